@@ -1,0 +1,2 @@
+const config = { singleQuote: true, printWidth: 110 };
+export default config;
