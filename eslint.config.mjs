@@ -13,6 +13,17 @@ export default defineConfig([
     'lib/findings/archive/**',
     'next-env.d.ts',
     'test-results/**',
+    'playwright-report/**',
   ]),
-  { rules: { '@next/next/no-html-link-for-pages': 'off' } },
+  {
+    linterOptions: { noInlineConfig: true },
+    rules: {
+      '@next/next/no-html-link-for-pages': 'off',
+      '@typescript-eslint/no-explicit-any': 'error',
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+      'no-console': 'error',
+      eqeqeq: ['error', 'always'],
+      'prefer-const': 'error',
+    },
+  },
 ]);
