@@ -1,0 +1,39 @@
+import 'server-only';
+import { and, desc, eq, lt, type SQL } from 'drizzle-orm';
+import type { Conn } from '@/db/client';
+import { people } from '@/db/schema/people';
+import { records } from '@/db/schema/records';
+import { releases } from '@/db/schema/releases';
+
+export type RecordRow = typeof records.$inferSelect;
+
+export function findLastRecord(conn: Conn): RecordRow | null {
+  return conn.select().from(records).orderBy(desc(records.seq)).limit(1).get() ?? null;
+}
+
+export function insertRecord(conn: Conn, row: RecordRow): void {
+  conn.insert(records).values(row).run();
+}
+
+export function listAllRecords(conn: Conn): RecordRow[] {
+  return conn.select().from(records).orderBy(records.seq).all();
+}
+
+/** Newest first, with the actor's name and the release whose embargo may hide what changed. */
+export function listRecords(
+  conn: Conn,
+  page: { before: number | null; limit: number; entityId: string | null },
+) {
+  const conditions: SQL[] = [];
+  if (page.before !== null) conditions.push(lt(records.seq, page.before));
+  if (page.entityId !== null) conditions.push(eq(records.entityId, page.entityId));
+  return conn
+    .select({ record: records, person: people.name, release: releases })
+    .from(records)
+    .leftJoin(people, eq(people.id, records.personId))
+    .leftJoin(releases, eq(releases.id, records.releaseId))
+    .where(and(...conditions))
+    .orderBy(desc(records.seq))
+    .limit(page.limit)
+    .all();
+}
