@@ -27,6 +27,6 @@ const kept = globalThis as typeof globalThis & { leadlineDb?: Db };
 
 /** This process's connection to the desk's database. */
 export function getDb(): Db {
-  kept.leadlineDb ??= openDatabase(databaseFile(readEnv().dataFolder));
+  kept.leadlineDb ??= openDatabase(databaseFile(readEnv().LEADLINE_DATA));
   return kept.leadlineDb;
 }

@@ -8,7 +8,7 @@ import { verifyHistory } from '@/lib/services/history/verify';
 /** `npm run record:verify [-- --head SEQ:HASH]`: status 0 when the history is whole, 1 when it is not. */
 function main(): number {
   const { values } = parseArgs({ options: { head: { type: 'string', multiple: true } } });
-  const file = databaseFile(readEnv().dataFolder);
+  const file = databaseFile(readEnv().LEADLINE_DATA);
   if (!existsSync(file)) return fail(`there is no database at ${file}`);
   const db = openDatabase(file);
   const kept = headFile(db);
