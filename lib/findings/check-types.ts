@@ -86,12 +86,7 @@ export type TestedReason =
   | 'modelled'
   | 'comparison';
 export type UntestedReason =
-  | 'no-sample-size'
-  | 'no-sampling-basis'
-  | 'too-small'
-  | 'few-clusters'
-  | 'not-comparable'
-  | 'not-disclosed';
+  'no-sample-size' | 'no-sampling-basis' | 'too-small' | 'few-clusters' | 'not-comparable' | 'not-disclosed';
 export type Reason = TestedReason | UntestedReason;
 
 export type SecondTest =
@@ -134,13 +129,11 @@ type TwoBases = TestFields & { breakingFactor: number | null };
 
 export type LeadFinding = { kind: 'lead'; pair: Pair } & (OneBase | UntestedFields);
 export type ChangeFinding = { kind: 'change'; option: string } & (
-  | (TwoBases & { littleChanged: boolean })
-  | UntestedFields
+  (TwoBases & { littleChanged: boolean }) | UntestedFields
 );
 export type LeadChangeFinding = { kind: 'lead-change'; pair: Pair } & (TwoBases | UntestedFields);
 export type ThresholdFinding = { kind: 'threshold'; option: string; thresholdPct: number } & (
-  | OneBase
-  | UntestedFields
+  OneBase | UntestedFields
 );
 
 export type TestableFinding = LeadFinding | ChangeFinding | LeadChangeFinding | ThresholdFinding;

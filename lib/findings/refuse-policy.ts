@@ -1,0 +1,29 @@
+import { CheckRefused } from './check-refused';
+import type { AssumedDeff, CheckDocument, Range } from './check-types';
+
+/**
+ * Refuses a policy whose ranges descend, leave their limits or miss their value.
+ *
+ * @throws CheckRefused at `policy.assumed.X.range` or `policy.kishRange`
+ */
+export function refuseFaultyPolicy(policy: CheckDocument['policy']): void {
+  for (const [design, assumed] of Object.entries(policy?.assumed ?? {})) {
+    if (assumed && !isSound(assumed)) {
+      throw new CheckRefused(
+        `policy.assumed.${design}.range`,
+        'The range ascends from at least 0.5 to at most 10 and contains the value.',
+      );
+    }
+  }
+  if (policy?.kishRange && !isAround(policy.kishRange, 1)) {
+    throw new CheckRefused('policy.kishRange', 'The range is positive, ascends and contains 1.');
+  }
+}
+
+function isSound({ value, range }: AssumedDeff): boolean {
+  return isAround(range, value) && range[0] >= 0.5 && range[1] <= 10;
+}
+
+function isAround([low, high]: Range, value: number): boolean {
+  return low > 0 && low <= value && value <= high;
+}
