@@ -52,11 +52,11 @@ describe('imports', () => {
     expect(broken).toEqual([]);
   });
 
-  it('use ./ inside a folder and @/ across folders', () => {
+  it('use relative paths inside a layer and @/ across layers', () => {
     const broken = product.flatMap((file) =>
       file.imports
         .filter((one) => one.own)
-        .filter((one) => one.specifier.startsWith('..') || isRoundabout(file.path, one.specifier, one.target))
+        .filter((one) => isRoundabout(file.path, one.specifier, one.target))
         .map((one) => `${file.path} imports ${one.specifier}`),
     );
     expect(broken).toEqual([]);
@@ -178,8 +178,17 @@ function packagesOf(layer: string): string[] {
     .flatMap((file) => file.imports.filter((one) => !one.own).map((one) => `${file.path} ${one.specifier}`));
 }
 
+/** A relative path may not leave its layer, and a path from the root may not lead back into the same folder. */
 function isRoundabout(from: string, specifier: string, target: string): boolean {
-  return specifier.startsWith('@/') && from.includes('/') && dirname(from) === dirname(target);
+  if (specifier.startsWith('@/')) return from.includes('/') && dirname(from) === dirname(target);
+  return specifier.startsWith('..') && topLayerOf(from) !== topLayerOf(target);
+}
+
+function topLayerOf(path: string): string {
+  return path
+    .split('/')
+    .slice(0, path.startsWith('lib/') ? 2 : 1)
+    .join('/');
 }
 
 function firstDirective(file: SourceFile): string | null {

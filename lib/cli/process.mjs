@@ -28,7 +28,7 @@ export function run(command, args, { env = {}, forwardSignals = false } = {}) {
     });
     child.once('exit', (code, signal) => {
       stopForwarding();
-      resolve(code ?? (signal ? 128 + signalNumbers[signal] : 1));
+      resolve(code ?? 128 + (signalNumbers[signal ?? ''] ?? 0));
     });
   });
 }
