@@ -1,0 +1,205 @@
+import 'server-only';
+import { and, asc, desc, eq, inArray, isNull, sql } from 'drizzle-orm';
+import type { Conn } from '@/db/client';
+import { people } from '@/db/schema/people';
+import { pollsters, races } from '@/db/schema/races';
+import { releases, releaseVersions } from '@/db/schema/releases';
+import { lines, lineVersions, sheets } from '@/db/schema/sheets';
+import type { LineState } from '@/lib/domain/sheet';
+import { isPublic, isOnEmbargoList, type Viewer, visible } from './visible';
+
+export type SheetRow = typeof sheets.$inferSelect;
+export type LineRow = typeof lines.$inferSelect;
+export type LineVersionRow = typeof lineVersions.$inferSelect;
+
+export function insertSheet(conn: Conn, row: typeof sheets.$inferInsert): SheetRow {
+  return conn.insert(sheets).values(row).returning().get();
+}
+
+export function findSheetBySubmission(conn: Conn, submissionKey: string): SheetRow | null {
+  return conn.select().from(sheets).where(eq(sheets.submissionKey, submissionKey)).get() ?? null;
+}
+
+/** A sheet whose release this viewer may see, or null. */
+export function findSheet(conn: Conn, publicId: string, viewer: Viewer, now: number) {
+  return (
+    conn
+      .select({ sheet: sheets, release: releases, author: people.name, isPublic: isPublic(now) })
+      .from(sheets)
+      .innerJoin(releases, eq(releases.id, sheets.releaseId))
+      .innerJoin(people, eq(people.id, sheets.authorId))
+      .where(and(eq(sheets.publicId, publicId), visible(conn, viewer, now)))
+      .get() ?? null
+  );
+}
+
+/** Moves a sheet on from the version the asker saw; false when somebody was faster. */
+export function touchSheet(
+  conn: Conn,
+  id: number,
+  version: number,
+  set: Partial<typeof sheets.$inferInsert> = {},
+): boolean {
+  const result = conn
+    .update(sheets)
+    .set({ ...set, version: version + 1 })
+    .where(and(eq(sheets.id, id), eq(sheets.version, version)))
+    .run();
+  return result.changes === 1;
+}
+
+export function insertLine(conn: Conn, row: typeof lines.$inferInsert): LineRow {
+  return conn.insert(lines).values(row).returning().get();
+}
+
+export function setKnockedOut(conn: Conn, lineId: number, knockedOut: boolean): void {
+  conn.update(lines).set({ knockedOut }).where(eq(lines.id, lineId)).run();
+}
+
+export function insertLineVersion(conn: Conn, row: typeof lineVersions.$inferInsert): LineVersionRow {
+  return conn.insert(lineVersions).values(row).returning().get();
+}
+
+const newestVersion = sql<number>`(
+  select max(newer.number) from line_versions newer where newer.line_id = ${lines.id}
+)`;
+
+/** Every line of a sheet with its newest version, in the order drafted. */
+export function listNewestLines(conn: Conn, sheetId: number) {
+  return conn
+    .select({ line: lines, version: lineVersions, changedBy: people.name })
+    .from(lines)
+    .innerJoin(lineVersions, and(eq(lineVersions.lineId, lines.id), eq(lineVersions.number, newestVersion)))
+    .innerJoin(people, eq(people.id, lineVersions.changedBy))
+    .where(eq(lines.sheetId, sheetId))
+    .orderBy(asc(lines.id))
+    .all();
+}
+
+/** The cleared words of a sheet, in the order drafted. */
+export function listClearedLines(conn: Conn, sheetId: number) {
+  return conn
+    .select({ line: lines, version: lineVersions })
+    .from(lines)
+    .innerJoin(lineVersions, and(eq(lineVersions.lineId, lines.id), eq(lineVersions.state, 'cleared')))
+    .where(eq(lines.sheetId, sheetId))
+    .orderBy(asc(lines.id))
+    .all();
+}
+
+export function updateDraftText(
+  conn: Conn,
+  id: number,
+  set: { text?: string; draftText?: string; changedBy: number; changedAt: number; templateVersion?: string },
+): boolean {
+  const result = conn
+    .update(lineVersions)
+    .set(set)
+    .where(and(eq(lineVersions.id, id), eq(lineVersions.state, 'draft')))
+    .run();
+  return result.changes === 1;
+}
+
+/** Moves line versions from one state to another; false unless every one of them was in it. */
+export function moveLineVersions(
+  conn: Conn,
+  ids: number[],
+  from: LineState,
+  set: Partial<typeof lineVersions.$inferInsert> & { state: LineState },
+): boolean {
+  const result = conn
+    .update(lineVersions)
+    .set({ ...set, version: sql`${lineVersions.version} + 1` })
+    .where(and(inArray(lineVersions.id, ids), eq(lineVersions.state, from)))
+    .run();
+  return result.changes === ids.length;
+}
+
+const listColumns = {
+  sheet: sheets,
+  release: releases,
+  race: races.name,
+  pollster: pollsters.name,
+  fieldStartOn: releaseVersions.fieldStartOn,
+  fieldEndOn: releaseVersions.fieldEndOn,
+  author: people.name,
+};
+
+function listSelect(conn: Conn) {
+  return conn
+    .select(listColumns)
+    .from(sheets)
+    .innerJoin(releases, eq(releases.id, sheets.releaseId))
+    .innerJoin(races, eq(races.id, releases.raceId))
+    .innerJoin(pollsters, eq(pollsters.id, releases.pollsterId))
+    .innerJoin(releaseVersions, eq(releaseVersions.id, sheets.releaseVersionId))
+    .innerJoin(people, eq(people.id, sheets.authorId));
+}
+
+/** Sheets that are being worked on or wait for a reader, newest first. */
+export function listOpenSheets(conn: Conn, viewer: Viewer, now: number, limit: number) {
+  const open = conn
+    .select({ id: lines.sheetId })
+    .from(lines)
+    .innerJoin(lineVersions, and(eq(lineVersions.lineId, lines.id), eq(lineVersions.number, newestVersion)))
+    .where(inArray(lineVersions.state, ['draft', 'filed', 'sent-back']));
+  return listSelect(conn)
+    .where(and(inArray(sheets.id, open), visible(conn, viewer, now)))
+    .orderBy(desc(sheets.id))
+    .limit(limit)
+    .all();
+}
+
+export function listSheetsOfRelease(conn: Conn, releaseId: number) {
+  return listSelect(conn).where(eq(sheets.releaseId, releaseId)).orderBy(desc(sheets.id)).all();
+}
+
+/** Sheets with cleared words that this viewer may read, newest clearing first. */
+export function listClearedSheets(
+  conn: Conn,
+  viewer: Viewer,
+  now: number,
+  search: { race: string; pollster: string; limit: number },
+) {
+  const cleared = conn
+    .select({ id: lines.sheetId })
+    .from(lines)
+    .innerJoin(lineVersions, and(eq(lineVersions.lineId, lines.id), eq(lineVersions.state, 'cleared')));
+  return listSelect(conn)
+    .where(
+      and(
+        inArray(sheets.id, cleared),
+        visible(conn, viewer, now),
+        isNull(releases.archivedAt),
+        contains(races.name, search.race),
+        contains(pollsters.name, search.pollster),
+      ),
+    )
+    .orderBy(desc(sheets.version), desc(sheets.id))
+    .limit(search.limit)
+    .all();
+}
+
+function contains(column: typeof races.name | typeof pollsters.name, text: string) {
+  return text === '' ? undefined : sql`instr(lower(${column}), ${text.toLowerCase()}) > 0`;
+}
+
+export function isReleasePublic(conn: Conn, releaseId: number, now: number): boolean {
+  return (
+    conn
+      .select({ id: releases.id })
+      .from(releases)
+      .where(and(eq(releases.id, releaseId), isPublic(now)))
+      .get() !== undefined
+  );
+}
+
+export function mayCopyBeforeHour(conn: Conn, releaseId: number, viewer: Viewer): boolean {
+  return (
+    conn
+      .select({ id: releases.id })
+      .from(releases)
+      .where(and(eq(releases.id, releaseId), isOnEmbargoList(conn, viewer)))
+      .get() !== undefined
+  );
+}
