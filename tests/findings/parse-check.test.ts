@@ -40,7 +40,7 @@ const base = {
 const release = (change: object) => ({ release: { ...base, ...change } });
 const policy = (change: object) => ({ policy: change, release: base });
 const margin = { pp: 3.6, unit: 0.1, level: 0.95 };
-const { n: _n, ...withoutN } = base;
+const withoutN = Object.fromEntries(Object.entries(base).filter(([key]) => key !== 'n'));
 
 const faults: [what: string, input: unknown, path: string][] = [
   ['no document', null, ''],

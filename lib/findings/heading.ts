@@ -1,0 +1,62 @@
+import type { CheckDocument, Finding } from './check-types';
+import { decimalPlaces } from './decimal';
+
+const NO_FIGURE = 'no figure';
+
+/**
+ * The neutral heading of a finding: a quantity, never a claim that could be printed.
+ *
+ * @param finding any finding of an answer
+ * @param document the document it answers, for the decimals that its bases print
+ * @returns with U+2212 for a minus and a plus before what is above 0
+ * @example
+ * headingOf(
+ *   { kind: 'lead', pair: ['Alder', 'Brook'], estimatePp: 8 },
+ *   { release: { decimals: 0 } },
+ * ); // => 'Alder minus Brook: +8'
+ * headingOf(
+ *   { kind: 'threshold', option: 'Brook', thresholdPct: 50, estimatePp: -9 },
+ *   { release: { decimals: 1 } },
+ * ); // => 'Brook against 50%: −9.0'
+ */
+export function headingOf(finding: Finding, document: Decimals): string {
+  if (finding.kind === 'share') {
+    const { estimatePct } = finding;
+    const shown = estimatePct === null ? NO_FIGURE : `${estimatePct.toFixed(document.release.decimals)}%`;
+    return `${finding.option}: ${shown}`;
+  }
+  const { estimatePp } = finding;
+  const shown = estimatePp === null ? NO_FIGURE : signed(estimatePp, printedDecimals(finding, document));
+  return `${subjectOf(finding)}: ${shown}`;
+}
+
+type Decimals = {
+  release: Pick<CheckDocument['release'], 'decimals'>;
+  previous?: Pick<CheckDocument['release'], 'decimals'> | null;
+};
+
+/** The decimals that an estimate is printed with: those of the finest figure in it. */
+export function printedDecimals(finding: Finding, { release, previous }: Decimals): number {
+  const ofThreshold = finding.kind === 'threshold' ? decimalPlaces(finding.thresholdPct) : 0;
+  const isChange = finding.kind === 'change' || finding.kind === 'lead-change';
+  return Math.max(release.decimals, ofThreshold, isChange ? (previous?.decimals ?? 0) : 0);
+}
+
+function subjectOf(finding: Exclude<Finding, { kind: 'share' }>): string {
+  switch (finding.kind) {
+    case 'lead':
+      return `${finding.pair[0]} minus ${finding.pair[1]}`;
+    case 'change':
+      return `${finding.option}, earlier to this`;
+    case 'lead-change':
+      return `${finding.pair[0]} minus ${finding.pair[1]}, earlier to this`;
+    case 'threshold':
+      return `${finding.option} against ${finding.thresholdPct}%`;
+  }
+}
+
+function signed(value: number, decimals: number): string {
+  const digits = Math.abs(value).toFixed(decimals);
+  if (Number(digits) === 0) return digits;
+  return value > 0 ? `+${digits}` : `−${digits}`;
+}
