@@ -11,8 +11,10 @@ import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { readDeskSettings } from '../setup/desk-settings';
+import { computeFindings } from './compute-findings';
 import { embargoInstant } from './embargo-time';
 import { factsOf } from './facts';
+import { indexFindings } from './index-findings';
 import { refuseImpossibleFigures } from './refuse-figures';
 import { namedId, storeVersion } from './store-version';
 
@@ -64,6 +66,7 @@ export function createReleaseIn(
   const version = storeVersion(tx, input, who);
   const facts = factsOf(tx, version.id);
   refuseImpossibleFigures(facts, readDeskSettings(tx).policy.body);
+  indexFindings(tx, version.id, computeFindings(tx, version.id));
   appendRecord(
     tx,
     {
