@@ -1,4 +1,5 @@
-import { formatLevel, formatValue, type ChartWords } from './chart-words';
+import { formatValue, type ChartWords } from './chart-words';
+import { describeSounding } from './describe-sounding';
 import type { Scene, SceneNode } from './scene';
 import { axisNodes } from './sounding-axis';
 import { soundingFrame } from './sounding-frame';
@@ -62,21 +63,4 @@ export function soundingScene(spec: SoundingSpec, size: SoundingSize, words: Cha
     description: describeSounding(spec, words),
     nodes,
   };
-}
-
-/** The picture in words: estimate, range, range with heavier weighting, and what the poll shows by it. */
-export function describeSounding(spec: SoundingSpec, words: ChartWords): string {
-  const isShare = spec.quantity === 'share' || spec.quantity === 'threshold';
-  const value = (pp: number, decimals = 1) => formatValue(pp, decimals, spec.quantity, words);
-  const estimate = value(spec.estimatePp, spec.decimals);
-  const parts = [isShare ? estimate : words.points(estimate)];
-  const outer = spec.bands[0];
-  if (outer) {
-    parts.push(words.range(formatLevel(outer.level, words), value(outer.lowPp), value(outer.highPp)));
-  }
-  if (spec.far) parts.push(words.heavierWeighting(value(spec.far.lowPp), value(spec.far.highPp)));
-  const sentences = [`${spec.label}: ${parts.join(', ')}.`];
-  if (spec.untestedNote) sentences.push(`${spec.untestedNote}.`);
-  else if (spec.verdict) sentences.push(words.verdict[spec.verdict]);
-  return sentences.join(' ');
 }

@@ -1,5 +1,6 @@
 import { uncertaintyOf } from '@/lib/findings/bands';
 import type { CheckDocument, Finding, TestableFinding } from '@/lib/findings/check-types';
+import { printedDecimals } from '@/lib/findings/heading';
 import { formatValue, untestedNote, type ChartWords } from './chart-words';
 import type { SoundingSpec } from './sounding-spec';
 
@@ -24,18 +25,13 @@ export function soundingSpecOf(
     quantity: finding.kind,
     verdict: finding.kind === 'share' ? null : finding.verdict,
     estimatePp: finding.kind === 'threshold' ? estimate + finding.thresholdPct : estimate,
-    decimals: decimalsOf(finding, document),
+    decimals: printedDecimals(finding, document),
     bands: (uncertainty?.bands ?? []).map(({ level, low, high }) => ({ level, lowPp: low, highPp: high })),
     far: uncertainty?.far ? { lowPp: uncertainty.far.low, highPp: uncertainty.far.high } : null,
     untestedNote: isUntested ? untestedNote(finding.reasons, words) : uncertainty ? null : words.noMargin,
     ...namesOf(finding, words),
     ...shoreOf(finding, estimate, words),
   };
-}
-
-function decimalsOf(finding: Finding, { release, previous }: CheckDocument): number {
-  const isChange = finding.kind === 'change' || finding.kind === 'lead-change';
-  return isChange ? Math.max(release.decimals, previous?.decimals ?? 0) : release.decimals;
 }
 
 function namesOf(finding: Finding, words: ChartWords): Pick<SoundingSpec, 'label' | 'name'> {

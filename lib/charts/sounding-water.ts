@@ -14,7 +14,7 @@ export function landNodes(spec: SoundingSpec, scale: SoundingScale, frame: Sound
   return block('land', from, to, frame.topPx, frame.basePx);
 }
 
-/** Bands, their edge lines, hatching where the outermost reaches over the shore, the whisker. */
+/** Bands, their edge lines (in a row the outermost alone), hatching where the outermost reaches over the shore, the whisker. */
 export function waterNodes(spec: SoundingSpec, scale: SoundingScale, frame: SoundingFrame): SceneNode[] {
   const bands = spec.bands.map((band, at) => ({ band, ...depthOf(at, spec.bands.length, frame) }));
   return [
@@ -22,7 +22,9 @@ export function waterNodes(spec: SoundingSpec, scale: SoundingScale, frame: Soun
       bandNodes(role, onWater(band, role, spec), scale, top, base),
     ),
     ...hatchNodes(spec, scale, frame),
-    ...bands.flatMap(({ band, role, top, base }) => edgeNodes(role, band, scale, top, base)),
+    ...bands
+      .filter(({ role }) => frame.kind === 'full' || role === 'water-1')
+      .flatMap(({ band, role, top, base }) => edgeNodes(role, band, scale, top, base)),
     ...whiskerNodes(spec, scale, frame),
   ];
 }
@@ -68,10 +70,14 @@ function hatchNodes(spec: SoundingSpec, scale: SoundingScale, frame: SoundingFra
   return block('hatch', scale.x(low), scale.x(high), frame.topPx, frame.basePx);
 }
 
-/** How far the interval goes at the far end of the design effect's range; calm only where the claim holds. */
+/**
+ * How far the interval goes at the far end of the design effect's range; calm only where the claim holds. A share
+ * in a row claims nothing and has no room for it.
+ */
 function whiskerNodes(spec: SoundingSpec, scale: SoundingScale, frame: SoundingFrame): SceneNode[] {
   const outer = spec.bands[0];
-  if (!outer || !spec.far) return [];
+  const isShareRow = spec.verdict === null && frame.kind === 'row';
+  if (!outer || !spec.far || isShareRow) return [];
   const role: SceneRole = spec.verdict === 'holds' || spec.verdict === null ? 'calm-whisker' : 'whisker';
   const arms: [number, number][] = [
     [scale.x(outer.lowPp), scale.x(spec.far.lowPp)],
