@@ -1,0 +1,71 @@
+import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
+import type { DisclosureStatus } from '@/lib/domain/disclosed';
+import type { CaveatSentence, Terms } from './language-pack';
+import { sayAll, type Draft } from './draft';
+import { isOfTwoReleases } from './draft-input';
+
+/** Who, for whom, whom, how many, how, when; what kind of sample; whose margin of what; what margins leave out. */
+export function draftCaveat(draft: Draft): string {
+  const { input, pack } = draft;
+  const sentences: (CaveatSentence | null)[] = [
+    'fieldwork',
+    isOfTwoReleases(input.finding.kind) ? 'earlier' : null,
+  ];
+  const closing: (CaveatSentence | null)[] = [
+    sampleSentence(draft),
+    hasOtherBase(draft) ? 'threshold-base' : null,
+    marginSentence(draft),
+    errorSentence(draft),
+  ];
+  return [
+    sayAll(sentences.map(messageOf(pack.caveat)), draft),
+    missing('not-disclosed', draft),
+    missing('not-entered', draft),
+    sayAll(closing.map(messageOf(pack.caveat)), draft),
+  ]
+    .filter((text) => text !== '')
+    .join(' ');
+}
+
+const messageOf = (messages: Record<CaveatSentence, string>) => (key: CaveatSentence | null) =>
+  key === null ? null : messages[key];
+
+function missing(status: DisclosureStatus, draft: Draft): string {
+  const { release } = draft.input;
+  const items = (Object.keys(draft.pack.terms.particular) as (keyof Terms['particular'])[])
+    .filter((item) => release[item].status === status)
+    .map((item) => draft.pack.terms.particular[item]);
+  if (items.length === 0) return '';
+  const list = new Intl.ListFormat(draft.voice.locale, { type: 'conjunction' }).format(items);
+  const key = status === 'not-disclosed' ? 'not-disclosed' : 'not-recorded';
+  return sayAll([draft.pack.caveat[key]], draft, { items: list });
+}
+
+function sampleSentence({ input }: Draft): CaveatSentence {
+  if (input.release.sampleSource === 'probability') return 'sample-random';
+  if (input.answer.base.basis === 'modelled') return 'sample-modelled';
+  return input.answer.base.basis === 'comparison' ? 'sample-comparison' : 'sample-not-random';
+}
+
+/** Whether the rule counts votes while the poll's shares count people without a choice too. */
+function hasOtherBase({ input, slots }: Draft): boolean {
+  const { finding, release } = input;
+  if (finding.kind !== 'threshold' || slots.asked !== 'everyone') return false;
+  const rule = release.race.thresholds.find(
+    ({ option, pct }) => option === finding.option && pct === finding.thresholdPct,
+  );
+  return rule?.base === 'votes-cast' || rule?.base === 'valid-votes';
+}
+
+function marginSentence({ input }: Draft): CaveatSentence | null {
+  const { finding, release, answer } = input;
+  if (finding.verdict !== 'cannot-be-tested' && finding.marginPp > 0) return 'margin';
+  if (answer.base.basis === 'modelled' || answer.base.basis === 'comparison') return 'margin-none';
+  if (release.sampleSource !== 'probability') return null;
+  return release.statedMargin.status === 'given' ? 'margin-stated-only' : 'margin-none';
+}
+
+function errorSentence({ input }: Draft): CaveatSentence {
+  if (input.release.sampleSource !== 'probability') return 'errors-without-margin';
+  return ELECTION_KINDS.includes(input.release.race.kind) ? 'errors-before-a-vote' : 'errors';
+}

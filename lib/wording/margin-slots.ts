@@ -1,0 +1,130 @@
+import { valueOf } from '@/lib/domain/disclosed';
+import type { ReleaseFacts } from '@/lib/domain/release-facts';
+import { uncertaintyOf } from '@/lib/findings/bands';
+import { checkDocumentOf } from '@/lib/findings/check-document-of';
+import type { BaseAnswer, Range, TestableFinding } from '@/lib/findings/check-types';
+import { formatTrimmed } from '@/lib/format/number';
+import { isOfTwoReleases, type DraftInput } from './draft-input';
+import { printPercent, roundBeside, roundUp, type Voice } from './print';
+import type { Slots } from './say';
+
+/** The bases a finding stands on, each with the release it belongs to: one, or the later and the earlier. */
+export function basesOf(input: DraftInput): { facts: ReleaseFacts; base: BaseAnswer | null }[] {
+  const { answer, release, previous, finding } = input;
+  const own = { facts: release, base: answer.base };
+  return isOfTwoReleases(finding.kind) && previous
+    ? [own, { facts: previous, base: answer.previousBase }]
+    : [own];
+}
+
+/** Margin, range and what they rest on; the wider ones are those at the high end of the design effects. */
+export function marginSlots(input: DraftInput, voice: Voice): Slots {
+  const { finding, policy, release } = input;
+  const stated = valueOf(release.statedMargin);
+  const modelled = release.modelledInterval;
+  const shared: Slots = {
+    basis: basisOf(input),
+    deffSource: deffSourceOf(input),
+    level: printLevel(policy.level, voice),
+    stated: statedStatus(input),
+    sameLevel: !stated || stated.level === policy.level ? 'yes' : 'no',
+    statedPp: stated ? formatTrimmed(stated.pp, 2, voice.locale) : '',
+    statedCount: stated?.pp ?? 0,
+    statedLevel: stated ? printLevel(stated.level, voice) : '',
+    ...sizeSlots('modelled', modelled?.pp ?? 0, voice),
+    ...indifferenceSlots(input, voice),
+  };
+  if (finding.verdict === 'cannot-be-tested') return shared;
+  const far = farEnds(finding, input);
+  const size = Math.abs(finding.estimatePp);
+  const margins = roundBeside([finding.marginPp, far.marginPp], size, voice.style);
+  const [margin, wider] = margins.map((pp) => formatTrimmed(pp, 3, voice.locale));
+  return {
+    ...shared,
+    margin: margin ?? '',
+    widerMargin: wider ?? '',
+    wider: margin === wider ? 'no' : 'yes',
+    ...rangeSlots('', finding, finding.intervalPp, voice),
+    ...rangeSlots('wider', finding, far.intervalPp, voice),
+    ...sizeSlots('detectable', roundUp(finding.detectable80Pp ?? 0, voice.style), voice),
+  };
+}
+
+/** The weakest basis among the bases concerned. */
+export function basisOf(input: DraftInput): 'sampling' | 'modelled' | 'comparison' {
+  const all = basesOf(input).map(({ base }) => base?.basis);
+  if (all.includes('comparison')) return 'comparison';
+  return all.includes('modelled') ? 'modelled' : 'sampling';
+}
+
+export function printLevel(level: number, voice: Voice): string {
+  const pct = Number((level * 100).toFixed(6));
+  return printPercent(pct, Number.isInteger(pct) ? 0 : 1, voice);
+}
+
+type Tested = Exclude<TestableFinding, { verdict: 'cannot-be-tested' }>;
+
+/** Margin and interval at the high end of the design effects: the dashed reach of the chart. */
+function farEnds(finding: Tested, input: DraftInput): { marginPp: number; intervalPp: Range } {
+  const near = { marginPp: finding.marginPp, intervalPp: finding.intervalPp };
+  const far = uncertaintyOf(finding, checkDocumentOf(input.release, input.previous, input.policy))?.far;
+  if (!far) return near;
+  if (finding.kind !== 'threshold') {
+    return { marginPp: (far.high - far.low) / 2, intervalPp: [far.low, far.high] };
+  }
+  const { deff, deffRange } = input.answer.base;
+  const factor = deff && deffRange ? Math.sqrt(deffRange[1] / deff) : 1;
+  const pct = finding.thresholdPct;
+  return { marginPp: finding.marginPp * factor, intervalPp: [far.low - pct, far.high - pct] };
+}
+
+function rangeSlots(prefix: '' | 'wider', finding: Tested, [low, high]: Range, voice: Voice): Slots {
+  if (finding.kind === 'threshold') {
+    const pct = finding.thresholdPct;
+    const rounded = roundBeside([low + pct, high + pct], pct, voice.style);
+    const [from = '', to = ''] = rounded.map((end) => printPercent(end, decimalsOf(end), voice));
+    return { [slotName(prefix, 'low')]: from, [slotName(prefix, 'high')]: to };
+  }
+  const isMirrored = finding.kind !== 'change' && finding.estimatePp < 0;
+  return spanSlots(prefix, isMirrored ? [-high, -low] : [low, high], voice);
+}
+
+const slotName = (prefix: string, word: string) =>
+  prefix ? prefix + word.charAt(0).toUpperCase() + word.slice(1) : word;
+
+/** An interval around zero as two sizes: across it, above it, or below it (then the smaller size first). */
+function spanSlots(prefix: string, [low, high]: Range, voice: Voice): Slots {
+  const [from = 0, to = 0] = roundBeside([low, high], 0, voice.style);
+  const span = from < 0 && to > 0 ? 'across' : from < 0 ? 'below' : 'above';
+  const [first, second] = span === 'below' ? [-to, -from] : [Math.abs(from), Math.abs(to)];
+  return {
+    [slotName(prefix, 'span')]: span,
+    ...sizeSlots(slotName(prefix, 'low'), first, voice),
+    ...sizeSlots(slotName(prefix, 'high'), second, voice),
+  };
+}
+
+function deffSourceOf(input: DraftInput): string {
+  const sources = basesOf(input).map(({ base }) => base?.deffSource);
+  return (['assumed', 'kish', 'implied'] as const).find((source) => sources.includes(source)) ?? 'other';
+}
+
+function statedStatus(input: DraftInput): 'given' | 'none' | 'unknown' {
+  if (basisOf(input) !== 'sampling') return 'unknown';
+  const { status } = input.release.statedMargin;
+  return status === 'given' ? 'given' : status === 'not-disclosed' ? 'none' : 'unknown';
+}
+
+/** What counts as little: the desk's margin of indifference or a fifth of the earlier share, whichever is smaller. */
+function indifferenceSlots({ finding, previous, policy }: DraftInput, voice: Voice): Slots {
+  const earlier =
+    finding.kind === 'change' ? previous?.shares.find(({ option }) => option === finding.option) : undefined;
+  const fifth = previous && earlier?.units ? earlier.units / 10 ** previous.decimals / 5 : Infinity;
+  return sizeSlots('indifference', Math.min(policy.indifferencePp, fifth), voice);
+}
+
+function sizeSlots(name: string, pp: number, voice: Voice): Slots {
+  return { [name]: formatTrimmed(pp, 3, voice.locale), [`${name}Count`]: pp };
+}
+
+const decimalsOf = (pct: number) => [0, 1, 2].find((places) => Number(pct.toFixed(places)) === pct) ?? 3;

@@ -1,0 +1,37 @@
+import type { LanguagePack } from '@/lib/wording/language-pack';
+
+/**
+ * Who was asked, by whom, for whom, how and when; what kind of sample; whose margin it is and of what; other error.
+ * Minimum contents: common practice, no source. "Sampling error only": AAPOR's advice to journalists, from memory.
+ * Total error about twice the stated margins: Shirani-Mehr, Rothschild, Goel and Gelman, JASA 113 (2018) 607–614.
+ */
+export const EN_CAVEAT: LanguagePack['caveat'] = {
+  fieldwork:
+    '{pollsterStart} surveyed {sized, select, yes {{n} {population}} other {{population}}}{modeKnown, select, yes { {mode}} other {}} {span, select, wider {from {start} to {end}} other {on {dates}}}{sponsored, select, given { for {sponsor}} own { on its own account} other {}}.',
+  earlier:
+    'The earlier poll{samePollster, select, yes {} other {, by {prevPollster},}} surveyed {prevSized, select, yes {{prevN} {prevPopulation}} other {{prevPopulation}}} {prevSpan, select, wider {from {prevStart} to {prevEnd}} other {on {prevDates}}}.',
+  'not-disclosed': 'Not disclosed: {items}.',
+  'not-recorded': 'Not recorded by {newsroom}: {items}.',
+  'sample-random':
+    '{design, select, weighted {The sample was drawn at random and the results are weighted.} clustered {The sample was drawn at random, in clusters.} unweighted {The sample was drawn at random and the results are not weighted.} other {The sample was drawn at random; whether the results are weighted is not known.}}',
+  'sample-not-random':
+    '{drawn, select, unknown {How the sample was drawn is not stated, so no margin of sampling error is claimed.} other {The sample was not drawn at random ({sample}), so no margin of sampling error is claimed.}}',
+  'sample-modelled':
+    '{drawn, select, unknown {How the sample was drawn is not stated.} other {The sample was not drawn at random ({sample}).}} {pollsterStart} states a modelled interval of ±{modelled} {modelledCount, plural, one {point} other {points}} for a share; it rests on a model and is not a margin of sampling error.',
+  'sample-comparison':
+    '{drawn, select, unknown {How the sample was drawn is not stated.} other {The sample was not drawn at random ({sample}).}} The margin given here is worked out as if it had been, for comparison only, under {comparisonRule}; it is not a margin of sampling error.',
+  'threshold-base':
+    'The poll’s shares count everyone asked, those without a choice included; the rule counts {ruleBase}, so the share that counts may be higher.',
+  margin:
+    '{stated, select, given {{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share{sameLevel, select, yes {} other { at {statedLevel} confidence}}; {newsroom} puts} none {{pollsterStart} states no margin; {newsroom} puts} other {{newsroomStart} puts}} {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}} at ±{margin}{stated, select, given {} other { points}}{wider, select, yes {, or ±{widerMargin} if weighting cost more,} other {}} at {level} confidence.',
+  'margin-stated-only':
+    '{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share at {statedLevel} confidence; none is given here for {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}}.',
+  'margin-none':
+    'No margin is given here for {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}}.',
+  'errors-before-a-vote':
+    'Margins cover sampling error only; studies of pre-election polls found total error about twice the stated margins.',
+  errors:
+    'Margins cover sampling error only; the wording of questions and the people whom the poll did not reach can move the figures too.',
+  'errors-without-margin':
+    'The wording of questions and the people whom the poll did not reach can move the figures.',
+};
