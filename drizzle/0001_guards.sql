@@ -47,3 +47,9 @@ BEGIN SELECT RAISE(ABORT, 'a filed sheet rests on this version'); END;
 CREATE TRIGGER line_versions_cleared_text BEFORE UPDATE OF text, draft_text ON line_versions
 WHEN OLD.state <> 'draft' AND OLD.text <> NEW.text
 BEGIN SELECT RAISE(ABORT, 'words change only as a new draft version'); END;
+--> statement-breakpoint
+CREATE TRIGGER clearings_two_people BEFORE INSERT ON clearings
+WHEN NEW.act = 'cleared' AND NOT EXISTS (
+  SELECT 1 FROM clearings f WHERE f.evidence_id = NEW.evidence_id AND f.act = 'filed' AND f.person_id <> NEW.person_id
+)
+BEGIN SELECT RAISE(ABORT, 'two different people agree before anything is cleared'); END;

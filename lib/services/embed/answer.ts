@@ -1,0 +1,105 @@
+import 'server-only';
+import { LRUCache } from 'lru-cache';
+import { getDb } from '@/db/client';
+import { findEvidence } from '@/db/queries/clearing';
+import { findPublicEmbed } from '@/db/queries/embed';
+import { notFoundDocument } from '@/lib/charts/withdrawal-document';
+import type { ThemeChoice } from '@/lib/charts/tokens';
+import { THEME_CHOICES } from '@/lib/charts/tokens';
+import { sha256 } from '@/lib/security/ids';
+import type { Ctx } from '../context';
+import type { EvidenceBody } from '../sheet/evidence-body';
+import { dataOf, pageOf, pictureOf, withdrawalOf } from './render-embed';
+
+export type EmbedRequest = {
+  path: string;
+  query: URLSearchParams;
+  headers: Record<string, string | undefined>;
+};
+export type EmbedAnswer = {
+  status: number;
+  headers: Record<string, string>;
+  body: string | Uint8Array | null;
+};
+
+type Found = NonNullable<ReturnType<typeof findPublicEmbed>>;
+type Part = 'page' | 'chart.svg' | 'data.json';
+type Rendered = { body: Uint8Array; etag: string };
+
+const PATH = /^\/embed\/([A-Za-z0-9_-]{22})(?:@([1-9]\d{0,5}))?(?:\/(chart\.svg|data\.json))?$/;
+const TYPES: Record<Part, string> = {
+  page: 'text/html; charset=utf-8',
+  'chart.svg': 'image/svg+xml; charset=utf-8',
+  'data.json': 'application/json; charset=utf-8',
+};
+const FRESH_SECONDS = 30;
+const STALE_SECONDS = 30;
+const STALE_IF_ERROR_SECONDS = 300;
+
+const SAFE = {
+  'X-Content-Type-Options': 'nosniff',
+  'Referrer-Policy': 'no-referrer',
+  'Permissions-Policy': 'camera=(), geolocation=(), microphone=()',
+  'Cross-Origin-Resource-Policy': 'cross-origin',
+  'Access-Control-Allow-Origin': '*',
+  'Content-Security-Policy':
+    "default-src 'none'; style-src 'unsafe-inline'; img-src data:; base-uri 'none'; form-action 'none'; frame-ancestors *",
+};
+
+const bodies = new LRUCache<string, Rendered>({
+  maxSize: 64 * 1024 * 1024,
+  sizeCalculation: (rendered) => rendered.body.byteLength + 200,
+});
+
+/** Answers a public address. Reads the state at every request; no cookie is ever looked at. */
+export function answerEmbed(request: EmbedRequest, ctx: Ctx = { db: getDb(), now: Date.now() }): EmbedAnswer {
+  const match = PATH.exec(request.path);
+  if (!match) return notFound();
+  const [, id, number, part = 'page'] = match as unknown as [string, string, string?, Part?];
+  const found = findPublicEmbed(ctx.db, id, number ? Number(number) : null, ctx.now);
+  if (!found?.isPublic || found.version.pulledUnseen) return notFound();
+  const theme = THEME_CHOICES.find((choice) => choice === request.query.get('theme')) ?? 'auto';
+  if (found.version.state === 'pulled') return withdrawn(found, part, theme);
+  const rendered = render(found, part, theme, ctx);
+  const headers = {
+    ...SAFE,
+    'Content-Type': TYPES[part],
+    'Cache-Control': `public, max-age=${FRESH_SECONDS}, stale-while-revalidate=${STALE_SECONDS}, stale-if-error=${STALE_IF_ERROR_SECONDS}`,
+    ETag: rendered.etag,
+  };
+  if (matches(request.headers['if-none-match'], rendered.etag)) return { status: 304, headers, body: null };
+  return { status: 200, headers, body: rendered.body };
+}
+
+function render(found: Found, part: Part, theme: ThemeChoice, ctx: Ctx): Rendered {
+  const key = `${found.hash} ${found.embedId} ${found.version.number} ${part} ${theme}`;
+  const kept = bodies.get(key);
+  if (kept) return kept;
+  const evidence = JSON.parse(findEvidence(ctx.db, found.evidenceId)!.bytes.toString('utf8')) as EvidenceBody;
+  const subject = { evidence, id: found.embedId, version: found.version.number, at: found.version.createdAt };
+  const text = { page: pageOf, 'chart.svg': pictureOf, 'data.json': dataOf }[part](subject, theme);
+  const body = Buffer.from(text, 'utf8');
+  const rendered = { body, etag: `"${sha256(body).slice(0, 32)}"` };
+  bodies.set(key, rendered);
+  return rendered;
+}
+
+/** 410: on purpose, with a dated note and no figure. */
+function withdrawn(found: Found, part: Part, theme: ThemeChoice): EmbedAnswer {
+  return {
+    status: 410,
+    headers: { ...SAFE, 'Content-Type': TYPES[part], 'Cache-Control': 'no-store' },
+    body: withdrawalOf(part, found.version.pulledAt ?? 0, theme),
+  };
+}
+
+/** One constant answer for everything that is not public: what never was, and what is not yet. */
+function notFound(): EmbedAnswer {
+  const headers = { ...SAFE, 'Content-Type': TYPES.page, 'Cache-Control': 'no-store' };
+  return { status: 404, headers, body: notFoundDocument() };
+}
+
+function matches(header: string | undefined, etag: string): boolean {
+  if (header === undefined) return false;
+  return header.split(',').some((one) => one.trim() === '*' || one.trim().replace(/^W\//, '') === etag);
+}

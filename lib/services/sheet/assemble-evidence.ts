@@ -1,0 +1,117 @@
+import 'server-only';
+import type { Conn } from '@/db/client';
+import { findPerson } from '@/db/queries/person';
+import type { SheetRow } from '@/db/queries/sheet';
+import { ENGLISH_CHART_WORDS } from '@/lib/charts/chart-words';
+import { soundingScene } from '@/lib/charts/sounding-scene';
+import { soundingSpecOf } from '@/lib/charts/sounding-spec-of';
+import type { Claim, LineText } from '@/lib/domain/sheet';
+import type { Language } from '@/lib/domain/vocabulary';
+import { AppError } from '@/lib/errors';
+import type { TestableFinding } from '@/lib/findings/check-types';
+import { findClaim } from '@/lib/findings/claim-key';
+import { canonicalJson, hashOf } from '@/lib/security/canonical';
+import { sha256 } from '@/lib/security/ids';
+import { comparisonNote } from '@/lib/wording/comparison-note';
+import { draftSheet } from '@/lib/wording/draft-sheet';
+import { type Computed, computeFindings } from '../release/compute-findings';
+import type { EvidenceBody } from './evidence-body';
+
+const SCENE_PX = 640;
+
+export type Subject = Pick<SheetRow, 'publicId' | 'claim' | 'claimKey' | 'language' | 'releaseVersionId'>;
+
+export type Assembled = {
+  finding: TestableFinding;
+  findingIndex: number;
+  computed: Computed;
+  draft: LineText[];
+  /** The evidence that these texts would be cleared on. */
+  withTexts: (texts: LineText[]) => { body: EvidenceBody; bytes: Buffer; hash: string };
+  /** Hash of everything but the texts: what a writer has in front of them. */
+  basisHash: string;
+};
+
+/** Everything a sheet rests on, computed anew from what is stored now. */
+export function assemble(conn: Conn, sheet: Subject): Assembled {
+  const computed = computeFindings(conn, sheet.releaseVersionId);
+  const { facts, previous, comparison, settings, document, answer, missing } = computed;
+  const found = findClaim(answer, sheet.claimKey);
+  if (!found || found.finding.kind === 'share')
+    throw new AppError(
+      'conflict',
+      'This release supports no such claim any more. Draft a new sheet from it.',
+    );
+  const finding = found.finding;
+  const claim = JSON.parse(sheet.claim) as Claim;
+  const language = sheet.language as Language;
+  const draft = draftSheet({
+    claim,
+    finding,
+    answer,
+    release: facts,
+    previous,
+    comparison: { note: comparisonNote(comparison) },
+    houseStyle: settings.houseStyle.body,
+    policy: settings.policy.body,
+    language,
+  });
+  const spec = soundingSpecOf(finding, document, ENGLISH_CHART_WORDS);
+  if (!spec) throw new AppError('conflict', 'There is no figure to write about: a share is not disclosed.');
+  const overridePerson = comparison.override && findPerson(conn, comparison.override.personId);
+  const basis: Omit<EvidenceBody, 'texts'> = {
+    schema: 1,
+    sheet: sheet.publicId,
+    claim,
+    claimKey: sheet.claimKey,
+    language,
+    release: facts,
+    comparison: {
+      release: previous,
+      reason: comparison.reason,
+      unknowns: comparison.unknowns,
+      differences: comparison.differences.map(({ item }) => item),
+      override:
+        comparison.override && overridePerson
+          ? { reason: comparison.override.reason, person: overridePerson.publicId }
+          : null,
+    },
+    policy: { version: settings.policy.version },
+    houseStyle: {
+      version: settings.houseStyle.version,
+      templates: settings.houseStyle.body.templateVersion,
+      hash: hashOf(settings.houseStyle.body),
+    },
+    engine: answer.engine,
+    document,
+    answer,
+    draft,
+    chart: {
+      spec,
+      rows: facts.shares.map((share) => ({
+        option: share.option,
+        isAnswer: share.isAnswer,
+        share: shareSpec(computed, share.option),
+      })),
+      scene: soundingScene(spec, { widthPx: SCENE_PX, kind: 'full' }, ENGLISH_CHART_WORDS),
+    },
+    missing,
+  };
+  return {
+    finding,
+    findingIndex: found.index,
+    computed,
+    draft,
+    basisHash: hashOf(basis),
+    withTexts: (texts) => {
+      const body: EvidenceBody = { ...basis, texts };
+      const bytes = Buffer.from(canonicalJson(body), 'utf8');
+      return { body, bytes, hash: sha256(bytes) };
+    },
+  };
+}
+
+function shareSpec({ answer, document }: Computed, option: string) {
+  const finding = answer.findings.find((entry) => entry.kind === 'share' && entry.option === option);
+  return finding ? soundingSpecOf(finding, document, ENGLISH_CHART_WORDS) : null;
+}

@@ -1,0 +1,144 @@
+import 'server-only';
+import { z } from 'zod';
+import type { Tx } from '@/db/client';
+import { findEvidence, findLastAct, insertClearing, type ClearingRow } from '@/db/queries/clearing';
+import { findEmbedOfSheet, insertEmbedVersion } from '@/db/queries/embed';
+import { listClearedLines, moveLineVersions, touchSheet } from '@/db/queries/sheet';
+import { type Actor, canDraftSheets, isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
+import { newId } from '@/lib/security/ids';
+import { authorize, type Ctx, parse, transact } from '../context';
+import { appendRecord } from '../history/append-record';
+import { assemble } from './assemble-evidence';
+import { MOVED_ON, openSheet, type Opened, refuseUnless } from './sheet-state';
+
+export const readerInput = z.strictObject({
+  id: z.string().min(1).max(64),
+  /** The evidence that was on the screen. */
+  hash: z.string().regex(/^[0-9a-f]{64}$/, 'Reload the page and look again.'),
+});
+
+export type Cleared =
+  | { outcome: 'cleared'; version: number }
+  /** The evidence had changed since filing: the sheet went back to its filer, who agrees anew with one key. */
+  | { outcome: 'returned' };
+
+/** The second agreement: words that two people, one of them an editor, have agreed to become printable. */
+export function clearSheet(actor: Actor, input: unknown, ctx: Ctx): Cleared {
+  authorize(canDraftSheets(actor), 'Only reporters and editors read filed sheets.');
+  const { id, hash } = parse(readerInput, input);
+  return transact(ctx, (tx) => clearSheetIn(tx, actor, { id, hash }, ctx.now));
+}
+
+export function clearSheetIn(
+  tx: Tx,
+  actor: Actor,
+  { id, hash }: { id: string; hash: string },
+  now: number,
+): Cleared {
+  const opened = openSheet(tx, actor, id, now);
+  const filing = filingOf(tx, opened);
+  const evidence = findEvidence(tx, filing.evidenceId!)!;
+  refuseUnless(evidence.hash === hash, MOVED_ON);
+  const filer = { personId: filing.personId, roles: JSON.parse(filing.roles) as Role[] };
+  authorize(
+    filer.personId !== actor.personId,
+    'You filed these words. Somebody else reads them before they are cleared.',
+  );
+  authorize(
+    isTwoPersonAgreement(filer, actor),
+    'One of the two who agree has to be an editor. Leave this one to an editor.',
+  );
+  if (assemble(tx, opened.sheet).withTexts(opened.texts).hash !== evidence.hash) {
+    endFiling(tx, actor, opened, filing, now, {
+      act: 'returned',
+      comment: 'Figures, policy or house style changed since filing. Agree to the sheet as it is now.',
+    });
+    return { outcome: 'returned' };
+  }
+  const ids = opened.kept.map(({ version }) => version.id);
+  for (const { version } of listClearedLines(tx, opened.sheet.id))
+    refuseUnless(moveLineVersions(tx, [version.id], 'cleared', { state: 'superseded' }), MOVED_ON);
+  refuseUnless(moveLineVersions(tx, ids, 'filed', { state: 'cleared' }), MOVED_ON);
+  insertAct(tx, actor, opened, evidence.id, 'cleared', null, now);
+  refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
+  const embed = findEmbedOfSheet(tx, opened.sheet.id);
+  if (embed) insertEmbedVersion(tx, embed.id, evidence.id, now);
+  const entry = { action: 'cleared sheet', entity: 'sheet', entityId: opened.sheet.publicId };
+  const after = { state: 'cleared', evidence: evidence.hash, texts: opened.texts };
+  const before = { state: 'filed', filedBy: filer.personId };
+  appendRecord(tx, { personId: actor.personId, ...entry, before, after, releaseId: opened.release.id }, now);
+  return { outcome: 'cleared', version: opened.sheet.version + 1 };
+}
+
+const back = readerInput.extend({
+  comment: z.string().trim().min(3, 'Say what should change.').max(2000, 'At most 2,000 characters.'),
+});
+
+/** Sends a filed sheet back to its author with a comment. Its filer may take it back the same way. */
+export function sendBack(actor: Actor, input: unknown, ctx: Ctx): void {
+  authorize(canDraftSheets(actor), 'Only reporters and editors read filed sheets.');
+  const { id, hash, comment } = parse(back, input);
+  transact(ctx, (tx) => {
+    const opened = openSheet(tx, actor, id, ctx.now);
+    const filing = filingOf(tx, opened);
+    refuseUnless(findEvidence(tx, filing.evidenceId!)!.hash === hash, MOVED_ON);
+    const filer = { personId: filing.personId, roles: JSON.parse(filing.roles) as Role[] };
+    authorize(
+      filer.personId === actor.personId || isTwoPersonAgreement(filer, actor),
+      'An editor reads this sheet: only they send it back.',
+    );
+    endFiling(tx, actor, opened, filing, ctx.now, { act: 'sent-back', comment });
+  });
+}
+
+/** The filing that a filed sheet stands on. @throws AppError `conflict` unless it is filed now */
+export function filingOf(tx: Tx, opened: Opened): ClearingRow {
+  const filing = findLastAct(tx, opened.sheet.id, 'filed');
+  const message = opened.state === 'cleared' ? 'This sheet is cleared already.' : 'This sheet is not filed.';
+  refuseUnless(opened.state === 'filed' && filing !== null && filing.evidenceId !== null, message);
+  return filing;
+}
+
+export function endFiling(
+  tx: Tx,
+  actor: Actor,
+  opened: Opened,
+  filing: ClearingRow,
+  now: number,
+  end: { act: 'sent-back' | 'returned'; comment: string },
+): void {
+  const ids = opened.kept.map(({ version }) => version.id);
+  refuseUnless(moveLineVersions(tx, ids, 'filed', { state: 'sent-back' }), MOVED_ON);
+  insertAct(tx, actor, opened, filing.evidenceId!, end.act, end.comment, now);
+  refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
+  const action = end.act === 'returned' ? 'returned sheet to its filer' : 'sent sheet back';
+  const entry = { action, entity: 'sheet', entityId: opened.sheet.publicId, reason: end.comment };
+  const [before, after] = [{ state: 'filed' }, { state: 'sent-back' }];
+  appendRecord(tx, { personId: actor.personId, ...entry, before, after, releaseId: opened.release.id }, now);
+}
+
+export function insertAct(
+  tx: Tx,
+  actor: Actor,
+  opened: Opened,
+  evidenceId: number | null,
+  act: ClearingRow['act'],
+  comment: string | null,
+  now: number,
+): void {
+  const ids = opened.kept.map(({ version }) => version.id);
+  insertClearing(
+    tx,
+    {
+      publicId: newId(),
+      sheetId: opened.sheet.id,
+      evidenceId,
+      act,
+      personId: actor.personId,
+      roles: JSON.stringify(actor.roles),
+      comment,
+      at: now,
+    },
+    ids,
+  );
+}

@@ -1,0 +1,87 @@
+import 'server-only';
+import { z } from 'zod';
+import { findRelease, findWholeVersion } from '@/db/queries/release';
+import { findSheetBySubmission, insertLine, insertLineVersion, insertSheet } from '@/db/queries/sheet';
+import { type Actor, canDraftSheets } from '@/lib/domain/roles';
+import type { Claim } from '@/lib/domain/sheet';
+import { AppError } from '@/lib/errors';
+import type { TestableFinding } from '@/lib/findings/check-types';
+import { findClaim } from '@/lib/findings/claim-key';
+import { canonicalJson } from '@/lib/security/canonical';
+import { newId } from '@/lib/security/ids';
+import { authorize, type Ctx, parse, transact } from '../context';
+import { appendRecord } from '../history/append-record';
+import { computeFindings } from '../release/compute-findings';
+import { submissionKey } from '../release/create-release';
+import { assemble } from './assemble-evidence';
+
+const schema = z.strictObject({
+  submissionKey,
+  releaseId: z.string().min(1).max(64),
+  claimKey: z.string().min(1, 'Choose what the sheet claims.').max(600),
+});
+
+/** Drafts a sheet for one finding of a release, from the house style in force. */
+export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: string } {
+  authorize(canDraftSheets(actor), 'Only reporters and editors draft sheets.');
+  const { submissionKey: key, releaseId, claimKey } = parse(schema, input);
+  return transact(ctx, (tx) => {
+    const before = findSheetBySubmission(tx, key);
+    if (before && before.authorId !== actor.personId) throw new AppError('conflict', 'Reload and try again.');
+    if (before) return { id: before.publicId };
+    const release = findRelease(tx, releaseId, actor, ctx.now);
+    const whole = release?.currentVersionId ? findWholeVersion(tx, release.currentVersionId) : null;
+    if (!release || !whole) throw new AppError('not-found', 'There is no such release.');
+    const found = findClaim(computeFindings(tx, whole.version.id).answer, claimKey);
+    if (!found || found.finding.kind === 'share')
+      throw new AppError('invalid', 'This release has no such finding.', {
+        fields: { claimKey: 'Choose one of the findings of the release.' },
+      });
+    const subject = {
+      publicId: newId(),
+      claim: canonicalJson(claimOf(found.finding)),
+      claimKey,
+      language: 'en',
+      releaseVersionId: whole.version.id,
+    };
+    const { draft, computed } = assemble(tx, subject);
+    const sheet = insertSheet(tx, {
+      ...subject,
+      releaseId: release.id,
+      questionId: whole.question.id,
+      authorId: actor.personId,
+      createdAt: ctx.now,
+      submissionKey: key,
+    });
+    for (const { kind, text } of draft) {
+      const line = insertLine(tx, { publicId: newId(), sheetId: sheet.id, kind });
+      insertLineVersion(tx, {
+        publicId: newId(),
+        lineId: line.id,
+        number: 1,
+        draftText: text,
+        text,
+        state: 'draft',
+        templateVersion: computed.settings.houseStyle.body.templateVersion,
+        changedBy: actor.personId,
+        changedAt: ctx.now,
+      });
+    }
+    const entry = { action: 'drafted sheet', entity: 'sheet', entityId: sheet.publicId };
+    const after = { release: releaseId, claim: subject.claim, draft };
+    appendRecord(tx, { personId: actor.personId, ...entry, after, releaseId: release.id }, ctx.now);
+    return { id: sheet.publicId };
+  });
+}
+
+function claimOf(finding: TestableFinding): Claim {
+  switch (finding.kind) {
+    case 'lead':
+    case 'lead-change':
+      return { kind: finding.kind, pair: [finding.pair[0], finding.pair[1]] };
+    case 'change':
+      return { kind: 'change', option: finding.option };
+    case 'threshold':
+      return { kind: 'threshold', option: finding.option, pct: finding.thresholdPct };
+  }
+}

@@ -1,0 +1,35 @@
+import 'server-only';
+import type { ReleaseFacts } from '@/lib/domain/release-facts';
+import type { Claim, LineText } from '@/lib/domain/sheet';
+import type { Language } from '@/lib/domain/vocabulary';
+import type { EmbedRow } from '@/lib/charts/embed-input';
+import type { Scene } from '@/lib/charts/scene';
+import type { SoundingSpec } from '@/lib/charts/sounding-spec';
+import type { CheckAnswer, CheckDocument } from '@/lib/findings/check-types';
+import type { MissingDisclosure } from '@/lib/findings/disclosure';
+
+/** What is frozen at the moment of clearing: everything that was on the screen, and what it was made from. */
+export type EvidenceBody = {
+  schema: 1;
+  sheet: string;
+  claim: Claim;
+  claimKey: string;
+  language: Language;
+  release: ReleaseFacts;
+  comparison: {
+    release: ReleaseFacts | null;
+    reason: string;
+    unknowns: string[];
+    differences: string[];
+    override: { reason: string; person: string } | null;
+  };
+  policy: { version: number };
+  houseStyle: { version: number; templates: string; hash: string };
+  engine: string;
+  document: CheckDocument;
+  answer: CheckAnswer;
+  draft: LineText[];
+  texts: LineText[];
+  chart: { spec: SoundingSpec; rows: EmbedRow[]; scene: Scene };
+  missing: MissingDisclosure[];
+};

@@ -1,0 +1,95 @@
+import 'server-only';
+import { z } from 'zod';
+import type { Tx } from '@/db/client';
+import { insertClearing, insertEvidence } from '@/db/queries/clearing';
+import { freezeVersion } from '@/db/queries/release';
+import { moveLineVersions, touchSheet } from '@/db/queries/sheet';
+import { type Actor, canDraftSheets } from '@/lib/domain/roles';
+import { AppError } from '@/lib/errors';
+import { newId } from '@/lib/security/ids';
+import { authorize, type Ctx, parse, transact } from '../context';
+import { appendRecord } from '../history/append-record';
+import { assemble } from './assemble-evidence';
+import { applyEdits, filingProblems, lineEdits, openForWriting } from './edit-lines';
+import { MOVED_ON, openSheet, refuseUnless } from './sheet-state';
+
+const schema = z.strictObject({
+  id: z.string().min(1).max(64),
+  version: z.number().int().min(1),
+  /** Hash of the figures and draft that were on the screen. */
+  basisHash: z.string().regex(/^[0-9a-f]{64}$/),
+  lines: lineEdits,
+});
+
+export type Filed = { hash: string; version: number };
+
+/** Files a sheet: whoever files agrees to these words on this evidence, and can never be the second reader. */
+export function fileSheet(actor: Actor, input: unknown, ctx: Ctx): Filed {
+  authorize(canDraftSheets(actor), 'Only reporters and editors file sheets.');
+  const { id, version, basisHash, lines } = parse(schema, input);
+  return transact(ctx, (tx) => {
+    const opened = openForWriting(tx, actor, id, version, ctx.now);
+    applyEdits(tx, actor, opened, lines, ctx.now);
+    return fileIn(tx, actor, { id, version, basisHash }, ctx.now, 'filed sheet');
+  });
+}
+
+/** The act itself, on lines that are drafts. */
+export function fileIn(
+  tx: Tx,
+  actor: Actor,
+  seen: { id: string; version: number; basisHash: string },
+  now: number,
+  action: string,
+): Filed {
+  const opened = openSheet(tx, actor, seen.id, now);
+  const fields = filingProblems(opened.texts);
+  if (Object.keys(fields).length > 0)
+    throw new AppError('invalid', 'Some lines need another look.', { fields });
+  const assembled = assemble(tx, opened.sheet);
+  refuseUnless(
+    assembled.basisHash === seen.basisHash,
+    'The figures or the house style changed since you opened this page. Reload it and read it once more.',
+  );
+  const { bytes, hash, body } = assembled.withTexts(opened.texts);
+  const { comparison } = assembled.computed;
+  const evidence = insertEvidence(
+    tx,
+    {
+      publicId: newId(),
+      sheetId: opened.sheet.id,
+      hash,
+      bytes,
+      engine: body.engine,
+      createdAt: now,
+    },
+    [
+      { releaseVersionId: opened.sheet.releaseVersionId, part: 'release' as const },
+      ...(comparison.versionId === null
+        ? []
+        : [{ releaseVersionId: comparison.versionId, part: 'comparison' as const }]),
+    ],
+  );
+  const ids = opened.kept.map(({ version }) => version.id);
+  refuseUnless(moveLineVersions(tx, ids, 'draft', { state: 'filed', filedBy: actor.personId }), MOVED_ON);
+  freezeVersion(tx, opened.sheet.releaseVersionId, now);
+  if (comparison.versionId !== null) freezeVersion(tx, comparison.versionId, now);
+  insertClearing(
+    tx,
+    {
+      publicId: newId(),
+      sheetId: opened.sheet.id,
+      evidenceId: evidence.id,
+      act: 'filed',
+      personId: actor.personId,
+      roles: JSON.stringify(actor.roles),
+      at: now,
+    },
+    ids,
+  );
+  refuseUnless(touchSheet(tx, opened.sheet.id, seen.version), MOVED_ON);
+  const entry = { action, entity: 'sheet', entityId: opened.sheet.publicId };
+  const after = { state: 'filed', evidence: hash, texts: opened.texts };
+  appendRecord(tx, { personId: actor.personId, ...entry, after, releaseId: opened.release.id }, now);
+  return { hash, version: seen.version + 1 };
+}
