@@ -62,7 +62,7 @@ export const ENGLISH_CHART_WORDS: ChartWords = {
     hatched: 'Hatched: the range reaches the tinted side.',
     halfWeight: 'Half-filled weight: the poll cannot settle it.',
     hollowWeight: 'Hollow weight: not shown by this poll.',
-    dashedWeight: 'Dashed weight: no margin of sampling error.',
+    dashedWeight: 'Dashed weight: it cannot be tested.',
   },
 };
 

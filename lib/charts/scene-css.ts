@@ -6,7 +6,7 @@ type Colour = (token: TokenName) => string;
 /** In forced colours only the reader's own two inks are left: lines and shapes must say all of it. */
 const FORCED = [
   '@media (forced-colors:active){',
-  '.s-land,.s-water-1,.s-water-2,.s-water-3,.s-bar-hollow,.s-weight-half,.s-weight-hollow,.s-weight-dashed{fill:Canvas}',
+  '.s-paper,.s-land,.s-water-1,.s-water-2,.s-water-3,.s-bar-hollow,.s-weight-half,.s-weight-hollow,.s-weight-dashed{fill:Canvas}',
   '.s-bar-filled,.s-weight,.s-weight-half-fill,.s-tick,.s-side,.s-estimate,.s-untested{fill:CanvasText}',
   '.s-edge,.s-inner-edge,.s-whisker,.s-calm-whisker,.s-shore,.s-bar-filled,.s-bar-hollow,.s-lead-line,',
   '.s-weight-half,.s-weight-hollow,.s-weight-dashed,.s-hatch-line{stroke:CanvasText}',
@@ -42,7 +42,7 @@ function colours(colour: Colour): string {
     ];
     return parts.length > 0 ? [`.s-${role}{${parts.join(';')}}`] : [];
   });
-  return `${rules.join('')}.s-hatch-line{stroke:${colour('caution')}}`;
+  return `${rules.join('')}.s-hatch-line{stroke:${colour('caution')}}.s-paper{fill:${colour('paper')}}`;
 }
 
 /** What does not change with the theme: widths, dashes, sizes. */

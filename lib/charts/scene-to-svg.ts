@@ -8,7 +8,7 @@ const FONT =
   'font-family:system-ui,-apple-system,"Segoe UI",Roboto,sans-serif;font-variant-numeric:tabular-nums';
 
 /**
- * A scene as a picture of its own, with its colours.
+ * A scene as a picture of its own: with its colours and its paper, so that it is legible on any page.
  *
  * @param scene what is drawn
  * @param options theme, and ids unique wherever the picture is put
@@ -18,15 +18,24 @@ export function sceneToSvg(
   { theme, ...options }: SceneOptions & { theme: ThemeChoice },
 ): string {
   const svg = sceneElements(scene, options);
+  const isName = (child: SceneElement | string) =>
+    typeof child !== 'string' && (child.name === 'title' || child.name === 'desc');
+  const names = svg.children.filter(isName);
+  const drawn = svg.children.filter((child) => !isName(child));
   const style: SceneElement = {
     name: 'style',
     attributes: {},
     children: [`.sounding{${FONT}}${sceneRules(theme)}`],
   };
+  const paper: SceneElement = {
+    name: 'rect',
+    attributes: { class: 's-paper', width: scene.widthPx, height: scene.heightPx },
+    children: [],
+  };
   return writeElement({
     ...svg,
     attributes: { xmlns: 'http://www.w3.org/2000/svg', ...svg.attributes },
-    children: [...svg.children.slice(0, 2), style, ...svg.children.slice(2)],
+    children: [...names, style, paper, ...drawn],
   });
 }
 

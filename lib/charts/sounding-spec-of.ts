@@ -44,7 +44,10 @@ function namesOf(finding: Finding, words: ChartWords): Pick<SoundingSpec, 'label
         name: finding.option,
       };
     case 'lead':
-      return { label: words.leadLabel(...finding.pair), name: finding.pair[0] };
+      return {
+        label: words.leadLabel(...finding.pair),
+        name: finding.estimatePp === 0 ? '' : finding.pair[0],
+      };
     case 'change':
       return { label: words.changeLabel(finding.option), name: '' };
     case 'lead-change':
