@@ -8,7 +8,7 @@ export function draftAltText(draft: Draft): string {
   const { finding } = input;
   const title = say(claimMessage(pack.chartTitle, finding.kind, state), slots, voice.locale);
   const { intro, range, wider, fieldwork } = pack.altText;
-  const isWider = slots.wider === 'yes';
+  const isWider = slots.rangeWidens === 'yes';
   return sayAll(
     [
       intro,

@@ -2,6 +2,7 @@ import type { FragileReason, WordingState } from './wording-state';
 import type { Claim } from '@/lib/domain/sheet';
 import type { Mode, Population, ThresholdBase } from '@/lib/domain/vocabulary';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
+import type { ComparableItem } from '@/lib/findings/comparability';
 import type { DeffSource, SecondTest, UntestedReason } from '@/lib/findings/check-types';
 
 /**
@@ -15,10 +16,11 @@ export type LanguagePack = {
   chartTitle: ClaimMessages;
   range: Record<Claim['kind'], string>;
   detectable: string;
-  fragile: Record<FragileReason, string>;
+  fragile: Record<FragileReason | 'as-printed', string>;
   untested: Record<UntestedReason | 'no-sign-of-error', string>;
   caveat: Record<CaveatSentence, string>;
   methodNote: Record<MethodSentence, string>;
+  comparison: Record<'latest' | 'latest-comparable' | 'unknown' | 'override', string>;
   altText: Record<'intro' | 'title' | 'range' | 'wider' | 'fieldwork', string>;
   terms: Terms;
 };
@@ -83,5 +85,6 @@ export type Terms = {
   sample: Record<ReleaseFacts['sampleSource'], string>;
   thresholdBase: Record<ThresholdBase, string>;
   secondTest: Record<SecondTest['name'], string>;
+  comparable: Record<ComparableItem, string>;
   particular: Record<'sponsor' | 'population' | 'n' | 'mode', string>;
 };

@@ -37,15 +37,18 @@ export function marginSlots(input: DraftInput, voice: Voice): Slots {
   if (finding.verdict === 'cannot-be-tested') return shared;
   const far = farEnds(finding, input);
   const size = Math.abs(finding.estimatePp);
-  const margins = roundBeside([finding.marginPp, far.marginPp], size, voice.style);
-  const [margin, wider] = margins.map((pp) => formatTrimmed(pp, 3, voice.locale));
+  const margin = roundBeside(finding.marginPp, size, voice.style);
+  const widerMargin = roundBeside(far.marginPp, size, voice.style);
+  const near = rangeSlots('', finding, finding.intervalPp, voice);
+  const wide = rangeSlots('wider', finding, far.intervalPp, voice);
   return {
     ...shared,
-    margin: margin ?? '',
-    widerMargin: wider ?? '',
-    wider: margin === wider ? 'no' : 'yes',
-    ...rangeSlots('', finding, finding.intervalPp, voice),
-    ...rangeSlots('wider', finding, far.intervalPp, voice),
+    ...sizeSlots('margin', margin, voice),
+    ...sizeSlots('widerMargin', widerMargin, voice),
+    wider: margin === widerMargin ? 'no' : 'yes',
+    ...near,
+    ...wide,
+    rangeWidens: near.low === wide.widerLow && near.high === wide.widerHigh ? 'no' : 'yes',
     ...sizeSlots('detectable', roundUp(finding.detectable80Pp ?? 0, voice.style), voice),
   };
 }
@@ -81,9 +84,11 @@ function farEnds(finding: Tested, input: DraftInput): { marginPp: number; interv
 function rangeSlots(prefix: '' | 'wider', finding: Tested, [low, high]: Range, voice: Voice): Slots {
   if (finding.kind === 'threshold') {
     const pct = finding.thresholdPct;
-    const rounded = roundBeside([low + pct, high + pct], pct, voice.style);
-    const [from = '', to = ''] = rounded.map((end) => printPercent(end, decimalsOf(end), voice));
-    return { [slotName(prefix, 'low')]: from, [slotName(prefix, 'high')]: to };
+    const print = (end: number) => {
+      const rounded = roundBeside(end + pct, pct, voice.style);
+      return printPercent(rounded, decimalsOf(rounded), voice);
+    };
+    return { [slotName(prefix, 'low')]: print(low), [slotName(prefix, 'high')]: print(high) };
   }
   const isMirrored = finding.kind !== 'change' && finding.estimatePp < 0;
   return spanSlots(prefix, isMirrored ? [-high, -low] : [low, high], voice);
@@ -94,7 +99,8 @@ const slotName = (prefix: string, word: string) =>
 
 /** An interval around zero as two sizes: across it, above it, or below it (then the smaller size first). */
 function spanSlots(prefix: string, [low, high]: Range, voice: Voice): Slots {
-  const [from = 0, to = 0] = roundBeside([low, high], 0, voice.style);
+  const from = roundBeside(low, 0, voice.style);
+  const to = roundBeside(high, 0, voice.style);
   const span = from < 0 && to > 0 ? 'across' : from < 0 ? 'below' : 'above';
   const [first, second] = span === 'below' ? [-to, -from] : [Math.abs(from), Math.abs(to)];
   return {

@@ -20,8 +20,7 @@ export function draftMethodNote(draft: Draft): string {
     ...comparisonSentences(draft),
     questionSentence(draft),
     choiceSentence(draft),
-    ...basesOf(input).flatMap(({ facts, base }, index) => deffSentences(draft, facts, base, index)),
-    input.answer.base.deff === null ? '' : sayAll([pack.methodNote['one-deff']], draft),
+    ...(usesDeff(draft) ? deffNotes(draft) : []),
     ...testSentences(draft),
     input.finding.verdict === 'cannot-be-tested'
       ? `${sayAll([pack.methodNote.untested], draft)} ${untestedSentences(draft)}`
@@ -62,6 +61,19 @@ function choiceSentence(draft: Draft): string {
     : '';
 }
 
+/** Whether a design effect decided anything: a test, or that the sample is too small or has too few places. */
+function usesDeff({ input: { finding } }: Draft): boolean {
+  if (finding.verdict !== 'cannot-be-tested') return true;
+  return finding.reasons.includes('too-small') || finding.reasons.includes('few-clusters');
+}
+
+function deffNotes(draft: Draft): string[] {
+  const sentences = basesOf(draft.input).flatMap(({ facts, base }, index) =>
+    deffSentences(draft, facts, base, index),
+  );
+  return sentences.length > 0 ? [...sentences, sayAll([draft.pack.methodNote['one-deff']], draft)] : [];
+}
+
 function deffSentences(draft: Draft, facts: ReleaseFacts, base: BaseAnswer | null, index: number): string[] {
   if (!base?.deffSource || base.deff === null || !base.deffRange) return [];
   const { pack, voice, slots } = draft;
@@ -70,6 +82,7 @@ function deffSentences(draft: Draft, facts: ReleaseFacts, base: BaseAnswer | nul
   const [low, high] = base.deffRange;
   const extra = {
     ...slots,
+    stated: base.basis === 'modelled' ? 'modelled' : 'margin',
     poll: index === 0 ? 'this' : 'earlier',
     pollster: inSentence(facts.pollster.name),
     deff: shown(base.deff),

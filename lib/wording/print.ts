@@ -30,17 +30,13 @@ export function printGap(pp: number, decimals: number, { style, language, locale
 }
 
 /**
- * Rounds margins or range ends for text as the desk does, but finer where that would move one of them across (or
+ * Rounds a margin or the end of a range for text as the desk does, but finer where that would move it across (or
  * onto) what it is compared with: a range that excludes zero never reads as if it began at zero.
  */
-export function roundBeside(values: readonly number[], shore: number, style: HouseStyle): number[] {
-  const sideOf = (value: number) => Math.sign(value - shore);
-  const units = [UNITS[style.margins], 0.1, 0.01, 0.001];
-  const roundings = units.map((unit) => values.map((value) => roundTo(value, unit)));
-  const fitting = roundings.find((rounded) =>
-    rounded.every((value, index) => sideOf(value) === sideOf(values[index] ?? value)),
-  );
-  return fitting ?? roundings.at(-1) ?? [...values];
+export function roundBeside(value: number, shore: number, style: HouseStyle): number {
+  const side = Math.sign(value - shore);
+  const rounded = [UNITS[style.margins], 0.1, 0.01].map((unit) => roundTo(value, unit));
+  return rounded.find((one) => Math.sign(one - shore) === side) ?? roundTo(value, 0.001);
 }
 
 /** Rounds a size upwards, for sentences that promise "at least so much would have been found". */

@@ -1,5 +1,6 @@
 import { valueOf } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
+import { baseOf } from '@/lib/findings/check-document-of';
 import { formatDay, formatDayRange } from '@/lib/format/date';
 import { formatCount } from '@/lib/format/number';
 import { atStart, inSentence, plain } from './names';
@@ -36,7 +37,7 @@ function aboutSelf(release: ReleaseFacts, voice: Voice): Slots {
     mode: mode ? terms.mode[mode] : '',
     sponsored: release.sponsor.status === 'not-applicable' ? 'own' : sponsor ? 'given' : 'unknown',
     sponsor: sponsor ? inSentence(sponsor.name) : '',
-    design: release.design,
+    design: baseOf(release).design === 'clustered' ? 'clustered' : release.design,
     drawn: release.sampleSource === 'unknown' ? 'unknown' : 'known',
     sample: terms.sample[release.sampleSource],
   };
@@ -46,7 +47,7 @@ function fieldDates(release: ReleaseFacts, withYear: boolean, { locale }: Voice)
   const { fieldStartOn: start, fieldEndOn: end } = release;
   const crossesYear = yearOf(start) !== yearOf(end);
   return {
-    span: spanOf(start, end),
+    dateSpan: spanOf(start, end),
     dates: formatDayRange(start, end, locale, { withYear }),
     start: formatDay(start, locale, { withYear: crossesYear }),
     end: formatDay(end, locale, { withYear: withYear || crossesYear }),
@@ -69,7 +70,7 @@ function aboutEarlier(release: ReleaseFacts, previous: ReleaseFacts, withYear: b
     prevPopulation: own.population ?? '',
     prevSized: own.sized ?? 'no',
     prevN: own.n ?? '',
-    prevSpan: dates.span ?? '',
+    prevDateSpan: dates.dateSpan ?? '',
     prevDates: dates.dates ?? '',
     prevStart: dates.start ?? '',
     prevEnd: dates.end ?? '',

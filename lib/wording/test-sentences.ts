@@ -3,6 +3,7 @@ import { formatP, formatPoints, formatTrimmed } from '@/lib/format/number';
 import type { Draft } from './draft';
 import { isOfTwoReleases } from './draft-input';
 import { say, type Slots } from './say';
+import { familySize, isPlausibleBreaking } from './test-facts';
 import type { MethodSentence } from './language-pack';
 
 type Tested = Exclude<TestableFinding, { verdict: 'cannot-be-tested' }>;
@@ -14,7 +15,7 @@ export function testSentences(draft: Draft): string[] {
   const write = (key: MethodSentence, extra: Slots = {}) =>
     say(draft.pack.methodNote[key], { ...draft.slots, ...extra }, draft.voice.locale);
   const { locale } = draft.voice;
-  const count = familySize(draft);
+  const count = familySize(finding, draft.input.answer);
   const isOfChange = isOfTwoReleases(finding.kind);
   return [
     write('test', {
@@ -35,17 +36,6 @@ export function testSentences(draft: Draft): string[] {
   ];
 }
 
-/** How many findings were tested together with this one: changes and changes of leads are one family. */
-function familySize({ input }: Draft): number {
-  const familyOf = (kind: string) => (kind === 'lead-change' ? 'change' : kind);
-  return input.answer.findings.filter(
-    (one) =>
-      one.kind !== 'share' &&
-      one.verdict !== 'cannot-be-tested' &&
-      familyOf(one.kind) === familyOf(input.finding.kind),
-  ).length;
-}
-
 function secondTestSlots(test: SecondTest, { pack, voice }: Draft): Slots {
   const shared = { name: pack.terms.secondTest[test.name], passes: test.significant ? 'yes' : 'no' };
   if (test.name !== 'newcombe')
@@ -54,29 +44,20 @@ function secondTestSlots(test: SecondTest, { pack, voice }: Draft): Slots {
   return { ...shared, measure: 'interval', p: '', low: low ?? '', high: high ?? '' };
 }
 
-/** A sample is rarely worth more than a random one of its size, so a design effect below 1 is no reason to hope. */
-function isPlausible(finding: Tested, breaking: number, { answer }: Draft['input']): boolean {
-  if ('breakingDeff' in finding) return breaking >= 1;
-  return [answer.base, answer.previousBase].every((base) => breaking * (base?.deff ?? 0) >= 1);
-}
-
-/** Only where it says something: beyond the design effect of a finding that passes, below that of one that fails. */
 function breakingSentences(
   finding: Tested,
   { input, voice }: Draft,
   write: (key: MethodSentence, extra: Slots) => string,
 ): string[] {
-  const hasPassed = finding.verdict !== 'does-not-hold';
-  const [key, breaking, used] =
+  if (!isPlausibleBreaking(finding, input.answer)) return [];
+  const [key, breaking] =
     'breakingDeff' in finding
-      ? (['breaking-deff', finding.breakingDeff, input.answer.base.deff ?? 0] as const)
-      : (['breaking-factor', finding.breakingFactor, 1] as const);
-  if (breaking === null || breaking > used !== hasPassed) return [];
-  if (!hasPassed && !isPlausible(finding, breaking, input)) return [];
+      ? (['breaking-deff', finding.breakingDeff] as const)
+      : (['breaking-factor', finding.breakingFactor] as const);
   return [
     write(key, {
-      settled: hasPassed ? 'yes' : 'no',
-      breaking: formatTrimmed(breaking, 2, voice.locale),
+      settled: finding.verdict === 'does-not-hold' ? 'no' : 'yes',
+      breaking: formatTrimmed(breaking ?? 0, 2, voice.locale),
     }),
   ];
 }

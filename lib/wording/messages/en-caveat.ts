@@ -7,9 +7,9 @@ import type { LanguagePack } from '@/lib/wording/language-pack';
  */
 export const EN_CAVEAT: LanguagePack['caveat'] = {
   fieldwork:
-    '{pollsterStart} surveyed {sized, select, yes {{n} {population}} other {{population}}}{modeKnown, select, yes { {mode}} other {}} {span, select, wider {from {start} to {end}} other {on {dates}}}{sponsored, select, given { for {sponsor}} own { on its own account} other {}}.',
+    '{pollsterStart} surveyed {sized, select, yes {{n} {population}} other {{population}}}{modeKnown, select, yes { {mode}} other {}} {dateSpan, select, wider {from {start} to {end}} other {on {dates}}}{sponsored, select, given { for {sponsor}} own { on its own account} other {}}.',
   earlier:
-    'The earlier poll{samePollster, select, yes {} other {, by {prevPollster},}} surveyed {prevSized, select, yes {{prevN} {prevPopulation}} other {{prevPopulation}}} {prevSpan, select, wider {from {prevStart} to {prevEnd}} other {on {prevDates}}}.',
+    'The earlier poll{samePollster, select, yes {} other {, by {prevPollster},}} surveyed {prevSized, select, yes {{prevN} {prevPopulation}} other {{prevPopulation}}} {prevDateSpan, select, wider {from {prevStart} to {prevEnd}} other {on {prevDates}}}.',
   'not-disclosed': 'Not disclosed: {items}.',
   'not-recorded': 'Not recorded by {newsroom}: {items}.',
   'sample-random':
@@ -23,7 +23,7 @@ export const EN_CAVEAT: LanguagePack['caveat'] = {
   'threshold-base':
     'The poll’s shares count everyone asked, those without a choice included; the rule counts {ruleBase}, so the share that counts may be higher.',
   margin:
-    '{stated, select, given {{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share{sameLevel, select, yes {} other { at {statedLevel} confidence}}; {newsroom} puts} none {{pollsterStart} states no margin; {newsroom} puts} other {{newsroomStart} puts}} {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}} at ±{margin}{stated, select, given {} other { points}}{wider, select, yes {, or ±{widerMargin} if weighting cost more,} other {}} at {level} confidence.',
+    '{stated, select, given {{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share{sameLevel, select, yes {} other { at {statedLevel} confidence}}; {newsroom} puts} none {{pollsterStart} states no margin; {newsroom} puts} other {{newsroomStart} puts}} {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}} at ±{margin} {marginCount, plural, one {point} other {points}}{wider, select, yes {, or ±{widerMargin} {basis, select, modelled {within the rounding of that interval} other {if {design, select, clustered {clustering} other {weighting}} cost more}}} other {}} ({level} confidence).',
   'margin-stated-only':
     '{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share at {statedLevel} confidence; none is given here for {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}}.',
   'margin-none':

@@ -35,8 +35,8 @@ export const EN_CHART_TITLE: ClaimMessages = {
     'holds-twice': 'The gap between {a} and {b} has moved towards {toward} since {prevDates}',
     holds: 'The gap between {a} and {b} has moved towards {toward} in this poll since {prevDates}',
     fragile:
-      'The gap between {a} and {b} has a figure further towards {toward} than on {prevDates}, but the polls cannot settle it',
-    level: 'The gap between {a} and {b} has the same figure as on {prevDates}',
+      'The gap between {a} and {b} is further towards {toward} than on {prevDates}, but the polls cannot settle it',
+    level: 'The gap between {a} and {b} is at the same figure as on {prevDates}',
     'not-shown':
       'The gap between {a} and {b}, compared with {prevDates}: chance alone could produce the difference',
     family:

@@ -37,8 +37,8 @@ export const EN_HEADLINE: ClaimMessages = {
       'Gap between {a} and {b} has moved towards {toward} since {prevDates}, polls by {pollsters} suggest',
     holds: 'Gap between {a} and {b} has moved towards {toward} since {prevDates} in polls by {pollsters}',
     fragile:
-      'Gap between {a} and {b} has a figure further towards {toward} than on {prevDates}, but polls by {pollsters} cannot settle it',
-    level: 'Gap between {a} and {b} the same figure as on {prevDates} in poll by {pollster}',
+      'Gap between {a} and {b} is further towards {toward} than on {prevDates}, but polls by {pollsters} cannot settle it',
+    level: 'Gap between {a} and {b} at the same figure as on {prevDates} in poll by {pollster}',
     'not-shown':
       '{a} {aNow}, {b} {bNow} in poll by {pollster}: chance alone could account for the difference in the gap since {prevDates}',
     family:

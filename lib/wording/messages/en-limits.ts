@@ -3,24 +3,25 @@ import type { LanguagePack } from '@/lib/wording/language-pack';
 /** Range, detectable difference, and the reasons why a finding is fragile or was not tested. */
 export const EN_LIMITS: Pick<LanguagePack, 'range' | 'detectable' | 'fragile' | 'untested'> = {
   range: {
-    lead: '{basis, select, sampling {Allowing for sampling error} modelled {By the pollster’s own model} other {If the sample had been random}}, {span, select, across {the difference could be anything from {low} {lowCount, plural, one {point} other {points}} more for {b} to {high} {highCount, plural, one {point} other {points}} more for {a}.} other {the difference could be anything from {low} to {high} {highCount, plural, one {point} other {points}}.}}',
+    lead: '{basis, select, sampling {Allowing for sampling error, the range runs} modelled {On the pollster’s own model, the range runs} other {If the sample had been random, the range would run}} from {span, select, across {{low} {lowCount, plural, one {point} other {points}} more for {b} to {high} {highCount, plural, one {point} other {points}} more for {a}.} other {{low} to {high} {highCount, plural, one {point} other {points}} more for {a}.}}',
     change:
-      '{basis, select, sampling {Allowing for sampling error} modelled {By the pollster’s own model} other {If the samples had been random}}, {span, select, across {the change could be anything from a fall of {low} {lowCount, plural, one {point} other {points}} to a rise of {high} {highCount, plural, one {point} other {points}}.} above {the change could be anything from a rise of {low} {lowCount, plural, one {point} other {points}} to a rise of {high}.} other {the change could be anything from a fall of {high} {highCount, plural, one {point} other {points}} to a fall of {low}.}}',
+      '{basis, select, sampling {Allowing for sampling error, the range runs} modelled {On the pollster’s own model, the range runs} other {If the samples had been random, the range would run}} from {span, select, across {a fall of {low} {lowCount, plural, one {point} other {points}} to a rise of {high} {highCount, plural, one {point} other {points}}.} above {a rise of {low} {lowCount, plural, one {point} other {points}} to a rise of {high}.} other {a fall of {high} {highCount, plural, one {point} other {points}} to a fall of {low}.}}',
     'lead-change':
-      '{basis, select, sampling {Allowing for sampling error} modelled {By the pollster’s own model} other {If the samples had been random}}, {span, select, across {the change in the gap could be anything from {low} {lowCount, plural, one {point} other {points}} towards {away} to {high} {highCount, plural, one {point} other {points}} towards {toward}.} other {the change in the gap could be anything from {low} to {high} {highCount, plural, one {point} other {points}} towards {toward}.}}',
+      '{basis, select, sampling {Allowing for sampling error, the range runs} modelled {On the pollster’s own model, the range runs} other {If the samples had been random, the range would run}} from {span, select, across {{low} {lowCount, plural, one {point} other {points}} towards {away} to {high} {highCount, plural, one {point} other {points}} towards {toward}.} other {{low} to {high} {highCount, plural, one {point} other {points}} towards {toward}.}}',
     threshold:
-      '{basis, select, sampling {Allowing for sampling error} modelled {By the pollster’s own model} other {If the sample had been random}}, the share could be anything from {low} to {high}.',
+      '{basis, select, sampling {Allowing for sampling error, the range runs} modelled {On the pollster’s own model, the range runs} other {If the sample had been random, the range would run}} from {low} to {high}.',
   },
   detectable:
     'A true change of {detectable} {detectableCount, plural, one {point} other {points}} would have been found four times in five; smaller ones are often missed.',
   fragile: {
-    rounding:
-      '{claim, select, lead {The printed gap} change {The printed change} leadChange {The printed change in the gap} other {The printed distance from {line}}} is larger than sampling error alone would usually produce, but not once the rounding of the figures is allowed for.',
+    'as-printed':
+      '{claim, select, lead {As printed, the gap is larger} change {As printed, the change is larger} leadChange {As printed, the change in the gap is larger} other {As printed, the distance from {line} is larger}} than {basis, select, sampling {sampling error alone would usually produce} modelled {chance alone would usually produce by the pollster’s own model} other {chance alone would usually produce in a random sample}}.',
+    rounding: 'The rounding of the printed figures could undo that.',
     'design-effect':
-      '{claim, select, lead {The gap} change {The change} leadChange {The change in the gap} other {The distance from {line}}} is larger than sampling error alone would usually produce if {deffSource, select, assumed {weighting cost the sample as much precision as {newsroom} assumes} kish {weighting cost the sample as much precision as the weights alone suggest} other {weighting cost the sample as much precision as the pollster’s margin implies}}, but not if it cost more.',
+      '{deffSource, select, assumed {A heavier cost of {design, select, clustered {clustering} other {weighting}} than {newsroom} assumes could undo that.} kish {A heavier cost of weighting than the weights alone suggest could undo that.} other {A cost of {design, select, clustered {clustering} other {weighting}} at the heavy end of what the pollster’s margin implies could undo that.}}',
     'second-test': 'A second accepted test of the same figures does not confirm it.',
     together:
-      'Neither rounding nor a heavier cost of weighting would overturn this alone; both together could.',
+      'Rounding and a heavier cost of {design, select, clustered {clustering} other {weighting}} could together undo that, though neither could alone.',
     modelled:
       'The sample was not drawn at random, so the result rests on the pollster’s own model of its error.',
     comparison:

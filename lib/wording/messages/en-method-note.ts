@@ -12,9 +12,9 @@ export const EN_METHOD_NOTE: LanguagePack['methodNote'] = {
   stated:
     '{poll, select, earlier {Design effect of the earlier poll} other {Design effect}}: {deff}, as stated by {pollster}.',
   implied:
-    '{poll, select, earlier {Design effect of the earlier poll} other {Design effect}}: {deff}, implied by the interval that {pollster} states ({deffLow} to {deffHigh} within its rounding).',
+    '{poll, select, earlier {Design effect of the earlier poll} other {Design effect}}: {deff}, implied by the {stated, select, modelled {modelled interval} other {margin}} that {pollster} states ({deffLow} to {deffHigh} within its rounding).',
   assumed:
-    '{poll, select, earlier {Design effect of the earlier poll} other {Design effect}}: {deff} assumed by {newsroom}{ranged, select, yes {, taken as {deffLow} to {deffHigh}} other {}}; {pollster} gives nothing to work it out from.',
+    '{poll, select, earlier {Design effect of the earlier poll} other {Design effect}}: {deff} assumed by {newsroom}{ranged, select, yes {, taken as {deffLow} to {deffHigh}} other {}}.',
   'stated-margin-like-unweighted':
     'The margin that {pollster} states{poll, select, earlier { for the earlier poll} other {}} cannot be told from one that ignores weighting and was not used.',
   'one-deff': 'One overall design effect for every share and difference is an approximation.',

@@ -14,14 +14,21 @@ export const EN: LanguagePack = {
   ...EN_LIMITS,
   caveat: EN_CAVEAT,
   methodNote: EN_METHOD_NOTE,
+  comparison: {
+    latest: 'It is the latest poll of this series with earlier field dates.',
+    'latest-comparable':
+      '{count, plural, one {It is the latest earlier poll that can be compared; a later one differs in {items}.} other {It is the latest earlier poll that can be compared; # later ones differ in {items}.}}',
+    unknown: 'Not known, and not taken as different: {items}.',
+    override: 'The two polls differ in {items}; the desk compares them all the same: {reason}',
+  },
   altText: {
     intro:
       '{claim, select, lead {Uncertainty chart of the difference between {a} and {b}, {race}.} change {Uncertainty chart of the change for {option}, {race}.} leadChange {Uncertainty chart of the change in the gap between {a} and {b}, {race}.} other {Uncertainty chart of {option} against {line}, {race}.}}',
     title: '{title}.',
     range:
-      '{claim, select, lead {{span, select, across {The {level} range runs from {low} {lowCount, plural, one {point} other {points}} more for {b} to {high} {highCount, plural, one {point} other {points}} more for {a}.} other {The {level} range runs from {low} to {high} {highCount, plural, one {point} other {points}} more for {a}.}}} leadChange {{span, select, across {The {level} range runs from {low} {lowCount, plural, one {point} other {points}} towards {away} to {high} {highCount, plural, one {point} other {points}} towards {toward}.} other {The {level} range runs from {low} to {high} {highCount, plural, one {point} other {points}} towards {toward}.}}} change {{span, select, across {The {level} range runs from minus {low} to plus {high} points.} above {The {level} range runs from plus {low} to plus {high} points.} other {The {level} range runs from minus {high} to minus {low} points.}}} other {The {level} range runs from {low} to {high}.}}',
+      'The {level} range runs from {claim, select, lead {{span, select, across {{low} {lowCount, plural, one {point} other {points}} more for {b} to {high} {highCount, plural, one {point} other {points}} more for {a}.} other {{low} to {high} {highCount, plural, one {point} other {points}} more for {a}.}}} leadChange {{span, select, across {{low} {lowCount, plural, one {point} other {points}} towards {away} to {high} {highCount, plural, one {point} other {points}} towards {toward}.} other {{low} to {high} {highCount, plural, one {point} other {points}} towards {toward}.}}} change {{span, select, across {minus {low} to plus {high} {highCount, plural, one {point} other {points}}.} above {plus {low} to plus {high} {highCount, plural, one {point} other {points}}.} other {minus {high} to minus {low} {lowCount, plural, one {point} other {points}}.}}} other {{low} to {high}.}}',
     wider:
-      '{claim, select, lead {{widerSpan, select, across {If weighting cost more, it would run from {widerLow} {widerLowCount, plural, one {point} other {points}} more for {b} to {widerHigh} {widerHighCount, plural, one {point} other {points}} more for {a}.} other {If weighting cost more, it would run from {widerLow} to {widerHigh} {widerHighCount, plural, one {point} other {points}} more for {a}.}}} leadChange {{widerSpan, select, across {If weighting cost more, it would run from {widerLow} {widerLowCount, plural, one {point} other {points}} towards {away} to {widerHigh} {widerHighCount, plural, one {point} other {points}} towards {toward}.} other {If weighting cost more, it would run from {widerLow} to {widerHigh} {widerHighCount, plural, one {point} other {points}} towards {toward}.}}} change {{widerSpan, select, across {If weighting cost more, it would run from minus {widerLow} to plus {widerHigh} points.} above {If weighting cost more, it would run from plus {widerLow} to plus {widerHigh} points.} other {If weighting cost more, it would run from minus {widerHigh} to minus {widerLow} points.}}} other {If weighting cost more, it would run from {widerLow} to {widerHigh}.}}',
+      '{basis, select, modelled {Within the rounding of the stated interval, it could run from} other {If {design, select, clustered {clustering} other {weighting}} cost more, it would run from}} {claim, select, lead {{widerSpan, select, across {{widerLow} {widerLowCount, plural, one {point} other {points}} more for {b} to {widerHigh} {widerHighCount, plural, one {point} other {points}} more for {a}.} other {{widerLow} to {widerHigh} {widerHighCount, plural, one {point} other {points}} more for {a}.}}} leadChange {{widerSpan, select, across {{widerLow} {widerLowCount, plural, one {point} other {points}} towards {away} to {widerHigh} {widerHighCount, plural, one {point} other {points}} towards {toward}.} other {{widerLow} to {widerHigh} {widerHighCount, plural, one {point} other {points}} towards {toward}.}}} change {{widerSpan, select, across {minus {widerLow} to plus {widerHigh} {widerHighCount, plural, one {point} other {points}}.} above {plus {widerLow} to plus {widerHigh} {widerHighCount, plural, one {point} other {points}}.} other {minus {widerHigh} to minus {widerLow} {widerLowCount, plural, one {point} other {points}}.}}} other {{widerLow} to {widerHigh}.}}',
     fieldwork:
       '{pollsterStart} surveyed {sized, select, yes {{n} {population}} other {{population}}}{modeKnown, select, yes { {mode}} other {}} {longSpan, select, day {on {startLong}} other {from {startShort} to {endLong}}}.',
   },
@@ -66,6 +73,22 @@ export const EN: LanguagePack = {
       newcombe: 'hybrid score interval',
       fisher: 'Fisher’s exact test',
       'exact-binomial': 'exact binomial test',
+    },
+    comparable: {
+      pollster: 'the pollster',
+      race: 'the race',
+      'question-wording': 'the wording of the question',
+      'answer-options': 'the answers offered',
+      population: 'who was asked',
+      'likely-voter-method': 'how likely voters were found',
+      mode: 'how people were asked',
+      'sample-source': 'how the sample was drawn',
+      'sample-supplier': 'who supplied the sample',
+      'weighting-scheme': 'the weighting',
+      'sponsor-kind': 'the kind of sponsor',
+      're-basing': 'whether people without a choice are left out',
+      'question-order': 'the order of the questions',
+      'field-dates': 'the field dates',
     },
     particular: {
       sponsor: 'the sponsor',
