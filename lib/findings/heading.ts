@@ -8,6 +8,7 @@ const NO_FIGURE = 'no figure';
  *
  * @param finding any finding of an answer
  * @param document the document it answers, for the decimals that its bases print
+ * @param between the two releases of a change, such as "August to September"
  * @returns with U+2212 for a minus and a plus before what is above 0
  * @example
  * headingOf(
@@ -19,7 +20,7 @@ const NO_FIGURE = 'no figure';
  *   { release: { decimals: 1 } },
  * ); // => 'Brook against 50%: −9.0'
  */
-export function headingOf(finding: Finding, document: Decimals): string {
+export function headingOf(finding: Finding, document: Decimals, between = 'earlier to this'): string {
   if (finding.kind === 'share') {
     const { estimatePct } = finding;
     const shown = estimatePct === null ? NO_FIGURE : `${estimatePct.toFixed(document.release.decimals)}%`;
@@ -27,7 +28,7 @@ export function headingOf(finding: Finding, document: Decimals): string {
   }
   const { estimatePp } = finding;
   const shown = estimatePp === null ? NO_FIGURE : signed(estimatePp, printedDecimals(finding, document));
-  return `${subjectOf(finding)}: ${shown}`;
+  return `${subjectOf(finding, between)}: ${shown}`;
 }
 
 type Decimals = {
@@ -42,14 +43,14 @@ export function printedDecimals(finding: Finding, { release, previous }: Decimal
   return Math.max(release.decimals, ofThreshold, isChange ? (previous?.decimals ?? 0) : 0);
 }
 
-function subjectOf(finding: Exclude<Finding, { kind: 'share' }>): string {
+function subjectOf(finding: Exclude<Finding, { kind: 'share' }>, between: string): string {
   switch (finding.kind) {
     case 'lead':
       return `${finding.pair[0]} minus ${finding.pair[1]}`;
     case 'change':
-      return `${finding.option}, earlier to this`;
+      return `${finding.option}, ${between}`;
     case 'lead-change':
-      return `${finding.pair[0]} minus ${finding.pair[1]}, earlier to this`;
+      return `${finding.pair[0]} minus ${finding.pair[1]}, ${between}`;
     case 'threshold':
       return `${finding.option} against ${finding.thresholdPct}%`;
   }
