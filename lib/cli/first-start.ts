@@ -2,6 +2,7 @@ import { existsSync, mkdirSync, readdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { databaseFile, openDatabase, type Db } from '@/db/client';
 import { migrateDatabase } from '@/db/migrate';
+import { ensureDeskSettings } from '@/lib/services/setup/desk-settings';
 import { type DemoAccount, writeAccounts } from './accounts';
 import { type DataFolder, moveIntoPlace } from './data-folder';
 
@@ -15,6 +16,7 @@ export async function openDesk(data: DataFolder, seed: Seed | null): Promise<Db>
   if (!existsSync(data.database)) await makeDatabase(data, seed);
   const db = openDatabase(data.database);
   migrateDatabase(db);
+  ensureDeskSettings({ db, now: Date.now() });
   return db;
 }
 

@@ -1,6 +1,7 @@
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { pctOf } from '@/lib/domain/release-facts';
 import { valueOf } from '@/lib/domain/disclosed';
+import { countsTheBase, shareBaseOf } from './threshold-base';
 import type { Base, CheckDocument, Design, Pair, Policy } from './check-types';
 
 /** What a desk asks of a release beyond the engine's defaults. */
@@ -8,7 +9,7 @@ export type Asked = { pairs?: Pair[]; changes?: string[] };
 
 /**
  * The check document of a release and the release it is compared with.
- * Thresholds are those of the race, on options the release has.
+ * Thresholds are those of the race, on options the release has and on the base that the rule counts.
  */
 export function checkDocumentOf(
   release: ReleaseFacts,
@@ -17,13 +18,14 @@ export function checkDocumentOf(
   asked: Asked = {},
 ): CheckDocument {
   const options = new Set(release.shares.map((share) => share.option));
+  const base = shareBaseOf(release);
   return {
     policy,
     release: baseOf(release),
     previous: previous ? baseOf(previous) : null,
     ...asked,
     thresholds: release.race.thresholds
-      .filter((threshold) => options.has(threshold.option))
+      .filter((threshold) => options.has(threshold.option) && countsTheBase(threshold.base, base))
       .map(({ option, pct }) => ({ option, pct })),
   };
 }
