@@ -8,6 +8,8 @@ const config: NextConfig = {
   reactStrictMode: true,
   serverExternalPackages: ['better-sqlite3', '@node-rs/argon2', 'msw'],
   turbopack: { root: import.meta.dirname },
+  // Pages of the wrong role answer with a real 403.
+  experimental: { authInterrupts: true },
   async headers() {
     return [
       {

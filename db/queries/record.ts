@@ -1,9 +1,10 @@
 import 'server-only';
-import { and, desc, eq, lt, type SQL } from 'drizzle-orm';
+import { and, desc, eq, lt, type SQL, sql } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
 import { records } from '@/db/schema/records';
 import { releases } from '@/db/schema/releases';
+import { type Viewer, visible } from './visible';
 
 export type RecordRow = typeof records.$inferSelect;
 
@@ -19,16 +20,19 @@ export function listAllRecords(conn: Conn): RecordRow[] {
   return conn.select().from(records).orderBy(records.seq).all();
 }
 
-/** Newest first, with the actor's name and the release whose embargo may hide what changed. */
-export function listRecords(
-  conn: Conn,
-  page: { before: number | null; limit: number; entityId: string | null },
-) {
+export type RecordPage = { before: number | null; limit: number; entityId: string | null };
+
+/** Newest first, with the actor's name and whether the embargo of its release lets this viewer see what changed. */
+export function listRecords(conn: Conn, page: RecordPage, viewer: Viewer, now: number) {
   const conditions: SQL[] = [];
   if (page.before !== null) conditions.push(lt(records.seq, page.before));
   if (page.entityId !== null) conditions.push(eq(records.entityId, page.entityId));
   return conn
-    .select({ record: records, person: people.name, release: releases })
+    .select({
+      record: records,
+      person: people.name,
+      isVisible: sql<number>`(${visible(conn, viewer, now)})`.mapWith(Boolean),
+    })
     .from(records)
     .leftJoin(people, eq(people.id, records.personId))
     .leftJoin(releases, eq(releases.id, records.releaseId))

@@ -1,0 +1,76 @@
+import 'server-only';
+import { z } from 'zod';
+import { findPersonByPublicId } from '@/db/queries/person';
+import { findLastRecord, listRecords } from '@/db/queries/record';
+import { type Actor, canReadHistory } from '@/lib/domain/roles';
+import { authorize, type Ctx, parse } from '../context';
+import type { Head } from './head';
+
+export const PAGE_SIZE = 50;
+
+/** Who is written where no person acted. */
+const THE_SYSTEM = 'Leadline';
+
+export type HistoryEntry = {
+  seq: number;
+  at: number;
+  person: string;
+  action: string;
+  entity: string;
+  entityId: string;
+  /** The name of the person whom the entry is about; null for anything else. */
+  about: string | null;
+  before: unknown;
+  after: unknown;
+  reason: string | null;
+  /** An embargo keeps what changed, and why, from this reader for now. */
+  hidden: boolean;
+  hash: string;
+};
+
+export type HistoryPage = {
+  entries: HistoryEntry[];
+  /** What `before` is for the next older page; null on the last one. */
+  older: number | null;
+  head: Head | null;
+};
+
+const schema = z.strictObject({
+  before: z.coerce.number().int().min(1).optional(),
+  entityId: z.string().min(1).max(64).optional(),
+});
+
+/** One page of the history, newest first. */
+export function listHistory(actor: Actor, input: unknown, ctx: Ctx): HistoryPage {
+  authorize(canReadHistory(actor), 'The history is open to reporters, editors and administrators.');
+  const { before = null, entityId = null } = parse(schema, input);
+  const rows = listRecords(ctx.db, { before, entityId, limit: PAGE_SIZE + 1 }, actor, ctx.now);
+  const page = rows.slice(0, PAGE_SIZE);
+  const last = findLastRecord(ctx.db);
+  return {
+    entries: page.map(({ record, person, isVisible }) => ({
+      seq: record.seq,
+      at: record.at,
+      person: person ?? THE_SYSTEM,
+      action: record.action,
+      entity: record.entity,
+      entityId: record.entityId,
+      about: record.entity === 'person' ? nameOf(record.entityId, ctx) : null,
+      before: isVisible ? read(record.before) : null,
+      after: isVisible ? read(record.after) : null,
+      reason: isVisible ? record.reason : null,
+      hidden: !isVisible,
+      hash: record.hash,
+    })),
+    older: rows.length > PAGE_SIZE ? (page.at(-1)?.record.seq ?? null) : null,
+    head: last ? { seq: last.seq, hash: last.hash } : null,
+  };
+}
+
+function nameOf(publicId: string, ctx: Ctx): string | null {
+  return findPersonByPublicId(ctx.db, publicId)?.name ?? null;
+}
+
+function read(json: string | null): unknown {
+  return json === null ? null : (JSON.parse(json) as unknown);
+}
