@@ -1,26 +1,30 @@
 import 'server-only';
-import { findEvidence, findLastAct, listActs } from '@/db/queries/clearing';
+import { findEvidence, findLastAct, listActs, type EvidenceRow } from '@/db/queries/clearing';
 import { findEmbedOfSheet } from '@/db/queries/embed';
 import { isListed } from '@/db/queries/embargo';
+import { findPersonByPublicId } from '@/db/queries/person';
 import { findWholeVersion, listShares } from '@/db/queries/release';
-import {
-  type Actor,
-  canActAsEditor,
-  canReadUnpublished,
-  isTwoPersonAgreement,
-  type Role,
-} from '@/lib/domain/roles';
+import { listClearedLines, listEarlierTexts } from '@/db/queries/sheet';
+import { type Actor, canReadUnpublished, type Role } from '@/lib/domain/roles';
 import type { LineKind, LineState } from '@/lib/domain/sheet';
+import { AppError } from '@/lib/errors';
+import type { TestableFinding } from '@/lib/findings/check-types';
+import { findClaim } from '@/lib/findings/claim-key';
 import { claimsAbove } from '@/lib/wording/never-says-more';
 import { authorize, type Ctx } from '../context';
 import { type EmbargoView, embargoView } from '../release/get-release';
-import { type Assembled, assemble } from './assemble-evidence';
-import { openSheet } from './sheet-state';
+import { assemble } from './assemble-evidence';
+import type { EvidenceBody } from './evidence-body';
+import { permissionsOf, type SheetPermissions } from './sheet-permissions';
+import { type Opened, openSheet } from './sheet-state';
 
 export type LineView = {
   kind: LineKind;
+  /** What house style drafts from the evidence shown. */
   draft: string;
   text: string;
+  /** What this line said in its version before, where there was one. */
+  earlier: string | null;
   knockedOut: boolean;
   changedBy: string;
   /** Phrases that say more than the verdict, as a caution. */
@@ -29,28 +33,27 @@ export type LineView = {
 
 export type ActView = { act: string; person: string; at: number; comment: string | null };
 
-export type SheetView = {
+export type SheetView = SheetPermissions & {
   id: string;
   version: number;
   state: LineState;
   claimKey: string;
   author: string;
+  isAuthor: boolean;
   lines: LineView[];
   acts: ActView[];
   filer: { name: string; at: number } | null;
   /** Hash of the evidence that a filed or cleared sheet stands on. */
   hash: string | null;
-  /** Hash of figures and draft as they are now. */
+  /** Hash of figures and draft as they are now; empty where these words cannot be filed as they are. */
   basisHash: string;
   /** What was filed no longer fits the figures or house style in force. */
   hasMoved: boolean;
-  may: { write: boolean; change: boolean; clear: boolean; sendBack: boolean; pull: boolean; revise: boolean };
-  /** Why a filed sheet cannot be cleared by this reader. */
-  notYours: 'filer' | 'needs-editor' | null;
-  finding: Assembled['finding'];
-  findingIndex: number;
-  computed: Pick<Assembled['computed'], 'facts' | 'previous' | 'document' | 'answer' | 'missing'>;
-  comparison: { unknowns: string[]; differences: string[]; override: { reason: string; by: string } | null };
+  /** Words of this sheet are cleared and served now, also while newer ones are being written. */
+  isServed: boolean;
+  finding: TestableFinding;
+  evidence: Pick<EvidenceBody, 'release' | 'comparison' | 'document' | 'answer' | 'missing'>;
+  overrideBy: string | null;
   enteredBy: Record<string, string>;
   embargo: EmbargoView | null;
   isOnList: boolean;
@@ -62,73 +65,88 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
   authorize(canReadUnpublished(actor), 'Sheets are written and read by reporters and editors.');
   const opened = openSheet(ctx.db, actor, id, ctx.now);
   const { sheet, release, state } = opened;
-  const assembled = assemble(ctx.db, sheet);
   const acts = listActs(ctx.db, sheet.id);
   const filing = findLastAct(ctx.db, sheet.id, 'filed');
-  const stands = state === 'filed' || state === 'cleared' ? filing : null;
-  const evidence = stands?.evidenceId ? findEvidence(ctx.db, stands.evidenceId) : null;
-  const hasMoved =
-    state === 'filed' && evidence !== null && assembled.withTexts(opened.texts).hash !== evidence.hash;
-  const whole = findWholeVersion(ctx.db, sheet.releaseVersionId)!;
-  const { comparison, facts, previous, document, answer, missing } = assembled.computed;
-  const filer = stands && { personId: stands.personId, roles: JSON.parse(stands.roles) as Role[] };
+  const stands = state === 'filed' || state === 'cleared' || state === 'pulled' ? filing : null;
+  const frozen = stands?.evidenceId ? findEvidence(ctx.db, stands.evidenceId) : null;
+  const shown = evidenceShown(ctx, opened, frozen);
+  const finding = findingOf(shown.body);
+  const filer = filing && { personId: filing.personId, roles: JSON.parse(filing.roles) as Role[] };
+  const isServed = listClearedLines(ctx.db, sheet.id).length > 0;
+  const { release: facts, comparison, document, answer, missing } = shown.body;
+  const { override } = comparison;
   return {
     id: sheet.publicId,
     version: sheet.version,
     state,
     claimKey: sheet.claimKey,
     author: opened.author,
-    lines: opened.lines.map(({ line, version, changedBy }) => ({
-      kind: line.kind,
-      draft: version.draftText,
-      text: version.text,
-      knockedOut: line.knockedOut,
-      changedBy,
-      above: claimsAbove(assembled.finding.verdict, version.text),
-    })),
+    isAuthor: sheet.authorId === actor.personId,
+    lines: linesOf(ctx, opened, shown.body, finding),
     acts: acts.map(({ act, person }) => ({ act: act.act, person, at: act.at, comment: act.comment })),
     filer: stands && { name: acts.find(({ act }) => act.id === stands.id)!.person, at: stands.at },
-    hash: evidence?.hash ?? null,
-    basisHash: assembled.basisHash,
-    hasMoved,
-    ...permissions(actor, sheet.authorId, state, filer),
-    finding: assembled.finding,
-    findingIndex: assembled.findingIndex,
-    computed: { facts, previous, document, answer, missing },
-    comparison: {
-      unknowns: comparison.unknowns,
-      differences: comparison.differences.map(({ item }) => item),
-      override: comparison.override && { reason: comparison.override.reason, by: comparison.override.by },
-    },
-    enteredBy: Object.fromEntries(
-      listShares(ctx.db, whole.question.id).map(({ share, enteredBy }) => [share.option, enteredBy]),
-    ),
+    hash: frozen?.hash ?? null,
+    basisHash: shown.basisHash,
+    hasMoved: shown.hasMoved,
+    isServed,
+    ...permissionsOf(actor, {
+      authorId: sheet.authorId,
+      state,
+      filer,
+      isServed,
+      isReturned: acts.at(-1)?.act.act === 'returned',
+    }),
+    finding,
+    evidence: { release: facts, comparison, document, answer, missing },
+    overrideBy: override && (findPersonByPublicId(ctx.db, override.person)?.name ?? null),
+    enteredBy: enteredBy(ctx, sheet.releaseVersionId),
     embargo: embargoView(release, Boolean(opened.isPublic)),
     isOnList: isListed(ctx.db, release.id, actor),
     embedId: findEmbedOfSheet(ctx.db, sheet.id)?.publicId ?? null,
   };
 }
 
-function permissions(
-  actor: Actor,
-  authorId: number,
-  state: LineState,
-  filer: { personId: number; roles: Role[] } | null,
-): Pick<SheetView, 'may' | 'notYours'> {
-  const editor = canActAsEditor(actor);
-  const mine = authorId === actor.personId;
-  const filed = state === 'filed' && filer !== null;
-  const isFiler = filed && filer.personId === actor.personId;
-  const second = filed && isTwoPersonAgreement(filer, actor);
-  return {
-    may: {
-      write: (state === 'draft' || state === 'sent-back') && (mine || editor),
-      change: filed && editor && !isFiler,
-      clear: second,
-      sendBack: second || isFiler,
-      pull: state === 'cleared' && editor,
-      revise: (state === 'cleared' || state === 'pulled') && (mine || editor),
-    },
-    notYours: !filed || second ? null : isFiler ? 'filer' : 'needs-editor',
-  };
+type Shown = { body: EvidenceBody; basisHash: string; hasMoved: boolean };
+
+/** Cleared words are shown on the evidence they were cleared on, everything else on the figures of now. */
+function evidenceShown(ctx: Ctx, opened: Opened, frozen: EvidenceRow | null): Shown {
+  if (frozen && opened.state !== 'filed') return { body: bodyOf(frozen), basisHash: '', hasMoved: false };
+  try {
+    const assembled = assemble(ctx.db, opened.sheet);
+    const { body, hash } = assembled.withTexts(opened.texts);
+    return { body, basisHash: assembled.basisHash, hasMoved: frozen !== null && frozen.hash !== hash };
+  } catch (error) {
+    if (!frozen || !(error instanceof AppError)) throw error;
+    return { body: bodyOf(frozen), basisHash: '', hasMoved: true };
+  }
+}
+
+function bodyOf(evidence: EvidenceRow): EvidenceBody {
+  return JSON.parse(evidence.bytes.toString('utf8')) as EvidenceBody;
+}
+
+function findingOf({ answer, claimKey }: EvidenceBody): TestableFinding {
+  const found = findClaim(answer, claimKey)?.finding;
+  if (!found || found.kind === 'share') throw new Error('the evidence of a sheet lacks its claim');
+  return found;
+}
+
+function linesOf(ctx: Ctx, opened: Opened, body: EvidenceBody, finding: TestableFinding): LineView[] {
+  const earlier = listEarlierTexts(ctx.db, opened.sheet.id);
+  return opened.lines.map(({ line, version, changedBy }) => ({
+    kind: line.kind,
+    draft: body.draft.find(({ kind }) => kind === line.kind)?.text ?? version.draftText,
+    text: version.text,
+    earlier: earlier.get(line.id) ?? null,
+    knockedOut: line.knockedOut,
+    changedBy,
+    above: claimsAbove(finding.verdict, version.text),
+  }));
+}
+
+function enteredBy(ctx: Ctx, releaseVersionId: number): Record<string, string> {
+  const whole = findWholeVersion(ctx.db, releaseVersionId)!;
+  return Object.fromEntries(
+    listShares(ctx.db, whole.question.id).map(({ share, enteredBy }) => [share.option, enteredBy]),
+  );
 }

@@ -2,7 +2,7 @@ import 'server-only';
 import { findLastAct } from '@/db/queries/clearing';
 import { findPerson } from '@/db/queries/person';
 import { listNewestLines, listOpenSheets as listRows } from '@/db/queries/sheet';
-import { type Actor, canReadUnpublished } from '@/lib/domain/roles';
+import { type Actor, canReadUnpublished, isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
 import type { LineState } from '@/lib/domain/sheet';
 import { authorize, type Ctx } from '../context';
 
@@ -17,10 +17,11 @@ export type OpenSheetItem = {
   author: string;
   filedBy: string | null;
   filedAt: number | null;
-  /** The newest comment of a sheet that was sent back. */
-  comment: string | null;
-  /** What this person can do about it now. */
-  waitsFor: 'me' | 'others';
+  isFiledByMe: boolean;
+  /** Why and by whom a sheet came back. */
+  returned: { comment: string; by: string; at: number } | null;
+  /** Whose move it is; a draft is being written and waits for nobody. */
+  waitsFor: 'me' | 'others' | 'nobody';
   isUnderEmbargo: boolean;
 };
 
@@ -37,8 +38,6 @@ export function listOpenSheets(actor: Actor, ctx: Ctx): OpenSheetItem[] {
       kept.find(({ line }) => line.kind === 'headline') ??
       kept.find(({ line }) => line.kind === 'chart-title');
     const filing = state === 'filed' ? findLastAct(ctx.db, row.sheet.id, 'filed') : null;
-    const sent = state === 'sent-back' ? newestReturn(ctx, row.sheet.id) : null;
-    const mine = row.sheet.authorId === actor.personId;
     const { embargoAt, embargoLiftedAt } = row.release;
     return {
       id: row.sheet.publicId,
@@ -49,17 +48,41 @@ export function listOpenSheets(actor: Actor, ctx: Ctx): OpenSheetItem[] {
       headline: headline?.version.text ?? '',
       state,
       author: row.author,
-      filedBy: filing && (findPerson(ctx.db, filing.personId)?.name ?? null),
+      filedBy: filing && nameOf(ctx, filing.personId),
       filedAt: filing?.at ?? null,
-      comment: sent,
-      waitsFor: (filing ? filing.personId !== actor.personId : mine) ? 'me' : 'others',
+      isFiledByMe: filing?.personId === actor.personId,
+      returned: state === 'sent-back' ? returnOf(ctx, row.sheet.id) : null,
+      waitsFor: waitsFor(ctx, actor, row.sheet, state),
       isUnderEmbargo: embargoAt !== null && embargoLiftedAt === null && embargoAt > ctx.now,
     };
   });
 }
 
-function newestReturn(ctx: Ctx, sheetId: number): string | null {
+function waitsFor(
+  ctx: Ctx,
+  actor: Actor,
+  sheet: { id: number; authorId: number },
+  state: LineState,
+): OpenSheetItem['waitsFor'] {
+  if (state === 'draft') return 'nobody';
+  const filing = findLastAct(ctx.db, sheet.id, 'filed');
+  if (!filing) return 'nobody';
+  const filer = { personId: filing.personId, roles: JSON.parse(filing.roles) as Role[] };
+  if (state === 'filed') return isTwoPersonAgreement(filer, actor) ? 'me' : 'others';
+  const owner = newestReturn(ctx, sheet.id)?.act === 'returned' ? filer.personId : sheet.authorId;
+  return owner === actor.personId ? 'me' : 'others';
+}
+
+function returnOf(ctx: Ctx, sheetId: number): OpenSheetItem['returned'] {
+  const act = newestReturn(ctx, sheetId);
+  return act && { comment: act.comment ?? '', by: nameOf(ctx, act.personId), at: act.at };
+}
+
+function newestReturn(ctx: Ctx, sheetId: number) {
   const acts = (['sent-back', 'returned'] as const).map((act) => findLastAct(ctx.db, sheetId, act));
-  const newest = acts.filter((act) => act !== null).sort((a, b) => b.id - a.id)[0];
-  return newest?.comment ?? null;
+  return acts.filter((act) => act !== null).sort((a, b) => b.id - a.id)[0] ?? null;
+}
+
+function nameOf(ctx: Ctx, personId: number): string {
+  return findPerson(ctx.db, personId)?.name ?? '';
 }
