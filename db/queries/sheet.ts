@@ -76,6 +76,20 @@ export function listNewestLines(conn: Conn, sheetId: number) {
     .all();
 }
 
+/** What each line of a sheet said in the version before its newest, by line id. */
+export function listEarlierTexts(conn: Conn, sheetId: number): Map<number, string> {
+  const rows = conn
+    .select({ lineId: lines.id, text: lineVersions.text })
+    .from(lines)
+    .innerJoin(
+      lineVersions,
+      and(eq(lineVersions.lineId, lines.id), eq(lineVersions.number, sql`${newestVersion} - 1`)),
+    )
+    .where(eq(lines.sheetId, sheetId))
+    .all();
+  return new Map(rows.map(({ lineId, text }) => [lineId, text]));
+}
+
 /** The cleared words of a sheet, in the order drafted. */
 export function listClearedLines(conn: Conn, sheetId: number) {
   return conn
@@ -142,7 +156,7 @@ export function listOpenSheets(conn: Conn, viewer: Viewer, now: number, limit: n
     .select({ id: lines.sheetId })
     .from(lines)
     .innerJoin(lineVersions, and(eq(lineVersions.lineId, lines.id), eq(lineVersions.number, newestVersion)))
-    .where(inArray(lineVersions.state, ['draft', 'filed', 'sent-back']));
+    .where(and(eq(lines.knockedOut, false), inArray(lineVersions.state, ['draft', 'filed', 'sent-back'])));
   return listSelect(conn)
     .where(and(inArray(sheets.id, open), visible(conn, viewer, now)))
     .orderBy(desc(sheets.id))
@@ -153,6 +167,10 @@ export function listOpenSheets(conn: Conn, viewer: Viewer, now: number, limit: n
 export function listSheetsOfRelease(conn: Conn, releaseId: number) {
   return listSelect(conn).where(eq(sheets.releaseId, releaseId)).orderBy(desc(sheets.id)).all();
 }
+
+const lastClearing = sql`(
+  select max(acts.id) from clearings acts where acts.sheet_id = ${sheets.id} and acts.act = 'cleared'
+)`;
 
 /** Sheets with cleared words that this viewer may read, newest clearing first. */
 export function listClearedSheets(
@@ -175,7 +193,7 @@ export function listClearedSheets(
         contains(pollsters.name, search.pollster),
       ),
     )
-    .orderBy(desc(sheets.version), desc(sheets.id))
+    .orderBy(desc(lastClearing), desc(sheets.id))
     .limit(search.limit)
     .all();
 }
