@@ -126,8 +126,12 @@ export function countFailures(conn: Conn, bucket: string, since: number): number
   );
 }
 
-export function insertFailure(conn: Conn, bucket: string, at: number): void {
-  conn.insert(signInFailures).values({ bucket, at }).run();
+export function insertFailure(conn: Conn, bucket: string, at: number): number {
+  return conn.insert(signInFailures).values({ bucket, at }).returning({ id: signInFailures.id }).get().id;
+}
+
+export function deleteFailure(conn: Conn, id: number): void {
+  conn.delete(signInFailures).where(eq(signInFailures.id, id)).run();
 }
 
 export function deleteFailures(conn: Conn, bucket: string): void {

@@ -1,6 +1,7 @@
 import 'server-only';
 import {
   countFailures,
+  deleteFailure,
   deleteFailures,
   deleteFailuresBefore,
   findPersonByEmail,
@@ -27,18 +28,18 @@ export type SignInResult = { ok: true; token: string; name: string } | { ok: fal
  */
 export async function signIn(input: SignInInput, ctx: Ctx): Promise<SignInResult> {
   const email = normalizeEmail(input.email);
-  const buckets = [
-    { key: `account:${sha256(email)}`, max: MAX_PER_ACCOUNT },
-    { key: `address:${sha256(input.address)}`, max: MAX_PER_ADDRESS },
-  ];
+  const accountBucket = `account:${sha256(email)}`;
+  const addressBucket = `address:${sha256(input.address)}`;
   // Counted before the hash is checked, so that many at once cannot all slip under the limit.
-  const throttled = transact(ctx, (tx) => {
-    if (buckets.some(({ key, max }) => countFailures(tx, key, ctx.now - WINDOW) >= max)) return true;
-    for (const { key } of buckets) insertFailure(tx, key, ctx.now);
-    deleteFailuresBefore(tx, ctx.now - WINDOW);
-    return false;
+  const counted = transact(ctx, (tx) => {
+    const since = ctx.now - WINDOW;
+    deleteFailuresBefore(tx, since);
+    if (countFailures(tx, accountBucket, since) >= MAX_PER_ACCOUNT) return null;
+    if (countFailures(tx, addressBucket, since) >= MAX_PER_ADDRESS) return null;
+    insertFailure(tx, accountBucket, ctx.now);
+    return { id: insertFailure(tx, addressBucket, ctx.now) };
   });
-  if (throttled) return { ok: false, throttled: true };
+  if (!counted) return { ok: false, throttled: true };
 
   const person = findPersonByEmail(ctx.db, email);
   const matches = await passwordMatches(person?.passwordHash ?? null, input.password);
@@ -55,7 +56,8 @@ export async function signIn(input: SignInInput, ctx: Ctx): Promise<SignInResult
       );
       return null;
     }
-    deleteFailures(tx, buckets[0]!.key);
+    deleteFailures(tx, accountBucket);
+    deleteFailure(tx, counted.id);
     insertSession(tx, {
       tokenHash: sha256(token),
       personId: now.id,
