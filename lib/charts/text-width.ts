@@ -1,5 +1,6 @@
 const NARROW = new Set("iljtfrI.,:;'’‹›|!()[]  -");
 const WIDE = new Set('mwMW%@…—');
+const SIGNS = new Set('+−±=<>~');
 
 /**
  * How wide a text may be, at most, in any face an embed can meet: on the safe side, so that labels never collide.
@@ -7,7 +8,7 @@ const WIDE = new Set('mwMW%@…—');
  * @param text one line
  * @param fontPx its size
  * @example
- * textWidthPx('+8', 10); // => 12.8
+ * textWidthPx('50', 100); // => 144
  */
 export function textWidthPx(text: string, fontPx: number): number {
   let ems = 0;
@@ -18,6 +19,8 @@ export function textWidthPx(text: string, fontPx: number): number {
 function emsOf(char: string): number {
   if (NARROW.has(char)) return 0.4;
   if (WIDE.has(char)) return 1;
+  if (SIGNS.has(char)) return 0.86;
+  if (char >= '0' && char <= '9') return 0.72;
   if ((char.codePointAt(0) ?? 0) >= 0x2e80) return 1.1;
   return char !== char.toLowerCase() ? 0.78 : 0.64;
 }
