@@ -9,6 +9,5 @@ const entry = ['--conditions=react-server', '--import', 'tsx', 'lib/cli/dev-serv
 process.exit(
   await run(process.execPath, [...entry, ...process.argv.slice(2)], {
     env: { NODE_ENV: 'development', NEXT_TELEMETRY_DISABLED: '1' },
-    forwardSignals: true,
   }),
 );

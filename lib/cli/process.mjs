@@ -10,47 +10,48 @@ export function say(text) {
 }
 
 /**
- * Runs a command to its end with our own input and output, and answers its exit status.
- * A command that a signal ended counts as failed, as a shell would count it.
+ * Runs a command to its end with our own input and output, and answers its exit status. Signals are passed
+ * on; after one, this process ends with the child, since whoever sent it wants no further step.
  * @param {string} command
  * @param {string[]} args
- * @param {{ env?: Record<string, string | undefined>, forwardSignals?: boolean }} [options]
+ * @param {{ env?: Record<string, string | undefined> }} [options]
  * @returns {Promise<number>}
  */
-export function run(command, args, { env = {}, forwardSignals = false } = {}) {
+export function run(command, args, { env = {} } = {}) {
   return new Promise((resolve) => {
     const child = spawn(command, args, { cwd: root, stdio: 'inherit', env: { ...process.env, ...env } });
-    const stopForwarding = forwardSignals ? forwardTo(child) : () => {};
+    const forwarding = forwardSignals(child);
     child.once('error', (error) => {
-      stopForwarding();
+      forwarding.stop();
       say(`${command} could not be started: ${error.message}`);
       resolve(127);
     });
     child.once('exit', (code, signal) => {
-      stopForwarding();
-      resolve(code ?? 128 + (signalNumbers[signal ?? ''] ?? 0));
+      forwarding.stop();
+      const status = code ?? 128 + (signalNumbers[signal ?? ''] ?? 0);
+      if (forwarding.happened()) process.exit(status);
+      resolve(status);
     });
   });
 }
 
 /** @type {Record<string, number>} */
 const signalNumbers = { SIGHUP: 1, SIGINT: 2, SIGQUIT: 3, SIGABRT: 6, SIGKILL: 9, SIGSEGV: 11, SIGTERM: 15 };
+const names = /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP']);
 
-/**
- * A terminal sends Ctrl-C to the whole group, so the child has its SIGINT already; only what is
- * sent to this process alone is passed on. The child ignores a second stop while it is stopping.
- * @param {import('node:child_process').ChildProcess} child
- */
-function forwardTo(child) {
-  const names = /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP']);
-  const handlers = names.map((name) => {
-    const handler = () => {
-      child.kill(name);
-    };
-    process.on(name, handler);
-    return { name, handler };
-  });
-  return () => handlers.forEach(({ name, handler }) => process.off(name, handler));
+/** @param {import('node:child_process').ChildProcess} child */
+function forwardSignals(child) {
+  let happened = false;
+  /** @param {NodeJS.Signals} name */
+  const handler = (name) => {
+    happened = true;
+    child.kill(name);
+  };
+  for (const name of names) process.on(name, handler);
+  return {
+    happened: () => happened,
+    stop: () => names.forEach((name) => process.off(name, handler)),
+  };
 }
 
 /** @param {string} name */

@@ -10,6 +10,5 @@ if (!(await installIfChanged()) || !(await buildIfChanged())) process.exit(1);
 process.exit(
   await run(process.execPath, serveArguments(process.argv.slice(2)), {
     env: { NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
-    forwardSignals: true,
   }),
 );

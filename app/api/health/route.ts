@@ -1,0 +1,9 @@
+import { checkHealth } from '@/lib/services/health/check-health';
+
+export const dynamic = 'force-dynamic';
+
+export function GET(): Response {
+  const health = checkHealth();
+  const status = health.database === 'ok' ? 200 : 503;
+  return Response.json(health, { status, headers: { 'Cache-Control': 'no-store' } });
+}
