@@ -2,14 +2,13 @@ import 'server-only';
 import { cookies, headers } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { getToken } from 'next-auth/jwt';
-import { cache } from 'react';
 import type { Actor } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { readSession } from '@/lib/services/account/read-session';
 import { requestContext } from '@/lib/services/account/request-context';
 
-/** Who is asking, read from the database once a request; null when nobody is signed in. */
-export const findActor = cache(async (): Promise<Actor | null> => {
+/** Who is asking, read from the database; null when nobody is signed in. */
+export async function findActor(): Promise<Actor | null> {
   const jar = await cookies();
   const token = await getToken({
     req: {
@@ -18,7 +17,7 @@ export const findActor = cache(async (): Promise<Actor | null> => {
     } as unknown as Parameters<typeof getToken>[0]['req'],
   });
   return typeof token?.sid === 'string' ? readSession(token.sid, requestContext()) : null;
-});
+}
 
 /** For pages: sends whoever is not signed in to the door. */
 export async function requireUser(): Promise<Actor> {

@@ -1,0 +1,76 @@
+import { spawnSync } from 'node:child_process';
+import { expect, test } from '@playwright/test';
+import { readDatabase, signInByFetch, startServer, temporaryFolder } from './own-server';
+
+const PORT = 3111;
+/** Milliseconds after the first write at which the process is killed; fixed, so that a failure can be repeated. */
+const MOMENTS = [40, 95, 170, 260];
+
+test('a kill -9 right after an answer loses nothing that was answered', async () => {
+  test.setTimeout(180_000);
+  const { folder, remove } = temporaryFolder();
+  let acknowledged = 0;
+  for (const moment of MOMENTS) {
+    const server = await startServer(PORT, folder);
+    const sheet = readDatabase(folder, clearedSheet);
+    const cookie = await signInByFetch(server.origin, 'oake@averil-courier.example');
+    const before = readDatabase(folder, countCopies);
+    expect(before).toBeGreaterThanOrEqual(acknowledged);
+    acknowledged = before;
+    const killed = new Promise((resolve) => setTimeout(() => resolve(server.end('SIGKILL')), moment));
+    for (;;) {
+      const answer = await fetch(`${server.origin}/api/desk/copy/${sheet}`, {
+        method: 'POST',
+        headers: { 'Content-Type': 'application/json', 'Sec-Fetch-Site': 'same-origin', Cookie: cookie },
+        body: JSON.stringify({ kinds: ['caveat'], form: 'plain' }),
+      }).catch(() => null);
+      if (!answer) break;
+      expect(answer.status).toBe(200);
+      acknowledged += 1;
+    }
+    await killed;
+    const kept = readDatabase(folder, countCopies);
+    expect(kept).toBeGreaterThanOrEqual(acknowledged);
+    // The one that was under way when the process died may be there too, never half of it.
+    expect(kept).toBeLessThanOrEqual(acknowledged + 1);
+    expect(readDatabase(folder, countCopyRecords)).toBe(kept);
+    expect(command('record:verify', folder)).toContain('history whole');
+  }
+  expect(acknowledged).toBeGreaterThan(MOMENTS.length);
+  expect(command('evidence:verify', folder)).toContain('0 problems');
+  remove();
+});
+
+test('an empty newsroom is opened by whoever has the code on the console, and stops cleanly', async () => {
+  test.setTimeout(120_000);
+  const { folder, remove } = temporaryFolder();
+  const server = await startServer(PORT, folder, ['--empty']);
+  expect(server.printed()).toMatch(/[A-Z0-9]{5}(-[A-Z0-9]{5}){3}/);
+  expect(readDatabase(folder, (db) => db.prepare('select count(*) from people').pluck().get())).toBe(0);
+  expect(await server.end('SIGTERM')).toBe(0);
+  remove();
+});
+
+function command(name: string, folder: string): string {
+  const { stdout, stderr } = spawnSync('npm', ['run', '-s', name], {
+    env: { ...process.env, LEADLINE_DATA: folder, NODE_OPTIONS: '' },
+    encoding: 'utf8',
+  });
+  return stdout + stderr;
+}
+
+const clearedSheet: Parameters<typeof readDatabase<string>>[1] = (db) =>
+  db
+    .prepare(
+      `select s.public_id from sheets s join releases r on r.id = s.release_id
+       join lines l on l.sheet_id = s.id join line_versions v on v.line_id = l.id
+       where v.state = 'cleared' and r.embargo_at is null limit 1`,
+    )
+    .pluck()
+    .get() as string;
+
+const countCopies: Parameters<typeof readDatabase<number>>[1] = (db) =>
+  db.prepare('select count(*) from copies').pluck().get() as number;
+
+const countCopyRecords: Parameters<typeof readDatabase<number>>[1] = (db) =>
+  db.prepare(`select count(*) from records where action = 'copied'`).pluck().get() as number;
