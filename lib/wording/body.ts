@@ -10,8 +10,9 @@ export function draftBody(draft: Draft): string {
   const { input, pack, state } = draft;
   const { finding } = input;
   const found = claimMessage(pack.body, finding.kind, state);
-  if (finding.verdict === 'cannot-be-tested')
-    return [sayAll([found], draft), untestedSentences(draft)].join(' ');
+  if (finding.verdict === 'cannot-be-tested') {
+    return [sayAll([found], draft), untestedSentences(draft, isSilent(draft))].join(' ');
+  }
   const isMissable = finding.verdict === 'does-not-hold' && state !== 'little-changed';
   const isDetectable = isMissable && isOfTwoReleases(finding.kind) && finding.detectable80Pp !== null;
   return sayAll(

@@ -13,7 +13,6 @@ export function draftCaveat(draft: Draft): string {
   ];
   const closing: (CaveatSentence | null)[] = [
     sampleSentence(draft),
-    hasOtherBase(draft) ? 'threshold-base' : null,
     marginSentence(draft),
     errorSentence(draft),
   ];
@@ -45,16 +44,6 @@ function sampleSentence({ input }: Draft): CaveatSentence {
   if (input.release.sampleSource === 'probability') return 'sample-random';
   if (input.answer.base.basis === 'modelled') return 'sample-modelled';
   return input.answer.base.basis === 'comparison' ? 'sample-comparison' : 'sample-not-random';
-}
-
-/** Whether the rule counts votes while the poll's shares count people without a choice too. */
-function hasOtherBase({ input, slots }: Draft): boolean {
-  const { finding, release } = input;
-  if (finding.kind !== 'threshold' || slots.asked !== 'everyone') return false;
-  const rule = release.race.thresholds.find(
-    ({ option, pct }) => option === finding.option && pct === finding.thresholdPct,
-  );
-  return rule?.base === 'votes-cast' || rule?.base === 'valid-votes';
 }
 
 function marginSentence({ input }: Draft): CaveatSentence | null {

@@ -1,5 +1,6 @@
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
+import { shareBaseOf } from '@/lib/findings/threshold-base';
 import type { TestableFinding } from '@/lib/findings/check-types';
 import type { DraftInput } from './draft-input';
 import { plain } from './names';
@@ -46,7 +47,7 @@ function ofChange(finding: Of<'change'>, { release, previous }: DraftInput, voic
     known: knownOf([option], release, previous),
     now: printShare(unitsOf(release, option), release.decimals, voice),
     then: printShare(previous && unitsOf(previous, option), previous?.decimals ?? 0, voice),
-    direction: (estimatePp ?? 0) < 0 ? 'down' : 'up',
+    direction: (estimatePp ?? 0) < 0 ? 'less' : 'more',
     ...sizeSlots('move', estimatePp, Math.max(release.decimals, previous?.decimals ?? 0), voice),
   };
 }
@@ -84,8 +85,7 @@ function ofThreshold(finding: Of<'threshold'>, { release }: DraftInput, voice: V
   const { terms } = voice.style.messages[voice.language];
   const decimals = [0, 1, 2, 3].find((places) => Number(thresholdPct.toFixed(places)) === thresholdPct) ?? 4;
   const pct = printPercent(thresholdPct, decimals, voice);
-  const rule = release.race.thresholds.find((one) => one.option === option && one.pct === thresholdPct);
-  const asksEveryone = release.shares.some((share) => !share.isAnswer && (share.units ?? 0) > 0);
+  const asksEveryone = shareBaseOf(release).hasNonAnswers;
   return {
     option: nameOf(option, release, voice),
     known: estimatePp === null ? 'no' : 'yes',
@@ -93,7 +93,6 @@ function ofThreshold(finding: Of<'threshold'>, { release }: DraftInput, voice: V
     line: thresholdPct === 50 ? terms.half : say(terms.threshold, { pct }, voice.locale),
     side: (estimatePp ?? 0) < 0 ? 'below' : 'above',
     asked: asksEveryone ? 'everyone' : 'unknown',
-    ruleBase: rule ? terms.thresholdBase[rule.base] : '',
   };
 }
 

@@ -41,7 +41,15 @@ export const DEFAULT_HOUSE_STYLE: HouseStyle = {
     holds: ['leads', 'more say', 'up', 'down', 'has moved', 'above', 'below'],
     fragile: ['is ahead', 'has the higher figure', 'higher', 'lower', 'further towards', 'above', 'below'],
     'does-not-hold': ['level', 'same figure', 'could', 'too near', 'little changed', 'exactly at'],
-    'cannot-be-tested': ['no recognised margin', 'cannot be', 'does not', 'too few', 'leave'],
+    'cannot-be-tested': [
+      'no recognised margin',
+      'cannot be',
+      'not comparable',
+      'not disclosed',
+      'does not',
+      'too few',
+      'leave',
+    ],
   },
   messages: { en: EN },
 };

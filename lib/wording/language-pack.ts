@@ -1,6 +1,6 @@
 import type { FragileReason, WordingState } from './wording-state';
 import type { Claim } from '@/lib/domain/sheet';
-import type { Mode, Population, ThresholdBase } from '@/lib/domain/vocabulary';
+import type { Mode, Population } from '@/lib/domain/vocabulary';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { ComparableItem } from '@/lib/findings/comparability';
 import type { DeffSource, SecondTest, UntestedReason } from '@/lib/findings/check-types';
@@ -41,7 +41,6 @@ export type CaveatSentence =
   | 'sample-not-random'
   | 'sample-modelled'
   | 'sample-comparison'
-  | 'threshold-base'
   | 'margin'
   | 'margin-stated-only'
   | 'margin-none'
@@ -83,7 +82,6 @@ export type Terms = {
   population: Record<Population | 'unknown', string>;
   mode: Record<Mode, string>;
   sample: Record<ReleaseFacts['sampleSource'], string>;
-  thresholdBase: Record<ThresholdBase, string>;
   secondTest: Record<SecondTest['name'], string>;
   comparable: Record<ComparableItem, string>;
   particular: Record<'sponsor' | 'population' | 'n' | 'mode', string>;

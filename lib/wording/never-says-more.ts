@@ -6,9 +6,7 @@ import type { Verdict } from '@/lib/findings/check-types';
  * memory. The rest: common practice, no source.
  */
 const NEVER = [
-  /\bstatistical(?:ly)? (?:tie|tied|dead heat)\b/gi,
-  /\bdead heat\b/gi,
-  /\btied?\b/gi,
+  /\b(?:statistical(?:ly)? )?(?:tied?|dead heat)\b/gi,
   /\bneck and neck\b/gi,
   /\btoo close to call\b/gi,
   /\b(?:surg|slump|soar|plung|plummet)(?:e|es|ed|ing|s)?\b/gi,

@@ -48,7 +48,7 @@ function explainShare({ estimatePct, intervalPct, method }: ShareFinding): strin
 const UNTESTED: Record<UntestedReason, string> = {
   'no-sample-size': 'The number of people asked is not disclosed, so no margin can be worked out.',
   'no-sampling-basis':
-    'The sample is not random and no modelled interval is stated: there is no recognised margin for it. That is no sign that the figures are wrong.',
+    'The sample is not known to be random and no modelled interval is stated: there is no recognised margin for it. That is no sign that the figures are wrong.',
   'too-small': 'Counted at its design effect, the sample is smaller than the desk’s policy tests.',
   'few-clusters':
     'The design effect rests on fewer than eight degrees of freedom: too few places to judge it by.',
@@ -57,15 +57,23 @@ const UNTESTED: Record<UntestedReason, string> = {
   'not-disclosed': 'A share that this needs is not disclosed.',
 };
 
+const EQUAL: Record<Tested['kind'], string> = {
+  lead: 'The printed figures are equal.',
+  change: 'The printed figures are equal.',
+  'lead-change': 'The printed gaps are equal.',
+  threshold: 'The printed figure is the threshold itself.',
+};
+
 function explainNotShown(finding: Tested, answer: CheckAnswer): string[] {
   const what = finding.kind === 'change' || finding.kind === 'lead-change' ? 'change' : 'difference';
   const [low, high] = finding.intervalPp.map((end) => formatPoints(end, 1, LOCALE));
   const sentences = [`The ${what} could be anything from ${low} to ${high}.`];
-  if (finding.estimatePp === 0) sentences.unshift('The printed figures are equal.');
+  if (finding.estimatePp === 0) sentences.unshift(EQUAL[finding.kind]);
   if (finding.kind === 'change' && finding.littleChanged) {
-    sentences.push(
-      'Little changed: rounding and the high design effect allowed for, it is within the desk’s margin.',
-    );
+    return [
+      ...sentences,
+      'Little changed: with rounding and the high design effect allowed for, it is within the desk’s margin.',
+    ];
   }
   if (finding.reasons.includes('family')) {
     const adjusted = formatP(finding.pAdjusted, LOCALE);

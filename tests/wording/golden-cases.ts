@@ -23,7 +23,7 @@ const MODELLED: Partial<ReleaseFacts> = {
   modelledInterval: { pp: 3.8, unit: 0.1, level: 0.95 },
 };
 
-function race(option: string, pct: number, base: 'valid-votes' | 'answers' = 'valid-votes') {
+function race(option: string, pct: number, base: 'valid-votes' | 'answers' = 'answers') {
   return {
     id: 'governor',
     name: 'Governor of Averil Coast',
@@ -231,7 +231,11 @@ export const GOLDEN_CASES = {
   }),
   'threshold-holds-below-half': inputOf({
     claim: half('Brook'),
-    release: releaseOf(two(49, 41), { race: race('Brook', 50, 'answers') }),
+    release: releaseOf(two(49, 41), { race: race('Brook', 50) }),
+  }),
+  'threshold-holds-of-votes': inputOf({
+    claim: half('Alder'),
+    release: releaseOf({ Alder: 55, Brook: 45 }, { ...KNOWN_DEFF, race: race('Alder', 50, 'valid-votes') }),
   }),
   'threshold-fragile': inputOf({
     claim: half('Alder'),

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { LINE_KIND_NAMES } from '@/lib/domain/sheet';
 import type { DraftInput } from '@/lib/wording/draft-input';
 import { draftSheet } from '@/lib/wording/draft-sheet';
+import { explain } from '@/lib/wording/why';
 import { claimsAbove } from '@/lib/wording/never-says-more';
 import { GOLDEN_CASES } from './golden-cases';
 
@@ -13,7 +14,8 @@ function readable(input: DraftInput): string {
   const { finding } = input;
   const reasons = finding.reasons.length > 0 ? ` (${finding.reasons.join(', ')})` : '';
   const lines = draftSheet(input).map(({ kind, text }) => `${LINE_KIND_NAMES[kind]}\n${text}\n`);
-  return [`Verdict: ${finding.verdict}${reasons}\n`, ...lines].join('\n');
+  const staff = [`Why, for staff\n${explain(finding, input.answer).join(' ')}\n`];
+  return [`Verdict: ${finding.verdict}${reasons}\n`, ...lines, ...staff].join('\n');
 }
 
 describe('a drafted sheet', () => {

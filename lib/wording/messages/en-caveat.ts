@@ -20,8 +20,6 @@ export const EN_CAVEAT: LanguagePack['caveat'] = {
     '{drawn, select, unknown {How the sample was drawn is not stated.} other {The sample was not drawn at random ({sample}).}} {pollsterStart} states a modelled interval of ±{modelled} {modelledCount, plural, one {point} other {points}} for a share; it rests on a model and is not a margin of sampling error.',
   'sample-comparison':
     '{drawn, select, unknown {How the sample was drawn is not stated.} other {The sample was not drawn at random ({sample}).}} The margin given here is worked out as if it had been, for comparison only, under {comparisonRule}; it is not a margin of sampling error.',
-  'threshold-base':
-    'The poll’s shares count everyone asked, those without a choice included; the rule counts {ruleBase}, so the share that counts may be higher.',
   margin:
     '{stated, select, given {{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share{sameLevel, select, yes {} other { at {statedLevel} confidence}}; {newsroom} puts} none {{pollsterStart} states no margin; {newsroom} puts} other {{newsroomStart} puts}} {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}} at ±{margin} {marginCount, plural, one {point} other {points}}{wider, select, yes {, or ±{widerMargin} {basis, select, modelled {within the rounding of that interval} other {if {design, select, clustered {clustering} other {weighting}} cost more}}} other {}} ({level} confidence).',
   'margin-stated-only':

@@ -17,11 +17,11 @@ export const EN_CHART_TITLE: ClaimMessages = {
   },
   change: {
     'holds-twice':
-      '{direction, select, up {{option} is up since {prevDates}} other {{option} is down since {prevDates}}}',
+      '{direction, select, more {{option} is up since {prevDates}} other {{option} is down since {prevDates}}}',
     holds:
-      '{direction, select, up {{option} is up in this poll since {prevDates}} other {{option} is down in this poll since {prevDates}}}',
+      '{direction, select, more {{option} is up in this poll since {prevDates}} other {{option} is down in this poll since {prevDates}}}',
     fragile:
-      '{direction, select, up {{option} has a higher figure than on {prevDates}, but the polls cannot settle it} other {{option} has a lower figure than on {prevDates}, but the polls cannot settle it}}',
+      '{direction, select, more {{option} has a higher figure than on {prevDates}, but the polls cannot settle it} other {{option} has a lower figure than on {prevDates}, but the polls cannot settle it}}',
     level: '{option} has the same figure as on {prevDates}',
     'not-shown':
       '{option} at {now}, against {then} on {prevDates}: chance alone could produce this difference',

@@ -18,11 +18,11 @@ export const EN_HEADLINE: ClaimMessages = {
   },
   change: {
     'holds-twice':
-      '{direction, select, up {{option} up since {prevDates}, polls by {pollsters} suggest} other {{option} down since {prevDates}, polls by {pollsters} suggest}}',
+      '{direction, select, more {{option} up since {prevDates}, polls by {pollsters} suggest} other {{option} down since {prevDates}, polls by {pollsters} suggest}}',
     holds:
-      '{direction, select, up {{option} up since {prevDates} in polls by {pollsters}} other {{option} down since {prevDates} in polls by {pollsters}}}',
+      '{direction, select, more {{option} up since {prevDates} in polls by {pollsters}} other {{option} down since {prevDates} in polls by {pollsters}}}',
     fragile:
-      '{direction, select, up {{option} has a higher figure than on {prevDates}, {now} against {then}, but polls by {pollsters} cannot settle it} other {{option} has a lower figure than on {prevDates}, {now} against {then}, but polls by {pollsters} cannot settle it}}',
+      '{direction, select, more {{option} has a higher figure than on {prevDates}, {now} against {then}, but polls by {pollsters} cannot settle it} other {{option} has a lower figure than on {prevDates}, {now} against {then}, but polls by {pollsters} cannot settle it}}',
     level: '{option} at {now} in poll by {pollster}, the same figure as on {prevDates}',
     'not-shown':
       '{option} at {now} in poll by {pollster}, against {then} on {prevDates}: a difference that chance alone could produce',

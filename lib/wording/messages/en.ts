@@ -60,12 +60,6 @@ export const EN: LanguagePack = {
       blended: 'part random, part opt-in',
       unknown: 'not stated',
     },
-    thresholdBase: {
-      'votes-cast': 'all votes cast',
-      'valid-votes': 'valid votes only',
-      'registered-voters': 'all registered voters',
-      answers: 'everyone asked',
-    },
     secondTest: {
       score: 'score test',
       'exact-sign': 'exact sign test',
