@@ -1,0 +1,91 @@
+import type { Metadata } from 'next';
+import Link from 'next/link';
+import { type Column, DataTable } from '@/components/ui/data-table';
+import { LinkButton } from '@/components/ui/link-button';
+import { PageTitle } from '@/components/ui/page-title';
+import { deskPage } from '@/lib/auth/desk-page';
+import { readEnv } from '@/lib/env';
+import { formatInstant } from '@/lib/format/date';
+import { type HistoryEntry, listHistory } from '@/lib/services/history/list-history';
+import { EntryChanges } from './_components/entry-changes';
+import { HeadNote } from './_components/head-note';
+
+export const metadata: Metadata = { title: 'History' };
+
+type Search = { entity?: string | string[]; before?: string | string[] };
+
+export default async function HistoryPage({ searchParams }: { searchParams: Promise<Search> }) {
+  const { entity, before } = await searchParams;
+  const { entries, older, head } = await deskPage((actor, ctx) =>
+    listHistory(actor, { entityId: entity, before }, ctx),
+  );
+  const zone = readEnv().LEADLINE_ZONE;
+  const only = typeof entity === 'string' ? entity : null;
+  return (
+    <>
+      <PageTitle
+        title={only ? `History of one ${entries[0]?.entity ?? 'thing'}` : 'History'}
+        crumbs={only ? [{ label: 'History', href: '/history' }, { label: entries[0]?.about ?? only }] : []}
+        sub={`Who did what, newest first. Nothing here is ever changed or deleted. Times are those of ${zone}.`}
+      />
+      <div className="mt-6">
+        <HeadNote head={head} />
+        <DataTable
+          caption="Entries of the history"
+          hideCaption
+          columns={columnsFor(zone, only)}
+          rows={entries}
+          rowKey={({ seq }) => String(seq)}
+          empty="No entry here."
+        />
+        <nav aria-label="Pages of the history" className="flex flex-wrap gap-3">
+          {before ? <LinkButton href={addressOf(only, null)}>Newest</LinkButton> : null}
+          {older === null ? null : <LinkButton href={addressOf(only, older)}>Older</LinkButton>}
+        </nav>
+      </div>
+    </>
+  );
+}
+
+function addressOf(entity: string | null, before: number | null): string {
+  const query = new URLSearchParams();
+  if (entity !== null) query.set('entity', entity);
+  if (before !== null) query.set('before', String(before));
+  return query.size > 0 ? `/history?${query}` : '/history';
+}
+
+function columnsFor(zone: string, only: string | null): Column<HistoryEntry>[] {
+  return [
+    {
+      key: 'seq',
+      head: 'No.',
+      numeric: true,
+      cell: ({ seq, hash }) => <span title={`Hash ${hash}`}>{seq}</span>,
+    },
+    {
+      key: 'at',
+      head: 'When',
+      cell: ({ at }) => (
+        <time dateTime={new Date(at).toISOString()} className="whitespace-nowrap">
+          {formatInstant(at, zone, 'en-GB')}
+        </time>
+      ),
+    },
+    { key: 'person', head: 'Who', cell: ({ person }) => person },
+    { key: 'action', head: 'What', rowHead: true, cell: ({ action }) => action },
+    {
+      key: 'entity',
+      head: 'About',
+      cell: ({ entity, entityId, about }) =>
+        only === entityId ? (
+          (about ?? entity)
+        ) : (
+          <Link href={addressOf(entityId, null)}>
+            {about ?? entity}
+            <span className="sr-only">, its own history {about === null ? entityId : ''}</span>
+          </Link>
+        ),
+    },
+    { key: 'changes', head: 'Before, after, why', cell: (entry) => <EntryChanges entry={entry} /> },
+  ];
+}
