@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 
 /** The form of a check document: keys, kinds and the range of each single field. What joins fields comes after. */
 

@@ -1,4 +1,4 @@
-import type { z } from 'zod';
+import type { ZodError } from 'zod';
 import { CheckRefused } from './check-refused';
 import { checkDocumentSchema } from './check-schema';
 import type { CheckDocument } from './check-types';
@@ -38,7 +38,7 @@ export function parseCheckDocument(input: unknown): CheckDocument {
 const TOLD_WHOLE = /^(policy\.assumed\.\w+\.range|policy\.kishRange)\b.*$/;
 const PAIR_NOT_OF_TWO = /^(pairs\[\d+\])\[\d+\]$/;
 
-function refusalOf(error: z.ZodError): CheckRefused {
+function refusalOf(error: ZodError): CheckRefused {
   const [issue] = error.issues;
   if (!issue) throw new TypeError('refusalOf requires an issue');
   if (issue.code === 'unrecognized_keys') {

@@ -14,7 +14,7 @@ import { isInside, isPositive, required } from './require';
  * @throws RangeError `exactBinomialP requires p0 inside 0 and 1`
  * @see R 4.2.2 `2 * min(pbinom(x, m, p0), 1 - pbinom(x - 1, m, p0))` for whole counts
  * @example
- * exactBinomialP(12, 120, 0.05); // => 0.0362...
+ * exactBinomialP(12, 120, 0.05); // => 0.0346...
  */
 export function exactBinomialP(x: number, m: number, p0: number): number {
   required(isPositive(m), 'exactBinomialP', 'm above 0');

@@ -17,7 +17,7 @@ const NEGLIGIBLE = 1e-18;
  * @throws RangeError `fisherExactP requires whole counts of at least 0, none above its sample`
  * @see R 4.2.2 `fisher.test(matrix(c(hits1, n1 - hits1, hits2, n2 - hits2), 2))`
  * @example
- * fisherExactP(3, 20, 9, 20); // => 0.0824...
+ * fisherExactP(3, 20, 9, 20); // => 0.0823...
  */
 export function fisherExactP(hits1: number, n1: number, hits2: number, n2: number): number {
   const whole = [hits1, n1, hits2, n2].every((count) => Number.isInteger(count) && count >= 0);

@@ -14,7 +14,7 @@ import { wilsonInterval } from './wilson-interval';
  * @see Newcombe (1998), Statistics in Medicine 17, 873–890, method 10 (from memory); checked against closed forms
  *   computed in R 4.2.2
  * @example
- * newcombeInterval(0.44, 700, 0.47, 700, 1.959963984540054); // => [-0.0221...,  0.0819...]
+ * newcombeInterval(0.44, 700, 0.47, 700, 1.959963984540054); // => [-0.0221..., 0.0818...]
  */
 export function newcombeInterval(p1: number, n1: number, p2: number, n2: number, z: number): Interval {
   const [low1, high1] = wilsonInterval(p1, n1, z);

@@ -7,7 +7,7 @@ const JSTAT_REACH = 4;
 /**
  * The probability that a standard normal variable exceeds z.
  *
- * Exact to about 1e-13 relative down to 1e-300: jstat up to |z| = 4, stdlib beyond, where jstat loses digits
+ * Exact to about 1e-12 relative down to 1e-300: jstat up to |z| = 4, stdlib beyond, where jstat loses digits
  * (from about 4.25) and gives 0 from 8.3 on (measured).
  *
  * @param z any number

@@ -19,7 +19,7 @@ const BISECTIONS = 60;
  * @example
  * roundingHalfWidth([0.5], 0.95); // => 0.475
  * roundingHalfWidth([0.5, 0.5], 0.95); // => 0.776393202250021
- * roundingHalfWidth([0.5, 0.5, 0.5, 0.5], 0.95); // => 1.1199...
+ * roundingHalfWidth([0.5, 0.5, 0.5, 0.5], 0.95); // => 1.1198...
  */
 export function roundingHalfWidth(halfUnits: readonly number[], coverage: number): number {
   const count = halfUnits.length;

@@ -32,7 +32,7 @@ export function shareStandardError(p: number, n: number, deff: number): number {
  * @throws RangeError `leadStandardError requires n and deff above 0`
  * @see R 4.2.2 `sqrt(deff * (a + b - (a - b)^2) / n)`
  * @example
- * leadStandardError(0.47, 0.41, 1012, 1.4426); // => 0.0353466...
+ * leadStandardError(0.47, 0.41, 1012, 1.4426); // => 0.0353454...
  */
 export function leadStandardError(a: number, b: number, n: number, deff: number): number {
   required(isProportion(a) && isProportion(b), 'leadStandardError', 'shares from 0 to 1');
@@ -51,7 +51,7 @@ export function leadStandardError(a: number, b: number, n: number, deff: number)
  * @throws RangeError `leadNullStandardError requires n and deff above 0`
  * @see R 4.2.2 `sqrt(deff * (a + b) / n)`; its square test is McNemar's without correction when deff = 1
  * @example
- * leadNullStandardError(0.47, 0.41, 1012, 1); // => 0.0294884...
+ * leadNullStandardError(0.47, 0.41, 1012, 1); // => 0.0294883...
  */
 export function leadNullStandardError(a: number, b: number, n: number, deff: number): number {
   required(isProportion(a) && isProportion(b), 'leadNullStandardError', 'shares from 0 to 1');
@@ -70,7 +70,7 @@ export function leadNullStandardError(a: number, b: number, n: number, deff: num
  * @throws RangeError `pooledStandardError requires sizes above 0`
  * @see R 4.2.2 `prop.test(correct = FALSE)` on effective counts
  * @example
- * pooledStandardError(0.44, 700, 0.47, 700); // => 0.0266171...
+ * pooledStandardError(0.44, 700, 0.47, 700); // => 0.0266176...
  */
 export function pooledStandardError(p1: number, n1: number, p2: number, n2: number): number {
   required(isProportion(p1) && isProportion(p2), 'pooledStandardError', 'shares from 0 to 1');
