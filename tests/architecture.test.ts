@@ -126,7 +126,8 @@ describe('the layers', () => {
   });
 
   it('have no file that only passes others on', () => {
-    const allowed = ['lib/stats/index.ts', 'db/schema.ts'];
+    const entriesOfTools = ['db/schema.ts', 'lib/findings/engine-entry.ts'];
+    const allowed = ['lib/stats/index.ts', ...entriesOfTools];
     const barrels = product.filter((file) => isBarrel(file) && !allowed.includes(file.path));
     expect(barrels.map((file) => file.path)).toEqual([]);
   });
@@ -207,6 +208,7 @@ function isServerAction(path: string): boolean {
 }
 
 function isBarrel(file: SourceFile): boolean {
+  if (!/^export (type )?[{*]/m.test(file.text)) return false;
   const statements = [...parse(file.path, file.text).statements];
   const passesOn = (one: ts.Statement) => ts.isExportDeclaration(one) && one.moduleSpecifier !== undefined;
   return statements.length > 0 && statements.every(passesOn);

@@ -9,15 +9,15 @@ import { type DataFolder, moveIntoPlace } from './data-folder';
 export type Seed = (db: Db) => Promise<DemoAccount[]>;
 
 /**
- * Opens the desk's database on the newest schema. On the very first start it is filled beside its place
- * and moved there last, so that a start which is cut short leaves nothing half made.
+ * Leaves the desk's database in its place, on the newest schema. At the very first start it is filled beside
+ * its place and moved there last, so that a start which is cut short leaves nothing half made.
  */
-export async function openDesk(data: DataFolder, seed: Seed | null): Promise<Db> {
+export async function makeReady(data: DataFolder, seed: Seed | null): Promise<void> {
   if (!existsSync(data.database)) await makeDatabase(data, seed);
   const db = openDatabase(data.database);
   migrateDatabase(db);
   ensureDeskSettings({ db, now: Date.now() });
-  return db;
+  db.$client.close();
 }
 
 async function makeDatabase(data: DataFolder, seed: Seed | null): Promise<void> {

@@ -1,16 +1,6 @@
 import type { IncomingMessage, RequestListener, ServerResponse } from 'node:http';
+import type { EmbedAnswer, EmbedRequest } from '@/lib/services/embed/answer';
 import { rewriteForwarded } from './forwarded';
-
-export type EmbedRequest = {
-  path: string;
-  query: URLSearchParams;
-  headers: Record<string, string | undefined>;
-};
-export type EmbedAnswer = {
-  status: number;
-  headers: Record<string, string>;
-  body: string | Uint8Array | null;
-};
 
 export type FrontOptions = {
   origin: URL;

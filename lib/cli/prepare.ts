@@ -1,11 +1,11 @@
 import { existsSync } from 'node:fs';
 import { parseArgs } from 'node:util';
-import type { Db } from '@/db/client';
+import { type Db, getDb } from '@/db/client';
 import { appVersion, type Env, readEnv } from '@/lib/env';
 import { prepareFirstAdministrator } from '@/lib/services/account/first-administrator';
 import { describeAccounts, readAccounts } from './accounts';
 import { type DataFolder, openDataFolder } from './data-folder';
-import { openDesk } from './first-start';
+import { makeReady } from './first-start';
 
 export type Desk = { env: Env; data: DataFolder; db: Db; firstCode: string | null };
 
@@ -21,7 +21,8 @@ export async function prepareDesk(env: Env, args: string[]): Promise<Desk> {
   const data = openDataFolder(env.LEADLINE_DATA);
   try {
     shareSettings(env, data);
-    const db = await openDesk(data, values.empty ? null : (db) => seed(db, env));
+    await makeReady(data, values.empty ? null : (db) => seed(db, env));
+    const db = getDb();
     return { env, data, db, firstCode: prepareFirstAdministrator({ db, now: Date.now() }) };
   } catch (error) {
     data.release();

@@ -2,9 +2,10 @@ import { existsSync, mkdtempSync, readdirSync, rmSync, writeFileSync } from 'nod
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
+import { openDatabase } from '@/db/client';
 import { readAccounts } from '@/lib/cli/accounts';
 import { type DataFolder, openDataFolder } from '@/lib/cli/data-folder';
-import { openDesk, type Seed } from '@/lib/cli/first-start';
+import { makeReady, type Seed } from '@/lib/cli/first-start';
 
 let data: DataFolder;
 beforeEach(() => {
@@ -30,7 +31,8 @@ describe('the first start', () => {
       expect(existsSync(data.database)).toBe(false);
       return seed(...args);
     });
-    const db = await openDesk(data, watched);
+    await makeReady(data, watched);
+    const db = openDatabase(data.database);
     expect(db.$client.prepare('SELECT word FROM seeded').pluck().get()).toBe('yes');
     expect(db.$client.pragma('journal_mode', { simple: true })).toBe('wal');
     expect(readAccounts(data.accounts)).toEqual([person]);
@@ -44,10 +46,11 @@ describe('the first start', () => {
       db.$client.exec('CREATE TABLE half (word TEXT)');
       throw new Error('the pier is closed');
     };
-    await expect(openDesk(data, broken)).rejects.toThrow('the pier is closed');
+    await expect(makeReady(data, broken)).rejects.toThrow('the pier is closed');
     expect(existsSync(data.database)).toBe(false);
 
-    const db = await openDesk(data, seed);
+    await makeReady(data, seed);
+    const db = openDatabase(data.database);
     const tables = db.$client
       .prepare("SELECT name FROM sqlite_master WHERE name IN ('half', 'seeded')")
       .pluck();
@@ -56,17 +59,18 @@ describe('the first start', () => {
   });
 
   it('makes no accounts for a desk without a demo', async () => {
-    const db = await openDesk(data, null);
+    await makeReady(data, null);
+    expect(existsSync(data.database)).toBe(true);
     expect(existsSync(data.accounts)).toBe(false);
-    db.$client.close();
   });
 });
 
 describe('a later start', () => {
   it('keeps the data and seeds nothing', async () => {
-    (await openDesk(data, seed)).$client.close();
+    await makeReady(data, seed);
     const again = vi.fn(seed);
-    const db = await openDesk(data, again);
+    await makeReady(data, again);
+    const db = openDatabase(data.database);
     expect(again).not.toHaveBeenCalled();
     expect(db.$client.prepare('SELECT word FROM seeded').pluck().get()).toBe('yes');
     db.$client.close();
