@@ -4,7 +4,7 @@ import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
 import { pollsters, races } from '@/db/schema/races';
 import { releases, releaseVersions } from '@/db/schema/releases';
-import { lines, lineVersions, sheets } from '@/db/schema/sheets';
+import { clearingLines, clearings, evidenceSources, lines, lineVersions, sheets } from '@/db/schema/sheets';
 import type { LineState } from '@/lib/domain/sheet';
 import { isPublic, isOnEmbargoList, type Viewer, visible } from './visible';
 
@@ -220,4 +220,29 @@ export function mayCopyBeforeHour(conn: Conn, releaseId: number, viewer: Viewer)
       .where(and(eq(releases.id, releaseId), isOnEmbargoList(conn, viewer)))
       .get() !== undefined
   );
+}
+
+/** Sheets with words cleared now whose evidence rests on any version of a release, also as the comparison. */
+export function countClearedSheetsOn(conn: Conn, releaseId: number): number {
+  const row = conn
+    .select({ count: sql<number>`count(distinct ${lines.sheetId})` })
+    .from(lineVersions)
+    .innerJoin(lines, eq(lines.id, lineVersions.lineId))
+    .innerJoin(clearingLines, eq(clearingLines.lineVersionId, lineVersions.id))
+    .innerJoin(clearings, and(eq(clearings.id, clearingLines.clearingId), eq(clearings.act, 'cleared')))
+    .innerJoin(evidenceSources, eq(evidenceSources.evidenceId, clearings.evidenceId))
+    .innerJoin(releaseVersions, eq(releaseVersions.id, evidenceSources.releaseVersionId))
+    .where(and(eq(lineVersions.state, 'cleared'), eq(releaseVersions.releaseId, releaseId)))
+    .get();
+  return row?.count ?? 0;
+}
+
+/** Sheets of a release rest on its newest version from now on. */
+export function moveSheetsToVersion(
+  conn: Conn,
+  releaseId: number,
+  releaseVersionId: number,
+  questionId: number,
+): void {
+  conn.update(sheets).set({ releaseVersionId, questionId }).where(eq(sheets.releaseId, releaseId)).run();
 }

@@ -1,0 +1,65 @@
+import 'server-only';
+import { z } from 'zod';
+import type { Tx } from '@/db/client';
+import { findRelease, findWholeVersion, type ReleaseRow, updateRelease } from '@/db/queries/release';
+import { countClearedSheetsOn, moveSheetsToVersion } from '@/db/queries/sheet';
+import { releaseInput } from '@/lib/domain/release-input';
+import { type Actor, canLogReleases } from '@/lib/domain/roles';
+import { AppError } from '@/lib/errors';
+import { authorize, type Ctx, parse, transact } from '../context';
+import { appendRecord } from '../history/append-record';
+import { readDeskSettings } from '../setup/desk-settings';
+import { computeFindings } from './compute-findings';
+import { factsOf } from './facts';
+import { indexFindings } from './index-findings';
+import { refuseImpossibleFigures } from './refuse-figures';
+import { namedId, storeVersion } from './store-version';
+
+const schema = z.strictObject({
+  id: z.string().min(1).max(64),
+  version: z.number().int().min(1),
+  release: releaseInput,
+});
+
+/**
+ * Mends a release on which nothing cleared rests: a new version, the old one kept. Open sheets go over to it, and
+ * one that was filed returns to its filer when it is read. Race and embargo stay as they are.
+ */
+export function reviseRelease(actor: Actor, input: unknown, ctx: Ctx): { version: number } {
+  authorize(canLogReleases(actor), 'Only reporters and editors change releases.');
+  const { id, version, release: given } = parse(schema, input);
+  return transact(ctx, (tx) => {
+    const release = findRelease(tx, id, actor, ctx.now);
+    if (!release?.currentVersionId) throw new AppError('not-found', 'There is no such release.');
+    const before = factsOf(tx, release.currentVersionId);
+    if (given.race.kind !== 'existing' || given.race.id !== before.race.id)
+      throw new AppError('invalid', 'Some fields need another look.', {
+        fields: { 'race.id': 'A release stays with its race. Log it anew for another one.' },
+      });
+    refuseUnderClearedWords(tx, release);
+    const pollsterId = namedId(tx, 'pollsters', given.pollster, ctx.now);
+    if (!updateRelease(tx, release.id, version, { pollsterId }))
+      throw new AppError('conflict', 'Somebody changed this release meanwhile. Reload it and look again.');
+    const stored = storeVersion(tx, given, {
+      releaseId: release.id,
+      number: before.version + 1,
+      personId: actor.personId,
+      now: ctx.now,
+    });
+    const after = factsOf(tx, stored.id);
+    refuseImpossibleFigures(after, readDeskSettings(tx).policy.body);
+    indexFindings(tx, stored.id, computeFindings(tx, stored.id));
+    moveSheetsToVersion(tx, release.id, stored.id, findWholeVersion(tx, stored.id)!.question.id);
+    const entry = { action: 'revised release', entity: 'release', entityId: id, releaseId: release.id };
+    appendRecord(tx, { personId: actor.personId, ...entry, before, after }, ctx.now);
+    return { version: version + 1 };
+  });
+}
+
+function refuseUnderClearedWords(tx: Tx, release: ReleaseRow): void {
+  if (countClearedSheetsOn(tx, release.id) > 0)
+    throw new AppError(
+      'conflict',
+      'Cleared words rest on this release. Pull them before its figures change.',
+    );
+}
