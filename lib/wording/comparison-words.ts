@@ -56,11 +56,13 @@ export function comparisonNote(told: ComparisonTold, style: HouseStyle, language
       return [say(comparison['latest-comparable'], slots, locale), ...unknown];
     }
     case 'override': {
-      const reason = told.override ? plain(told.override.reason) : '';
-      return [
-        say(comparison.override, { items: list(itemsOf(told.differences)), reason }, locale),
-        ...unknown,
-      ];
+      const items = itemsOf(told.differences);
+      const slots = {
+        differing: items.length > 0 ? 'yes' : 'no',
+        items: list(items),
+        reason: plain(told.override?.reason ?? ''),
+      };
+      return [say(comparison.override, slots, locale), ...unknown];
     }
     default:
       return [];
@@ -80,9 +82,12 @@ function firstSentence(told: ComparisonTold): string {
     case 'dates-unknown':
       return 'The field dates are not entered yet, so there is nothing to compare with.';
     case 'override': {
-      const items = itemList(itemsOf(told.differences), INTERFACE);
       const by = told.override ? plain(told.override.by) : 'An editor';
-      return `${by} chose this release although the two differ in ${items}: ${plain(told.override?.reason ?? '')}`;
+      const reason = plain(told.override?.reason ?? '');
+      const items = itemList(itemsOf(told.differences), INTERFACE);
+      return items === ''
+        ? `${by} chose this release: ${reason}`
+        : `${by} chose this release although the two differ in ${items}: ${reason}`;
     }
   }
 }

@@ -61,6 +61,18 @@ describe('comparisonReason', () => {
   });
 });
 
+describe('an override of releases that differ in nothing known', () => {
+  it('is told by its reason alone', () => {
+    const override = { reason: 'It is the last poll before the debate.', by: 'M. Reed' };
+    expect(comparisonReason(told({ reason: 'override', override }))).toEqual([
+      'M. Reed chose this release: It is the last poll before the debate.',
+    ]);
+    expect(noteOf({ reason: 'override', override })).toEqual([
+      'The desk chose the poll to compare with: It is the last poll before the debate.',
+    ]);
+  });
+});
+
 describe('comparisonNote', () => {
   it('prints why that poll is compared with', () => {
     expect(noteOf({})).toEqual(['It is the latest poll of this series with earlier field dates.']);

@@ -12,7 +12,7 @@ import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
 import { canonicalJson, hashOf } from '@/lib/security/canonical';
 import { sha256 } from '@/lib/security/ids';
-import { comparisonNote } from '@/lib/wording/comparison-note';
+import { comparisonNote } from '@/lib/wording/comparison-words';
 import { draftSheet } from '@/lib/wording/draft-sheet';
 import { type Computed, computeFindings } from '../release/compute-findings';
 import type { EvidenceBody } from './evidence-body';
@@ -51,7 +51,7 @@ export function assemble(conn: Conn, sheet: Subject): Assembled {
     answer,
     release: facts,
     previous,
-    comparison: { note: comparisonNote(comparison) },
+    comparison: { note: comparisonNote(comparison, settings.houseStyle.body, language) },
     houseStyle: settings.houseStyle.body,
     policy: settings.policy.body,
     language,
@@ -70,7 +70,8 @@ export function assemble(conn: Conn, sheet: Subject): Assembled {
       release: previous,
       reason: comparison.reason,
       unknowns: comparison.unknowns,
-      differences: comparison.differences.map(({ item }) => item),
+      differences: comparison.differences,
+      passedOver: comparison.passedOver,
       override:
         comparison.override && overridePerson
           ? { reason: comparison.override.reason, person: overridePerson.publicId }

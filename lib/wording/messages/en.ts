@@ -19,7 +19,8 @@ export const EN: LanguagePack = {
     'latest-comparable':
       '{count, plural, one {It is the latest earlier poll that can be compared; a later one differs in {items}.} other {It is the latest earlier poll that can be compared; # later ones differ in {items}.}}',
     unknown: 'Not known, and not taken as different: {items}.',
-    override: 'The two polls differ in {items}; the desk compares them all the same: {reason}',
+    override:
+      '{differing, select, yes {The two polls differ in {items}; the desk compares them all the same: {reason}} other {The desk chose the poll to compare with: {reason}}}',
   },
   altText: {
     intro:
