@@ -6,7 +6,9 @@ import type { EmbedRow } from '@/lib/charts/embed-input';
 import type { Scene } from '@/lib/charts/scene';
 import type { SoundingSpec } from '@/lib/charts/sounding-spec';
 import type { CheckAnswer, CheckDocument } from '@/lib/findings/check-types';
+import type { ComparableItem, Difference } from '@/lib/findings/comparability';
 import type { MissingDisclosure } from '@/lib/findings/disclosure';
+import type { ComparisonTold } from '@/lib/wording/comparison-words';
 
 /** What is frozen at the moment of clearing: everything that was on the screen, and what it was made from. */
 export type EvidenceBody = {
@@ -18,9 +20,10 @@ export type EvidenceBody = {
   release: ReleaseFacts;
   comparison: {
     release: ReleaseFacts | null;
-    reason: string;
-    unknowns: string[];
-    differences: string[];
+    reason: ComparisonTold['reason'];
+    unknowns: readonly ComparableItem[];
+    differences: readonly Difference[];
+    passedOver: ComparisonTold['passedOver'];
     override: { reason: string; person: string } | null;
   };
   policy: { version: number };

@@ -6,10 +6,12 @@ import { findPersonByPublicId } from '@/db/queries/person';
 import { findWholeVersion, listShares } from '@/db/queries/release';
 import { listClearedLines, listEarlierTexts } from '@/db/queries/sheet';
 import { type Actor, canReadUnpublished, type Role } from '@/lib/domain/roles';
+import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { LineKind, LineState } from '@/lib/domain/sheet';
 import { AppError } from '@/lib/errors';
 import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
+import type { ComparisonTold } from '@/lib/wording/comparison-words';
 import { claimsAbove } from '@/lib/wording/never-says-more';
 import { authorize, type Ctx } from '../context';
 import { type EmbargoView, embargoView } from '../release/get-release';
@@ -52,8 +54,9 @@ export type SheetView = SheetPermissions & {
   /** Words of this sheet are cleared and served now, also while newer ones are being written. */
   isServed: boolean;
   finding: TestableFinding;
-  evidence: Pick<EvidenceBody, 'release' | 'comparison' | 'document' | 'answer' | 'missing'>;
-  overrideBy: string | null;
+  evidence: Pick<EvidenceBody, 'release' | 'document' | 'answer' | 'missing'>;
+  previous: ReleaseFacts | null;
+  comparison: ComparisonTold;
   enteredBy: Record<string, string>;
   embargo: EmbargoView | null;
   isOnList: boolean;
@@ -74,7 +77,6 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
   const filer = filing && { personId: filing.personId, roles: JSON.parse(filing.roles) as Role[] };
   const isServed = listClearedLines(ctx.db, sheet.id).length > 0;
   const { release: facts, comparison, document, answer, missing } = shown.body;
-  const { override } = comparison;
   return {
     id: sheet.publicId,
     version: sheet.version,
@@ -97,8 +99,9 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
       isReturned: acts.at(-1)?.act.act === 'returned',
     }),
     finding,
-    evidence: { release: facts, comparison, document, answer, missing },
-    overrideBy: override && (findPersonByPublicId(ctx.db, override.person)?.name ?? null),
+    evidence: { release: facts, document, answer, missing },
+    previous: comparison.release,
+    comparison: toldOf(ctx, comparison),
     enteredBy: enteredBy(ctx, sheet.releaseVersionId),
     embargo: embargoView(release, Boolean(opened.isPublic)),
     isOnList: isListed(ctx.db, release.id, actor),
@@ -142,6 +145,18 @@ function linesOf(ctx: Ctx, opened: Opened, body: EvidenceBody, finding: Testable
     changedBy,
     above: claimsAbove(finding.verdict, version.text),
   }));
+}
+
+function toldOf(ctx: Ctx, { override, ...told }: EvidenceBody['comparison']): ComparisonTold {
+  const { reason, unknowns, differences, passedOver } = told;
+  const by = override && (findPersonByPublicId(ctx.db, override.person)?.name ?? 'An editor');
+  return {
+    reason,
+    unknowns,
+    differences,
+    passedOver,
+    override: override && by ? { reason: override.reason, by } : null,
+  };
 }
 
 function enteredBy(ctx: Ctx, releaseVersionId: number): Record<string, string> {
