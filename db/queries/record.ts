@@ -20,12 +20,18 @@ export function listAllRecords(conn: Conn): RecordRow[] {
   return conn.select().from(records).orderBy(records.seq).all();
 }
 
-export type RecordPage = { before: number | null; limit: number; entityId: string | null };
+export type RecordPage = {
+  before: number | null;
+  limit: number;
+  entity: string | null;
+  entityId: string | null;
+};
 
 /** Newest first, with the actor's name and whether the embargo of its release lets this viewer see what changed. */
 export function listRecords(conn: Conn, page: RecordPage, viewer: Viewer, now: number) {
   const conditions: SQL[] = [];
   if (page.before !== null) conditions.push(lt(records.seq, page.before));
+  if (page.entity !== null) conditions.push(eq(records.entity, page.entity));
   if (page.entityId !== null) conditions.push(eq(records.entityId, page.entityId));
   return conn
     .select({

@@ -12,20 +12,24 @@ import { HeadNote } from './_components/head-note';
 
 export const metadata: Metadata = { title: 'History' };
 
-type Search = { entity?: string | string[]; before?: string | string[] };
+type Search = { [name in 'kind' | 'entity' | 'before']?: string | string[] };
+
+/** One thing whose history is read alone. Its kind tells apart what is only numbered, such as policies. */
+type Only = { id: string; kind: string | null };
 
 export default async function HistoryPage({ searchParams }: { searchParams: Promise<Search> }) {
-  const { entity, before } = await searchParams;
+  const { kind, entity, before } = await searchParams;
   const { entries, older, head } = await deskPage((actor, ctx) =>
-    listHistory(actor, { entityId: entity, before }, ctx),
+    listHistory(actor, { entity: kind, entityId: entity, before }, ctx),
   );
   const zone = readEnv().LEADLINE_ZONE;
-  const only = typeof entity === 'string' ? entity : null;
+  const only =
+    typeof entity === 'string' ? { id: entity, kind: typeof kind === 'string' ? kind : null } : null;
   return (
     <>
       <PageTitle
         title={only ? `History of one ${entries[0]?.entity ?? 'thing'}` : 'History'}
-        crumbs={only ? [{ label: 'History', href: '/history' }, { label: entries[0]?.about ?? only }] : []}
+        crumbs={only ? [{ label: 'History', href: '/history' }, { label: entries[0]?.about ?? only.id }] : []}
         sub={`Who did what, newest first. Nothing here is ever changed or deleted. Times are those of ${zone}.`}
       />
       <div className="mt-6">
@@ -47,14 +51,15 @@ export default async function HistoryPage({ searchParams }: { searchParams: Prom
   );
 }
 
-function addressOf(entity: string | null, before: number | null): string {
+function addressOf(only: Only | null, before: number | null): string {
   const query = new URLSearchParams();
-  if (entity !== null) query.set('entity', entity);
+  if (only?.kind) query.set('kind', only.kind);
+  if (only) query.set('entity', only.id);
   if (before !== null) query.set('before', String(before));
   return query.size > 0 ? `/history?${query}` : '/history';
 }
 
-function columnsFor(zone: string, only: string | null): Column<HistoryEntry>[] {
+function columnsFor(zone: string, only: Only | null): Column<HistoryEntry>[] {
   return [
     {
       key: 'seq',
@@ -77,10 +82,10 @@ function columnsFor(zone: string, only: string | null): Column<HistoryEntry>[] {
       key: 'entity',
       head: 'About',
       cell: ({ entity, entityId, about }) =>
-        only === entityId ? (
+        only?.id === entityId ? (
           (about ?? entity)
         ) : (
-          <Link href={addressOf(entityId, null)}>
+          <Link href={addressOf({ id: entityId, kind: entity }, null)}>
             {about ?? entity}
             <span className="sr-only">, its own history {about === null ? entityId : ''}</span>
           </Link>

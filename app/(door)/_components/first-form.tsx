@@ -30,7 +30,7 @@ export function FirstForm({ create }: { create: (input: Input) => Promise<Action
   };
 
   return (
-    <form method="post" noValidate onSubmit={submit} className="door-form">
+    <form method="post" noValidate onSubmit={submit} className="mt-5 max-w-[26rem]">
       <ErrorSummary faults={faultsOf(failure, FIELDS)} attempt={attempt} title="No account was made" />
       <TextInput
         id="code"

@@ -24,7 +24,7 @@ export function InvitationForm({ redeem }: { redeem: (input: Input) => Promise<A
   };
 
   return (
-    <form method="post" noValidate onSubmit={submit} className="door-form">
+    <form method="post" noValidate onSubmit={submit} className="mt-5 max-w-[26rem]">
       <ErrorSummary faults={faultsOf(failure, FIELDS)} attempt={attempt} title="No password was set" />
       <TextInput
         id="code"

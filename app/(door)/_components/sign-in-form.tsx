@@ -39,7 +39,7 @@ export function SignInForm() {
 
   return (
     // A form that is sent before its script runs must not put the password into the address.
-    <form method="post" noValidate onSubmit={submit} className="door-form">
+    <form method="post" noValidate onSubmit={submit} className="mt-5 max-w-[26rem]">
       <ErrorSummary faults={faults} attempt={attempt} title="You are not signed in" />
       <TextInput
         id="email"

@@ -14,7 +14,7 @@ export default function InvitationPage() {
         sub="An administrator gave you a code. It works once, for a week, and lets you choose a password."
       />
       <InvitationForm redeem={redeemInvitation} />
-      <p className="door-more">
+      <p className="mt-6 max-w-[26rem] border-t border-rule pt-3 text-soft">
         You have a password? <Link href="/sign-in">Sign in</Link>
       </p>
     </>

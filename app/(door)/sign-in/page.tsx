@@ -24,7 +24,7 @@ export default async function SignInPage({ searchParams }: Props) {
       <PageTitle title="Sign in" sub="To the poll desk of your newsroom." />
       <Notice name={typeof notice === 'string' ? notice : undefined} />
       <SignInForm />
-      <p className="door-more">
+      <p className="mt-6 max-w-[26rem] border-t border-rule pt-3 text-soft">
         New here, or locked out? <Link href="/invitation">I have a sign-in code</Link>
       </p>
     </>

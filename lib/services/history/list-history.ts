@@ -37,14 +37,16 @@ export type HistoryPage = {
 
 const schema = z.strictObject({
   before: z.coerce.number().int().min(1).optional(),
+  entity: z.string().min(1).max(40).optional(),
   entityId: z.string().min(1).max(64).optional(),
 });
 
-/** One page of the history, newest first. */
+/** One page of the history, newest first; of one kind of thing, or of one thing, where the asker names it. */
 export function listHistory(actor: Actor, input: unknown, ctx: Ctx): HistoryPage {
   authorize(canReadHistory(actor), 'The history is open to reporters, editors and administrators.');
-  const { before = null, entityId = null } = parse(schema, input);
-  const rows = listRecords(ctx.db, { before, entityId, limit: PAGE_SIZE + 1 }, actor, ctx.now);
+  const { before = null, entity = null, entityId = null } = parse(schema, input);
+  const asked = { before, entity, entityId, limit: PAGE_SIZE + 1 };
+  const rows = listRecords(ctx.db, asked, actor, ctx.now);
   const page = rows.slice(0, PAGE_SIZE);
   const last = findLastRecord(ctx.db);
   return {

@@ -13,8 +13,8 @@ export function HeadNote({ head }: { head: { seq: number; hash: string } | null 
       </p>
       <p className="text-13 text-soft">
         Each entry carries the hash of the one before. Keep this line somewhere outside this machine:{' '}
-        <code className="break-all">npm run record:verify -- --head SEQ:HASH</code>, with it in the place of
-        SEQ:HASH, then proves that no entry up to it was changed, added or cut off since.
+        <code>npm run record:verify -- --head SEQ:HASH</code>, with it in the place of SEQ:HASH, then proves
+        that no entry up to it was changed, added or cut off since.
       </p>
     </section>
   );
