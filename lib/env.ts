@@ -18,10 +18,10 @@ const schema = z
     ),
     LEADLINE_TRUST_PROXY: z.preprocess(blankIsAbsent, z.string().default('')),
     LEADLINE_ZONE: z.preprocess(
-    blankIsAbsent,
-    z.string().refine(isZone, 'must be an IANA time zone such as Etc/UTC').default('Etc/UTC'),
-  ),
-  DEMO_PASSWORD: z.preprocess(
+      blankIsAbsent,
+      z.string().refine(isZone, 'must be an IANA time zone such as Etc/UTC').default('Etc/UTC'),
+    ),
+    DEMO_PASSWORD: z.preprocess(
       blankIsAbsent,
       z.string().min(15, 'must have at least 15 characters').optional(),
     ),
