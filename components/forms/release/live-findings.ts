@@ -1,0 +1,32 @@
+import { check } from '@/lib/findings/check';
+import { CheckRefused } from '@/lib/findings/check-refused';
+import type { CheckAnswer, CheckDocument } from '@/lib/findings/check-types';
+import { fieldOfCheckPath } from '@/lib/findings/form-field';
+import { parseCheckDocument } from '@/lib/findings/parse-check';
+import type { ReleaseForm } from './form-values';
+import { liveDocument, type LiveAround } from './live-document';
+
+export type LiveFindings =
+  | { kind: 'nothing' }
+  /** The engine will not answer: at which field of the form, and why. */
+  | { kind: 'refused'; field: string; message: string; leftOut: string[] }
+  | { kind: 'answer'; document: CheckDocument; answer: CheckAnswer; leftOut: string[] };
+
+/** What the numbers typed so far support, by the same code that the service uses. */
+export function liveFindings(values: ReleaseForm, around: LiveAround): LiveFindings {
+  const live = liveDocument(values, around);
+  if (!live) return { kind: 'nothing' };
+  const { leftOut, rows } = live;
+  try {
+    const document = parseCheckDocument(live.document);
+    return { kind: 'answer', document, answer: check(document), leftOut };
+  } catch (error) {
+    if (!(error instanceof CheckRefused)) throw error;
+    return { kind: 'refused', field: fieldOf(error.path, rows), message: error.message, leftOut };
+  }
+}
+
+/** The document has fewer rows than the form where some say nothing yet. */
+function fieldOf(path: string, rows: readonly number[]): string {
+  return fieldOfCheckPath(path).replace(/^shares\.(\d+)/, (_, row) => `shares.${rows[Number(row)] ?? row}`);
+}

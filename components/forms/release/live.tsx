@@ -1,0 +1,65 @@
+'use client';
+
+import { createContext, type ReactNode, useContext, useDeferredValue, useMemo } from 'react';
+import { type Control, get, useFormState, useWatch } from 'react-hook-form';
+import { comparisonQuery } from './comparison-query';
+import type { FormChoices } from './form-choices';
+import type { ReleaseForm } from './form-values';
+import { type LiveFindings, liveFindings } from './live-findings';
+import { type ComparisonState, useComparison } from './use-comparison';
+
+export type Live = { findings: LiveFindings; comparison: ComparisonState; isNewRace: boolean };
+
+const LiveContext = createContext<Live | null>(null);
+const RefusalContext = createContext<{ field: string; message: string } | null>(null);
+
+/**
+ * Computes what the numbers support as they are typed, behind the typing: the fields stay as they are, only what
+ * reads the findings is drawn again.
+ */
+export function LiveProvider({
+  control,
+  choices,
+  personId,
+  children,
+}: {
+  control: Control<ReleaseForm>;
+  choices: FormChoices;
+  personId: string;
+  children: ReactNode;
+}) {
+  const values = useDeferredValue(useWatch({ control }) as ReleaseForm);
+  const comparison = useComparison(comparisonQuery(values), personId);
+  const previous = comparison.kind === 'answered' ? comparison.compared.previous : null;
+  const { policy, races } = choices;
+  const findings = useMemo(() => {
+    const chosen = values.race.kind === 'existing' ? values.race.id : null;
+    const thresholds = races.find((race) => race.id === chosen)?.thresholds ?? [];
+    return liveFindings(values, { policy, previous, thresholds });
+  }, [values, policy, previous, races]);
+  const isNewRace = values.race.kind === 'new';
+  const live = useMemo(() => ({ findings, comparison, isNewRace }), [findings, comparison, isNewRace]);
+  const [field, message] = findings.kind === 'refused' ? [findings.field, findings.message] : [null, ''];
+  const refusal = useMemo(() => (field === null ? null : { field, message }), [field, message]);
+  return (
+    <RefusalContext value={refusal}>
+      <LiveContext value={live}>{children}</LiveContext>
+    </RefusalContext>
+  );
+}
+
+export function useLive(): Live {
+  const live = useContext(LiveContext);
+  if (!live) throw new Error('useLive requires a LiveProvider');
+  return live;
+}
+
+/** What is wrong with one field: as the form was sent, else as the engine refuses it while it is typed. */
+export function useFault(control: Control<ReleaseForm>, path: string): string | undefined {
+  const { errors } = useFormState({ control });
+  const refusal = useContext(RefusalContext);
+  const error: unknown = get(errors, path);
+  const sent = typeof error === 'object' && error !== null && 'message' in error ? error.message : undefined;
+  if (typeof sent === 'string' && sent !== '') return sent;
+  return refusal?.field === path ? refusal.message : undefined;
+}
