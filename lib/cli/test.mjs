@@ -1,5 +1,6 @@
 // @ts-check
 import { rmSync } from 'node:fs';
+import { createServer } from 'node:net';
 import { join } from 'node:path';
 import { buildIfChanged } from './build.mjs';
 import { installIfChanged } from './install.mjs';
@@ -61,9 +62,24 @@ async function runBrowserTests() {
   if (!chromium) return one(false);
   rmSync(browserReport, { force: true });
   const status = await run(localBinary('playwright'), ['test'], {
-    env: { ...env, CHROMIUM: chromium, PLAYWRIGHT_JSON_OUTPUT_FILE: browserReport },
+    env: {
+      ...env,
+      CHROMIUM: chromium,
+      E2E_PORT: String(await freePort()),
+      PLAYWRIGHT_JSON_OUTPUT_FILE: browserReport,
+    },
   });
   return countBrowser(browserReport, status);
+}
+
+/** A fixed port would fail the tests of whoever has something running on it. @returns {Promise<number>} */
+function freePort() {
+  return new Promise((resolve) => {
+    const probe = createServer().listen(0, () => {
+      const address = probe.address();
+      probe.close(() => resolve(typeof address === 'object' && address ? address.port : 3100));
+    });
+  });
 }
 
 /** @param {Step} step @returns {Promise<{ name: string, seconds: number, counts: Counts }>} */
