@@ -13,7 +13,7 @@ export function testSteps(
   policy: Policy,
 ): WorkingStep[] {
   const { df } = measured;
-  const { estimatePp, sePp, z } = fields;
+  const { estimatePp, sePp } = fields;
   const q = criticalValue(1 - policy.level, df);
   return [
     { label: 'Estimate', ...writing.estimate, result: figure(estimatePp), unit: 'points' },
@@ -27,13 +27,7 @@ export function testSteps(
       unit: 'points',
     },
     { ...intervalWriting(fields), result: figures(fields.intervalPp), unit: 'points' },
-    {
-      label: 'Test statistic',
-      formula: 'z = estimate / SE',
-      substituted: `${inBrackets(estimatePp)} / ${figure(sePp)}`,
-      result: z === null ? 'none, since there is no variance' : figure(z),
-      unit: '',
-    },
+    statisticStep(fields),
     pStep(fields, df),
     {
       label: 'Level of this test in its family',
@@ -66,6 +60,17 @@ function intervalWriting({ intervalPp, estimatePp, marginPp }: TestFields) {
     formula: 'estimate ± margin',
     substituted: `${figure(estimatePp)} ± ${figure(marginPp)}`,
   };
+}
+
+function statisticStep({ estimatePp, sePp, z }: TestFields): WorkingStep {
+  const label = 'Test statistic';
+  if (sePp === 0) {
+    const formula = 'without variance: 0 where the estimate is 0, else none';
+    const substituted = `estimate ${figure(estimatePp)}, no variance`;
+    return { label, formula, substituted, result: z === null ? 'none' : figure(z), unit: '' };
+  }
+  const substituted = `${inBrackets(estimatePp)} / ${figure(sePp)}`;
+  return { label, formula: 'z = estimate / SE', substituted, result: figure(z ?? 0), unit: '' };
 }
 
 function pStep({ z, p }: TestFields, df: number | null): WorkingStep {
