@@ -43,8 +43,8 @@ export function accountWith(role: string, { only = true } = {}): Account {
 
 export async function signIn(page: Page, { email, password }: Account): Promise<void> {
   await page.goto('/sign-in');
-  await page.getByLabel('Email').fill(email);
-  await page.getByLabel('Password').fill(password);
+  await page.getByLabel('Email', { exact: true }).fill(email);
+  await page.getByLabel('Password', { exact: true }).fill(password);
   await page.getByRole('button', { name: 'Sign in' }).click();
   await page.waitForURL((url) => url.pathname !== '/sign-in');
 }
