@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { type Disclosed, given, NOT_DISCLOSED, NOT_ENTERED } from './disclosed';
 import { readPrintedNumber } from './printed-number';
 import type { StatedMargin } from './release-facts';
