@@ -26,19 +26,18 @@ export async function POST(request: Request): Promise<Response> {
       { 'Retry-After': seconds },
     );
   } catch (error) {
+    if (!(error instanceof AppError)) throw error;
     return problem(error, notJson(error));
   }
 }
 
 /** A body that is no JSON is a fault of the document as a whole: the empty path. */
-function notJson(error: unknown): { error?: CheckRefusal } {
-  const isOfBody = error instanceof AppError && error.code === 'invalid';
-  return isOfBody ? { error: { path: '', message: error.message } } : {};
+function notJson({ code, message }: AppError): { error?: CheckRefusal } {
+  return code === 'invalid' ? { error: { path: '', message } } : {};
 }
 
-function problem(error: unknown, more: object = {}, headers: Record<string, string> = {}): Response {
+function problem(error: AppError, more: object = {}, headers: Record<string, string> = {}): Response {
   const { status, body } = toProblem(error);
-  if (status === 500) console.error(error);
   return Response.json(
     { ...body, ...more },
     { status, headers: { ...NO_STORE, ...headers, 'Content-Type': 'application/problem+json' } },
