@@ -11,6 +11,8 @@ export default defineConfig({
     environment: 'node',
     include: ['tests/**/*.test.{ts,tsx}'],
     exclude: ['tests/e2e/**', 'node_modules/**'],
+    testTimeout: 20_000,
+    hookTimeout: 30_000,
     setupFiles: ['tests/support/setup.ts'],
   },
 });
