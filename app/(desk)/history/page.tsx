@@ -34,14 +34,17 @@ export default async function HistoryPage({ searchParams }: { searchParams: Prom
       />
       <div className="mt-6">
         <HeadNote head={head} />
-        <DataTable
-          caption="Entries of the history"
-          hideCaption
-          columns={columnsFor(zone, only)}
-          rows={entries}
-          rowKey={({ seq }) => String(seq)}
-          empty="No entry here."
-        />
+        {/* An opened entry grows tall: who and when stay beside its first line. */}
+        <div className="[&_tbody_td]:align-top [&_tbody_th]:align-top">
+          <DataTable
+            caption="Entries of the history"
+            hideCaption
+            columns={columnsFor(zone, only)}
+            rows={entries}
+            rowKey={({ seq }) => String(seq)}
+            empty="No entry here."
+          />
+        </div>
         <nav aria-label="Pages of the history" className="flex flex-wrap gap-3">
           {before ? <LinkButton href={addressOf(only, null)}>Newest</LinkButton> : null}
           {older === null ? null : <LinkButton href={addressOf(only, older)}>Older</LinkButton>}

@@ -11,7 +11,10 @@ export function EntryChanges({ entry }: { entry: Entry }) {
     <>
       {entry.reason ? <p>“{entry.reason}”</p> : null}
       {changes.length > 0 ? (
-        <Details summary={changes.length === 1 ? '1 value' : `${changes.length} values`}>
+        <Details
+          className="-mt-[5px]"
+          summary={changes.length === 1 ? '1 value' : `${changes.length} values`}
+        >
           <ChangeTable changes={changes} />
         </Details>
       ) : null}
