@@ -1,0 +1,17 @@
+import type { ActionResult } from '@/lib/errors';
+
+type Action<Input, Value> = (input: Input) => Promise<ActionResult<Value>>;
+type Line = { kind: string; text: string; knockedOut: boolean };
+type Filing = { id: string; version: number; basisHash: string; lines: Line[] };
+type Reading = { id: string; hash: string };
+
+/** What the screen of a sheet can do; the page hands the actions in. */
+export type SheetActions = {
+  file: Action<Filing, { hash: string; version: number }>;
+  change: Action<Filing, { hash: string; version: number }>;
+  clear: Action<Reading, { outcome: 'cleared' | 'returned' }>;
+  sendBack: Action<Reading & { comment: string }, void>;
+  pull: Action<{ id: string; reason: string }, void>;
+  revise: Action<{ id: string; version: number }, { version: number }>;
+  embed: Action<{ sheetId: string }, { id: string }>;
+};

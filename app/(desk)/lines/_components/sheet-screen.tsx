@@ -1,0 +1,50 @@
+'use client';
+
+import { useState } from 'react';
+import { ActsList } from '@/components/lines/acts-list';
+import type { SheetView } from '@/lib/services/sheet/get-sheet';
+import { Cleared } from './cleared';
+import { PullDialog } from './pull-dialog';
+import { Reading } from './reading';
+import type { SheetActions } from './sheet-actions';
+import { Waiting } from './waiting';
+import { Writing } from './writing';
+
+type Props = {
+  view: SheetView;
+  actions: SheetActions;
+  /** Public id of whoever looks. */
+  person: string;
+  now: number;
+  zone: string;
+};
+
+/** One sheet in the face that its state and its reader call for. */
+export function SheetScreen({ view, actions, person, now, zone }: Props) {
+  const [done, setDone] = useState('');
+  const seen = `${view.state} ${view.version} ${view.hash} ${view.basisHash}`;
+  const isBeingRewritten = view.isServed && view.state !== 'cleared';
+  return (
+    <>
+      <p role="status" className="mt-2 font-semibold">
+        {done}
+      </p>
+      {isBeingRewritten ? (
+        <div className="mt-2 flex flex-wrap items-center gap-3">
+          <p>An earlier version of these words is cleared and served until this one is cleared.</p>
+          {view.may.pull ? <PullDialog view={view} pull={actions.pull} onDone={setDone} /> : null}
+        </div>
+      ) : null}
+      {view.state === 'filed' ? (
+        <Reading key={seen} view={view} actions={actions} onDone={setDone} />
+      ) : view.state === 'cleared' || view.state === 'pulled' ? (
+        <Cleared key={seen} view={view} actions={actions} now={now} zone={zone} onDone={setDone} />
+      ) : view.may.write ? (
+        <Writing key={seen} view={view} actions={actions} person={person} now={now} zone={zone} />
+      ) : (
+        <Waiting view={view} now={now} zone={zone} />
+      )}
+      <ActsList acts={view.acts} now={now} zone={zone} />
+    </>
+  );
+}

@@ -1,0 +1,26 @@
+import { PrintableLine } from '@/components/lines/printable-line';
+import { SectionHeading } from '@/components/ui/section-heading';
+import type { SheetView } from '@/lib/services/sheet/get-sheet';
+import { LastComment } from './last-comment';
+import { SheetColumns } from './sheet-columns';
+
+/** A sheet that somebody else is writing. */
+export function Waiting({ view, now, zone }: { view: SheetView; now: number; zone: string }) {
+  return (
+    <>
+      <LastComment view={view} now={now} zone={zone} />
+      <p className="mt-4">{view.author} is writing this. Nobody has agreed to these words yet.</p>
+      <SheetColumns view={view}>
+        <SectionHeading>Words so far, marked against the draft</SectionHeading>
+        {view.lines.map(({ kind, text, draft, knockedOut, above }) => (
+          <PrintableLine
+            key={kind}
+            {...{ kind, text, knockedOut, above }}
+            before={draft}
+            verdict={view.finding.verdict}
+          />
+        ))}
+      </SheetColumns>
+    </>
+  );
+}

@@ -1,0 +1,87 @@
+'use client';
+
+import { useState, useSyncExternalStore } from 'react';
+import { LineFields } from '@/components/forms/sheet/line-fields';
+import { findUnsaved, forgetUnsaved } from '@/components/forms/sheet/unsaved-words';
+import { useAutosave } from '@/components/forms/sheet/use-autosave';
+import { sameLines, useLines } from '@/components/forms/sheet/use-lines';
+import { Button } from '@/components/ui/button';
+import type { SheetView } from '@/lib/services/sheet/get-sheet';
+import { ActBar } from './act-bar';
+import { LastComment } from './last-comment';
+import { RefusedNote } from './refused-note';
+import { SaveStatus } from './save-status';
+import type { SheetActions } from './sheet-actions';
+import { SheetColumns } from './sheet-columns';
+import { UnsavedNote } from './unsaved-note';
+import { useAct } from './use-act';
+import { draftsOf, writtenLines } from './written-lines';
+
+type Props = { view: SheetView; actions: SheetActions; person: string; now: number; zone: string };
+
+const never = () => () => undefined;
+
+/** The sheet while its author or an editor writes it. */
+export function Writing({ view, actions, person, now, zone }: Props) {
+  const keptAs = `leadline-sheet-${person}-${view.id}`;
+  const { lines, change, replace } = useLines(writtenLines(view.lines));
+  const [isOffered, setOffered] = useState(true);
+  const isHydrated = useSyncExternalStore(
+    never,
+    () => true,
+    () => false,
+  );
+  const [unsaved] = useState(() => (typeof localStorage === 'undefined' ? null : findUnsaved(keptAs)));
+  const { saving, save, version } = useAutosave({ id: view.id, version: view.version, keptAs }, lines);
+  const { act, isPending, failure, attempt } = useAct(actions.file);
+  const [isFiling, setFiling] = useState(false);
+
+  const file = async () => {
+    setFiling(true);
+    if (await save()) await act({ id: view.id, version: version.current, basisHash: view.basisHash, lines });
+    setFiling(false);
+  };
+  const isOffer =
+    isHydrated && isOffered && unsaved !== null && !sameLines(unsaved, writtenLines(view.lines));
+
+  return (
+    <>
+      <LastComment view={view} now={now} zone={zone} />
+      {isOffer ? (
+        <UnsavedNote
+          onTake={() => {
+            replace(unsaved);
+            setOffered(false);
+          }}
+          onDrop={() => {
+            forgetUnsaved(keptAs);
+            setOffered(false);
+          }}
+        />
+      ) : null}
+      <SheetColumns view={view}>
+        <LineFields
+          lines={lines}
+          drafts={draftsOf(view.lines)}
+          verdict={view.finding.verdict}
+          errors={failure?.fields ?? {}}
+          attempt={attempt}
+          onChange={change}
+        />
+      </SheetColumns>
+      <RefusedNote failure={lines.some(({ kind }) => failure?.fields[kind]) ? null : failure} />
+      <ActBar
+        actions={
+          <Button tone="primary" pending={isPending || isFiling} pendingLabel="Filing…" onClick={file}>
+            {view.agreesAnew ? 'Agree and file again' : 'File'}
+          </Button>
+        }
+      >
+        {view.agreesAnew
+          ? 'Filing says that you agree to these words on the evidence as it is now; somebody else reads them again.'
+          : 'Filing says that you agree to these words. Somebody else reads them before they are cleared.'}
+        <SaveStatus saving={saving} zone={zone} onRetry={save} />
+      </ActBar>
+    </>
+  );
+}

@@ -1,0 +1,81 @@
+import { LINE_KIND_NAMES, REQUIRED_LINE_KINDS } from '@/lib/domain/sheet';
+import type { Verdict } from '@/lib/findings/check-types';
+import { claimsAbove } from '@/lib/wording/never-says-more';
+import { AboveNote } from '../../lines/above-note';
+import { diffParts } from '../../lines/diff-parts';
+import { Button } from '../../ui/button';
+import { TextArea } from '../../ui/text-area';
+import { WordDiff } from '../../ui/word-diff';
+import type { ChangeLine, WrittenLine } from './use-lines';
+
+/** One line being written: its words, what they changed of the draft, and a caution where they go too far. */
+export function LineField({
+  line,
+  draft,
+  verdict,
+  error,
+  onChange,
+}: {
+  line: WrittenLine;
+  draft: string;
+  verdict: Verdict;
+  error?: string;
+  onChange: ChangeLine;
+}) {
+  const { kind, text, knockedOut } = line;
+  const id = fieldIdOf(kind);
+  const name = LINE_KIND_NAMES[kind];
+  const isChanged = text !== draft;
+  return (
+    <div className="mb-5 border-b border-rule pb-3">
+      {knockedOut ? (
+        <p className="mb-2">
+          <span className="font-semibold">{name}</span>{' '}
+          <span className="text-soft">is knocked out. It is not part of this sheet.</span>
+        </p>
+      ) : (
+        <>
+          <TextArea
+            id={id}
+            label={name}
+            copy
+            rows={kind === 'headline' || kind === 'chart-title' ? 2 : 4}
+            maxLength={5000}
+            spellCheck
+            value={text}
+            error={error}
+            aria-describedby={isChanged ? `${id}-draft` : undefined}
+            fieldClassName="mb-1!"
+            onChange={(event) => onChange(kind, { text: event.target.value })}
+          />
+          <div aria-live="polite">
+            <AboveNote phrases={claimsAbove(verdict, text)} verdict={verdict} />
+          </div>
+          {isChanged ? (
+            <div id={`${id}-draft`} className="mt-1 max-w-prose font-serif whitespace-pre-line">
+              <span className="font-sans text-13 text-soft">Against the draft: </span>
+              <WordDiff parts={diffParts(draft, text)} />
+            </div>
+          ) : null}
+        </>
+      )}
+      <div className="mt-2 flex flex-wrap gap-2">
+        {REQUIRED_LINE_KINDS.includes(kind) ? null : (
+          <Button aria-pressed={knockedOut} onClick={() => onChange(kind, { knockedOut: !knockedOut })}>
+            {knockedOut ? 'Put back' : 'Knock out'}
+            <span className="sr-only"> the {name.toLowerCase()}</span>
+          </Button>
+        )}
+        {isChanged && !knockedOut ? (
+          <Button onClick={() => onChange(kind, { text: draft })}>
+            Back to the draft<span className="sr-only"> of the {name.toLowerCase()}</span>
+          </Button>
+        ) : null}
+      </div>
+    </div>
+  );
+}
+
+export function fieldIdOf(kind: WrittenLine['kind']): string {
+  return `line-${kind}`;
+}

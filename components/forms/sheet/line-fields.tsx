@@ -1,0 +1,43 @@
+import { LINE_KIND_NAMES } from '@/lib/domain/sheet';
+import type { Verdict } from '@/lib/findings/check-types';
+import { ErrorSummary } from '../../ui/error-summary';
+import { fieldIdOf, LineField } from './line-field';
+import type { ChangeLine, WrittenLine } from './use-lines';
+
+/** Every line of a sheet being written, with what is wrong on top. */
+export function LineFields({
+  lines,
+  drafts,
+  verdict,
+  errors,
+  attempt,
+  onChange,
+}: {
+  lines: readonly WrittenLine[];
+  drafts: Readonly<Record<string, string>>;
+  verdict: Verdict;
+  /** By line. */
+  errors: Readonly<Record<string, string>>;
+  attempt: number;
+  onChange: ChangeLine;
+}) {
+  const faults = lines.flatMap(({ kind }) => {
+    const message = errors[kind];
+    return message ? [{ message: `${LINE_KIND_NAMES[kind]}: ${message}`, fieldId: fieldIdOf(kind) }] : [];
+  });
+  return (
+    <>
+      <ErrorSummary faults={faults} attempt={attempt} title="Nothing was filed" />
+      {lines.map((line) => (
+        <LineField
+          key={line.kind}
+          line={line}
+          draft={drafts[line.kind] ?? ''}
+          verdict={verdict}
+          error={errors[line.kind]}
+          onChange={onChange}
+        />
+      ))}
+    </>
+  );
+}

@@ -1,0 +1,31 @@
+import { SectionHeading } from '../ui/section-heading';
+import { when } from './when';
+
+export type Act = { act: string; person: string; at: number; comment: string | null };
+
+const WORDS: Record<string, string> = {
+  filed: 'filed it',
+  cleared: 'cleared it',
+  'sent-back': 'sent it back',
+  returned: 'would have cleared it, but the evidence had changed',
+  pulled: 'pulled it',
+};
+
+/** Everything done to a sheet, oldest first. */
+export function ActsList({ acts, now, zone }: { acts: readonly Act[]; now: number; zone: string }) {
+  if (acts.length === 0) return null;
+  return (
+    <section aria-labelledby="acts" className="mt-6">
+      <SectionHeading id="acts">What was done</SectionHeading>
+      <ol className="mt-1">
+        {acts.map(({ act, person, at, comment }, index) => (
+          <li key={index} className="border-b border-rule py-2">
+            <strong className="font-semibold">{person}</strong> {WORDS[act] ?? act},{' '}
+            <time dateTime={new Date(at).toISOString()}>{when(at, now, zone)}</time>
+            {comment ? <p className="max-w-prose text-soft">“{comment}”</p> : null}
+          </li>
+        ))}
+      </ol>
+    </section>
+  );
+}

@@ -1,0 +1,48 @@
+import { LINE_KIND_NAMES, type LineKind } from '@/lib/domain/sheet';
+import type { Verdict } from '@/lib/findings/check-types';
+import { CopyBlock } from '../ui/copy-block';
+import { SectionHeading } from '../ui/section-heading';
+import { WordDiff } from '../ui/word-diff';
+import { AboveNote } from './above-note';
+import { diffParts } from './diff-parts';
+
+/** Set smaller, so that claim, sentence and evidence fit one screen. */
+const SMALL: readonly LineKind[] = ['caveat', 'method-note', 'chart-title', 'alt-text'];
+
+/** One line as it would be printed, marked against the wording it came from. */
+export function PrintableLine({
+  kind,
+  text,
+  before,
+  knockedOut,
+  above,
+  verdict,
+}: {
+  kind: LineKind;
+  text: string;
+  /** The wording that the marks compare with; null where nothing is to be marked. */
+  before: string | null;
+  knockedOut: boolean;
+  above: readonly string[];
+  verdict: Verdict;
+}) {
+  const id = `line-${kind}`;
+  return (
+    <section aria-labelledby={id} className="keep-together mb-4">
+      <SectionHeading id={id} level={3}>
+        {LINE_KIND_NAMES[kind]}
+        {knockedOut ? <span className="font-normal">: knocked out, not part of this sheet</span> : null}
+      </SectionHeading>
+      {knockedOut ? null : (
+        <div className={SMALL.includes(kind) ? '[&_.copy-block]:py-2 [&_.copy-block]:text-15' : undefined}>
+          <CopyBlock isDisplay={kind === 'headline'}>
+            <div className="whitespace-pre-line">
+              {before === null || before === text ? text : <WordDiff parts={diffParts(before, text)} />}
+            </div>
+          </CopyBlock>
+          <AboveNote phrases={above} verdict={verdict} />
+        </div>
+      )}
+    </section>
+  );
+}
