@@ -7,6 +7,8 @@ const config: NextConfig = {
   poweredByHeader: false,
   reactStrictMode: true,
   serverExternalPackages: ['better-sqlite3', '@node-rs/argon2', 'msw'],
+  // The development console would print the arguments of actions, passwords among them.
+  logging: { serverFunctions: false },
   turbopack: { root: import.meta.dirname },
   // Pages of the wrong role answer with a real 403.
   experimental: { authInterrupts: true },

@@ -22,7 +22,7 @@ export function Rail({
 }) {
   const current = items.find((item) => item.href === currentHref);
   return (
-    <div className="rail no-print">
+    <header className="rail no-print">
       <Link href={homeHref} className="rail-mark" aria-label="Leadline, to the first page">
         <Wordmark />
       </Link>
@@ -43,7 +43,7 @@ export function Rail({
           {foot ? <div className="rail-menu-foot">{foot}</div> : null}
         </div>
       </details>
-    </div>
+    </header>
   );
 }
 

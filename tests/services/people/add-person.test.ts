@@ -78,11 +78,11 @@ describe('adding a person', () => {
   });
 });
 
-function fieldsOf(act: () => unknown): unknown {
+function fieldsOf(act: () => unknown): object {
   try {
     act();
   } catch (error) {
-    return (error as { fields?: unknown }).fields ?? {};
+    return (error as { fields?: object }).fields ?? {};
   }
   throw new Error('the act was not refused');
 }
