@@ -22,7 +22,7 @@ export function Interval({
   }
 
   return (
-    <div role="group" aria-label={label} className="grid items-start gap-x-5 sm:grid-cols-3">
+    <div role="group" aria-label={`${label}, as printed`} className="grid items-start gap-x-5 sm:grid-cols-3">
       <TextField
         form={form}
         path={`${name}.pp`}

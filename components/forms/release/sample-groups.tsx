@@ -79,7 +79,7 @@ export function SampleGroup({ form }: InForm) {
           form={form}
           path="sampleSource"
           label="Sample source"
-          hint="How people came into the sample. Only a random one has a margin of sampling error."
+          hint="Only a random one has a margin."
           empty="Choose"
           choices={choicesOf(SAMPLE_SOURCES, SAMPLE_SOURCE_NAMES)}
         />

@@ -108,7 +108,7 @@ function ShareFields({
   return (
     <div
       role="group"
-      aria-label={`Option ${number}`}
+      aria-label={`Row ${number}`}
       onKeyDown={onKeyDown}
       className="mb-3 border-b border-rule pb-2"
     >

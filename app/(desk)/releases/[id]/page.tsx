@@ -41,7 +41,12 @@ export default async function ReleasePage({ params }: { params: Promise<{ id: st
   const isHeld = embargo?.isRunning ?? false;
   return (
     <>
-      {embargo && isHeld ? <EmbargoBand embargo={embargo} /> : null}
+      {embargo && isHeld ? (
+        <>
+          <EmbargoBand embargo={embargo} />
+          <div className="h-4" />
+        </>
+      ) : null}
       <PageTitle
         crumbs={[{ label: 'Releases', href: '/releases' }, { label: facts.race.name }]}
         note={noteOf(view)}
@@ -51,7 +56,7 @@ export default async function ReleasePage({ params }: { params: Promise<{ id: st
       <Next view={view} canLift={isEditor && isHeld} />
       <div className="grid gap-x-11 lg:grid-cols-[minmax(0,1fr)_19rem]">
         <Findings view={view} />
-        <aside aria-label="What the findings stand on" className="min-w-0">
+        <aside aria-label="What the findings stand on" className="min-w-0 [&_.table-scroll]:mt-0">
           <SharesTable view={view} />
           <Particulars
             view={view}
@@ -110,7 +115,9 @@ function Findings({ view }: { view: ReleaseView }) {
   const uncounted = uncountedThresholds(facts);
   return (
     <section aria-labelledby="findings" className="min-w-0">
-      <SectionHeading id="findings">What the numbers support, at {level}</SectionHeading>
+      <div className="mb-2">
+        <SectionHeading id="findings">What the numbers support, at {level}</SectionHeading>
+      </div>
       {testedFindings(answer).length === 0 ? (
         <p className="my-4 max-w-prose">
           Nothing to test: fewer than two answers have a share, and the race has no threshold that these
