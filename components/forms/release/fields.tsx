@@ -72,7 +72,7 @@ export function Withholdable({
         id={fieldId(path)}
         label={
           <>
-            Not disclosed<span className="sr-only">: {what}</span>
+            Not disclosed <span className="sr-only">({what})</span>
           </>
         }
         className="-mt-3 text-13"
