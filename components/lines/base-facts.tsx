@@ -17,7 +17,7 @@ export function BaseFacts({ release, base }: { release: ReleaseFacts; base: Base
       <SectionHeading id="evidence-base" level={3}>
         Base
       </SectionHeading>
-      <DefinitionList items={itemsOf(release)} className="text-13 md:text-15" />
+      <DefinitionList items={itemsOf(release)} className="text-13 [&>div]:py-0.5" />
       <p className="mt-1 max-w-prose text-13 text-soft">{baseSummary(base)}</p>
       {base.notes.map((note) => (
         <p key={note} className="mt-1 max-w-prose text-13 text-soft">

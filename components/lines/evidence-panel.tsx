@@ -18,6 +18,9 @@ import { MissingNote } from './missing-note';
 import { SharesTable } from './shares-table';
 import { testRows } from './test-rows';
 
+/** Close rows: the verdict, its test and the words are read together. */
+const PARTICULARS = 'text-13 [&>div]:py-0.5';
+
 export type EvidenceShown = {
   finding: TestableFinding;
   release: ReleaseFacts;
@@ -43,16 +46,16 @@ export function EvidencePanel({
   return (
     <section aria-labelledby="evidence">
       <SectionHeading id="evidence">The evidence</SectionHeading>
-      <FindingCard
-        id="evidence-finding"
-        heading={headingOf(finding, document, between)}
-        verdict={finding.verdict}
-        spec={soundingSpecOf(finding, document, ENGLISH_CHART_WORDS)}
-        why={[]}
-        working={undefined}
-        action={action}
-      />
-      <DefinitionList items={testRows(finding, answer)} className="text-13 md:text-15" />
+      <div className="[&>article]:mb-2 [&>article]:border-b-0 [&>article]:pb-0">
+        <FindingCard
+          id="evidence-finding"
+          heading={headingOf(finding, document, between)}
+          verdict={finding.verdict}
+          spec={soundingSpecOf(finding, document, ENGLISH_CHART_WORDS)}
+          why={[]}
+        />
+      </div>
+      <DefinitionList items={testRows(finding, answer)} className={PARTICULARS} />
       <Details summary="Why this verdict">
         <p className="max-w-prose text-soft">{explain(finding, answer).join(' ')}</p>
       </Details>
@@ -63,6 +66,7 @@ export function EvidencePanel({
         <SectionHeading level={3}>Compared with</SectionHeading>
         <ComparedWith previous={previous} told={comparison} />
       </div>
+      {action ? <p className="mt-4">{action}</p> : null}
     </section>
   );
 }

@@ -1,4 +1,5 @@
 import type {
+  BaseAnswer,
   CheckAnswer,
   Range,
   SecondTest,
@@ -9,7 +10,7 @@ import type {
 import { formatP, formatPoints, formatTrimmed } from '@/lib/format/number';
 import { deffSourceText } from '@/lib/wording/base-words';
 import { EN } from '@/lib/wording/messages/en';
-import { familySize } from '@/lib/wording/test-facts';
+import { familySize, isPlausibleBreaking } from '@/lib/wording/test-facts';
 import { VERDICT_NAMES } from '../charts/verdict-mark';
 
 const LOCALE = 'en-GB';
@@ -84,16 +85,27 @@ function roundingText({ roundingPp, reasons, verdict }: Tested): string {
 }
 
 function deffRows(finding: Tested, answer: CheckAnswer): TestRow[] {
-  const bases = 'breakingFactor' in finding ? [answer.base, answer.previousBase] : [answer.base];
-  const rows = bases.flatMap((base, at) => {
-    if (!base?.deff || !base.deffSource || !base.deffRange) return [];
-    const [low, high] = base.deffRange.map((end) => formatTrimmed(end, 2, LOCALE));
-    const range = low === high ? '' : ` (${low}–${high})`;
-    const value = `${formatTrimmed(base.deff, 2, LOCALE)} ${deffSourceText(base.deffSource)}${range}`;
-    return [{ term: at === 0 ? 'Design effect' : 'Design effect, earlier', value }];
-  });
-  const turns = turningText(finding);
-  return turns === null ? rows : [...rows, { term: 'The result turns', value: turns }];
+  const earlier = 'breakingFactor' in finding ? deffText(answer.previousBase) : null;
+  const current = deffText(answer.base);
+  const rows =
+    earlier === null || earlier === current
+      ? [{ term: 'Design effect', value: current }]
+      : [
+          { term: 'Design effect', value: current },
+          { term: 'Design effect, earlier', value: earlier },
+        ];
+  const turns = isPlausibleBreaking(finding, answer) ? turningText(finding) : null;
+  return [
+    ...rows.flatMap(({ term, value }) => (value === null ? [] : [{ term, value }])),
+    ...(turns === null ? [] : [{ term: 'The result turns', value: turns }]),
+  ];
+}
+
+function deffText(base: BaseAnswer | null): string | null {
+  if (!base?.deff || !base.deffSource || !base.deffRange) return null;
+  const [low, high] = base.deffRange.map((end) => formatTrimmed(end, 2, LOCALE));
+  const range = low === high ? '' : ` (${low}–${high})`;
+  return `${formatTrimmed(base.deff, 2, LOCALE)} ${deffSourceText(base.deffSource)}${range}`;
 }
 
 function turningText(finding: Tested): string | null {
@@ -108,7 +120,11 @@ function turningText(finding: Tested): string | null {
 function secondTestRow(test: SecondTest): TestRow {
   const agrees = test.significant ? 'passes' : 'does not pass';
   const figure = test.name === 'newcombe' ? rangeText(test.intervalPp) : formatP(test.p, LOCALE);
-  return { term: `Second test, ${EN.terms.secondTest[test.name]}`, value: `${figure}: ${agrees}` };
+  return { term: capital(EN.terms.secondTest[test.name]), value: `${figure}: ${agrees}` };
+}
+
+function capital(name: string): string {
+  return name.charAt(0).toUpperCase() + name.slice(1);
 }
 
 function reachRows({ detectable80Pp, survivesTwiceError }: Tested): TestRow[] {

@@ -21,6 +21,16 @@ const FORMS: { form: CopyForm; word: string }[] = [
   { form: 'markdown', word: 'Markdown' },
 ];
 
+const SMALL = '[&_.copy-block]:py-2 [&_.copy-block]:text-15';
+const SIZES: Record<LineKind, string> = {
+  headline: '',
+  body: '',
+  caveat: SMALL,
+  'method-note': SMALL,
+  'chart-title': SMALL,
+  'alt-text': SMALL,
+};
+
 type Status = { message: string; isFault: boolean };
 
 /** The lines of a cleared sheet with their copy buttons. What is copied comes from the server, never from here. */
@@ -62,18 +72,19 @@ export function CopyLines({
   const buttons = (kinds: LineKind[], about: string, all = false) =>
     FORMS.map(({ form, word }) => {
       const key = `${about} ${form}`;
+      const words = all ? (form === 'plain' ? 'Copy all lines' : `All, ${word}`) : word;
       return (
         <Button
           key={form}
           className="min-h-8! px-3! py-1! text-13!"
           disabled={blocked !== null}
+          aria-label={all ? words : `${word}: ${about}`}
           aria-describedby={blocked === null ? undefined : `${id}-blocked`}
           pending={running === key}
           pendingLabel="Copying…"
           onClick={() => copy(key, kinds, form)}
         >
-          {all ? (form === 'plain' ? 'Copy all lines' : `All, ${word}`) : word}
-          <span className="sr-only">: {about}</span>
+          {words}
         </Button>
       );
     });
@@ -85,19 +96,21 @@ export function CopyLines({
           {blocked}
         </p>
       ) : null}
-      {lines.map(({ kind, text }) => (
-        <section key={kind} aria-label={LINE_KIND_NAMES[kind]} className="mb-3">
-          <div className="mb-1 flex flex-wrap items-center justify-between gap-2">
-            <h3 className="section-heading">{LINE_KIND_NAMES[kind]}</h3>
-            <span className="no-print flex flex-wrap gap-2">
-              {buttons([kind], LINE_KIND_NAMES[kind].toLowerCase())}
-            </span>
+      <div className="gap-10 lg:columns-2">
+        {lines.map(({ kind, text }) => (
+          <div key={kind} className={`break-inside-avoid pb-3 ${SIZES[kind]}`}>
+            <div className="mb-1 flex flex-wrap items-center justify-between gap-2">
+              <h3 className="section-heading">{LINE_KIND_NAMES[kind]}</h3>
+              <span className="no-print flex flex-wrap gap-2">
+                {buttons([kind], LINE_KIND_NAMES[kind].toLowerCase())}
+              </span>
+            </div>
+            <CopyBlock>
+              <div className="whitespace-pre-line">{text}</div>
+            </CopyBlock>
           </div>
-          <CopyBlock>
-            <div className="whitespace-pre-line">{text}</div>
-          </CopyBlock>
-        </section>
-      ))}
+        ))}
+      </div>
       <div className="no-print flex flex-wrap gap-2">
         {buttons(
           lines.map(({ kind }) => kind),
@@ -105,7 +118,9 @@ export function CopyLines({
           true,
         )}
       </div>
-      <CopyStatus message={status?.message ?? null} isFault={status?.isFault} />
+      <div className={status ? 'sticky bottom-0 bg-paper py-1' : undefined}>
+        <CopyStatus message={status?.message ?? null} isFault={status?.isFault} />
+      </div>
       {byHand === null ? null : <ByHand id={id} text={byHand} />}
     </>
   );

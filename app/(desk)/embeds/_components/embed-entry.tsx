@@ -29,7 +29,10 @@ export function EmbedEntry({
       className="mb-8 scroll-mt-6 border-t-[1.5px] border-ink pt-3 target:bg-panel"
     >
       <div className="flex flex-wrap items-baseline justify-between gap-x-6">
-        <h2 id={`title-${id}`} className="max-w-prose font-serif text-24">
+        <h2
+          id={`title-${id}`}
+          className={`max-w-prose font-serif text-24 ${state === 'pulled' ? 'text-soft line-through' : ''}`}
+        >
           {title}
         </h2>
         <p className={state === 'live' ? 'font-semibold' : 'font-semibold text-caution'}>{STATES[state]}</p>

@@ -22,9 +22,11 @@ export function Reading({ view, actions, onDone }: Props) {
     <>
       <MovedNote view={view} />
       <SheetColumns view={view}>
-        <SectionHeading>
-          {isAgain ? 'Marked against what you filed' : 'Marked against the draft'}
-        </SectionHeading>
+        <div className="mb-2">
+          <SectionHeading>
+            {isAgain ? 'Marked against what you filed' : 'Marked against the draft'}
+          </SectionHeading>
+        </div>
         {view.lines.map(({ kind, text, draft, earlier, knockedOut, above }) => (
           <PrintableLine
             key={kind}

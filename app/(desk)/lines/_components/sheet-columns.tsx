@@ -12,7 +12,7 @@ export function SheetColumns({ view, children }: { view: SheetView; children: Re
       <div className="min-w-0">
         <EvidencePanel
           evidence={evidenceOf(view)}
-          action={<Link href={`/releases/${view.evidence.release.releaseId}`}>The release</Link>}
+          action={<Link href={`/releases/${view.evidence.release.releaseId}`}>Open the release</Link>}
         />
       </div>
     </div>

@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { ActsList } from '@/components/lines/acts-list';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { Cleared } from './cleared';
@@ -22,11 +22,15 @@ type Props = {
 /** One sheet in the face that its state and its reader call for. */
 export function SheetScreen({ view, actions, person, now, zone }: Props) {
   const [done, setDone] = useState('');
+  const said = useRef<HTMLParagraphElement>(null);
+  useEffect(() => {
+    if (done !== '') said.current?.focus();
+  }, [done]);
   const seen = `${view.state} ${view.version} ${view.hash} ${view.basisHash}`;
   const isBeingRewritten = view.isServed && view.state !== 'cleared';
   return (
     <>
-      <p role="status" className="mt-2 font-semibold">
+      <p ref={said} tabIndex={-1} role="status" className="mt-2 font-semibold">
         {done}
       </p>
       {isBeingRewritten ? (
