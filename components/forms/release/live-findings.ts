@@ -4,7 +4,7 @@ import type { CheckAnswer, CheckDocument } from '@/lib/findings/check-types';
 import { fieldOfCheckPath } from '@/lib/findings/form-field';
 import { parseCheckDocument } from '@/lib/findings/parse-check';
 import type { ReleaseForm } from './form-values';
-import { liveDocument, type LiveAround } from './live-document';
+import { type LiveAround, type LiveDocument, liveDocument } from './live-document';
 
 export type LiveFindings =
   | { kind: 'nothing' }
@@ -14,7 +14,11 @@ export type LiveFindings =
 
 /** What the numbers typed so far support, by the same code that the service uses. */
 export function liveFindings(values: ReleaseForm, around: LiveAround): LiveFindings {
-  const live = liveDocument(values, around);
+  return judged(liveDocument(values, around));
+}
+
+/** The costly half, for a caller that knows whether anything that counts has changed. */
+export function judged(live: LiveDocument | null): LiveFindings {
   if (!live) return { kind: 'nothing' };
   const { leftOut, rows } = live;
   try {

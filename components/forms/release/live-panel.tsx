@@ -1,5 +1,6 @@
 'use client';
 
+import { memo } from 'react';
 import { betweenReleases } from '../../findings/between';
 import { ComparedWith } from '../../findings/compared-with';
 import { FindingList, testedFindings } from '../../findings/finding-list';
@@ -14,6 +15,8 @@ import type { ComparisonState } from './use-comparison';
 /** What the numbers typed so far support, computed in this browser. */
 export function LivePanel({ level, fieldEndOn }: { level: number; fieldEndOn: string }) {
   const { findings, comparison, isNewRace } = useLive();
+  const previous = comparison.kind === 'answered' ? comparison.compared.previous : null;
+  const between = previous ? betweenReleases(previous.fieldEndOn, fieldEndOn) : undefined;
   return (
     <section aria-labelledby="live-heading">
       <SectionHeading id="live-heading">
@@ -22,7 +25,7 @@ export function LivePanel({ level, fieldEndOn }: { level: number; fieldEndOn: st
       <p role="status" className="mb-4 text-15 font-semibold">
         {summaryOf(findings)}
       </p>
-      <LiveList findings={findings} comparison={comparison} fieldEndOn={fieldEndOn} />
+      <LiveList findings={findings} between={between} />
       <SectionHeading level={3}>Compared with</SectionHeading>
       <LiveComparison comparison={comparison} isNewRace={isNewRace} />
     </section>
@@ -40,18 +43,9 @@ function summaryOf(findings: LiveFindings): string {
   }
 }
 
-function LiveList({
-  findings,
-  comparison,
-  fieldEndOn,
-}: {
-  findings: LiveFindings;
-  comparison: ComparisonState;
-  fieldEndOn: string;
-}) {
+const LiveList = memo(function LiveList({ findings, between }: { findings: LiveFindings; between?: string }) {
   if (findings.kind === 'nothing') return null;
   const notes = findings.kind === 'answer' ? findings.answer.base.notes.map(noteText) : [];
-  const previous = comparison.kind === 'answered' ? comparison.compared.previous : null;
   return (
     <>
       {findings.kind === 'answer' ? (
@@ -59,7 +53,7 @@ function LiveList({
           idPrefix="live"
           document={findings.document}
           answer={findings.answer}
-          between={previous ? betweenReleases(previous.fieldEndOn, fieldEndOn) : undefined}
+          between={between}
         />
       ) : null}
       {findings.kind === 'answer' ? (
@@ -74,7 +68,7 @@ function LiveList({
       </ul>
     </>
   );
-}
+});
 
 function LiveComparison({ comparison, isNewRace }: { comparison: ComparisonState; isNewRace: boolean }) {
   switch (comparison.kind) {

@@ -5,7 +5,8 @@ import { type Control, get, useFormState, useWatch } from 'react-hook-form';
 import { comparisonQuery } from './comparison-query';
 import type { FormChoices } from './form-choices';
 import type { ReleaseForm } from './form-values';
-import { type LiveFindings, liveFindings } from './live-findings';
+import { type LiveDocument, liveDocument } from './live-document';
+import { judged, type LiveFindings } from './live-findings';
 import { type ComparisonState, useComparison } from './use-comparison';
 
 export type Live = { findings: LiveFindings; comparison: ComparisonState; isNewRace: boolean };
@@ -32,11 +33,11 @@ export function LiveProvider({
   const comparison = useComparison(comparisonQuery(values), personId);
   const previous = comparison.kind === 'answered' ? comparison.compared.previous : null;
   const { policy, races } = choices;
-  const findings = useMemo(() => {
-    const chosen = values.race.kind === 'existing' ? values.race.id : null;
-    const thresholds = races.find((race) => race.id === chosen)?.thresholds ?? [];
-    return liveFindings(values, { policy, previous, thresholds });
-  }, [values, policy, previous, races]);
+  const chosen = values.race.kind === 'existing' ? values.race.id : null;
+  const thresholds = races.find((race) => race.id === chosen)?.thresholds ?? [];
+  // As text, so that typing what no figure rests on computes and draws nothing anew.
+  const wanted = JSON.stringify(liveDocument(values, { policy, previous, thresholds }));
+  const findings = useMemo(() => judged(JSON.parse(wanted) as LiveDocument | null), [wanted]);
   const isNewRace = values.race.kind === 'new';
   const live = useMemo(() => ({ findings, comparison, isNewRace }), [findings, comparison, isNewRace]);
   const [field, message] = findings.kind === 'refused' ? [findings.field, findings.message] : [null, ''];

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import useSWR from 'swr';
 import type { Compared, ComparisonQuery } from './comparison-query';
 import { fetchJson } from './fetch-json';
@@ -18,9 +18,13 @@ export function useComparison(query: ComparisonQuery | null, personId: string): 
   const settled = useSettled(wanted);
   const key = settled === null || wanted === null ? null : [COMPARISON_URL, personId, settled];
   const { data, error } = useSWR(key, ask, { keepPreviousData: true, revalidateOnFocus: false });
-  if (wanted === null) return { kind: 'not-asked' };
-  if (error instanceof Error) return { kind: 'failed', message: error.message };
-  return data ? { kind: 'answered', compared: data } : { kind: 'asking' };
+  const isAsked = wanted !== null;
+  const message = error instanceof Error ? error.message : null;
+  return useMemo(() => {
+    if (!isAsked) return { kind: 'not-asked' };
+    if (message !== null) return { kind: 'failed', message };
+    return data ? { kind: 'answered', compared: data } : { kind: 'asking' };
+  }, [isAsked, message, data]);
 }
 
 async function ask([url, , query]: [string, string, string] | string[]): Promise<Compared> {
