@@ -103,8 +103,10 @@ function settingOf(release: ReleaseFacts, options: readonly string[]): 'contest'
   return isContest ? 'contest' : 'question';
 }
 
+/** Candidates and parties stand as they are; an answer that is a phrase, such as "End the toll", is quoted. */
 function nameOf(option: string, release: ReleaseFacts, voice: Voice): string {
-  if (settingOf(release, [option]) === 'contest') return plain(option);
+  const isProperName = settingOf(release, [option]) === 'contest' && release.race.kind !== 'referendum';
+  if (isProperName) return plain(option);
   return say(voice.style.messages[voice.language].terms.quoted, { name: plain(option) }, voice.locale);
 }
 

@@ -240,3 +240,15 @@ describe('draftSheet', () => {
     );
   });
 });
+
+describe('the names of answers', () => {
+  const toll = { id: 'toll', name: 'Bridge-toll referendum', kind: 'referendum' as const, thresholds: [] };
+  const shares = { 'Keep the toll': 40, 'End the toll': 55, Undecided: 5 };
+
+  it('stand in quotation marks where an answer of a referendum is a phrase', () => {
+    const release = releaseOf(shares, { race: toll });
+    const claim: Claim = { kind: 'lead', pair: ['End the toll', 'Keep the toll'] };
+    const [headline] = draftSheet(inputOf({ claim, release }));
+    expect(headline?.text).toMatch(/^“End the toll” leads “Keep the toll”/);
+  });
+});
