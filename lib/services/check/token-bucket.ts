@@ -11,11 +11,13 @@ export function tokenBuckets({ capacity, perMinute }: { capacity: number; perMin
   const buckets = new LRUCache<number, Bucket>({ max: 10_000 });
   const perMs = perMinute / 60_000;
 
-  /** Takes one token. @returns 0, or the milliseconds until there is one */
-  return function take(key: number, now: number): number {
+  /** Takes what one asking costs, at most the capacity. @returns 0, or the milliseconds until there is enough */
+  return function take(key: number, now: number, cost = 1): number {
+    const wanted = Math.min(cost, capacity);
     const kept = buckets.get(key) ?? { tokens: capacity, at: now };
     const tokens = Math.min(capacity, kept.tokens + Math.max(0, now - kept.at) * perMs);
-    buckets.set(key, { tokens: tokens >= 1 ? tokens - 1 : tokens, at: now });
-    return tokens >= 1 ? 0 : Math.ceil((1 - tokens) / perMs);
+    const isEnough = tokens >= wanted;
+    buckets.set(key, { tokens: isEnough ? tokens - wanted : tokens, at: now });
+    return isEnough ? 0 : Math.ceil((wanted - tokens) / perMs);
   };
 }

@@ -51,6 +51,17 @@ describe('a check document', () => {
   });
 });
 
+describe('a document of very many questions', () => {
+  it('costs as many askings as its length is worth', () => {
+    const shares = Array.from({ length: 100 }, (_, at) => ({ option: `Option ${at}`, pct: 1 }));
+    const thresholds = shares.map(({ option }) => ({ option, pct: 5 }));
+    const long = { release: { ...DOCUMENT.release, shares }, thresholds };
+    const kinds = Array.from({ length: 21 }, () => checkPoll(person(4), long, { now: NOW }).kind);
+    expect(kinds.filter((kind) => kind === 'answer')).toHaveLength(20);
+    expect(kinds.at(-1)).toBe('too-many');
+  });
+});
+
 describe('a token bucket', () => {
   it('never holds more than its capacity and survives a clock that goes back', () => {
     const take = tokenBuckets({ capacity: 2, perMinute: 60 });
