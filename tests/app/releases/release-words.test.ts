@@ -1,0 +1,86 @@
+import { describe, expect, it } from 'vitest';
+import {
+  columnHeads,
+  missingSentence,
+  particularsOf,
+  titleOf,
+} from '@/app/(desk)/releases/[id]/_components/release-words';
+import { given, NOT_DISCLOSED, NOT_ENTERED } from '@/lib/domain/disclosed';
+import type { ReleaseFacts } from '@/lib/domain/release-facts';
+
+const FACTS: ReleaseFacts = {
+  releaseId: 'r',
+  versionId: 'v',
+  version: 1,
+  race: { id: 'g', name: 'Averil Coast governor', kind: 'candidate', thresholds: [] },
+  pollster: { id: 'k', name: 'Kelmouth Research' },
+  sponsor: given({ id: 's', name: 'The Averil Courier' }),
+  population: given('likely-voters'),
+  sampleSource: 'probability',
+  mode: given('live-telephone'),
+  design: 'weighted',
+  fieldStartOn: '2026-09-14',
+  fieldEndOn: '2026-09-17',
+  publishedOn: '2026-09-18',
+  n: given(1012),
+  deff: null,
+  statedMargin: NOT_ENTERED,
+  modelledInterval: null,
+  questionWording: NOT_ENTERED,
+  decimals: 1,
+  shares: [
+    { option: 'Brook', units: 410, isAnswer: true },
+    { option: 'Don’t know', units: 600, isAnswer: false },
+    { option: 'Alder', units: 490, isAnswer: true },
+    { option: 'Someone else', units: null, isAnswer: true },
+  ],
+  sourceUrl: NOT_ENTERED,
+};
+
+describe('the title of a release', () => {
+  it('is the pollster and the two largest answers as printed, without a word of who leads', () => {
+    expect(titleOf(FACTS)).toBe('Kelmouth Research: Alder 49.0, Brook 41.0');
+  });
+
+  it('says so where no share is disclosed', () => {
+    const shares = [{ option: 'Alder', units: null, isAnswer: true }];
+    expect(titleOf({ ...FACTS, shares })).toBe('Kelmouth Research: no share disclosed');
+  });
+});
+
+describe('the line beneath it', () => {
+  it('tells who was asked, when, how and for whom', () => {
+    expect(particularsOf(FACTS)).toBe(
+      '1,012 likely voters, 14–17 September 2026, live telephone, for The Averil Courier.',
+    );
+  });
+
+  it('leaves out what is not known and says when the size is withheld', () => {
+    const facts = {
+      ...FACTS,
+      n: NOT_DISCLOSED,
+      mode: NOT_ENTERED,
+      sponsor: NOT_DISCLOSED,
+      population: NOT_ENTERED,
+    };
+    expect(particularsOf(facts)).toBe('An undisclosed number of people, 14–17 September 2026.');
+  });
+
+  it('counts what the disclosure list misses', () => {
+    const item = { item: 'sponsor' as const, label: 'Sponsor', status: 'not-entered' as const };
+    expect(missingSentence([])).toBe('Nothing of the disclosure list is missing.');
+    expect(missingSentence([item])).toBe('One item of the disclosure list is missing.');
+    expect(missingSentence([item, item, item])).toBe('Three items of the disclosure list are missing.');
+  });
+});
+
+describe('the heads of the columns of shares', () => {
+  const earlier = (fieldEndOn: string) => columnHeads(FACTS, { ...FACTS, fieldEndOn });
+
+  it('are months, days within one month, years across years', () => {
+    expect(columnHeads(FACTS, null)).toEqual(['Share', '']);
+    expect(earlier('2026-08-13')).toEqual(['Sept', 'Aug']);
+    expect(earlier('2026-09-03')).toEqual(['17 Sept', '3 Sept']);
+    expect(earlier('2025-09-13')).toEqual(['Sept 26', 'Sept 25']);
+  });
+});
