@@ -2,7 +2,7 @@ import type { Db } from '@/db/client';
 import type { LineKind } from '@/lib/domain/sheet';
 import type { Actor } from '@/lib/domain/roles';
 import { newId } from '@/lib/security/ids';
-import { clearSheet } from '@/lib/services/sheet/clear-sheet';
+import { clearSheet, sendBack } from '@/lib/services/sheet/clear-sheet';
 import { createSheet } from '@/lib/services/sheet/create-sheet';
 import { fileSheet } from '@/lib/services/sheet/file-sheet';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
@@ -44,6 +44,9 @@ export function sheetDesk(db: Db) {
 
     clear: (actor: Actor, id: string, later = 0) =>
       clearSheet(actor, { id, hash: hashOf(actor, id) }, ctx(later)),
+
+    sendBack: (actor: Actor, id: string, comment: string) =>
+      sendBack(actor, { id, hash: hashOf(actor, id), comment }, ctx()),
 
     /** Drafted and filed by the first, cleared by the second. */
     cleared(author: Actor, editor: Actor, releaseId: string, later = 0) {
