@@ -105,6 +105,7 @@ describe('a filed sheet before its second reader', () => {
     open(views.filed);
     await press('Send back');
     const dialog = screen.getByRole('dialog');
+    expect(document.activeElement).toBe(within(dialog).getByLabelText('What should change?'));
     await userEvent.click(within(dialog).getByRole('button', { name: 'Send back' }));
     expect(await within(dialog).findByText('Say what should change.')).toBeTruthy();
     const comment = 'Name the pollster first.';

@@ -1,6 +1,6 @@
 'use client';
 
-import { type FormEvent, useState } from 'react';
+import { type FormEvent, useEffect, useState } from 'react';
 import { Button, type ButtonTone } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { TextArea } from '@/components/ui/text-area';
@@ -35,6 +35,11 @@ export function ReasonDialog({
 }) {
   const [isOpen, setOpen] = useState(false);
   const id = `reason-${field}`;
+
+  // After the dialog has opened and taken focus itself.
+  useEffect(() => {
+    if (isOpen) document.getElementById(id)?.focus();
+  }, [isOpen, id]);
 
   const submit = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
