@@ -11,7 +11,7 @@ import {
   releaseVersions,
   shares,
 } from '@/db/schema/releases';
-import { type Viewer, visible } from './visible';
+import { isPublic, type Viewer, visible } from './visible';
 
 export type ReleaseRow = typeof releases.$inferSelect;
 export type ReleaseVersionRow = typeof releaseVersions.$inferSelect;
@@ -126,8 +126,17 @@ export function listShares(conn: Conn, questionId: number) {
     .all();
 }
 
-/** Current versions of one race by one pollster, latest field dates first. */
-export function listVersionsOfSeries(conn: Conn, raceId: number, pollsterId: number): WholeVersion[] {
+/**
+ * Current versions of one race by one pollster, latest field dates first.
+ *
+ * @param publicAt only those that are out of embargo at this moment; null: every one
+ */
+export function listVersionsOfSeries(
+  conn: Conn,
+  raceId: number,
+  pollsterId: number,
+  publicAt: number | null,
+): WholeVersion[] {
   return versionSelect(conn)
     .where(
       and(
@@ -135,6 +144,7 @@ export function listVersionsOfSeries(conn: Conn, raceId: number, pollsterId: num
         eq(releases.raceId, raceId),
         eq(releases.pollsterId, pollsterId),
         isNull(releases.archivedAt),
+        publicAt === null ? undefined : isPublic(publicAt),
       ),
     )
     .orderBy(desc(releaseVersions.fieldEndOn), desc(releases.id))

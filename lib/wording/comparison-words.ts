@@ -78,7 +78,7 @@ function firstSentence(told: ComparisonTold): string {
     case 'none-comparable':
       return 'No earlier release of this series compares with this one.';
     case 'none-earlier':
-      return 'This series has no release with earlier field dates.';
+      return 'This series has no release with earlier field dates that is out of embargo.';
     case 'dates-unknown':
       return 'The field dates are not entered yet, so there is nothing to compare with.';
     case 'override': {

@@ -46,7 +46,7 @@ describe('comparisonReason', () => {
 
   it.each([
     ['none-comparable', 'No earlier release of this series compares with this one.'],
-    ['none-earlier', 'This series has no release with earlier field dates.'],
+    ['none-earlier', 'This series has no release with earlier field dates that is out of embargo.'],
     ['dates-unknown', 'The field dates are not entered yet, so there is nothing to compare with.'],
   ] as const)('says why there is none: %s', (reason, sentence) => {
     expect(comparisonReason(told({ reason }))).toEqual([sentence]);

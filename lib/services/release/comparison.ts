@@ -61,33 +61,57 @@ export function seriesFactsOf(conn: Conn, whole: WholeVersion): SeriesFacts {
 }
 
 /** The release that a stored version is compared with: the latest comparable one, or an editor's override. */
-export function comparisonOf(conn: Conn, whole: WholeVersion): Comparison {
+export function comparisonOf(conn: Conn, whole: WholeVersion, now: number): Comparison {
   const current = seriesFactsOf(conn, whole);
-  const override = findOverride(conn, whole.version.id);
-  const overridden = override && findWholeVersion(conn, override.override.comparisonVersionId);
-  if (override && overridden) {
-    const { differences, unknowns } = compareReleases(current, seriesFactsOf(conn, overridden));
-    const { reason, personId } = override.override;
-    return {
-      versionId: overridden.version.id,
-      reason: 'override',
-      unknowns,
-      differences,
-      passedOver: [],
-      override: { reason, by: override.person, personId },
-    };
-  }
-  return chooseAmong(conn, current, whole.release.raceId, whole.release.pollsterId);
+  return (
+    overriddenOf(conn, whole, current) ??
+    chooseAmong(conn, current, whole.release.raceId, whole.release.pollsterId, now)
+  );
 }
 
-/** The same choice for facts that are not stored yet. */
+/** An editor chose a release, whose figures are those of its newest version; one that fits no more is left. */
+function overriddenOf(conn: Conn, whole: WholeVersion, current: SeriesFacts): Comparison | null {
+  const override = findOverride(conn, whole.version.id);
+  const chosen = override && findWholeVersion(conn, override.override.comparisonVersionId);
+  const newest = chosen && findWholeVersion(conn, chosen.release.currentVersionId ?? chosen.version.id);
+  if (!override || !newest) return null;
+  const { differences, unknowns } = compareReleases(current, seriesFactsOf(conn, newest));
+  if (!mayBeCompared(whole, newest, differences)) return null;
+  const { reason, personId } = override.override;
+  return {
+    versionId: newest.version.id,
+    reason: 'override',
+    unknowns,
+    differences,
+    passedOver: [],
+    override: { reason, by: override.person, personId },
+  };
+}
+
+/** What no written reason lifts: another race, and interviews that did not end before these began. */
+export function mayBeCompared(
+  current: WholeVersion,
+  earlier: WholeVersion,
+  differences: Comparability['differences'],
+): boolean {
+  return (
+    earlier.version.fieldEndOn < current.version.fieldStartOn &&
+    differences.every((difference) => difference.isOverridable)
+  );
+}
+
+/**
+ * The same choice for facts that are not stored yet. Nothing under embargo is compared with: a figure that is held
+ * would show through the change.
+ */
 export function chooseAmong(
   conn: Conn,
   current: ComparableFacts,
   raceId: number,
   pollsterId: number,
+  now: number,
 ): Comparison {
-  const series = listVersionsOfSeries(conn, raceId, pollsterId).map((row) => seriesFactsOf(conn, row));
+  const series = listVersionsOfSeries(conn, raceId, pollsterId, now).map((row) => seriesFactsOf(conn, row));
   const choice = chooseComparison(current, series);
   return {
     versionId: choice.chosen?.versionId ?? null,

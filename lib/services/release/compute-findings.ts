@@ -23,13 +23,13 @@ export type Computed = {
   missing: MissingDisclosure[];
 };
 
-/** Everything that a stored version supports under the policy in force. */
-export function computeFindings(conn: Conn, versionId: number): Computed {
+/** Everything that a stored version supports now: under the policy in force, beside what is out of embargo. */
+export function computeFindings(conn: Conn, versionId: number, now: number): Computed {
   const whole = findWholeVersion(conn, versionId);
   if (!whole) throw new AppError('not-found', 'There is no such release.');
   const settings = readDeskSettings(conn);
   const facts = factsOf(conn, versionId);
-  const comparison = comparisonOf(conn, whole);
+  const comparison = comparisonOf(conn, whole, now);
   const previous = comparison.versionId === null ? null : factsOf(conn, comparison.versionId);
   const document = parseCheckDocument(checkDocumentOf(facts, previous, settings.policy.body));
   const missing = missingDisclosure(disclosureOf(facts));

@@ -11,10 +11,9 @@ import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { readDeskSettings } from '../setup/desk-settings';
-import { computeFindings } from './compute-findings';
 import { embargoInstant } from './embargo-time';
 import { factsOf } from './facts';
-import { indexFindings } from './index-findings';
+import { reindexSeries } from './index-findings';
 import { refuseImpossibleFigures } from './refuse-figures';
 import { namedId, storeVersion } from './store-version';
 
@@ -66,7 +65,7 @@ export function createReleaseIn(
   const version = storeVersion(tx, input, who);
   const facts = factsOf(tx, version.id);
   refuseImpossibleFigures(facts, readDeskSettings(tx).policy.body);
-  indexFindings(tx, version.id, computeFindings(tx, version.id));
+  reindexSeries(tx, { ...release, from: facts.fieldEndOn }, now);
   appendRecord(
     tx,
     {

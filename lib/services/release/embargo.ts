@@ -9,6 +9,8 @@ import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { factsOf } from './facts';
+import { reindexSeries } from './index-findings';
 
 const id = z.string().min(1).max(64);
 
@@ -25,6 +27,7 @@ export function liftEmbargo(actor: Actor, input: unknown, ctx: Ctx): void {
     const release = embargoedRelease(tx, actor, publicId, ctx.now);
     if (!updateRelease(tx, release.id, version, { embargoLiftedAt: ctx.now }))
       throw new AppError('conflict', 'Somebody changed this release meanwhile. Reload the page.');
+    reindexSeries(tx, { ...release, from: factsOf(tx, release.currentVersionId!).fieldEndOn }, ctx.now);
     record(tx, actor, release, 'lifted embargo', ctx.now, {
       before: { embargoAt: release.embargoAt },
       after: { embargoLiftedAt: ctx.now },

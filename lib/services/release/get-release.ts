@@ -40,7 +40,7 @@ export function getRelease(actor: Actor, id: string, ctx: Ctx): ReleaseView {
   const release = findVisibleRelease(actor, id, ctx);
   const versionId = release.currentVersionId!;
   const whole = findWholeVersion(ctx.db, versionId)!;
-  const { settings, comparison, ...computed } = computeFindings(ctx.db, versionId);
+  const { settings, comparison, ...computed } = computeFindings(ctx.db, versionId, ctx.now);
   const { versionId: _, override, ...chosen } = comparison;
   return {
     ...computed,

@@ -1,8 +1,9 @@
 import 'server-only';
 import type { Conn } from '@/db/client';
 import { replaceFindingIndex } from '@/db/queries/finding-index';
+import { listVersionsOfSeries } from '@/db/queries/release';
 import { claimKey } from '@/lib/findings/claim-key';
-import type { Computed } from './compute-findings';
+import { type Computed, computeFindings } from './compute-findings';
 
 /** Writes the derived row per finding that lists read. Never shown as a number, never evidence. */
 export function indexFindings(conn: Conn, versionId: number, computed: Computed): void {
@@ -20,4 +21,18 @@ export function indexFindings(conn: Conn, versionId: number, computed: Computed)
     };
   });
   replaceFindingIndex(conn, versionId, rows);
+}
+
+/**
+ * Writes anew what lists know of a race by one pollster, from the field dates given on: another release to compare
+ * with changes what the later ones support.
+ */
+export function reindexSeries(
+  conn: Conn,
+  series: { raceId: number; pollsterId: number; from: string },
+  now: number,
+): void {
+  for (const { version } of listVersionsOfSeries(conn, series.raceId, series.pollsterId, null))
+    if (version.fieldEndOn >= series.from)
+      indexFindings(conn, version.id, computeFindings(conn, version.id, now));
 }

@@ -1,12 +1,13 @@
 import 'server-only';
 import { z } from 'zod';
 import { findRelease, findWholeVersion, insertOverride } from '@/db/queries/release';
+import { isReleasePublic } from '@/db/queries/sheet';
 import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { compareReleases } from '@/lib/findings/comparability';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
-import { seriesFactsOf } from './comparison';
+import { mayBeCompared, seriesFactsOf } from './comparison';
 import { computeFindings } from './compute-findings';
 import { indexFindings } from './index-findings';
 
@@ -31,14 +32,17 @@ export function overrideComparison(actor: Actor, input: unknown, ctx: Ctx): void
       NonNullable<ReturnType<typeof findWholeVersion>>,
       NonNullable<ReturnType<typeof findWholeVersion>>,
     ];
+    if (!isReleasePublic(tx, earlier.release.id, ctx.now))
+      throw new AppError(
+        'invalid',
+        'That release is under embargo, and its figures would show. Compare with it once the embargo is over.',
+      );
     const { differences } = compareReleases(seriesFactsOf(tx, current), seriesFactsOf(tx, earlier));
-    if (
-      current.version.id === earlier.version.id ||
-      current.version.fieldStartOn <= earlier.version.fieldEndOn
-    )
-      throw new AppError('invalid', 'A comparison is with a release whose interviews ended before.');
-    if (differences.some((difference) => !difference.isOverridable))
-      throw new AppError('invalid', 'Two different races are never compared, whatever the reason.');
+    if (!mayBeCompared(current, earlier, differences))
+      throw new AppError(
+        'invalid',
+        'A comparison is with a release of the same race whose interviews ended before these began.',
+      );
     insertOverride(tx, {
       releaseVersionId: current.version.id,
       comparisonVersionId: earlier.version.id,
@@ -46,7 +50,7 @@ export function overrideComparison(actor: Actor, input: unknown, ctx: Ctx): void
       personId: actor.personId,
       at: ctx.now,
     });
-    indexFindings(tx, current.version.id, computeFindings(tx, current.version.id));
+    indexFindings(tx, current.version.id, computeFindings(tx, current.version.id, ctx.now));
     const subject = { entity: 'release', entityId: publicId, releaseId: current.release.id };
     const after = { comparedWith, differences: differences.map(({ item }) => item) };
     appendRecord(

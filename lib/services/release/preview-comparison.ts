@@ -64,6 +64,7 @@ export function previewComparison(actor: Actor, input: unknown, ctx: Ctx): Compa
     },
     race.id,
     pollster.id,
+    ctx.now,
   );
   return {
     previous: versionId === null ? null : factsOf(ctx.db, versionId),

@@ -9,9 +9,8 @@ import { AppError } from '@/lib/errors';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { readDeskSettings } from '../setup/desk-settings';
-import { computeFindings } from './compute-findings';
 import { factsOf } from './facts';
-import { indexFindings } from './index-findings';
+import { reindexSeries } from './index-findings';
 import { refuseImpossibleFigures } from './refuse-figures';
 import { namedId, storeVersion } from './store-version';
 
@@ -48,7 +47,9 @@ export function reviseRelease(actor: Actor, input: unknown, ctx: Ctx): { version
     });
     const after = factsOf(tx, stored.id);
     refuseImpossibleFigures(after, readDeskSettings(tx).policy.body);
-    indexFindings(tx, stored.id, computeFindings(tx, stored.id));
+    const from = [before.fieldEndOn, after.fieldEndOn].sort()[0]!;
+    for (const series of new Set([release.pollsterId, pollsterId]))
+      reindexSeries(tx, { raceId: release.raceId, pollsterId: series, from }, ctx.now);
     moveSheetsToVersion(tx, release.id, stored.id, findWholeVersion(tx, stored.id)!.question.id);
     const entry = { action: 'revised release', entity: 'release', entityId: id, releaseId: release.id };
     appendRecord(tx, { personId: actor.personId, ...entry, before, after }, ctx.now);

@@ -33,8 +33,8 @@ export type Assembled = {
 };
 
 /** Everything a sheet rests on, computed anew from what is stored now. */
-export function assemble(conn: Conn, sheet: Subject): Assembled {
-  const computed = computeFindings(conn, sheet.releaseVersionId);
+export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
+  const computed = computeFindings(conn, sheet.releaseVersionId, now);
   const { facts, previous, comparison, settings, document, answer, missing } = computed;
   const found = findClaim(answer, sheet.claimKey);
   if (!found || found.finding.kind === 'share')

@@ -48,7 +48,7 @@ export function clearSheetIn(
     isTwoPersonAgreement(filer, actor),
     'One of the two who agree has to be an editor. Leave this one to an editor.',
   );
-  if (assemble(tx, opened.sheet).withTexts(opened.texts).hash !== evidence.hash) {
+  if (assemble(tx, opened.sheet, now).withTexts(opened.texts).hash !== evidence.hash) {
     endFiling(tx, actor, opened, filing, now, {
       act: 'returned',
       comment: 'Figures, policy or house style changed since filing. Agree to the sheet as it is now.',

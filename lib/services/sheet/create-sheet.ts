@@ -32,7 +32,7 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
     const release = findRelease(tx, releaseId, actor, ctx.now);
     const whole = release?.currentVersionId ? findWholeVersion(tx, release.currentVersionId) : null;
     if (!release || !whole) throw new AppError('not-found', 'There is no such release.');
-    const found = findClaim(computeFindings(tx, whole.version.id).answer, claimKey);
+    const found = findClaim(computeFindings(tx, whole.version.id, ctx.now).answer, claimKey);
     if (!found || found.finding.kind === 'share')
       throw new AppError('invalid', 'This release has no such finding.', {
         fields: { claimKey: 'Choose one of the findings of the release.' },
@@ -44,7 +44,7 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
       language: 'en',
       releaseVersionId: whole.version.id,
     };
-    const { draft, computed } = assemble(tx, subject);
+    const { draft, computed } = assemble(tx, subject, ctx.now);
     const sheet = insertSheet(tx, {
       ...subject,
       releaseId: release.id,

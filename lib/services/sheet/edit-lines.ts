@@ -73,7 +73,7 @@ export function applyEdits(tx: Tx, actor: Actor, opened: Opened, edits: LineEdit
 
 /** New draft versions of every line, drafted from what is stored now, with the words as they stand. */
 export function renewLines(tx: Tx, actor: Actor, opened: Opened, now: number): NewestLine[] {
-  const { draft, computed } = assemble(tx, opened.sheet);
+  const { draft, computed } = assemble(tx, opened.sheet, now);
   return opened.lines.map(({ line, version, changedBy }) => ({
     line,
     changedBy,

@@ -46,7 +46,7 @@ export function fileIn(
   const fields = filingProblems(opened.texts);
   if (Object.keys(fields).length > 0)
     throw new AppError('invalid', 'Some lines need another look.', { fields });
-  const assembled = assemble(tx, opened.sheet);
+  const assembled = assemble(tx, opened.sheet, now);
   refuseUnless(
     assembled.basisHash === seen.basisHash,
     'The figures or the house style changed since you opened this page. Reload it and read it once more.',

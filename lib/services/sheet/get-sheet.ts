@@ -115,7 +115,7 @@ type Shown = { body: EvidenceBody; basisHash: string; hasMoved: boolean };
 function evidenceShown(ctx: Ctx, opened: Opened, frozen: EvidenceRow | null): Shown {
   if (frozen && opened.state !== 'filed') return { body: bodyOf(frozen), basisHash: '', hasMoved: false };
   try {
-    const assembled = assemble(ctx.db, opened.sheet);
+    const assembled = assemble(ctx.db, opened.sheet, ctx.now);
     const { body, hash } = assembled.withTexts(opened.texts);
     return { body, basisHash: assembled.basisHash, hasMoved: frozen !== null && frozen.hash !== hash };
   } catch (error) {

@@ -68,7 +68,7 @@ describe('a filed sheet before its second reader', () => {
       'polls.example',
       'Not disclosed: Sponsor.',
       'Not entered: How they were interviewed.',
-      'This series has no release with earlier field dates.',
+      'This series has no release with earlier field dates that is out of embargo.',
     ])
       expect(evidence).toContain(shown);
   });
