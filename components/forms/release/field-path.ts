@@ -3,7 +3,8 @@ import type { FieldFault } from '../../ui/error-summary';
 
 /** The id of the control of a field; `shares.2.printed` is `field-shares-2-printed`. */
 export function fieldId(path: string): string {
-  return `field-${(CONTROL_OF[path] ?? path).replaceAll('.', '-')}`;
+  const whole = path.replace(/^(race\.race\.options)\.\d+$/, '$1');
+  return `field-${(CONTROL_OF[whole] ?? whole).replaceAll('.', '-')}`;
 }
 
 /** Faults of a whole group are told at its first control. */
@@ -76,5 +77,16 @@ function leaves(errors: unknown, path: string[]): { path: string; message: strin
     return [{ path: path.join('.'), message: errors.message }];
   return Object.entries(errors)
     .filter(([key]) => key !== 'ref')
-    .flatMap(([key, value]) => leaves(value, [...path, key]));
+    .flatMap(([key, value]) => leaves(value, isOfWhole(key, path) ? path : [...path, key]));
+}
+
+/** A list's own fault is kept under `root` of the list. */
+function isOfWhole(key: string, path: readonly string[]): boolean {
+  return key === 'root' && path.length > 0;
+}
+
+/** The message of one fault, where it is one. */
+export function messageOf(error: unknown): string | undefined {
+  const isFault = typeof error === 'object' && error !== null && 'message' in error;
+  return isFault && typeof error.message === 'string' && error.message !== '' ? error.message : undefined;
 }

@@ -3,6 +3,7 @@
 import { createContext, type ReactNode, useContext, useDeferredValue, useMemo } from 'react';
 import { type Control, get, useFormState, useWatch } from 'react-hook-form';
 import { comparisonQuery } from './comparison-query';
+import { messageOf } from './field-path';
 import type { FormChoices } from './form-choices';
 import type { ReleaseForm } from './form-values';
 import { type LiveDocument, liveDocument } from './live-document';
@@ -59,8 +60,7 @@ export function useLive(): Live {
 export function useFault(control: Control<ReleaseForm>, path: string): string | undefined {
   const { errors } = useFormState({ control });
   const refusal = useContext(RefusalContext);
-  const error: unknown = get(errors, path);
-  const sent = typeof error === 'object' && error !== null && 'message' in error ? error.message : undefined;
-  if (typeof sent === 'string' && sent !== '') return sent;
+  const sent = messageOf(get(errors, path)) ?? messageOf(get(errors, `${path}.root`));
+  if (sent) return sent;
   return refusal?.field === path ? refusal.message : undefined;
 }

@@ -1,12 +1,12 @@
 'use client';
 
 import { useRef } from 'react';
-import { Controller, useWatch } from 'react-hook-form';
+import { Controller, get, useFormState, useWatch } from 'react-hook-form';
 import { RACE_KIND_NAMES, RACE_KINDS } from '@/lib/domain/vocabulary';
 import { Select } from '../../ui/select';
 import { TextArea } from '../../ui/text-area';
 import { choicesOf } from './choices-of';
-import { fieldId } from './field-path';
+import { fieldId, messageOf } from './field-path';
 import { ChoiceField, Group, type InForm, Row, TextField } from './fields';
 import type { RaceChoice } from './form-choices';
 import { blankRace, blankShare, type NewRace } from './form-values';
@@ -76,8 +76,9 @@ const ADDED = { value: ADD, label: 'Add a race…' };
 
 function RaceOptions({ form, onSettled }: InForm & { onSettled: (names: string[]) => void }) {
   const whole = useFault(form.control, 'race.race.options');
-  const first = useFault(form.control, 'race.race.options.0');
-  const second = useFault(form.control, 'race.race.options.1');
+  const { errors } = useFormState({ control: form.control });
+  const lines: unknown = get(errors, 'race.race.options');
+  const ofLine = Array.isArray(lines) ? lines.map(messageOf).find(Boolean) : undefined;
   return (
     <Controller
       control={form.control}
@@ -89,7 +90,7 @@ function RaceOptions({ form, onSettled }: InForm & { onSettled: (names: string[]
           name={field.name}
           label="Answer options"
           hint="One a line, as the releases name them. Leave out don’t know and the like."
-          error={whole ?? first ?? second}
+          error={whole ?? ofLine}
           rows={4}
           value={(field.value ?? []).join('\n')}
           onChange={(event) => field.onChange(event.target.value.split('\n'))}

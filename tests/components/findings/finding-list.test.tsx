@@ -91,7 +91,7 @@ describe('the summary of verdicts', () => {
     [['holds', 'fragile', 'does-not-hold'], 'One holds, one is fragile, one is not shown.'],
     [['does-not-hold', 'holds', 'holds'], 'Two hold, one is not shown.'],
     [['cannot-be-tested', 'cannot-be-tested'], 'Two cannot be tested.'],
-    [Array.from({ length: 12 }, () => 'fragile'), '12 are fragile.'],
+    [Array.from({ length: 12 }, () => 'fragile' as const), '12 are fragile.'],
     [[], 'Nothing here is tested.'],
   ] as const)('of %j is “%s”', (verdicts, words) => {
     expect(verdictSummary([...verdicts])).toBe(words);
