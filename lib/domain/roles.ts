@@ -25,7 +25,8 @@ export const canLogReleases = (who: Who) => has(who, 'reporter', 'editor');
 export const canDraftSheets = (who: Who) => has(who, 'reporter', 'editor');
 export const canReadUnpublished = (who: Who) => has(who, 'reporter', 'editor');
 export const canActAsEditor = (who: Who) => has(who, 'editor');
-export const canReadCopyDesk = (who: Who) => has(who, 'reporter', 'editor', 'copy-desk');
+/** Everybody on the staff: what is cleared is printable, and an embargo hides what it hides whoever asks. */
+export const canReadCopyDesk = (who: Who) => has(who, ...ROLES);
 export const canMakeEmbeds = (who: Who) => has(who, 'reporter', 'editor', 'copy-desk');
 export const canManagePeople = (who: Who) => has(who, 'administrator');
 export const canReadHistory = (who: Who) => has(who, 'reporter', 'editor', 'administrator');

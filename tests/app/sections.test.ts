@@ -10,7 +10,7 @@ describe('the rail', () => {
     expect(labels('reporter')).toEqual(['Releases', 'Lines', 'Copy desk', 'Embeds', 'History']);
     expect(labels('editor')).toEqual(['Releases', 'Lines', 'Copy desk', 'Embeds', 'History']);
     expect(labels('copy-desk')).toEqual(['Copy desk', 'Embeds']);
-    expect(labels('administrator')).toEqual(['People', 'History']);
+    expect(labels('administrator')).toEqual(['Copy desk', 'People', 'History']);
   });
 
   it('adds up the sections of several roles', () => {

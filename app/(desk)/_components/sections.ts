@@ -24,9 +24,11 @@ export function sectionsFor(who: Who): { href: string; label: string }[] {
   return SECTIONS.filter(({ isOpenTo }) => isOpenTo(who)).map(({ href, label }) => ({ href, label }));
 }
 
-/** Where somebody lands: the first section that is open to them. */
+/** Where somebody lands: the section of their own work. */
 export function homeOf(who: Who): string {
-  return sectionsFor(who)[0]?.href ?? '/account';
+  if (canLogReleases(who)) return '/releases';
+  if (canMakeEmbeds(who)) return '/copy-desk';
+  return canManagePeople(who) ? '/people' : '/account';
 }
 
 /** The section that an address lies in, or null. */

@@ -31,7 +31,7 @@ export function listCopyDesk(
   search: { race: string; pollster: string },
   ctx: Ctx,
 ): ClearedSheetItem[] {
-  authorize(canReadCopyDesk(actor), 'The copy desk is for copy editors, reporters and editors.');
+  authorize(canReadCopyDesk(actor), 'The copy desk is open to people with a role.');
   const rows = listClearedSheets(ctx.db, actor, ctx.now, {
     race: search.race.trim().slice(0, 120),
     pollster: search.pollster.trim().slice(0, 120),
