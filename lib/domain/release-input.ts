@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { type Disclosed, given, NOT_DISCLOSED, NOT_ENTERED } from './disclosed';
+import { plainName } from './plain-name';
 import { readPrintedNumber } from './printed-number';
 import type { StatedMargin } from './release-facts';
 import {
@@ -15,7 +16,7 @@ import {
 const MAX_OPTIONS = 30;
 
 const line = (what: string, max = 160) =>
-  z.string({ error: what }).trim().min(1, what).max(max, `At most ${max} characters.`);
+  z.string({ error: what }).overwrite(plainName).min(1, what).max(max, `At most ${max} characters.`);
 
 const isDay = (text: string) => {
   const date = new Date(`${text}T00:00:00Z`);
@@ -56,6 +57,9 @@ const isProblem = (value: unknown): value is { problem: string } =>
 function oneOf<T extends string>(list: readonly T[]) {
   return (text: string) => list.find((entry) => entry === text) ?? { problem: 'Choose one from the list.' };
 }
+
+/** Nothing is left of a text of invisible characters alone. */
+const readName = (text: string) => plainName(text) || { problem: 'Type it, or leave this empty.' };
 
 function readCount(text: string) {
   const plain = text.replace(/[\s,.’'](?=\d{3}\b)/g, '');
@@ -215,7 +219,7 @@ export const releaseInput = z
       z.strictObject({ kind: z.literal('new'), race: newRaceInput }),
     ]),
     pollster: line('Who did the fieldwork?', 120),
-    sponsor: disclosed((text) => text, 120),
+    sponsor: disclosed(readName, 120),
     population: disclosed(oneOf(POPULATIONS)),
     sampleSource: z.enum(SAMPLE_SOURCES, { error: 'Choose how people came into the sample.' }),
     mode: disclosed(oneOf(MODES)),
@@ -233,7 +237,7 @@ export const releaseInput = z
     deff,
     statedMargin,
     modelledInterval,
-    wording: disclosed((text) => text, 2000),
+    wording: disclosed(readName, 2000),
     sameQuestion: z.boolean(),
     shares: z
       .array(share)

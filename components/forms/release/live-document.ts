@@ -1,9 +1,11 @@
 import { type Disclosed, NOT_ENTERED } from '@/lib/domain/disclosed';
+import { plainName } from '@/lib/domain/plain-name';
 import { type PrintedNumber, readPrintedNumber, unitsAt } from '@/lib/domain/printed-number';
 import type { FactThreshold, ReleaseFacts } from '@/lib/domain/release-facts';
 import { readDecimal, releaseInput } from '@/lib/domain/release-input';
 import { checkDocumentOf } from '@/lib/findings/check-document-of';
 import type { CheckDocument, Policy } from '@/lib/findings/check-types';
+import { withNamesOf } from '@/lib/findings/same-names';
 import { uncountedThresholds } from '@/lib/findings/threshold-base';
 import type { ReleaseForm, ShareRow } from './form-values';
 
@@ -48,8 +50,9 @@ export function liveDocument(values: ReleaseForm, around: LiveAround): LiveDocum
   };
   for (const { option, pct } of uncountedThresholds(facts))
     leftOut.push(`${option} is not held against ${pct}%: the rule counts another base than these shares.`);
+  const previous = around.previous && withNamesOf(around.previous, facts);
   return {
-    document: checkDocumentOf(facts, around.previous, around.policy),
+    document: checkDocumentOf(facts, previous, around.policy),
     rows: read.map((row) => row.row),
     leftOut,
   };
@@ -84,7 +87,7 @@ type ReadRow = { row: number; option: string; printed: PrintedNumber | null; isA
 
 function readShares(rows: readonly ShareRow[], leftOut: string[]): ReadRow[] {
   return rows.flatMap(({ option: typed, printed: text, notDisclosed, isAnswer }, row): ReadRow[] => {
-    const option = typed.trim();
+    const option = plainName(typed);
     const printed = notDisclosed ? null : readPrintedNumber(text);
     const name = option || `Row ${row + 1}`;
     if (!notDisclosed && text.trim() === '') return [];
@@ -136,6 +139,6 @@ function thresholdsOf({ race }: ReleaseForm, { thresholds }: LiveAround): FactTh
   if (race.kind === 'existing') return thresholds;
   return race.race.thresholds.flatMap(({ option, pct: typed, base }) => {
     const pct = readDecimal(typed);
-    return pct !== null && pct > 0 && pct < 100 ? [{ option: option.trim(), pct, base }] : [];
+    return pct !== null && pct > 0 && pct < 100 ? [{ option: plainName(option), pct, base }] : [];
   });
 }

@@ -1,9 +1,14 @@
 import 'server-only';
 import { z } from 'zod';
+import { plainName } from '@/lib/domain/plain-name';
 import { ROLES } from '@/lib/domain/roles';
 
 export const personFields = {
-  name: z.string().trim().min(1, 'Type the name as it should appear.').max(80, 'At most 80 characters.'),
+  name: z
+    .string()
+    .overwrite(plainName)
+    .min(1, 'Type the name as it should appear.')
+    .max(80, 'At most 80 characters.'),
   email: z
     .string()
     .trim()

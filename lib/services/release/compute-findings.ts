@@ -9,6 +9,7 @@ import { checkDocumentOf } from '@/lib/findings/check-document-of';
 import type { CheckAnswer, CheckDocument } from '@/lib/findings/check-types';
 import { type DisclosureItem, missingDisclosure, type MissingDisclosure } from '@/lib/findings/disclosure';
 import { parseCheckDocument } from '@/lib/findings/parse-check';
+import { withNamesOf } from '@/lib/findings/same-names';
 import { type DeskSettings, readDeskSettings } from '../setup/desk-settings';
 import { type Comparison, comparisonOf } from './comparison';
 import { factsOf } from './facts';
@@ -30,7 +31,8 @@ export function computeFindings(conn: Conn, versionId: number, now: number): Com
   const settings = readDeskSettings(conn);
   const facts = factsOf(conn, versionId);
   const comparison = comparisonOf(conn, whole, now);
-  const previous = comparison.versionId === null ? null : factsOf(conn, comparison.versionId);
+  const previous =
+    comparison.versionId === null ? null : withNamesOf(factsOf(conn, comparison.versionId), facts);
   const document = parseCheckDocument(checkDocumentOf(facts, previous, settings.policy.body));
   const missing = missingDisclosure(disclosureOf(facts));
   return { facts, previous, comparison, settings, document, answer: check(document), missing };

@@ -9,14 +9,10 @@ import { AppError } from '@/lib/errors';
  */
 export function embargoInstant(local: string, zone: string): number {
   const plain = readLocal(local);
-  const instants = (['earlier', 'later'] as const).map((disambiguation) => {
-    try {
-      return plain.toZonedDateTime(zone, { disambiguation });
-    } catch (cause) {
-      throw refusal('embargo.zone', 'There is no such time zone.', cause);
-    }
-  });
-  const [earlier, later] = instants as [Temporal.ZonedDateTime, Temporal.ZonedDateTime];
+  refuseUnknownZone(zone);
+  const [earlier, later] = (['earlier', 'later'] as const).map((disambiguation) =>
+    plain.toZonedDateTime(zone, { disambiguation }),
+  ) as [Temporal.ZonedDateTime, Temporal.ZonedDateTime];
   if (earlier.epochMilliseconds === later.epochMilliseconds) return earlier.epochMilliseconds;
   const happensTwice = earlier.toPlainDateTime().equals(plain);
   throw refusal(
@@ -25,6 +21,15 @@ export function embargoInstant(local: string, zone: string): number {
       ? 'The clocks go back then, and this time happens twice. Give the embargo in UTC.'
       : 'The clocks go forward then, and this time does not exist. Choose another.',
   );
+}
+
+/** Only zones that screens can show too: a bare offset such as +05:00 is none to every reader of this zone. */
+function refuseUnknownZone(zone: string): void {
+  try {
+    new Intl.DateTimeFormat('en', { timeZone: zone });
+  } catch (cause) {
+    throw refusal('embargo.zone', 'There is no such time zone.', cause);
+  }
 }
 
 function readLocal(local: string): Temporal.PlainDateTime {

@@ -2,6 +2,7 @@ import 'server-only';
 import { z } from 'zod';
 import { findRelease, findWholeVersion, insertOverride } from '@/db/queries/release';
 import { isReleasePublic } from '@/db/queries/sheet';
+import { plainName } from '@/lib/domain/plain-name';
 import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { compareReleases } from '@/lib/findings/comparability';
@@ -15,7 +16,7 @@ const id = z.string().min(1).max(64);
 const schema = z.strictObject({
   id,
   comparedWith: id,
-  reason: z.string().trim().min(10, 'Say in a sentence why the two may be compared.').max(1000),
+  reason: z.string().overwrite(plainName).min(10, 'Say in a sentence why the two may be compared.').max(1000),
 });
 
 /** Compares a release with one that differs, for a written reason that travels into the method note. */

@@ -1,6 +1,7 @@
 import 'server-only';
 import { z } from 'zod';
 import { findNamed, findRaceByPublicId } from '@/db/queries/race';
+import { plainName } from '@/lib/domain/plain-name';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { type Actor, canLogReleases } from '@/lib/domain/roles';
 import { DESIGNS, MODES, POPULATIONS, SAMPLE_SOURCES } from '@/lib/domain/vocabulary';
@@ -39,7 +40,7 @@ export function previewComparison(actor: Actor, input: unknown, ctx: Ctx): Compa
   const query = parse(schema, input);
   const policy = readDeskSettings(ctx.db).policy.body;
   const race = findRaceByPublicId(ctx.db, query.raceId);
-  const pollster = findNamed(ctx.db, 'pollsters', query.pollster.trim());
+  const pollster = findNamed(ctx.db, 'pollsters', plainName(query.pollster));
   if (!race || !pollster) return { previous: null, comparison: null, policy };
   const { versionId, reason, unknowns, differences, passedOver } = chooseAmong(
     ctx.db,

@@ -105,6 +105,7 @@ describe('the wall time of an embargo', () => {
     ['is on no calendar', '2026-02-30T12:00', 'UTC', 'embargo.local'],
     ['has no such hour', '2026-02-20T24:30', 'UTC', 'embargo.local'],
     ['lies in no zone', '2026-09-17T12:00', 'Averil/Coast', 'embargo.zone'],
+    ['lies at a bare offset, which no screen could show', '2026-09-17T12:00', '+05:00', 'embargo.zone'],
   ])('is refused at its field where it %s', (_, local, zone, field) => {
     const race = { kind: 'existing' as const, id: getRelease(reporter, id, desk.ctx()).facts.race.id };
     const log = () => logRelease(desk.db, reporter, { race, embargo: { local, zone } });
