@@ -4,12 +4,16 @@ import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
 import { records } from '@/db/schema/records';
 import { releases } from '@/db/schema/releases';
-import { type Viewer, visible } from './visible';
+import { isPublic, type Viewer, visible } from './visible';
 
 export type RecordRow = typeof records.$inferSelect;
 
 export function findLastRecord(conn: Conn): RecordRow | null {
   return conn.select().from(records).orderBy(desc(records.seq)).limit(1).get() ?? null;
+}
+
+export function findRecord(conn: Conn, seq: number): RecordRow | null {
+  return conn.select().from(records).where(eq(records.seq, seq)).get() ?? null;
 }
 
 export function insertRecord(conn: Conn, row: RecordRow): void {
@@ -38,6 +42,7 @@ export function listRecords(conn: Conn, page: RecordPage, viewer: Viewer, now: n
       record: records,
       person: people.name,
       isVisible: sql<number>`(${visible(conn, viewer, now)})`.mapWith(Boolean),
+      isHeld: sql<number>`(not (${isPublic(now)}))`.mapWith(Boolean),
     })
     .from(records)
     .leftJoin(people, eq(people.id, records.personId))

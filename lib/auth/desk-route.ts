@@ -23,13 +23,17 @@ export function readRoute(read: Read) {
     });
 }
 
-/** A handler that changes something: only from our own pages, only JSON, only so large. */
+/**
+ * A handler that changes something: only from our own pages, only JSON, only so large. Who asks is read again once
+ * the body is there, since a slow one can outlast a session or a role.
+ */
 export function writeRoute(write: Write) {
   return (request: Request, context: RouteContext) =>
     answer(async () => {
       sameOrigin(request.headers);
-      const actor = await requireActor();
-      return write(actor, await readJson(request), requestContext(), await context.params);
+      await requireActor();
+      const body = await readJson(request);
+      return write(await requireActor(), body, requestContext(), await context.params);
     });
 }
 

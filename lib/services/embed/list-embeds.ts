@@ -1,10 +1,12 @@
 import 'server-only';
 import { findEvidence } from '@/db/queries/clearing';
 import { listEmbeds as listRows } from '@/db/queries/embed';
+import { isListed } from '@/db/queries/embargo';
 import { isReleasePublic } from '@/db/queries/sheet';
 import { type Actor, canMakeEmbeds } from '@/lib/domain/roles';
 import { readEnv } from '@/lib/env';
 import { authorize, type Ctx } from '../context';
+import { recordEmbargoViews } from '../release/record-embargo-views';
 import type { EvidenceBody } from '../sheet/evidence-body';
 
 export type EmbedItem = {
@@ -25,8 +27,12 @@ export type EmbedItem = {
 /** Every embed with where it stands; one under embargo waits, its address exists already. */
 export function listEmbeds(actor: Actor, ctx: Ctx): EmbedItem[] {
   authorize(canMakeEmbeds(actor), 'Embeds are made by reporters, editors and the copy desk.');
-  return newestOf(listRows(ctx.db, actor, ctx.now, 200)).map((row) => {
-    const isPublic = isReleasePublic(ctx.db, row.release.id, ctx.now);
+  const rows = newestOf(listRows(ctx.db, actor, ctx.now, 200));
+  const isPublicNow = (row: (typeof rows)[number]) => isReleasePublic(ctx.db, row.release.id, ctx.now);
+  const held = rows.filter((row) => !isPublicNow(row) && isListed(ctx.db, row.release.id, actor));
+  recordEmbargoViews(ctx, actor, new Set(held.map(({ release }) => release.id)), 'embeds');
+  return rows.map((row) => {
+    const isPublic = isPublicNow(row);
     const body = JSON.parse(findEvidence(ctx.db, row.evidenceId)!.bytes.toString('utf8')) as EvidenceBody;
     return {
       id: row.embed.publicId,

@@ -2,8 +2,9 @@ import 'server-only';
 import { z } from 'zod';
 import { findPersonByPublicId } from '@/db/queries/person';
 import { findLastRecord, listRecords } from '@/db/queries/record';
-import { type Actor, canReadHistory } from '@/lib/domain/roles';
+import { type Actor, canReadHistory, canReadUnpublished } from '@/lib/domain/roles';
 import { authorize, type Ctx, parse } from '../context';
+import { recordEmbargoViews } from '../release/record-embargo-views';
 import type { Head } from './head';
 
 export const PAGE_SIZE = 50;
@@ -48,6 +49,7 @@ export function listHistory(actor: Actor, input: unknown, ctx: Ctx): HistoryPage
   const asked = { before, entity, entityId, limit: PAGE_SIZE + 1 };
   const rows = listRecords(ctx.db, asked, actor, ctx.now);
   const page = rows.slice(0, PAGE_SIZE);
+  recordViews(actor, page, ctx);
   const last = findLastRecord(ctx.db);
   return {
     entries: page.map(({ record, person, isVisible }) => ({
@@ -67,6 +69,13 @@ export function listHistory(actor: Actor, input: unknown, ctx: Ctx): HistoryPage
     older: rows.length > PAGE_SIZE ? (page.at(-1)?.record.seq ?? null) : null,
     head: last ? { seq: last.seq, hash: last.hash } : null,
   };
+}
+
+/** Whoever reads held figures from an embargo list, and not by role, is written down. */
+function recordViews(actor: Actor, page: ReturnType<typeof listRecords>, ctx: Ctx): void {
+  if (canReadUnpublished(actor)) return;
+  const read = page.filter(({ isVisible, isHeld }) => isVisible && isHeld);
+  recordEmbargoViews(ctx, actor, new Set(read.map(({ record }) => record.releaseId!)), 'history');
 }
 
 function nameOf(publicId: string, ctx: Ctx): string | null {

@@ -46,7 +46,7 @@ export function createReleaseIn(
   key: string,
   now: number,
 ): ReleaseRow {
-  const race = raceOf(tx, actor, input, now);
+  const { race, isNew } = raceOf(tx, input, now);
   const embargo = input.embargo && {
     embargoAt: embargoInstant(input.embargo.local, input.embargo.zone),
     embargoLocal: input.embargo.local,
@@ -61,6 +61,7 @@ export function createReleaseIn(
     submissionKey: key,
     ...embargo,
   });
+  if (isNew) recordRace(tx, actor, race, input, release.id, now);
   const who = { releaseId: release.id, number: 1, personId: actor.personId, now };
   const version = storeVersion(tx, input, who);
   const facts = factsOf(tx, version.id);
@@ -81,20 +82,30 @@ export function createReleaseIn(
   return release;
 }
 
-function raceOf(tx: Tx, actor: Actor, input: ReleaseInput, now: number): RaceRow {
+function raceOf(tx: Tx, input: ReleaseInput, now: number): { race: RaceRow; isNew: boolean } {
   if (input.race.kind === 'existing') {
     const race = findRaceByPublicId(tx, input.race.id);
-    if (race) return race;
+    if (race) return { race, isNew: false };
     throw fieldError('race.id', 'This race is not on the list any more.');
   }
   const { name, kind, options, thresholds } = input.race.race;
   if (findRaceByName(tx, name))
     throw fieldError('race.race.name', 'A race of this name exists: choose it from the list.');
   const row = { publicId: newId(), name, kind, createdAt: now };
-  const race = insertRace(tx, row, options, thresholds);
+  return { race: insertRace(tx, row, options, thresholds), isNew: true };
+}
+
+/** Told as part of the release that brought it, so that an embargo holds the race back too. */
+function recordRace(
+  tx: Tx,
+  actor: Actor,
+  race: RaceRow,
+  { race: given }: ReleaseInput,
+  releaseId: number,
+  now: number,
+): void {
   const entry = { personId: actor.personId, action: 'added race', entity: 'race', entityId: race.publicId };
-  appendRecord(tx, { ...entry, after: input.race.race }, now);
-  return race;
+  appendRecord(tx, { ...entry, after: given.kind === 'new' ? given.race : null, releaseId }, now);
 }
 
 function fieldError(field: string, message: string): AppError {

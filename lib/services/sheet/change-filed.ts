@@ -2,7 +2,7 @@ import 'server-only';
 import { z } from 'zod';
 import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { touchSheet } from '@/db/queries/sheet';
-import { authorize, type Ctx, parse, transact } from '../context';
+import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { endFiling, filingOf } from './clear-sheet';
 import { applyEdits, lineEdits, renewLines } from './edit-lines';
@@ -24,6 +24,7 @@ export function changeFiledSheet(actor: Actor, input: unknown, ctx: Ctx): Filed 
   authorize(canActAsEditor(actor), 'Only an editor changes filed words.');
   const { id, version, basisHash, lines } = parse(schema, input);
   return transact(ctx, (tx) => {
+    authorize(canActAsEditor(actingNow(tx, actor)), 'Only an editor changes filed words.');
     const opened = openSheet(tx, actor, id, ctx.now);
     refuseUnless(opened.sheet.version === version, MOVED_ON);
     const filing = filingOf(tx, opened);

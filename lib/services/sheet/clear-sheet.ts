@@ -6,7 +6,7 @@ import { findEmbedOfSheet, insertEmbedVersion } from '@/db/queries/embed';
 import { listClearedLines, moveLineVersions, touchSheet } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets, isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
 import { newId } from '@/lib/security/ids';
-import { authorize, type Ctx, parse, transact } from '../context';
+import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { assemble } from './assemble-evidence';
 import { MOVED_ON, openSheet, type Opened, refuseUnless } from './sheet-state';
@@ -31,10 +31,12 @@ export function clearSheet(actor: Actor, input: unknown, ctx: Ctx): Cleared {
 
 export function clearSheetIn(
   tx: Tx,
-  actor: Actor,
+  asker: Actor,
   { id, hash }: { id: string; hash: string },
   now: number,
 ): Cleared {
+  const actor = actingNow(tx, asker);
+  authorize(canDraftSheets(actor), 'Only reporters and editors read filed sheets.');
   const opened = openSheet(tx, actor, id, now);
   const filing = filingOf(tx, opened);
   const evidence = findEvidence(tx, filing.evidenceId!)!;

@@ -7,7 +7,7 @@ import { moveLineVersions, touchSheet } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
-import { authorize, type Ctx, parse, transact } from '../context';
+import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { assemble } from './assemble-evidence';
 import { applyEdits, filingProblems, lineEdits, openForWriting } from './edit-lines';
@@ -37,11 +37,13 @@ export function fileSheet(actor: Actor, input: unknown, ctx: Ctx): Filed {
 /** The act itself, on lines that are drafts. */
 export function fileIn(
   tx: Tx,
-  actor: Actor,
+  asker: Actor,
   seen: { id: string; version: number; basisHash: string },
   now: number,
   action: string,
 ): Filed {
+  const actor = actingNow(tx, asker);
+  authorize(canDraftSheets(actor), 'Only reporters and editors file sheets.');
   const opened = openSheet(tx, actor, seen.id, now);
   const fields = filingProblems(opened.texts);
   if (Object.keys(fields).length > 0)

@@ -1,7 +1,10 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { listEmbargoViews } from '@/db/queries/embargo';
+import { findRelease } from '@/db/queries/release';
 import { answerEmbed } from '@/lib/services/embed/answer';
 import { createEmbed } from '@/lib/services/embed/create-embed';
 import { listEmbeds } from '@/lib/services/embed/list-embeds';
+import { setEmbargoReader } from '@/lib/services/release/embargo';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
 import { pullSheet } from '@/lib/services/sheet/pull-sheet';
 import { freshDatabase, HOUR, makePerson } from '@/tests/support/database';
@@ -26,8 +29,9 @@ const named = (name: string) =>
   ({ ...GOVERNOR, race: { ...(GOVERNOR as { race: object }).race, name } }) as typeof GOVERNOR;
 
 function embedOf(race: string, embargo: typeof NOON | null = null) {
-  const sheetId = on.cleared(reporter, editor, logRelease(db, reporter, { race: named(race), embargo }));
-  return { sheetId, id: createEmbed(editor, { sheetId }, desk.ctx()).id };
+  const releaseId = logRelease(db, reporter, { race: named(race), embargo });
+  const sheetId = on.cleared(reporter, editor, releaseId);
+  return { releaseId, sheetId, id: createEmbed(editor, { sheetId }, desk.ctx()).id };
 }
 
 const ask = (path: string, headers: Record<string, string> = {}, later = 0, query = '') => {
@@ -167,5 +171,17 @@ describe('the list of embeds', () => {
     expect(states(copyDesk)).toEqual({ 'Averil Coast governor': 'live', 'Bridge toll': 'pulled' });
     expect(refusal(() => listEmbeds(administrator, desk.ctx()))[0]).toBe('forbidden');
     expect(listEmbeds(editor, desk.ctx()).at(-1)?.url).toBe(`http://localhost:3000/embed/${live.id}`);
+  });
+
+  it('is read under embargo from the list of the release, and each such reading is recorded', () => {
+    const input = { id: waiting.releaseId, personId: copyDesk.publicId, listed: true };
+    setEmbargoReader(editor, input, desk.ctx());
+    const seen = () => listEmbeds(copyDesk, desk.ctx()).map(({ race }) => race);
+    expect(seen()).toContain('Assembly');
+    const release = findRelease(db, waiting.releaseId, editor, desk.ctx().now)!;
+    const view = { name: 'Tamsin Oake', at: desk.ctx().now, what: 'embeds' };
+    expect(listEmbargoViews(db, release.id)).toEqual([view]);
+    setEmbargoReader(editor, { ...input, listed: false }, desk.ctx());
+    expect(seen()).not.toContain('Assembly');
   });
 });

@@ -1,11 +1,13 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { listEmbargoViews } from '@/db/queries/embargo';
+import { findRelease } from '@/db/queries/release';
 import type { Role } from '@/lib/domain/roles';
 import { listHistory, PAGE_SIZE } from '@/lib/services/history/list-history';
 import { addPerson } from '@/lib/services/people/add-person';
 import { liftEmbargo, setEmbargoReader } from '@/lib/services/release/embargo';
 import { freshDatabase, HOUR, makePerson, NOW } from '@/tests/support/database';
 import { refusal } from '@/tests/support/refusal';
-import { logRelease } from '@/tests/support/release';
+import { logRelease, sharesOf } from '@/tests/support/release';
 
 const desk = freshDatabase();
 afterAll(desk.closeAndRemove);
@@ -87,6 +89,29 @@ describe('what an embargo hides', () => {
   it('is nothing from an administrator on the embargo list of that release', () => {
     expect(entryOf(listed, administrator).hidden).toBe(false);
     expect(entryOf(early, administrator).hidden).toBe(true);
+  });
+
+  it('is the race that an early release brought with it', () => {
+    const name = 'Quay levy';
+    const race = {
+      kind: 'new' as const,
+      race: { name, kind: 'issue' as const, options: ['For'], thresholds: [] },
+    };
+    logRelease(desk.db, editor, { embargo, race, shares: sharesOf([['For', '51']]) });
+    const added = (later: number) =>
+      listHistory(administrator, { entity: 'race' }, desk.ctx(later)).entries[0]!;
+    expect(added(LIFTS - 1)).toMatchObject({ action: 'added race', hidden: true, after: null });
+    expect(added(LIFTS)).toMatchObject({ hidden: false, after: { name } });
+  });
+
+  it('is read from its list by name only, and each such reading is recorded', () => {
+    const release = findRelease(desk.db, listed, editor, desk.ctx().now)!;
+    const before = listEmbargoViews(desk.db, release.id).length;
+    listHistory(editor, { entityId: listed }, desk.ctx(5));
+    listHistory(administrator, { entityId: listed }, desk.ctx(7));
+    expect(listEmbargoViews(desk.db, release.id).slice(before)).toEqual([
+      { name: administrator.name, at: desk.ctx(7).now, what: 'history' },
+    ]);
   });
 
   it('leaves no figure of the release anywhere in the page', () => {

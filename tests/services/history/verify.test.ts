@@ -1,6 +1,6 @@
 import { join } from 'node:path';
-import { writeFileSync } from 'node:fs';
-import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { mkdirSync, rmSync, writeFileSync } from 'node:fs';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { listAllRecords } from '@/db/queries/record';
 import { headFile, readHead } from '@/lib/services/history/head';
 import { verifyHistory } from '@/lib/services/history/verify';
@@ -88,6 +88,30 @@ describe('the history', () => {
       ok: false,
       problem: 'entry 5 is not the one that the printed head knows',
     });
+  });
+
+  it('keeps the head that witnesses a cut tail, however much is written afterwards', () => {
+    const known = headOnDisk()!;
+    tamper('DELETE FROM records WHERE seq = 5');
+    const administrator = makePerson(desk.db, { name: 'Bela Tarn', roles: ['administrator'] });
+    for (const name of ['Fred Loe', 'Greta Loe', 'Hugo Loe']) {
+      const email = `${name.slice(0, 4)}@courier.example`;
+      addPerson(administrator, { name, email, roles: ['reporter'] }, desk.ctx());
+    }
+    expect(headOnDisk()).toEqual(known);
+    expect(verify()).toMatchObject({ ok: false });
+  });
+
+  it('answers an act that is on disk as done, even where the head cannot be written', () => {
+    const told = vi.spyOn(console, 'error').mockImplementation(() => undefined);
+    const file = headFile(desk.db)!;
+    rmSync(file);
+    mkdirSync(join(file, 'in the way'), { recursive: true });
+    const administrator = makePerson(desk.db, { name: 'Bela Tarn', roles: ['administrator'] });
+    const input = { name: 'Fred Loe', email: 'fred@courier.example', roles: ['reporter'] };
+    expect(addPerson(administrator, input, desk.ctx()).id).toMatch(/^[\w-]{22}$/);
+    expect(listAllRecords(desk.db)).toHaveLength(6);
+    expect(told).toHaveBeenCalledOnce();
   });
 
   it('takes a head file that cannot be read for none', () => {

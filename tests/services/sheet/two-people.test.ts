@@ -2,7 +2,7 @@ import { afterAll, beforeEach, describe, expect, it } from 'vitest';
 import { databaseFile, openDatabase } from '@/db/client';
 import type { Role } from '@/lib/domain/roles';
 import { readSession } from '@/lib/services/account/read-session';
-import { setRoles } from '@/lib/services/people/change-person';
+import { setDisabled, setRoles } from '@/lib/services/people/change-person';
 import { changeFiledSheet } from '@/lib/services/sheet/change-filed';
 import { clearSheet, sendBack } from '@/lib/services/sheet/clear-sheet';
 import { fileSheet } from '@/lib/services/sheet/file-sheet';
@@ -84,6 +84,21 @@ describe('words filed by a reporter', () => {
     const hash = on.hashOf(reader, id);
     const demoted = withRoles(reader, ['reporter']);
     expect(refusal(() => clearSheet(demoted, { id, hash }, desk.ctx()))[0]).toBe('forbidden');
+    expect(stateOf()).toBe('filed');
+  });
+
+  it('are not cleared or filed by a request that outlasted its person’s role or account', () => {
+    const reader = makePerson(db, { name: 'Sela Wick', roles: ['editor'] });
+    const hash = on.hashOf(reader, id);
+    const draft = on.draft(reader, releaseId);
+    const filing = on.filing(reader, draft);
+    withRoles(reader, ['reporter']);
+    expect(refusal(() => clearSheet(reader, { id, hash }, desk.ctx()))[0]).toBe('forbidden');
+    expect(refusal(() => changeFiledSheet(reader, filing, desk.ctx()))[0]).toBe('forbidden');
+    fileSheet(reader, filing, desk.ctx());
+    expect(refusal(() => on.clear(colleague, draft))[0], 'filed as a reporter by then').toBe('forbidden');
+    setDisabled(administrator, { id: reader.publicId, version: 2, disabled: true }, desk.ctx());
+    expect(refusal(() => clearSheet(reader, { id, hash }, desk.ctx()))[0]).toBe('not-signed-in');
     expect(stateOf()).toBe('filed');
   });
 
