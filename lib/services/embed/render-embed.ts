@@ -33,7 +33,7 @@ export function pageOf({ evidence, version, at }: Subject, theme: ThemeChoice): 
     caveat: textOf(evidence, 'caveat'),
     version,
     updated: dated(at),
-    source: { text: `Source: ${release.pollster.name}`, url: valueOf(release.sourceUrl) },
+    source: { text: release.pollster.name, url: valueOf(release.sourceUrl) },
   });
 }
 
