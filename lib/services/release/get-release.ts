@@ -7,6 +7,7 @@ import { AppError } from '@/lib/errors';
 import { renderMarkdown } from '@/lib/markdown/render-markdown';
 import { authorize, type Ctx } from '../context';
 import { type Computed, computeFindings } from './compute-findings';
+import { whyNotRevised } from './why-not-revised';
 
 export type EmbargoView = {
   /** Still running now. */
@@ -32,6 +33,8 @@ export type ReleaseView = Omit<Computed, 'settings' | 'comparison'> & {
   loggedAt: number;
   methodNoteHtml: string | null;
   isFrozen: boolean;
+  /** Why these figures may not change now. */
+  whyNotRevised: string | null;
 };
 
 /** One release with what its numbers support, for those who may read unpublished figures. */
@@ -58,6 +61,7 @@ export function getRelease(actor: Actor, id: string, ctx: Ctx): ReleaseView {
     loggedAt: whole.version.createdAt,
     methodNoteHtml: whole.version.methodNote && renderMarkdown(whole.version.methodNote),
     isFrozen: whole.version.frozenAt !== null,
+    whyNotRevised: whyNotRevised(ctx.db, release.id),
   };
 }
 

@@ -13,6 +13,8 @@ import { factsOf } from './facts';
 
 const day = z.string().regex(/^\d{4}-\d{2}-\d{2}$/);
 const schema = z.strictObject({
+  /** Of a release that is being changed, so that it is not compared with itself; empty for a new one. */
+  releaseId: z.string().max(64).default(''),
   raceId: z.string().max(64),
   pollster: z.string().max(120),
   wording: z.string().max(2000).nullable(),
@@ -45,7 +47,7 @@ export function previewComparison(actor: Actor, input: unknown, ctx: Ctx): Compa
   const { versionId, reason, unknowns, differences, passedOver } = chooseAmong(
     ctx.db,
     {
-      id: '',
+      id: query.releaseId,
       pollster: pollster.publicId,
       race: race.publicId,
       questionWording: query.wording,

@@ -1,8 +1,7 @@
 import 'server-only';
 import { z } from 'zod';
-import type { Tx } from '@/db/client';
-import { findRelease, findWholeVersion, type ReleaseRow, updateRelease } from '@/db/queries/release';
-import { countClearedSheetsOn, moveSheetsToVersion } from '@/db/queries/sheet';
+import { findRelease, findWholeVersion, updateRelease } from '@/db/queries/release';
+import { moveSheetsToVersion } from '@/db/queries/sheet';
 import { releaseInput } from '@/lib/domain/release-input';
 import { type Actor, canLogReleases } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
@@ -13,6 +12,7 @@ import { factsOf } from './facts';
 import { reindexSeries } from './index-findings';
 import { refuseImpossibleFigures } from './refuse-figures';
 import { namedId, storeVersion } from './store-version';
+import { whyNotRevised } from './why-not-revised';
 
 const schema = z.strictObject({
   id: z.string().min(1).max(64),
@@ -35,7 +35,8 @@ export function reviseRelease(actor: Actor, input: unknown, ctx: Ctx): { version
       throw new AppError('invalid', 'Some fields need another look.', {
         fields: { 'race.id': 'A release stays with its race. Log it anew for another one.' },
       });
-    refuseUnderClearedWords(tx, release);
+    const whyNot = whyNotRevised(tx, release.id);
+    if (whyNot) throw new AppError('conflict', whyNot);
     const pollsterId = namedId(tx, 'pollsters', given.pollster, ctx.now);
     if (!updateRelease(tx, release.id, version, { pollsterId }))
       throw new AppError('conflict', 'Somebody changed this release meanwhile. Reload it and look again.');
@@ -55,12 +56,4 @@ export function reviseRelease(actor: Actor, input: unknown, ctx: Ctx): { version
     appendRecord(tx, { personId: actor.personId, ...entry, before, after }, ctx.now);
     return { version: version + 1 };
   });
-}
-
-function refuseUnderClearedWords(tx: Tx, release: ReleaseRow): void {
-  if (countClearedSheetsOn(tx, release.id) > 0)
-    throw new AppError(
-      'conflict',
-      'Cleared words rest on this release. Pull them before its figures change.',
-    );
 }
