@@ -14,6 +14,8 @@ import type { ReleaseForm } from './form-values';
 
 /** What of the form decides which earlier release it is compared with. */
 export type ComparisonQuery = {
+  /** Of a release that is being changed, which is not compared with itself; empty for a new one. */
+  releaseId: string;
   raceId: string;
   pollster: string;
   wording: string | null;
@@ -45,13 +47,14 @@ export type Compared = {
 };
 
 /** null until there is a race on file and a pollster. */
-export function comparisonQuery(values: ReleaseForm): ComparisonQuery | null {
+export function comparisonQuery(values: ReleaseForm, releaseId: string): ComparisonQuery | null {
   const { race } = values;
   const pollster = values.pollster.trim().slice(0, 120);
   if (race.kind !== 'existing' || race.id === '' || pollster === '') return null;
   const named = values.shares.filter((row) => row.option.trim() !== '').slice(0, 30);
   const wording = textOf(values.wording).slice(0, 2000);
   return {
+    releaseId,
     raceId: race.id,
     pollster,
     wording: wording === '' ? null : wording,

@@ -1,14 +1,13 @@
 'use client';
 
-import { useMemo } from 'react';
+import { type ReactNode, useMemo } from 'react';
 import { useWatch } from 'react-hook-form';
 import { Checkbox } from '../../ui/checkbox';
 import { fieldId } from './field-path';
 import { Group, type InForm, TextField } from './fields';
 
 /** When people were asked, when it comes out, and until when it is held. */
-export function DatesGroup({ form, zone }: InForm & { zone: string }) {
-  const isHeld = useWatch({ control: form.control, name: 'embargo' }) !== null;
+export function DatesGroup({ form, children }: InForm & { children: ReactNode }) {
   return (
     <Group title="Dates">
       <div className="grid gap-x-5 sm:grid-cols-3">
@@ -16,6 +15,16 @@ export function DatesGroup({ form, zone }: InForm & { zone: string }) {
         <TextField form={form} path="fieldEndOn" label="Last day of interviews" type="date" />
         <TextField form={form} path="publishedOn" label="Publication date" type="date" />
       </div>
+      {children}
+    </Group>
+  );
+}
+
+/** Until when a new release is held, where it is. */
+export function EmbargoFields({ form, zone }: InForm & { zone: string }) {
+  const isHeld = useWatch({ control: form.control, name: 'embargo' }) !== null;
+  return (
+    <>
       <Checkbox
         id={fieldId('embargo.on')}
         label="Under embargo"
@@ -23,7 +32,7 @@ export function DatesGroup({ form, zone }: InForm & { zone: string }) {
         onChange={(event) => form.setValue('embargo', event.target.checked ? { local: '', zone } : null)}
       />
       {isHeld ? <Embargo form={form} /> : null}
-    </Group>
+    </>
   );
 }
 

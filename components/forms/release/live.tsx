@@ -23,15 +23,18 @@ export function LiveProvider({
   control,
   choices,
   personId,
+  releaseId,
   children,
 }: {
   control: Control<ReleaseForm>;
   choices: FormChoices;
   personId: string;
+  /** Of a release that is being changed; empty for a new one. */
+  releaseId: string;
   children: ReactNode;
 }) {
   const values = useDeferredValue(useWatch({ control }) as ReleaseForm);
-  const comparison = useComparison(comparisonQuery(values), personId);
+  const comparison = useComparison(comparisonQuery(values, releaseId), personId);
   const previous = comparison.kind === 'answered' ? comparison.compared.previous : null;
   const { policy, races } = choices;
   const chosen = values.race.kind === 'existing' ? values.race.id : null;

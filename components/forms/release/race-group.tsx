@@ -5,6 +5,7 @@ import { Controller, get, useFormState, useWatch } from 'react-hook-form';
 import { RACE_KIND_NAMES, RACE_KINDS } from '@/lib/domain/vocabulary';
 import { Select } from '../../ui/select';
 import { TextArea } from '../../ui/text-area';
+import { TextInput } from '../../ui/text-input';
 import { choicesOf } from './choices-of';
 import { fieldId, messageOf } from './field-path';
 import { ChoiceField, Group, type InForm, Row, TextField } from './fields';
@@ -68,6 +69,25 @@ export function RaceGroup({ form, races }: InForm & { races: readonly RaceChoice
           <ThresholdRows form={form} />
         </div>
       ) : null}
+    </Group>
+  );
+}
+
+/** The race of a release that is on file: it stays. */
+export function FixedRace({ form, races }: InForm & { races: readonly RaceChoice[] }) {
+  const race = useWatch({ control: form.control, name: 'race' });
+  const error = useFault(form.control, 'race.id');
+  const name = race.kind === 'existing' ? races.find(({ id }) => id === race.id)?.name : race.race.name;
+  return (
+    <Group title="Race">
+      <TextInput
+        id={fieldId('race.id')}
+        label="Race"
+        hint="A release stays with its race. Log it anew for another one."
+        error={error}
+        value={name ?? ''}
+        readOnly
+      />
     </Group>
   );
 }

@@ -1,107 +1,92 @@
 'use client';
 
-import { zodResolver } from '@hookform/resolvers/zod';
 import { useRouter } from 'next/navigation';
-import { type FormEvent, useCallback, useEffect, useState } from 'react';
-import { type FieldPath, type Resolver, useForm, useFormState, useWatch } from 'react-hook-form';
-import { type ReleaseFormValues, releaseInput } from '@/lib/domain/release-input';
+import { type FormEvent, type ReactNode, useState } from 'react';
+import { type FieldPath, useFormState, useWatch } from 'react-hook-form';
 import { Button } from '../../ui/button';
 import { ErrorSummary } from '../../ui/error-summary';
-import { DatesGroup } from './dates-group';
-import { DraftLine } from './draft-line';
+import { DatesGroup, EmbargoFields } from './dates-group';
 import { faultsOf } from './field-path';
 import type { Form } from './fields';
 import type { FormChoices } from './form-choices';
-import { emptyReleaseForm, pruned, type ReleaseForm } from './form-values';
+import { pruned, type ReleaseForm } from './form-values';
 import { LiveProvider } from './live';
 import { LivePanel } from './live-panel';
 import { QuestionGroup, SourceGroup } from './question-groups';
-import { RaceGroup } from './race-group';
+import { FixedRace, RaceGroup } from './race-group';
 import { PollsterGroup, SampleGroup, SizeGroup } from './sample-groups';
 import { SharesGrid } from './shares-grid';
-import { newSubmissionKey } from './submission-key';
-import { useDraft } from './use-draft';
 
-type Answer =
-  | { ok: true; value: { id: string } }
-  | { ok: false; code: string; message: string; fields: Record<string, string> };
-export type SubmitRelease = (input: unknown) => Promise<Answer>;
-
-const UNSENT =
-  'The release could not be sent: Leadline cannot be reached, or was renewed meanwhile. What you typed is still here and in the draft; reload the page if it happens again.';
-
-const check = zodResolver(releaseInput, undefined, { raw: true });
-const resolver: Resolver<ReleaseForm> = (values, context, options) =>
-  check(values as ReleaseFormValues, context, options as Parameters<typeof check>[2]) as ReturnType<
-    Resolver<ReleaseForm>
-  >;
+export type Refusal = { ok: false; code: string; message: string; fields: Record<string, string> };
+export type Answer<Value> = { ok: true; value: Value } | Refusal;
 
 /** The form itself, findings beside it on wide screens and beneath it on narrow ones. */
 export function ReleaseFields({
+  form,
   choices,
   personId,
+  releaseId = '',
+  lead,
+  send,
   submit,
-  initial,
 }: {
+  form: Form;
   choices: FormChoices;
   personId: string;
-  submit: SubmitRelease;
-  initial: { values: ReleaseForm; savedAt: number | null };
+  /** Of a release on file, whose race and embargo stay as they are. */
+  releaseId?: string;
+  /** Above the fields. */
+  lead: ReactNode;
+  send: { label: string; pendingLabel: string };
+  /** Sends what was validated; the id of the release comes back. */
+  submit: (values: ReleaseForm) => Promise<Answer<{ id: string }>>;
 }) {
-  const form = useForm<ReleaseForm>({ defaultValues: initial.values, resolver, shouldFocusError: false });
-  const [submissionKey, setSubmissionKey] = useState(newSubmissionKey);
   const [attempt, setAttempt] = useState(0);
-  const [restoredAt, setRestoredAt] = useState(initial.savedAt);
   const router = useRouter();
-  const { getValues, subscribe } = form;
-  const draft = useDraft(useCallback(() => getValues(), [getValues]));
-  const { changed } = draft;
-  useEffect(() => subscribe({ formState: { values: true }, callback: changed }), [subscribe, changed]);
+  const isOnFile = releaseId !== '';
 
-  async function send(values: ReleaseForm) {
-    await draft.stop();
-    const answer = await submit({ submissionKey, release: values }).catch((): Answer => ({
-      ok: false,
-      code: 'unreachable',
-      message: UNSENT,
-      fields: {},
-    }));
+  async function deliver(values: ReleaseForm) {
+    const answer = await submit(values);
     if (answer.ok) return router.push(`/releases/${answer.value.id}`);
-    draft.resume();
     showRefusal(form, answer);
     setAttempt((count) => count + 1);
   }
 
   function onSubmit(event: FormEvent) {
-    const values = pruned(getValues());
+    const values = pruned(form.getValues());
     form.setValue('shares', values.shares);
     form.setValue('race', values.race);
     form.setValue('modelledInterval', values.modelledInterval);
-    void form.handleSubmit(send, () => setAttempt((count) => count + 1))(event);
-  }
-
-  async function discard() {
-    if (!(await draft.discard())) return;
-    form.reset(emptyReleaseForm());
-    setSubmissionKey(newSubmissionKey());
-    setRestoredAt(null);
+    void form.handleSubmit(deliver, () => setAttempt((count) => count + 1))(event);
   }
 
   return (
-    <LiveProvider control={form.control} choices={choices} personId={personId}>
+    <LiveProvider control={form.control} choices={choices} personId={personId} releaseId={releaseId}>
       <div className="grid gap-x-10 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)] xl:grid-cols-[minmax(0,1fr)_minmax(0,30rem)]">
         <form noValidate onSubmit={onSubmit} aria-label="Release" className="min-w-0 max-w-form">
-          <DraftLine status={draft.status} restoredAt={restoredAt} onDiscard={discard} />
+          {lead}
           <Faults form={form} attempt={attempt} />
-          <RaceGroup form={form} races={choices.races} />
+          {isOnFile ? (
+            <FixedRace form={form} races={choices.races} />
+          ) : (
+            <RaceGroup form={form} races={choices.races} />
+          )}
           <PollsterGroup form={form} pollsters={choices.pollsters} sponsors={choices.sponsors} />
           <SampleGroup form={form} />
-          <DatesGroup form={form} zone={choices.zone} />
+          <DatesGroup form={form}>
+            {isOnFile ? (
+              <p className="text-13 text-soft">
+                An embargo stays as it is: it is changed on the release page.
+              </p>
+            ) : (
+              <EmbargoFields form={form} zone={choices.zone} />
+            )}
+          </DatesGroup>
           <SizeGroup form={form} />
           <QuestionGroup form={form} />
           <SharesGrid form={form} />
           <SourceGroup form={form} />
-          <Send form={form} />
+          <Send form={form} {...send} />
         </form>
         <Beside form={form} level={choices.policy.level} />
       </div>
@@ -110,7 +95,7 @@ export function ReleaseFields({
 }
 
 /** A refusal of the service, at its fields; the whole form's is told on top. */
-function showRefusal(form: Form, { message, fields }: Extract<Answer, { ok: false }>) {
+function showRefusal(form: Form, { message, fields }: Refusal) {
   const faults = Object.entries(fields).map(([path, text]) => [path.replace(/^release\./, ''), text]);
   for (const [path, text] of faults)
     form.setError(path ? (path as FieldPath<ReleaseForm>) : 'root.server', { type: 'server', message: text });
@@ -122,13 +107,12 @@ function Faults({ form, attempt }: { form: Form; attempt: number }) {
   return <ErrorSummary faults={attempt === 0 ? [] : faultsOf(errors)} attempt={attempt} />;
 }
 
-function Send({ form }: { form: Form }) {
-  const { isSubmitting, isSubmitSuccessful } = useFormState({ control: form.control });
-  const { errors } = useFormState({ control: form.control });
+function Send({ form, label, pendingLabel }: { form: Form; label: string; pendingLabel: string }) {
+  const { isSubmitting, isSubmitSuccessful, errors } = useFormState({ control: form.control });
   const isLeaving = isSubmitSuccessful && Object.keys(errors).length === 0;
   return (
-    <Button tone="primary" type="submit" pending={isSubmitting || isLeaving} pendingLabel="Logging…">
-      Log the release
+    <Button tone="primary" type="submit" pending={isSubmitting || isLeaving} pendingLabel={pendingLabel}>
+      {label}
     </Button>
   );
 }

@@ -7,7 +7,7 @@ import { Loading } from '../../ui/loading';
 import { fetchJson } from './fetch-json';
 import type { FormChoices } from './form-choices';
 import { emptyReleaseForm, type ReleaseForm as Values, reviveReleaseForm } from './form-values';
-import { ReleaseFields, type SubmitRelease } from './release-fields';
+import { LogFields, type SubmitRelease } from './log-fields';
 import { DRAFTS_URL } from './use-draft';
 
 /** Logging a release: what was typed before comes back first, then the form opens on it. */
@@ -35,7 +35,7 @@ export function ReleaseForm({
       </CautionNote>
     );
   if (isLoading || !data) return <Loading label="Fetching what you typed before…" lines={8} />;
-  return <ReleaseFields choices={choices} personId={personId} submit={submit} initial={data} />;
+  return <LogFields choices={choices} personId={personId} submit={submit} initial={data} />;
 }
 
 export type Initial = { values: Values; savedAt: number | null };

@@ -120,16 +120,18 @@ describe('shares pasted into the grid', () => {
 
 describe('the question which release to compare with', () => {
   it('is not asked without a race on file and a pollster', () => {
-    expect(comparisonQuery(blankForm())).toBeNull();
-    expect(comparisonQuery(typedForm({ race: GOVERNOR }))).toBeNull();
-    expect(comparisonQuery(typedForm({ pollster: '  ' }))).toBeNull();
+    expect(comparisonQuery(blankForm(), '')).toBeNull();
+    expect(comparisonQuery(typedForm({ race: GOVERNOR }), '')).toBeNull();
+    expect(comparisonQuery(typedForm({ pollster: '  ' }), '')).toBeNull();
   });
 
   it('takes what is withheld, empty or half typed as not known', () => {
     const query = comparisonQuery(
       typedForm({ wording: withheld, mode: typed(''), population: withheld, fieldStartOn: '', design: '' }),
+      'release-1',
     );
     expect(query).toMatchObject({
+      releaseId: 'release-1',
       wording: null,
       mode: null,
       population: null,

@@ -4,7 +4,7 @@ import { http } from 'msw';
 import { SWRConfig } from 'swr';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest';
 import { ReleaseForm } from '@/components/forms/release/release-form';
-import type { SubmitRelease } from '@/components/forms/release/release-fields';
+import type { SubmitRelease } from '@/components/forms/release/log-fields';
 import { DEFAULT_POLICY } from '@/lib/findings/policy';
 import { NOW } from '@/tests/support/database';
 import { withheld } from '@/tests/support/release';

@@ -91,6 +91,9 @@ function Next({ view, canLift }: { view: ReleaseView; canLift: boolean }) {
       actions={
         <>
           {canLift ? <LiftEmbargo id={view.id} version={view.version} lift={liftEmbargoAction} /> : null}
+          {view.whyNotRevised ? null : (
+            <LinkButton href={`/releases/${view.id}/edit`}>Change figures</LinkButton>
+          )}
           {first ? (
             <LinkButton href={draftHref(view.id, first)} tone="primary">
               Draft a sheet
@@ -101,6 +104,7 @@ function Next({ view, canLift }: { view: ReleaseView; canLift: boolean }) {
     >
       <strong>{verdictSummary(findings.map(({ verdict }) => verdict))}</strong>{' '}
       {missingSentence(view.missing)}
+      {view.whyNotRevised ? <p className="mt-1 text-13 text-soft">{view.whyNotRevised}</p> : null}
     </NextBar>
   );
 }
