@@ -1,8 +1,16 @@
 import 'server-only';
-import { and, asc, desc, eq } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, notInArray } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
-import { clearingLines, clearings, copies, evidence, evidenceSources } from '@/db/schema/sheets';
+import {
+  clearingLines,
+  clearings,
+  copies,
+  evidence,
+  evidenceSources,
+  lines,
+  lineVersions,
+} from '@/db/schema/sheets';
 
 export type EvidenceRow = typeof evidence.$inferSelect;
 export type ClearingRow = typeof clearings.$inferSelect;
@@ -58,6 +66,18 @@ export function findLastAct(conn: Conn, sheetId: number, act: ClearingRow['act']
   );
 }
 
+/** Everything done to many sheets, newest first, with names and the hash agreed to; for lists. */
+export function listActsOf(conn: Conn, sheetIds: number[]) {
+  return conn
+    .select({ act: clearings, person: people.name, hash: evidence.hash })
+    .from(clearings)
+    .innerJoin(people, eq(people.id, clearings.personId))
+    .leftJoin(evidence, eq(evidence.id, clearings.evidenceId))
+    .where(inArray(clearings.sheetId, sheetIds))
+    .orderBy(desc(clearings.id))
+    .all();
+}
+
 /** Everything done to a sheet, oldest first, with names. */
 export function listActs(conn: Conn, sheetId: number) {
   return conn
@@ -67,6 +87,41 @@ export function listActs(conn: Conn, sheetId: number) {
     .where(eq(clearings.sheetId, sheetId))
     .orderBy(asc(clearings.id))
     .all();
+}
+
+/** Who agreed to one evidence, as what, and to which words as they are stored now. */
+export function listAgreements(conn: Conn, evidenceId: number) {
+  const acts = conn
+    .select()
+    .from(clearings)
+    .where(and(eq(clearings.evidenceId, evidenceId), inArray(clearings.act, ['filed', 'cleared'])))
+    .orderBy(asc(clearings.id))
+    .all();
+  return acts.map(({ id, act, personId, roles }) => {
+    const texts = conn
+      .select({ kind: lines.kind, text: lineVersions.text })
+      .from(clearingLines)
+      .innerJoin(lineVersions, eq(lineVersions.id, clearingLines.lineVersionId))
+      .innerJoin(lines, eq(lines.id, lineVersions.lineId))
+      .where(eq(clearingLines.clearingId, id))
+      .orderBy(asc(lines.id))
+      .all();
+    return { act, personId, roles, texts };
+  });
+}
+
+/** Public ids of line versions that count as cleared although nobody cleared them. */
+export function listClearedByNobody(conn: Conn): string[] {
+  const agreed = conn
+    .select({ id: clearingLines.lineVersionId })
+    .from(clearingLines)
+    .innerJoin(clearings, and(eq(clearings.id, clearingLines.clearingId), eq(clearings.act, 'cleared')));
+  return conn
+    .select({ publicId: lineVersions.publicId })
+    .from(lineVersions)
+    .where(and(inArray(lineVersions.state, ['cleared', 'superseded']), notInArray(lineVersions.id, agreed)))
+    .all()
+    .map((row) => row.publicId);
 }
 
 export function insertCopy(conn: Conn, row: typeof copies.$inferInsert): void {

@@ -15,6 +15,16 @@ export function findEmbedOfSheet(conn: Conn, sheetId: number): EmbedRow | null {
   return conn.select().from(embeds).where(eq(embeds.sheetId, sheetId)).get() ?? null;
 }
 
+/** Public ids of embeds by the sheet they were made from, for lists. */
+export function listEmbedsOf(conn: Conn, sheetIds: number[]): Map<number, string> {
+  const rows = conn
+    .select({ sheetId: embeds.sheetId, publicId: embeds.publicId })
+    .from(embeds)
+    .where(inArray(embeds.sheetId, sheetIds))
+    .all();
+  return new Map(rows.map(({ sheetId, publicId }) => [sheetId, publicId]));
+}
+
 export function insertEmbed(conn: Conn, row: typeof embeds.$inferInsert): EmbedRow {
   return conn.insert(embeds).values(row).returning().get();
 }

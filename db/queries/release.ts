@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, asc, desc, eq, isNull } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
 import { pollsters, races, sponsors } from '@/db/schema/races';
@@ -126,6 +126,16 @@ export function listShares(conn: Conn, questionId: number) {
     .all();
 }
 
+/** The shares of many questions at once, for lists. */
+export function listSharesOf(conn: Conn, questionIds: number[]): (typeof shares.$inferSelect)[] {
+  return conn
+    .select()
+    .from(shares)
+    .where(inArray(shares.questionId, questionIds))
+    .orderBy(asc(shares.questionId), asc(shares.position))
+    .all();
+}
+
 /**
  * Current versions of one race by one pollster, latest field dates first.
  *
@@ -147,7 +157,7 @@ export function listVersionsOfSeries(
         publicAt === null ? undefined : isPublic(publicAt),
       ),
     )
-    .orderBy(desc(releaseVersions.fieldEndOn), desc(releases.id))
+    .orderBy(desc(releaseVersions.fieldEndOn), desc(releaseVersions.fieldStartOn), desc(releases.id))
     .all();
 }
 

@@ -76,6 +76,17 @@ export function listNewestLines(conn: Conn, sheetId: number) {
     .all();
 }
 
+/** The same for many sheets at once, for lists. */
+export function listNewestLinesOf(conn: Conn, sheetIds: number[]) {
+  return conn
+    .select({ line: lines, version: lineVersions })
+    .from(lines)
+    .innerJoin(lineVersions, and(eq(lineVersions.lineId, lines.id), eq(lineVersions.number, newestVersion)))
+    .where(inArray(lines.sheetId, sheetIds))
+    .orderBy(asc(lines.id))
+    .all();
+}
+
 /** What each line of a sheet said in the version before its newest, by line id. */
 export function listEarlierTexts(conn: Conn, sheetId: number): Map<number, string> {
   const rows = conn
@@ -92,11 +103,16 @@ export function listEarlierTexts(conn: Conn, sheetId: number): Map<number, strin
 
 /** The cleared words of a sheet, in the order drafted. */
 export function listClearedLines(conn: Conn, sheetId: number) {
+  return listClearedLinesOf(conn, [sheetId]);
+}
+
+/** The same for many sheets at once, for lists. */
+export function listClearedLinesOf(conn: Conn, sheetIds: number[]) {
   return conn
     .select({ line: lines, version: lineVersions })
     .from(lines)
     .innerJoin(lineVersions, and(eq(lineVersions.lineId, lines.id), eq(lineVersions.state, 'cleared')))
-    .where(eq(lines.sheetId, sheetId))
+    .where(inArray(lines.sheetId, sheetIds))
     .orderBy(asc(lines.id))
     .all();
 }

@@ -1,8 +1,8 @@
 import 'server-only';
 import { insertEmbargoView, isListed } from '@/db/queries/embargo';
-import { findEvidence, findLastAct } from '@/db/queries/clearing';
-import { findEmbedOfSheet } from '@/db/queries/embed';
-import { isReleasePublic, listClearedLines, listClearedSheets } from '@/db/queries/sheet';
+import { listActsOf } from '@/db/queries/clearing';
+import { listEmbedsOf } from '@/db/queries/embed';
+import { isReleasePublic, listClearedLinesOf, listClearedSheets } from '@/db/queries/sheet';
 import { type Actor, canReadCopyDesk } from '@/lib/domain/roles';
 import type { LineText } from '@/lib/domain/sheet';
 import { authorize, type Ctx, transact } from '../context';
@@ -37,28 +37,30 @@ export function listCopyDesk(
     pollster: search.pollster.trim().slice(0, 120),
     limit: LIMIT,
   });
+  const sheetIds = rows.map(({ sheet }) => sheet.id);
+  const allLines = listClearedLinesOf(ctx.db, sheetIds);
+  const clearings = listActsOf(ctx.db, sheetIds).filter(({ act }) => act.act === 'cleared');
+  const embedIds = listEmbedsOf(ctx.db, sheetIds);
   const items = rows.map((row) => {
     const isPublic = isReleasePublic(ctx.db, row.release.id, ctx.now);
-    const act = findLastAct(ctx.db, row.sheet.id, 'cleared');
-    const evidence = act?.evidenceId ? findEvidence(ctx.db, act.evidenceId) : null;
-    const isOnList = isListed(ctx.db, row.release.id, actor);
+    const clearing = clearings.find(({ act }) => act.sheetId === row.sheet.id);
+    const isOnList = !isPublic && isListed(ctx.db, row.release.id, actor);
     const item: ClearedSheetItem = {
       id: row.sheet.publicId,
       race: row.race,
       pollster: row.pollster,
       fieldStartOn: row.fieldStartOn,
       fieldEndOn: row.fieldEndOn,
-      clearedAt: act?.at ?? 0,
-      lines: listClearedLines(ctx.db, row.sheet.id).map(({ line, version }) => ({
-        kind: line.kind,
-        text: version.text,
-      })),
+      clearedAt: clearing?.act.at ?? 0,
+      lines: allLines
+        .filter(({ line }) => line.sheetId === row.sheet.id)
+        .map(({ line, version }) => ({ kind: line.kind, text: version.text })),
       embargo: embargoView(row.release, isPublic),
       mayCopy: isPublic || isOnList,
-      embedId: findEmbedOfSheet(ctx.db, row.sheet.id)?.publicId ?? null,
-      hash: evidence?.hash ?? '',
+      embedId: embedIds.get(row.sheet.id) ?? null,
+      hash: clearing?.hash ?? '',
     };
-    return { item, releaseId: row.release.id, isWatched: !isPublic && isOnList };
+    return { item, releaseId: row.release.id, isWatched: isOnList };
   });
   const watched = items.filter(({ isWatched }) => isWatched);
   if (watched.length > 0)

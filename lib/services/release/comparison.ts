@@ -111,8 +111,7 @@ export function chooseAmong(
   pollsterId: number,
   now: number,
 ): Comparison {
-  const series = listVersionsOfSeries(conn, raceId, pollsterId, now).map((row) => seriesFactsOf(conn, row));
-  const choice = chooseComparison(current, series);
+  const choice = chooseComparison(current, earlierThan(conn, current, raceId, pollsterId, now));
   return {
     versionId: choice.chosen?.versionId ?? null,
     reason: choice.reason,
@@ -126,4 +125,30 @@ export function chooseAmong(
     })),
     override: null,
   };
+}
+
+/** Down to the first that compares: a series of years is not read to its beginning. */
+function earlierThan(
+  conn: Conn,
+  current: ComparableFacts,
+  raceId: number,
+  pollsterId: number,
+  now: number,
+): SeriesFacts[] {
+  const earlier: SeriesFacts[] = [];
+  for (const row of listVersionsOfSeries(conn, raceId, pollsterId, now)) {
+    if (row.release.publicId === current.id || !isEarlier(row, current)) continue;
+    const facts = seriesFactsOf(conn, row);
+    earlier.push(facts);
+    if (compareReleases(current, facts).comparable) break;
+  }
+  return earlier;
+}
+
+function isEarlier({ version }: WholeVersion, { fieldStartOn, fieldEndOn }: ComparableFacts): boolean {
+  if (!fieldStartOn || !fieldEndOn) return false;
+  return (
+    version.fieldEndOn < fieldEndOn ||
+    (version.fieldEndOn === fieldEndOn && version.fieldStartOn < fieldStartOn)
+  );
 }

@@ -1,7 +1,6 @@
 import 'server-only';
-import { listReleases as listRows, listShares } from '@/db/queries/release';
+import { listReleases as listRows, listSharesOf } from '@/db/queries/release';
 import { listVerdicts } from '@/db/queries/finding-index';
-import { valueOf } from '@/lib/domain/disclosed';
 import { pctOf } from '@/lib/domain/release-facts';
 import { type Actor, canReadUnpublished } from '@/lib/domain/roles';
 import type { Population } from '@/lib/domain/vocabulary';
@@ -9,7 +8,6 @@ import type { Verdict } from '@/lib/findings/check-types';
 import { ENGINE_VERSION } from '@/lib/findings/engine-version';
 import { authorize, type Ctx } from '../context';
 import { readDeskSettings } from '../setup/desk-settings';
-import { factsOfWhole } from './facts';
 
 export type ReleaseListItem = {
   id: string;
@@ -36,18 +34,22 @@ export function listReleases(actor: Actor, ctx: Ctx): ReleaseListItem[] {
   const policy = readDeskSettings(ctx.db).policy.version;
   const versionIds = rows.map((row) => row.version.id);
   const verdicts = listVerdicts(ctx.db, versionIds, policy, ENGINE_VERSION);
+  const questionIds = rows.map((row) => row.question.id);
+  const shares = listSharesOf(ctx.db, questionIds);
   return rows.map((row) => {
-    const facts = factsOfWhole(ctx.db, row);
     const { embargoAt, embargoLiftedAt, publicId } = row.release;
     return {
       id: publicId,
       race: row.race.name,
       pollster: row.pollster.name,
-      population: valueOf(facts.population),
-      n: valueOf(facts.n),
-      fieldStartOn: facts.fieldStartOn,
-      fieldEndOn: facts.fieldEndOn,
-      topShares: topShares(listShares(ctx.db, row.question.id), facts.decimals),
+      population: row.base.population,
+      n: row.base.n,
+      fieldStartOn: row.version.fieldStartOn,
+      fieldEndOn: row.version.fieldEndOn,
+      topShares: topShares(
+        shares.filter(({ questionId }) => questionId === row.question.id),
+        row.question.decimals,
+      ),
       verdicts: verdicts.filter((v) => v.versionId === row.version.id).map((v) => v.verdict as Verdict),
       embargoAt,
       isUnderEmbargo: embargoAt !== null && embargoLiftedAt === null && embargoAt > ctx.now,
@@ -57,9 +59,8 @@ export function listReleases(actor: Actor, ctx: Ctx): ReleaseListItem[] {
   });
 }
 
-function topShares(rows: ReturnType<typeof listShares>, decimals: number) {
+function topShares(rows: ReturnType<typeof listSharesOf>, decimals: number) {
   return rows
-    .map(({ share }) => share)
     .filter((share) => share.isAnswer && share.units !== null)
     .sort((a, b) => b.units! - a.units!)
     .slice(0, 3)

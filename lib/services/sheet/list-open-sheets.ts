@@ -1,7 +1,6 @@
 import 'server-only';
-import { findLastAct } from '@/db/queries/clearing';
-import { findPerson } from '@/db/queries/person';
-import { listNewestLines, listOpenSheets as listRows } from '@/db/queries/sheet';
+import { listActsOf } from '@/db/queries/clearing';
+import { listNewestLinesOf, listOpenSheets as listRows } from '@/db/queries/sheet';
 import { type Actor, canReadUnpublished, isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
 import type { LineState } from '@/lib/domain/sheet';
 import { authorize, type Ctx } from '../context';
@@ -30,14 +29,19 @@ const LIMIT = 200;
 /** The queue: what is being written, waits for a reader, or was sent back. */
 export function listOpenSheets(actor: Actor, ctx: Ctx): OpenSheetItem[] {
   authorize(canReadUnpublished(actor), 'Sheets are written and read by reporters and editors.');
-  return listRows(ctx.db, actor, ctx.now, LIMIT).map((row) => {
-    const lines = listNewestLines(ctx.db, row.sheet.id);
+  const rows = listRows(ctx.db, actor, ctx.now, LIMIT);
+  const sheetIds = rows.map(({ sheet }) => sheet.id);
+  const allLines = listNewestLinesOf(ctx.db, sheetIds);
+  const allActs = listActsOf(ctx.db, sheetIds);
+  return rows.map((row) => {
+    const lines = allLines.filter(({ line }) => line.sheetId === row.sheet.id);
+    const acts = allActs.filter(({ act }) => act.sheetId === row.sheet.id);
     const kept = lines.filter(({ line }) => !line.knockedOut);
     const state = kept[0]?.version.state ?? 'draft';
     const headline =
       kept.find(({ line }) => line.kind === 'headline') ??
       kept.find(({ line }) => line.kind === 'chart-title');
-    const filing = state === 'filed' ? findLastAct(ctx.db, row.sheet.id, 'filed') : null;
+    const filing = state === 'filed' ? lastFiling(acts) : null;
     const { embargoAt, embargoLiftedAt } = row.release;
     return {
       id: row.sheet.publicId,
@@ -48,41 +52,33 @@ export function listOpenSheets(actor: Actor, ctx: Ctx): OpenSheetItem[] {
       headline: headline?.version.text ?? '',
       state,
       author: row.author,
-      filedBy: filing && nameOf(ctx, filing.personId),
-      filedAt: filing?.at ?? null,
-      isFiledByMe: filing?.personId === actor.personId,
-      returned: state === 'sent-back' ? returnOf(ctx, row.sheet.id) : null,
-      waitsFor: waitsFor(ctx, actor, row.sheet, state),
+      filedBy: filing && filing.person,
+      filedAt: filing?.act.at ?? null,
+      isFiledByMe: filing?.act.personId === actor.personId,
+      returned: state === 'sent-back' ? returnOf(acts) : null,
+      waitsFor: waitsFor(actor, row.sheet.authorId, state, acts),
       isUnderEmbargo: embargoAt !== null && embargoLiftedAt === null && embargoAt > ctx.now,
     };
   });
 }
 
-function waitsFor(
-  ctx: Ctx,
-  actor: Actor,
-  sheet: { id: number; authorId: number },
-  state: LineState,
-): OpenSheetItem['waitsFor'] {
-  if (state === 'draft') return 'nobody';
-  const filing = findLastAct(ctx.db, sheet.id, 'filed');
-  if (!filing) return 'nobody';
-  const filer = { personId: filing.personId, roles: JSON.parse(filing.roles) as Role[] };
+/** Of one sheet, newest first. */
+type Acts = ReturnType<typeof listActsOf>;
+
+function waitsFor(actor: Actor, authorId: number, state: LineState, acts: Acts): OpenSheetItem['waitsFor'] {
+  const filing = lastFiling(acts);
+  if (state === 'draft' || !filing) return 'nobody';
+  const filer = { personId: filing.act.personId, roles: JSON.parse(filing.act.roles) as Role[] };
   if (state === 'filed') return isTwoPersonAgreement(filer, actor) ? 'me' : 'others';
-  const owner = newestReturn(ctx, sheet.id)?.act === 'returned' ? filer.personId : sheet.authorId;
+  const owner = lastReturn(acts)?.act.act === 'returned' ? filer.personId : authorId;
   return owner === actor.personId ? 'me' : 'others';
 }
 
-function returnOf(ctx: Ctx, sheetId: number): OpenSheetItem['returned'] {
-  const act = newestReturn(ctx, sheetId);
-  return act && { comment: act.comment ?? '', by: nameOf(ctx, act.personId), at: act.at };
+function returnOf(acts: Acts): OpenSheetItem['returned'] {
+  const last = lastReturn(acts);
+  return last && { comment: last.act.comment ?? '', by: last.person, at: last.act.at };
 }
 
-function newestReturn(ctx: Ctx, sheetId: number) {
-  const acts = (['sent-back', 'returned'] as const).map((act) => findLastAct(ctx.db, sheetId, act));
-  return acts.filter((act) => act !== null).sort((a, b) => b.id - a.id)[0] ?? null;
-}
-
-function nameOf(ctx: Ctx, personId: number): string {
-  return findPerson(ctx.db, personId)?.name ?? '';
-}
+const lastFiling = (acts: Acts) => acts.find(({ act }) => act.act === 'filed') ?? null;
+const lastReturn = (acts: Acts) =>
+  acts.find(({ act }) => act.act === 'sent-back' || act.act === 'returned') ?? null;
