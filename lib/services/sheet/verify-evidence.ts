@@ -1,6 +1,14 @@
 import 'server-only';
 import type { Db } from '@/db/client';
-import { findEvidence, listEvidenceIds } from '@/db/queries/clearing';
+import {
+  type EvidenceRow,
+  findEvidence,
+  listAgreements,
+  listClearedByNobody,
+  listEvidenceIds,
+} from '@/db/queries/clearing';
+import { isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
+import type { LineText } from '@/lib/domain/sheet';
 import { canonicalJson } from '@/lib/security/canonical';
 import { sha256 } from '@/lib/security/ids';
 import type { EvidenceBody } from './evidence-body';
@@ -12,28 +20,67 @@ export type FrozenEngine = {
 };
 
 /**
- * Re-runs every evidence on the engine version it names. Each problem is one line; none means that every stored
- * byte fits its hash and every number comes out the same.
+ * Re-runs every evidence on the engine version it names, and holds the stored words and acts against it. Each problem
+ * is one line; none means that every stored byte fits its hash, every number comes out the same, the words are those
+ * agreed to, and two people, one of them an editor, agreed to whatever was cleared.
  */
 export async function verifyEvidence(
   db: Db,
   engineOf: (version: string) => Promise<FrozenEngine>,
 ): Promise<{ checked: number; problems: string[] }> {
-  const problems: string[] = [];
   const ids = listEvidenceIds(db);
+  const problems: string[] = [];
   for (const id of ids) {
     const row = findEvidence(db, id)!;
-    if (sha256(row.bytes) !== row.hash) {
-      problems.push(`evidence ${row.publicId} does not fit its hash`);
-      continue;
-    }
-    const body = JSON.parse(row.bytes.toString('utf8')) as EvidenceBody;
-    if (body.engine !== row.engine)
-      problems.push(`evidence ${row.publicId} names another engine than its row`);
+    const found = await problemsOf(db, row, engineOf);
+    problems.push(...found.map((problem) => `evidence ${row.publicId} ${problem}`));
+  }
+  for (const publicId of listClearedByNobody(db)) problems.push(`line ${publicId} was cleared by nobody`);
+  return { checked: ids.length, problems };
+}
+
+async function problemsOf(
+  db: Db,
+  row: EvidenceRow,
+  engineOf: (version: string) => Promise<FrozenEngine>,
+): Promise<string[]> {
+  if (sha256(row.bytes) !== row.hash) return ['does not fit its hash'];
+  const body = JSON.parse(row.bytes.toString('utf8')) as EvidenceBody;
+  return [
+    ...(body.engine === row.engine ? [] : ['names another engine than its row']),
+    ...(await numbersDiffer(body, engineOf)),
+    ...agreementProblems(db, row.id, body.texts),
+  ];
+}
+
+async function numbersDiffer(
+  body: EvidenceBody,
+  engineOf: (version: string) => Promise<FrozenEngine>,
+): Promise<string[]> {
+  try {
     const engine = await engineOf(body.engine);
     const answer = engine.check(engine.parseCheckDocument(body.document));
-    if (canonicalJson(answer) !== canonicalJson(body.answer))
-      problems.push(`evidence ${row.publicId} comes out differently on engine ${body.engine}`);
+    const isSame = canonicalJson(answer) === canonicalJson(body.answer);
+    return isSame ? [] : [`comes out differently on engine ${body.engine}`];
+  } catch (error) {
+    return [`cannot be run: ${error instanceof Error ? error.message : String(error)}`];
   }
-  return { checked: ids.length, problems };
+}
+
+function agreementProblems(db: Db, evidenceId: number, texts: LineText[]): string[] {
+  const acts = listAgreements(db, evidenceId);
+  const [filed, cleared] = (['filed', 'cleared'] as const).map((kind) =>
+    acts.find(({ act }) => act === kind),
+  );
+  const who = (act: (typeof acts)[number]) => ({
+    personId: act.personId,
+    roles: JSON.parse(act.roles) as Role[],
+  });
+  const isAgreed = !cleared || (filed && isTwoPersonAgreement(who(filed), who(cleared)));
+  return [
+    ...(isAgreed ? [] : ['was not agreed to by two people of whom one was an editor']),
+    ...acts
+      .filter((act) => canonicalJson(act.texts) !== canonicalJson(texts))
+      .map(({ act }) => `holds other words than those that were ${act}`),
+  ];
 }
