@@ -66,6 +66,7 @@ export function answerEmbed(request: EmbedRequest, ctx: Ctx = { db: getDb(), now
     'Content-Type': TYPES[part],
     'Cache-Control': `public, max-age=${FRESH_SECONDS}, stale-while-revalidate=${STALE_SECONDS}, stale-if-error=${STALE_IF_ERROR_SECONDS}`,
     ETag: rendered.etag,
+    ...(found.version.state === 'superseded' ? { Link: `</embed/${id}>; rel="latest-version"` } : {}),
   };
   if (matches(request.headers['if-none-match'], rendered.etag)) return { status: 304, headers, body: null };
   return { status: 200, headers, body: rendered.body };

@@ -56,6 +56,10 @@ describe('a second version', () => {
     expect(page(`/embed/${embed}`)).toContain('Second title');
     expect(page(`/embed/${embed}@1`)).not.toContain('Second title');
     expect(page(`/embed/${embed}@2`)).toContain('Second title');
+    const linkOf = (path: string) =>
+      answerEmbed({ path, query: new URLSearchParams(), headers: {} }, desk.ctx()).headers.Link;
+    expect(linkOf(`/embed/${embed}@1`)).toBe(`</embed/${embed}>; rel="latest-version"`);
+    expect([linkOf(`/embed/${embed}`), linkOf(`/embed/${embed}@2`)]).toEqual([undefined, undefined]);
     expect(statusOf(`/embed/${embed}@3`)).toBe(404);
   });
 
