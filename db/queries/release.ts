@@ -116,6 +116,10 @@ export function findWholeVersion(conn: Conn, versionId: number): WholeVersion | 
   return versionSelect(conn).where(eq(releaseVersions.id, versionId)).get() ?? null;
 }
 
+export function findWholeVersionByPublicId(conn: Conn, publicId: string): WholeVersion | null {
+  return versionSelect(conn).where(eq(releaseVersions.publicId, publicId)).get() ?? null;
+}
+
 export function listShares(conn: Conn, questionId: number) {
   return conn
     .select({ share: shares, enteredBy: people.name })

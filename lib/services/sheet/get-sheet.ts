@@ -3,7 +3,7 @@ import { findEvidence, findLastAct, listActs, type EvidenceRow } from '@/db/quer
 import { findEmbedOfSheet } from '@/db/queries/embed';
 import { isListed } from '@/db/queries/embargo';
 import { findPersonByPublicId } from '@/db/queries/person';
-import { findWholeVersion, listShares } from '@/db/queries/release';
+import { findWholeVersionByPublicId, listShares } from '@/db/queries/release';
 import { listClearedLines, listEarlierTexts } from '@/db/queries/sheet';
 import { type Actor, canReadUnpublished, type Role } from '@/lib/domain/roles';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
@@ -102,7 +102,7 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
     evidence: { release: facts, document, answer, missing },
     previous: comparison.release,
     comparison: toldOf(ctx, comparison),
-    enteredBy: enteredBy(ctx, sheet.releaseVersionId),
+    enteredBy: enteredBy(ctx, facts.versionId),
     embargo: embargoView(release, Boolean(opened.isPublic)),
     isOnList: isListed(ctx.db, release.id, actor),
     embedId: findEmbedOfSheet(ctx.db, sheet.id)?.publicId ?? null,
@@ -159,8 +159,9 @@ function toldOf(ctx: Ctx, { override, ...told }: EvidenceBody['comparison']): Co
   };
 }
 
-function enteredBy(ctx: Ctx, releaseVersionId: number): Record<string, string> {
-  const whole = findWholeVersion(ctx.db, releaseVersionId)!;
+/** Of the version shown: pulled words keep their evidence when the release has moved on. */
+function enteredBy(ctx: Ctx, versionId: string): Record<string, string> {
+  const whole = findWholeVersionByPublicId(ctx.db, versionId)!;
   return Object.fromEntries(
     listShares(ctx.db, whole.question.id).map(({ share, enteredBy }) => [share.option, enteredBy]),
   );
