@@ -20,6 +20,10 @@ export function openDatabase(file: string): Db {
   client.pragma('synchronous = FULL');
   client.pragma('foreign_keys = ON');
   client.pragma('busy_timeout = 5000');
+  // SQLite itself knows the case of ASCII alone.
+  client.function('folded', { deterministic: true }, (text) =>
+    typeof text === 'string' ? text.normalize('NFKC').toLowerCase() : null,
+  );
   return drizzle(client);
 }
 

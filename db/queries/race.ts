@@ -15,7 +15,7 @@ export function findRaceByName(conn: Conn, name: string): RaceRow | null {
     conn
       .select()
       .from(races)
-      .where(sql`${races.name} = ${name} collate nocase`)
+      .where(sql`folded(${races.name}) = folded(${name})`)
       .get() ?? null
   );
 }
@@ -25,7 +25,7 @@ export function listRaces(conn: Conn): RaceRow[] {
     .select()
     .from(races)
     .where(isNull(races.archivedAt))
-    .orderBy(sql`${races.name} collate nocase`)
+    .orderBy(sql`folded(${races.name})`)
     .all();
 }
 
@@ -77,7 +77,7 @@ export function findNamed(conn: Conn, table: 'pollsters' | 'sponsors', name: str
     conn
       .select()
       .from(named)
-      .where(sql`${named.name} = ${name} collate nocase`)
+      .where(sql`folded(${named.name}) = folded(${name})`)
       .get() ?? null
   );
 }
@@ -96,7 +96,7 @@ export function listNames(conn: Conn, table: 'pollsters' | 'sponsors'): string[]
   return conn
     .select({ name: named.name })
     .from(named)
-    .orderBy(sql`${named.name} collate nocase`)
+    .orderBy(sql`folded(${named.name})`)
     .all()
     .map((row) => row.name);
 }

@@ -215,7 +215,7 @@ export function listClearedSheets(
 }
 
 function contains(column: typeof races.name | typeof pollsters.name, text: string) {
-  return text === '' ? undefined : sql`instr(lower(${column}), ${text.toLowerCase()}) > 0`;
+  return text === '' ? undefined : sql`instr(folded(${column}), folded(${text})) > 0`;
 }
 
 export function isReleasePublic(conn: Conn, releaseId: number, now: number): boolean {

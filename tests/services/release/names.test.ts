@@ -2,6 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { liveDocument } from '@/components/forms/release/live-document';
 import type { ReleaseFormValues } from '@/lib/domain/release-input';
 import { DEFAULT_POLICY } from '@/lib/findings/policy';
+import { listCopyDesk } from '@/lib/services/copy/list-copy-desk';
 import { addPerson } from '@/lib/services/people/add-person';
 import { listPeople } from '@/lib/services/people/list-people';
 import { getRelease } from '@/lib/services/release/get-release';
@@ -74,6 +75,21 @@ describe('names with characters that nobody sees', () => {
       'Brook of the Quay',
       'Don’t know',
     ]);
+  });
+});
+
+describe('names beyond ASCII', () => {
+  it('are one name in any case, and are found in any', () => {
+    const change = (pollster: string) => ({ race, pollster, sponsor: typed('ÉCHO D’ÂVERIL') });
+    const ids = ['Éclat Ökonometrie', 'ÉCLAT ÖKONOMETRIE', 'e\u0301clat o\u0308konometrie'].map((name) =>
+      logRelease(db, reporter, change(name)),
+    );
+    const facts = ids.map((id) => getRelease(reporter, id, desk.ctx()).facts);
+    expect(new Set(facts.map(({ pollster }) => pollster.name))).toEqual(new Set(['Éclat Ökonometrie']));
+    const editor = makePerson(db, { name: 'Marten Reed', roles: ['editor'] });
+    const sheet = sheetDesk(db).cleared(reporter, editor, ids[0]!);
+    for (const pollster of ['éclat', 'ÖKONO', 'E\u0301CLAT'])
+      expect(listCopyDesk(editor, { race: '', pollster }, desk.ctx()).map(({ id }) => id)).toEqual([sheet]);
   });
 });
 
