@@ -1,4 +1,5 @@
 import { SectionHeading } from '../ui/section-heading';
+import { isTakenBack } from './taken-back';
 import { when } from './when';
 
 export type Act = { act: string; person: string; at: number; comment: string | null };
@@ -18,13 +19,17 @@ export function ActsList({ acts, now, zone }: { acts: readonly Act[]; now: numbe
     <section aria-labelledby="acts" className="mt-6">
       <SectionHeading id="acts">What was done</SectionHeading>
       <ol className="mt-1">
-        {acts.map(({ act, person, at, comment }, index) => (
-          <li key={index} className="border-b border-rule py-2">
-            <strong className="font-semibold">{person}</strong> {WORDS[act] ?? act},{' '}
-            <time dateTime={new Date(at).toISOString()}>{when(at, now, zone)}</time>
-            {comment ? <p className="max-w-prose text-soft">“{comment}”</p> : null}
-          </li>
-        ))}
+        {acts.map(({ act, person, at, comment }, index) => {
+          const isOwn = isTakenBack(acts, index);
+          return (
+            <li key={index} className="border-b border-rule py-2">
+              <strong className="font-semibold">{person}</strong>{' '}
+              {isOwn ? 'took it back' : (WORDS[act] ?? act)},{' '}
+              <time dateTime={new Date(at).toISOString()}>{when(at, now, zone)}</time>
+              {comment && !isOwn ? <p className="max-w-prose text-soft">“{comment}”</p> : null}
+            </li>
+          );
+        })}
       </ol>
     </section>
   );

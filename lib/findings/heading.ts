@@ -24,7 +24,7 @@ export function headingOf(finding: Finding, document: Decimals, between = 'earli
   if (finding.kind === 'share') {
     const { estimatePct } = finding;
     const shown = estimatePct === null ? NO_FIGURE : `${estimatePct.toFixed(document.release.decimals)}%`;
-    return `${finding.option}: ${shown}`;
+    return `${subjectOf(finding)}: ${shown}`;
   }
   const { estimatePp } = finding;
   const shown = estimatePp === null ? NO_FIGURE : signed(estimatePp, printedDecimals(finding, document));
@@ -43,8 +43,19 @@ export function printedDecimals(finding: Finding, { release, previous }: Decimal
   return Math.max(release.decimals, ofThreshold, isChange ? (previous?.decimals ?? 0) : 0);
 }
 
-function subjectOf(finding: Exclude<Finding, { kind: 'share' }>, between: string): string {
+/**
+ * What a finding is about, without its figure.
+ *
+ * @param finding any finding of an answer
+ * @param between the two releases of a change, such as "August to September"
+ * @returns names as the release prints them
+ * @example
+ * subjectOf({ kind: 'lead', pair: ['Alder', 'Brook'] }); // => 'Alder minus Brook'
+ */
+export function subjectOf(finding: Finding, between = 'earlier to this'): string {
   switch (finding.kind) {
+    case 'share':
+      return finding.option;
     case 'lead':
       return `${finding.pair[0]} minus ${finding.pair[1]}`;
     case 'change':

@@ -3,7 +3,7 @@ import { cleanup, fireEvent, render, screen, waitFor, within } from '@testing-li
 import userEvent from '@testing-library/user-event';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest';
 import { SheetScreen } from '@/app/(desk)/lines/_components/sheet-screen';
-import { titleOf } from '@/app/(desk)/lines/_components/sheet-title';
+import { tabOf, titleOf } from '@/app/(desk)/lines/_components/sheet-title';
 import { changeFiledSheet } from '@/lib/services/sheet/change-filed';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { NOW } from '@/tests/support/database';
@@ -52,6 +52,7 @@ describe('a filed sheet before its second reader', () => {
       },
     });
     expect(titleOf(views.filed, NOW, 'Etc/UTC')).toBe('Filed by Rhea Quill at 08:00');
+    expect(tabOf(views.filed)).toBe('Averil Coast governor: Alder minus Brook');
     const body = screen.getByRole('region', { name: 'Body sentence' });
     expect(body.querySelector('ins')?.textContent).toContain('leads');
     expect(within(body).getByText('“leads” says more than Not shown allows.')).toBeTruthy();

@@ -3,6 +3,7 @@ import {
   columnHeads,
   missingSentence,
   particularsOf,
+  tabOf,
   titleOf,
 } from '@/app/(desk)/releases/[id]/_components/release-words';
 import { given, NOT_DISCLOSED, NOT_ENTERED } from '@/lib/domain/disclosed';
@@ -36,6 +37,12 @@ const FACTS: ReleaseFacts = {
   ],
   sourceUrl: NOT_ENTERED,
 };
+
+describe('the browser tab of a release', () => {
+  it('names race, pollster and dates, and no figure', () => {
+    expect(tabOf(FACTS)).toBe('Averil Coast governor: Kelmouth Research, 14–17 September');
+  });
+});
 
 describe('the title of a release', () => {
   it('is the pollster and the two largest answers as printed, without a word of who leads', () => {

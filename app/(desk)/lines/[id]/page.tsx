@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { EmbargoBand } from '@/components/lines/embargo-band';
 import { EmptyState } from '@/components/ui/empty-state';
 import { LinkButton } from '@/components/ui/link-button';
@@ -8,7 +9,7 @@ import { readEnv } from '@/lib/env';
 import { AppError } from '@/lib/errors';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
 import { SheetScreen } from '../_components/sheet-screen';
-import { SheetTitle } from '../_components/sheet-title';
+import { SheetTitle, tabOf } from '../_components/sheet-title';
 import {
   changeFiledSheetAction,
   clearSheetAction,
@@ -18,8 +19,6 @@ import {
   reviseSheetAction,
   sendBackAction,
 } from '../actions';
-
-export const metadata: Metadata = { title: 'Sheet' };
 
 const ACTIONS = {
   file: fileSheetAction,
@@ -31,13 +30,27 @@ const ACTIONS = {
   embed: createEmbedAction,
 };
 
-export default async function SheetPage({ params }: { params: Promise<{ id: string }> }) {
-  const { id } = await params;
-  const { view, problem, person, now } = await deskPage((actor, ctx) => ({
+type Props = { params: Promise<{ id: string }> };
+
+/** Read once for the page and its name. */
+const readPage = cache((id: string) =>
+  deskPage((actor, ctx) => ({
     ...viewOrProblem(() => getSheet(actor, id, ctx)),
     person: actor.publicId,
     now: ctx.now,
-  }));
+  })),
+);
+
+/** A refusal is answered by the page, not by its name. */
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { id } = await params;
+  const page = await readPage(id).catch(() => null);
+  return { title: page?.view ? tabOf(page.view) : 'Sheet' };
+}
+
+export default async function SheetPage({ params }: Props) {
+  const { id } = await params;
+  const { view, problem, person, now } = await readPage(id);
   if (!view) return <NoClaim problem={problem} />;
   const zone = readEnv().LEADLINE_ZONE;
   return (

@@ -1,3 +1,4 @@
+import { isTakenBack } from '@/components/lines/taken-back';
 import { CautionNote } from '@/components/ui/caution-note';
 import { whenSaid } from '@/components/lines/when';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
@@ -6,6 +7,7 @@ import type { SheetView } from '@/lib/services/sheet/get-sheet';
 export function LastComment({ view, now, zone }: { view: SheetView; now: number; zone: string }) {
   const last = view.acts.at(-1);
   if (!last || (last.act !== 'sent-back' && last.act !== 'returned')) return null;
+  if (isTakenBack(view.acts)) return null;
   const at = whenSaid(last.at, now, zone);
   if (last.act === 'returned')
     return (

@@ -1,6 +1,9 @@
+import { betweenReleases } from '@/components/findings/between';
+import { isTakenBack } from '@/components/lines/taken-back';
 import { when } from '@/components/lines/when';
 import { PageTitle } from '@/components/ui/page-title';
 import { LINE_STATE_NAMES } from '@/lib/domain/sheet';
+import { subjectOf } from '@/lib/findings/heading';
 import { formatDayRange } from '@/lib/format/date';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 
@@ -20,6 +23,13 @@ export function SheetTitle({ view, now, zone }: { view: SheetView; now: number; 
   );
 }
 
+/** The name of a browser tab: race and claim without a figure, since tabs and their history are seen by others. */
+export function tabOf({ finding, evidence, previous }: Pick<SheetView, 'finding' | 'evidence' | 'previous'>) {
+  const { race, fieldEndOn } = evidence.release;
+  const between = previous ? betweenReleases(previous.fieldEndOn, fieldEndOn) : undefined;
+  return `${race.name}: ${subjectOf(finding, between)}`;
+}
+
 export function titleOf({ state, author, filer, acts }: SheetView, now: number, zone: string): string {
   const last = acts.at(-1);
   const at = last ? placed(when(last.at, now, zone)) : '';
@@ -31,6 +41,7 @@ export function titleOf({ state, author, filer, acts }: SheetView, now: number, 
     case 'pulled':
       return `Pulled by ${last?.person ?? 'an editor'}${at}`;
     case 'sent-back':
+      if (last && isTakenBack(acts)) return `Taken back by ${last.person}`;
       return last?.act === 'returned' ? `Back with ${lastFiler(acts) ?? author}` : `Sent back to ${author}`;
     default:
       return `Draft by ${author}`;

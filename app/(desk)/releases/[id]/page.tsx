@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { betweenReleases } from '@/components/findings/between';
 import { FindingList, testedFindings } from '@/components/findings/finding-list';
 import { verdictSummary } from '@/components/findings/verdict-summary';
@@ -25,18 +26,30 @@ import { EmbargoBand } from './_components/embargo-band';
 import { EmbargoList } from './_components/embargo-list';
 import { LiftEmbargo } from './_components/lift-embargo';
 import { Particulars } from './_components/particulars';
-import { missingSentence, particularsOf, titleOf } from './_components/release-words';
+import { missingSentence, particularsOf, tabOf, titleOf } from './_components/release-words';
 import { SharesTable } from './_components/shares-table';
 
-export const metadata: Metadata = { title: 'Release' };
+type Props = { params: Promise<{ id: string }> };
 
-export default async function ReleasePage({ params }: { params: Promise<{ id: string }> }) {
-  const { id } = await params;
-  const { view, isEditor, candidates } = await deskPage((actor, ctx) => ({
+/** Read once for the page and its name. */
+const readPage = cache((id: string) =>
+  deskPage((actor, ctx) => ({
     view: getRelease(actor, id, ctx),
     isEditor: canActAsEditor(actor),
     candidates: canActAsEditor(actor) ? listEmbargoCandidates(actor, ctx) : [],
-  }));
+  })),
+);
+
+/** A refusal is answered by the page, not by its name. */
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { id } = await params;
+  const page = await readPage(id).catch(() => null);
+  return { title: page ? tabOf(page.view.facts) : 'Release' };
+}
+
+export default async function ReleasePage({ params }: Props) {
+  const { id } = await params;
+  const { view, isEditor, candidates } = await readPage(id);
   const { facts, embargo } = view;
   const isHeld = embargo?.isRunning ?? false;
   return (
@@ -140,7 +153,7 @@ function Findings({ view }: { view: ReleaseView }) {
       />
       {uncounted.map(({ option, pct }) => (
         <p key={`${option} ${pct}`} className="mb-3 max-w-prose text-soft">
-          {option} is not held against {pct}%: the rule counts another base than these shares.
+          {option} is not tested against {pct}%: the rule counts a different base from these shares.
         </p>
       ))}
       <p className="mb-6 max-w-prose text-13 text-soft">

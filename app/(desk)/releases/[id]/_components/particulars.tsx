@@ -6,6 +6,7 @@ import { type Definition, DefinitionList } from '@/components/ui/definition-list
 import { SectionHeading } from '@/components/ui/section-heading';
 import { valueOf } from '@/lib/domain/disclosed';
 import { DESIGN_NAMES, SAMPLE_SOURCE_NAMES } from '@/lib/domain/vocabulary';
+import { formatDay } from '@/lib/format/date';
 import { formatCount, formatPercent, formatPoints, formatTrimmed } from '@/lib/format/number';
 import type { ReleaseView } from '@/lib/services/release/get-release';
 import { deffSourceText, noteText } from '@/lib/wording/base-words';
@@ -70,6 +71,7 @@ function baseItems({ facts, answer }: ReleaseView): Definition[] {
     { term: 'Interviews', value: n === null ? statusWords(facts.n.status) : formatCount(n, LOCALE) },
     { term: 'Sample', value: SAMPLE_SOURCE_NAMES[facts.sampleSource] },
     { term: 'Design', value: DESIGN_NAMES[facts.design] },
+    { term: 'Published', value: formatDay(facts.publishedOn, LOCALE) },
   ];
   if (nEff !== null) items.push({ term: 'Worth, after weighting', value: formatCount(nEff, LOCALE) });
   if (deff !== null && deffSource && deffRange) {

@@ -24,6 +24,11 @@ export function titleOf({ pollster, shares, decimals }: ReleaseFacts): string {
     : `${pollster.name}: no share disclosed`;
 }
 
+/** The name of a browser tab: no figure, since tabs and their history are seen by others. */
+export function tabOf({ race, pollster, fieldStartOn, fieldEndOn }: ReleaseFacts): string {
+  return `${race.name}: ${pollster.name}, ${formatDayRange(fieldStartOn, fieldEndOn, LOCALE)}`;
+}
+
 /** Who was asked, when and how, for whom; what is not known is left to the disclosure list. */
 export function particularsOf(facts: ReleaseFacts): string {
   const [n, population, mode] = [valueOf(facts.n), valueOf(facts.population), valueOf(facts.mode)];
