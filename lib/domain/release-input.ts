@@ -211,6 +211,22 @@ function refuseRepeats(names: string[], path: (index: number) => (string | numbe
   }
 }
 
+const days = z.object({
+  fieldStartOn: day('When did interviewing begin?'),
+  fieldEndOn: day('When did interviewing end?'),
+  publishedOn: day('When was or will it be published?'),
+});
+
+function refuseDisorder(
+  { fieldStartOn, fieldEndOn, publishedOn }: z.infer<typeof days>,
+  ctx: z.RefinementCtx,
+) {
+  const refuse = (path: string, message: string) => ctx.addIssue({ code: 'custom', path: [path], message });
+  if (fieldEndOn < fieldStartOn) refuse('fieldEndOn', 'Interviewing cannot end before it began.');
+  else if (publishedOn < fieldEndOn)
+    refuse('publishedOn', 'A release cannot come out before its interviews ended.');
+}
+
 /** What the release form sends, and what services accept: strings as typed, parsed here on both sides. */
 export const releaseInput = z
   .strictObject({
@@ -224,9 +240,7 @@ export const releaseInput = z
     sampleSource: z.enum(SAMPLE_SOURCES, { error: 'Choose how people came into the sample.' }),
     mode: disclosed(oneOf(MODES)),
     design: z.enum(DESIGNS, { error: 'Choose how the sample was weighted.' }),
-    fieldStartOn: day('When did interviewing begin?'),
-    fieldEndOn: day('When did interviewing end?'),
-    publishedOn: day('When was or will it be published?'),
+    ...days.shape,
     embargo: z
       .strictObject({
         local: z.string().regex(/^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}$/, 'Type date and time of the embargo.'),
@@ -252,19 +266,9 @@ export const releaseInput = z
       (index) => ['shares', index, 'option'],
       ctx,
     );
-    if (release.fieldEndOn < release.fieldStartOn)
-      ctx.addIssue({
-        code: 'custom',
-        path: ['fieldEndOn'],
-        message: 'Interviewing cannot end before it began.',
-      });
-    else if (release.publishedOn < release.fieldEndOn)
-      ctx.addIssue({
-        code: 'custom',
-        path: ['publishedOn'],
-        message: 'A release cannot come out before its interviews ended.',
-      });
-  });
+  })
+  // Told together with faults elsewhere, not only once those are mended.
+  .superRefine(refuseDisorder, { when: ({ value }) => days.safeParse(value).success });
 
 export type ReleaseFormValues = z.input<typeof releaseInput>;
 export type ReleaseInput = z.output<typeof releaseInput>;

@@ -68,6 +68,16 @@ describe('the form that is sent', () => {
     expect(newSubmissionKey()).toMatch(/^[\w-]{16,64}$/);
     expect(newSubmissionKey()).not.toBe(newSubmissionKey());
   });
+
+  it('has dates in the wrong order told together with other faults', () => {
+    const faulty = typedForm({
+      n: { value: 'a thousand', notDisclosed: false },
+      fieldStartOn: '2026-09-20',
+      fieldEndOn: '2026-09-10',
+    });
+    const paths = releaseInput.safeParse(pruned(faulty)).error?.issues.map(({ path }) => path.join('.'));
+    expect(paths).toEqual(['n.value', 'fieldEndOn']);
+  });
 });
 
 describe('the unit of a printed margin', () => {
