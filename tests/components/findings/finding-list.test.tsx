@@ -88,10 +88,13 @@ describe('a finding without a figure', () => {
 
 describe('the summary of verdicts', () => {
   it.each([
-    [['holds', 'fragile', 'does-not-hold'], 'One holds, one is fragile, one is not shown.'],
-    [['does-not-hold', 'holds', 'holds'], 'Two hold, one is not shown.'],
-    [['cannot-be-tested', 'cannot-be-tested'], 'Two cannot be tested.'],
-    [Array.from({ length: 12 }, () => 'fragile' as const), '12 are fragile.'],
+    [
+      ['holds', 'fragile', 'does-not-hold'],
+      'One finding holds, one is fragile, one is not shown by the numbers.',
+    ],
+    [['does-not-hold', 'holds', 'holds'], 'Two findings hold, one is not shown by the numbers.'],
+    [['cannot-be-tested', 'cannot-be-tested'], 'Two findings cannot be tested.'],
+    [Array.from({ length: 12 }, () => 'fragile' as const), '12 findings are fragile.'],
     [[], 'Nothing here is tested.'],
   ] as const)('of %j is “%s”', (verdicts, words) => {
     expect(verdictSummary([...verdicts])).toBe(words);

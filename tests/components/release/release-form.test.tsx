@@ -256,10 +256,10 @@ describe('the findings beside the form', () => {
     cleanup();
     await openTyped();
     expect(await screen.findByRole('heading', { name: 'Alder minus Brook: +6' })).toBeTruthy();
-    expect(screen.getByText('One is not shown.')).toBeTruthy();
+    expect(screen.getByText('One finding is not shown by the numbers.')).toBeTruthy();
     type('Sample size', 'a thousand');
     expect(await screen.findByText('The sample size cannot be read yet.')).toBeTruthy();
-    expect(await screen.findByText('One cannot be tested.')).toBeTruthy();
+    expect(await screen.findByText('One finding cannot be tested.')).toBeTruthy();
   });
 
   it('show an impossible figure at its field while it is typed', async () => {
@@ -292,7 +292,7 @@ describe('what a pollster withholds', () => {
     fireEvent.click(screen.getByRole('checkbox', { name: 'Not disclosed (sample size)' }));
     expect(field('Sample size').readOnly).toBe(true);
     expect(field('Sample size').value).toBe('1,012');
-    expect(await screen.findByText('One cannot be tested.')).toBeTruthy();
+    expect(await screen.findByText('One finding cannot be tested.')).toBeTruthy();
   });
 
   it('loses its mark when something is chosen after all', async () => {
