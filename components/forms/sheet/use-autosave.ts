@@ -39,7 +39,7 @@ export function useAutosave(sheet: { id: string; version: number; keptAs: string
         version.current = await send(id, version.current, sent);
       } catch (error) {
         isStopped.current = error instanceof Refused && FINAL.includes(error.status);
-        const message = error instanceof Refused ? error.message : 'This browser could not send it.';
+        const message = wordsFor(error);
         setSaving({ kind: isStopped.current ? 'stopped' : 'failed', message });
         return false;
       }
@@ -76,6 +76,12 @@ export function useAutosave(sheet: { id: string; version: number; keptAs: string
   }, [save]);
 
   return { saving, save, version };
+}
+
+function wordsFor(error: unknown): string {
+  if (error instanceof Refused && error.status === 401)
+    return 'Your session has ended. Sign in again in another tab, then press “Save now” here.';
+  return error instanceof Refused ? error.message : 'This browser could not send it.';
 }
 
 async function send(id: string, version: number, lines: WrittenLine[]): Promise<number> {

@@ -121,6 +121,14 @@ describe('saving', () => {
     expect(localStorage.length).toBe(0);
   });
 
+  it('that meets an ended session says how to go on', async () => {
+    answer = () => HttpResponse.json({ detail: 'Your session has ended.' }, { status: 401 });
+    open();
+    type('Words of a session that ended.');
+    expect(await screen.findByText(/^Your session has ended\. Sign in again in another tab/)).toBeTruthy();
+    expect(screen.getByRole('button', { name: 'Save now' })).toBeTruthy();
+  });
+
   it('that fails for now is tried again on demand', async () => {
     answer = () => HttpResponse.json({ detail: 'Leadline is busy.' }, { status: 503 });
     open();
@@ -144,6 +152,13 @@ describe('filing', () => {
       expect.objectContaining({ id: draft.id, version: 2, basisHash: draft.basisHash }),
     );
     expect(saved).toHaveLength(1);
+  });
+
+  it('is told, and the words that tell it take the focus', async () => {
+    open();
+    await userEvent.click(screen.getByRole('button', { name: 'File' }));
+    const said = await screen.findByText('Filed.');
+    await waitFor(() => expect(document.activeElement).toBe(said));
   });
 
   it('that is refused names the lines on top and at the field', async () => {

@@ -44,7 +44,15 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
       ) : view.state === 'cleared' || view.state === 'pulled' ? (
         <Cleared key={seen} view={view} actions={actions} now={now} zone={zone} onDone={setDone} />
       ) : view.may.write ? (
-        <Writing key={seen} view={view} actions={actions} person={person} now={now} zone={zone} />
+        <Writing
+          key={seen}
+          view={view}
+          actions={actions}
+          person={person}
+          now={now}
+          zone={zone}
+          onDone={setDone}
+        />
       ) : (
         <Waiting view={view} now={now} zone={zone} />
       )}

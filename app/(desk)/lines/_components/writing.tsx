@@ -17,12 +17,19 @@ import { UnsavedNote } from './unsaved-note';
 import { useAct } from './use-act';
 import { draftsOf, writtenLines } from './written-lines';
 
-type Props = { view: SheetView; actions: SheetActions; person: string; now: number; zone: string };
+type Props = {
+  view: SheetView;
+  actions: SheetActions;
+  person: string;
+  now: number;
+  zone: string;
+  onDone: (words: string) => void;
+};
 
 const never = () => () => undefined;
 
 /** The sheet while its author or an editor writes it. */
-export function Writing({ view, actions, person, now, zone }: Props) {
+export function Writing({ view, actions, person, now, zone, onDone }: Props) {
   const keptAs = `leadline-sheet-${person}-${view.id}`;
   const { lines, change, replace } = useLines(writtenLines(view.lines));
   const [isOffered, setOffered] = useState(true);
@@ -33,7 +40,7 @@ export function Writing({ view, actions, person, now, zone }: Props) {
   );
   const [unsaved] = useState(() => (typeof localStorage === 'undefined' ? null : findUnsaved(keptAs)));
   const { saving, save, version } = useAutosave({ id: view.id, version: view.version, keptAs }, lines);
-  const { act, isPending, failure, attempt } = useAct(actions.file);
+  const { act, isPending, failure, attempt } = useAct(actions.file, () => onDone('Filed.'));
   const [isFiling, setFiling] = useState(false);
 
   const file = async () => {
