@@ -1,3 +1,4 @@
+import { beforeFigure } from '@/lib/domain/reading-order';
 import type { CheckDocument, Finding } from './check-types';
 import { decimalPlaces } from './decimal';
 
@@ -55,16 +56,20 @@ export function printedDecimals(finding: Finding, { release, previous }: Decimal
 export function subjectOf(finding: Finding, between = 'earlier to this'): string {
   switch (finding.kind) {
     case 'share':
-      return finding.option;
+      return beforeFigure(finding.option);
     case 'lead':
-      return `${finding.pair[0]} minus ${finding.pair[1]}`;
+      return pairOf(finding.pair);
     case 'change':
-      return `${finding.option}, ${between}`;
+      return `${beforeFigure(finding.option)}, ${between}`;
     case 'lead-change':
-      return `${finding.pair[0]} minus ${finding.pair[1]}, ${between}`;
+      return `${pairOf(finding.pair)}, ${between}`;
     case 'threshold':
-      return `${finding.option} against ${finding.thresholdPct}%`;
+      return `${beforeFigure(finding.option)} against ${finding.thresholdPct}%`;
   }
+}
+
+function pairOf([first, second]: readonly [string, string]): string {
+  return `${beforeFigure(first)} minus ${beforeFigure(second)}`;
 }
 
 function signed(value: number, decimals: number): string {

@@ -45,6 +45,14 @@ describe('the browser tab of a release', () => {
 });
 
 describe('the title of a release', () => {
+  it('keeps a figure after its name, whichever way the name is written', () => {
+    const shares = [
+      { option: 'אלון', units: 470, isAnswer: true },
+      { option: 'Brook', units: 410, isAnswer: true },
+    ];
+    expect(titleOf({ ...FACTS, shares })).toBe('Kelmouth Research: אלון\u200e 47.0, Brook 41.0');
+  });
+
   it('is the pollster and the two largest answers as printed, without a word of who leads', () => {
     expect(titleOf(FACTS)).toBe('Kelmouth Research: Alder 49.0, Brook 41.0');
   });

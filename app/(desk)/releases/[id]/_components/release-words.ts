@@ -1,4 +1,5 @@
 import { valueOf } from '@/lib/domain/disclosed';
+import { beforeFigure } from '@/lib/domain/reading-order';
 import { pctOf, type ReleaseFacts } from '@/lib/domain/release-facts';
 import { MODE_NAMES, POPULATION_NAMES } from '@/lib/domain/vocabulary';
 import type { MissingDisclosure } from '@/lib/findings/disclosure';
@@ -18,7 +19,7 @@ export function titleOf({ pollster, shares, decimals }: ReleaseFacts): string {
     .filter((share) => share.isAnswer && share.units !== null)
     .sort((a, b) => (b.units ?? 0) - (a.units ?? 0))
     .slice(0, 2)
-    .map(({ option, units }) => `${option} ${printedShare(units, decimals)}`);
+    .map(({ option, units }) => `${beforeFigure(option)} ${printedShare(units, decimals)}`);
   return largest.length > 0
     ? `${pollster.name}: ${largest.join(', ')}`
     : `${pollster.name}: no share disclosed`;
