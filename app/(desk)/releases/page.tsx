@@ -7,6 +7,7 @@ import { LinkButton } from '@/components/ui/link-button';
 import { NextBar } from '@/components/ui/next-bar';
 import { PageTitle } from '@/components/ui/page-title';
 import { deskPage } from '@/lib/auth/desk-page';
+import { beforeFigure } from '@/lib/domain/reading-order';
 import { POPULATION_NAMES } from '@/lib/domain/vocabulary';
 import { readEnv } from '@/lib/env';
 import { formatDayRange, formatInstant } from '@/lib/format/date';
@@ -68,7 +69,7 @@ function columnsIn(zone: string): Column<ReleaseListItem>[] {
       key: 'race',
       head: 'Race, pollster',
       rowHead: true,
-      cell: ({ id, race, pollster, isUnderEmbargo }) => (
+      cell: ({ id, race, pollster, isUnderEmbargo, verdicts }) => (
         <>
           <Link href={`/releases/${id}`} className="font-semibold">
             {race}
@@ -77,6 +78,10 @@ function columnsIn(zone: string): Column<ReleaseListItem>[] {
           {isUnderEmbargo ? (
             <strong className="text-13 font-bold tracking-wider text-caution uppercase">Embargo</strong>
           ) : null}
+          {/* On a phone the column of verdicts is left out, and shares never stand without them. */}
+          <div className="mt-1 min-[30rem]:hidden">
+            <VerdictRow verdicts={verdicts} />
+          </div>
         </>
       ),
     },
@@ -85,7 +90,7 @@ function columnsIn(zone: string): Column<ReleaseListItem>[] {
       head: 'Interviews',
       cell: ({ fieldStartOn, fieldEndOn, n, population }) => (
         <>
-          <span className="whitespace-nowrap">
+          <span className="sm:whitespace-nowrap">
             {formatDayRange(fieldStartOn, fieldEndOn, 'en-GB', { withYear: true })}
           </span>
           <span className="block text-13 text-soft">
@@ -101,7 +106,7 @@ function columnsIn(zone: string): Column<ReleaseListItem>[] {
       cell: ({ topShares }) =>
         topShares.length === 0
           ? 'No share disclosed'
-          : topShares.map(({ option, printed }) => `${option} ${printed}`).join(', '),
+          : topShares.map(({ option, printed }) => `${beforeFigure(option)} ${printed}`).join(', '),
     },
     {
       key: 'verdicts',
