@@ -41,7 +41,7 @@ test('what is under embargo stays with reporters and editors until it is opened,
   await expect(copyDesk.getByText('No cleared sheet fits that search')).toBeVisible();
 
   await editor.goto(search);
-  await expect(editor.getByText('EMBARGO', { exact: true }).first()).toBeVisible();
+  await expect(editor.getByRole('complementary', { name: /embargo/i }).first()).toBeVisible();
   await expect(editor.getByRole('button', { name: /Plain/ }).first()).toBeDisabled();
 
   await editor.goto('/releases');
@@ -51,7 +51,7 @@ test('what is under embargo stays with reporters and editors until it is opened,
   await expect(editor.getByRole('button', { name: /Take off/ })).toBeVisible();
 
   await copyDesk.goto(search);
-  await expect(copyDesk.getByText('EMBARGO', { exact: true }).first()).toBeVisible();
+  await expect(copyDesk.getByRole('complementary', { name: /embargo/i }).first()).toBeVisible();
   await copyDesk.getByRole('button', { name: /Plain/ }).first().click();
   await expect(copyDesk.getByText(/^Copied/).first()).toBeVisible();
   expect((await copyDesk.request.get(address)).status()).toBe(404);
@@ -60,6 +60,6 @@ test('what is under embargo stays with reporters and editors until it is opened,
   const dialog = editor.getByRole('dialog');
   await dialog.getByRole('textbox').fill('The pollster published the figures early.');
   await dialog.getByRole('button', { name: 'Lift the embargo' }).click();
-  await expect(editor.getByText('EMBARGO', { exact: true })).toHaveCount(0);
+  await expect(editor.getByRole('complementary', { name: /embargo/i })).toHaveCount(0);
   expect((await copyDesk.request.get(address)).status()).toBe(200);
 });

@@ -24,6 +24,10 @@ for (const [role, paths] of Object.entries(SCREENS))
       const link = page.locator(`main a[href^="${list}/"]:not([href$="/new"])`).first();
       await look(page, (await link.getAttribute('href'))!);
     }
+    await page.goto('/releases');
+    const unprinted = page.getByRole('row').filter({ hasText: 'Bridge-toll' }).filter({ hasText: 'Quillon' });
+    await unprinted.getByRole('link').click();
+    await look(page, (await page.getByRole('link', { name: 'Change figures' }).getAttribute('href'))!);
   });
 
 test('the door and a public chart have no fault that axe finds, and fit 320 px', async ({
