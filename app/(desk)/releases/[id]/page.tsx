@@ -156,10 +156,12 @@ function Findings({ view }: { view: ReleaseView }) {
           {option} is not tested against {pct}%: the rule counts a different base from these shares.
         </p>
       ))}
-      <p className="mb-6 max-w-prose text-13 text-soft">
-        Ranges cover sampling error only, with one design effect for every figure, which is an approximation.
-        Other errors come on top.
-      </p>
+      {answer.findings.some((one) => one.kind === 'share' && one.intervalPct) ? (
+        <p className="mb-6 max-w-prose text-13 text-soft">
+          Ranges cover sampling error only, with one design effect for every figure, which is an
+          approximation. Other errors come on top.
+        </p>
+      ) : null}
     </section>
   );
 }

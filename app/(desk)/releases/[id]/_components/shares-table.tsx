@@ -8,8 +8,10 @@ import { formatPoints } from '@/lib/format/number';
 import type { ReleaseView } from '@/lib/services/release/get-release';
 import { columnHeads, printedShare } from './release-words';
 
+type Shown = Pick<ReleaseView, 'facts' | 'previous' | 'answer' | 'document' | 'enteredBy'>;
+
 /** Shares as printed, this release beside the one it is compared with, each with the range of its own. */
-export function SharesTable({ view }: { view: ReleaseView }) {
+export function SharesTable({ view }: { view: Shown }) {
   const { facts, previous, answer, document } = view;
   const ranges = new Map(answer.findings.flatMap((one) => (one.kind === 'share' ? [[one.option, one]] : [])));
   const [now, before] = columnHeads(facts, previous);
@@ -45,6 +47,7 @@ export function SharesTable({ view }: { view: ReleaseView }) {
       numeric: true,
       cell: ({ option }) => printedShare(earlier.get(option)?.units ?? null, previous.decimals),
     });
+  const hasRanges = [...ranges.values()].some(({ intervalPct }) => intervalPct);
   const typists = [...new Set(Object.values(view.enteredBy))];
   return (
     <>
@@ -55,9 +58,13 @@ export function SharesTable({ view }: { view: ReleaseView }) {
         rowKey={({ option }) => option}
       />
       <p className="-mt-2 mb-2 text-13 text-soft">
-        Typed by {typists.join(', ')}. Beneath each share: its range, from sampling error alone.
+        Typed by {typists.join(', ')}.
+        {hasRanges ? ' Beneath each share: its range, from sampling error alone.' : ''}
       </p>
-      <Details summary="Working of the ranges" className="mb-5 text-13">
+      <Details
+        summary={hasRanges ? 'Working of the ranges' : 'Why no share has a range'}
+        className="mb-5 text-13"
+      >
         {answer.findings.map((finding, at) =>
           finding.kind === 'share' ? (
             <section key={finding.option} className="mb-3">
