@@ -1,19 +1,24 @@
+import { formatInstant, formatTime } from '@/lib/format/date';
 import { Band } from '../ui/band';
 
-export type Embargo = { isRunning: boolean; local: string; zone: string } | null;
+const LOCALE = 'en-GB';
+
+export type Embargo = { isRunning: boolean; at: number; zone: string } | null;
 
 /** Stands over everything that comes from a release under embargo. */
 export function EmbargoBand({ embargo, isOnList }: { embargo: Embargo; isOnList?: boolean }) {
   if (!embargo?.isRunning) return null;
   return (
     <Band word="Embargo">
-      until {embargoEnd(embargo)}. Nothing of this leaves the desk before.
+      Until <time dateTime={new Date(embargo.at).toISOString()}>{embargoEnd(embargo)}</time>. Nothing of it
+      may be printed before.
       {isOnList === false ? ' You are not on its embargo list, so you cannot copy from it.' : null}
     </Band>
   );
 }
 
-/** As it was typed, in its own zone: "2026-09-17 12:00 (Etc/UTC)". */
-export function embargoEnd({ local, zone }: { local: string; zone: string }): string {
-  return `${local.replace('T', ' ')} (${zone})`;
+/** Its end on the clocks it was given for, and in UTC where those differ. */
+export function embargoEnd({ at, zone }: { at: number; zone: string }): string {
+  const [there, utc] = [formatInstant(at, zone, LOCALE), formatInstant(at, 'UTC', LOCALE)];
+  return there === utc ? `${utc} UTC` : `${there} in ${zone} (${formatTime(at, 'UTC', LOCALE)} UTC)`;
 }

@@ -4,6 +4,7 @@ import { betweenReleases } from '@/components/findings/between';
 import { FindingList, testedFindings } from '@/components/findings/finding-list';
 import { verdictSummary } from '@/components/findings/verdict-summary';
 import { WorkingSteps } from '@/components/findings/working-steps';
+import { EmbargoBand } from '@/components/lines/embargo-band';
 import { LinkButton } from '@/components/ui/link-button';
 import { NextBar } from '@/components/ui/next-bar';
 import { PageTitle } from '@/components/ui/page-title';
@@ -22,7 +23,6 @@ import { getRelease, type ReleaseView } from '@/lib/services/release/get-release
 import { listEmbargoCandidates } from '@/lib/services/release/list-embargo-candidates';
 import { liftEmbargoAction, setEmbargoReaderAction } from '../actions';
 import { ComparisonOverride } from './_components/comparison-override';
-import { EmbargoBand } from './_components/embargo-band';
 import { EmbargoList } from './_components/embargo-list';
 import { LiftEmbargo } from './_components/lift-embargo';
 import { Particulars } from './_components/particulars';
@@ -54,12 +54,8 @@ export default async function ReleasePage({ params }: Props) {
   const isHeld = embargo?.isRunning ?? false;
   return (
     <>
-      {embargo && isHeld ? (
-        <>
-          <EmbargoBand embargo={embargo} />
-          <div className="h-4" />
-        </>
-      ) : null}
+      <EmbargoBand embargo={embargo} />
+      {isHeld ? <div className="h-4" /> : null}
       <PageTitle
         crumbs={[{ label: 'Releases', href: '/releases' }, { label: facts.race.name }]}
         note={noteOf(view)}

@@ -1,3 +1,4 @@
+import { ENGLISH_CHART_WORDS, formatLevel } from '@/lib/charts/chart-words';
 import Link from 'next/link';
 import type { ReactNode } from 'react';
 import { ComparedWith } from '@/components/findings/compared-with';
@@ -7,7 +8,7 @@ import { SectionHeading } from '@/components/ui/section-heading';
 import { valueOf } from '@/lib/domain/disclosed';
 import { DESIGN_NAMES, SAMPLE_SOURCE_NAMES } from '@/lib/domain/vocabulary';
 import { formatDay } from '@/lib/format/date';
-import { formatCount, formatPercent, formatPoints, formatTrimmed } from '@/lib/format/number';
+import { formatCount, formatPoints, formatTrimmed } from '@/lib/format/number';
 import type { ReleaseView } from '@/lib/services/release/get-release';
 import { deffSourceText, noteText } from '@/lib/wording/base-words';
 
@@ -85,7 +86,7 @@ function baseItems({ facts, answer }: ReleaseView): Definition[] {
   items.push({
     term: 'Stated margin',
     value: stated
-      ? `± ${formatTrimmed(stated.pp, 2, LOCALE)} at ${formatPercent(stated.level * 100, 0, LOCALE)}`
+      ? `± ${formatTrimmed(stated.pp, 2, LOCALE)} at ${formatLevel(stated.level, ENGLISH_CHART_WORDS)}`
       : statusWords(facts.statedMargin.status),
   });
   return items;
