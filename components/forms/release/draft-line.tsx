@@ -1,10 +1,11 @@
 'use client';
 
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { formatTime } from '@/lib/format/date';
 import { Button } from '../../ui/button';
 import { CopyStatus } from '../../ui/copy-status';
 import { Dialog } from '../../ui/dialog';
+import { fieldId } from './field-path';
 import type { DraftStatus } from './use-draft';
 
 /** Says when the draft was last kept, and throws it away on a second word. */
@@ -16,14 +17,27 @@ export function DraftLine({
   status: DraftStatus;
   /** When the draft that the form opened with was kept. */
   restoredAt: number | null;
-  onDiscard: () => Promise<void>;
+  /** Answers whether the draft is gone. */
+  onDiscard: () => Promise<boolean>;
 }) {
   const [isAsking, setIsAsking] = useState(false);
   const [isPending, setIsPending] = useState(false);
+  const keep = useRef<HTMLButtonElement>(null);
+  const isGone = useRef(false);
   const hasDraft = restoredAt !== null || status.kind !== 'idle';
+
+  useEffect(() => {
+    if (isAsking) keep.current?.focus();
+    else if (isGone.current) document.getElementById(fieldId('race.id'))?.focus();
+    isGone.current = false;
+  }, [isAsking]);
+
   return (
     <div className="mb-4 flex flex-wrap items-center gap-x-5 gap-y-1">
-      <CopyStatus message={wordsFor(status, restoredAt)} isFault={status.kind === 'failed'} />
+      <CopyStatus
+        message={wordsFor(status, restoredAt)}
+        isFault={status.kind === 'failed' || status.kind === 'conflict'}
+      />
       {hasDraft ? (
         <button type="button" className="min-h-6 text-13 underline" onClick={() => setIsAsking(true)}>
           Discard this draft
@@ -32,19 +46,21 @@ export function DraftLine({
       <Dialog isOpen={isAsking} onClose={() => setIsAsking(false)} title="Discard this draft?">
         <p className="mb-4">Everything typed into this form goes. Releases that are logged stay.</p>
         <div className="flex flex-wrap gap-3">
+          <Button ref={keep} onClick={() => setIsAsking(false)}>
+            Keep it
+          </Button>
           <Button
             tone="caution"
             pending={isPending}
             onClick={async () => {
               setIsPending(true);
-              await onDiscard();
+              isGone.current = await onDiscard();
               setIsPending(false);
               setIsAsking(false);
             }}
           >
             Discard the draft
           </Button>
-          <Button onClick={() => setIsAsking(false)}>Keep it</Button>
         </div>
       </Dialog>
     </div>
@@ -61,6 +77,8 @@ function wordsFor(status: DraftStatus, restoredAt: number | null): string {
       return 'Saving…';
     case 'saved':
       return `Saved ${clock(status.at)}`;
+    case 'conflict':
+      return 'Not saved: this draft was changed in another tab.';
     case 'failed':
       return `Not saved: ${status.message}`;
   }

@@ -1,9 +1,12 @@
 'use client';
 
 import { useCallback, useEffect, useState } from 'react';
+import { Button } from '../../ui/button';
+import { DraftConflict } from './draft-conflict';
+import type { KeptDraft } from './draft-exchange';
 import { DraftLine } from './draft-line';
 import type { FormChoices } from './form-choices';
-import { emptyReleaseForm, type ReleaseForm } from './form-values';
+import { emptyReleaseForm, type ReleaseForm, reviveReleaseForm } from './form-values';
 import { type Answer, type Refusal, ReleaseFields } from './release-fields';
 import { newSubmissionKey } from './submission-key';
 import { useDraft } from './use-draft';
@@ -34,8 +37,13 @@ export function LogFields({
   const form = useReleaseForm(initial.values);
   const [submissionKey, setSubmissionKey] = useState(newSubmissionKey);
   const [restoredAt, setRestoredAt] = useState(initial.savedAt);
+  /** The version of two that was not chosen. */
+  const [aside, setAside] = useState<ReleaseForm | null>(null);
   const { getValues, subscribe } = form;
-  const draft = useDraft(useCallback(() => getValues(), [getValues]));
+  const draft = useDraft(
+    useCallback(() => getValues(), [getValues]),
+    initial.savedAt,
+  );
   const { changed } = draft;
   useEffect(() => subscribe({ formState: { values: true }, callback: changed }), [subscribe, changed]);
 
@@ -47,20 +55,57 @@ export function LogFields({
   }
 
   async function discard() {
-    if (!(await draft.discard())) return;
-    form.reset(emptyReleaseForm());
+    const isGone = await draft.discard(() => form.reset(emptyReleaseForm()));
+    if (!isGone) return false;
     setSubmissionKey(newSubmissionKey());
     setRestoredAt(null);
+    setAside(null);
+    return true;
   }
 
+  function keepTyped(other: KeptDraft) {
+    setAside(reviveReleaseForm(other.body));
+    draft.settle(other);
+  }
+
+  function loadOther(other: KeptDraft) {
+    swapFor(reviveReleaseForm(other.body));
+    draft.settle(other);
+  }
+
+  function swapFor(values: ReleaseForm) {
+    setAside(structuredClone(getValues()));
+    form.reset(values);
+  }
+
+  const { status } = draft;
   return (
     <ReleaseFields
       form={form}
       choices={choices}
       personId={personId}
-      lead={<DraftLine status={draft.status} restoredAt={restoredAt} onDiscard={discard} />}
+      lead={
+        <>
+          <DraftLine status={status} restoredAt={restoredAt} onDiscard={discard} />
+          {status.kind === 'conflict' ? (
+            <DraftConflict onKeep={() => keepTyped(status.other)} onLoad={() => loadOther(status.other)} />
+          ) : null}
+          {aside && status.kind !== 'conflict' ? <SetAside onBack={() => swapFor(aside)} /> : null}
+        </>
+      }
       send={{ label: 'Log the release', pendingLabel: 'Logging…' }}
       submit={send}
     />
+  );
+}
+
+function SetAside({ onBack }: { onBack: () => void }) {
+  return (
+    <p className="mb-4 text-13 text-soft">
+      The other version of this draft is set aside in this tab.{' '}
+      <Button className="ml-2" onClick={onBack}>
+        Swap the two versions
+      </Button>
+    </p>
   );
 }

@@ -1,14 +1,16 @@
 'use client';
 
+import { useState } from 'react';
 import useSWR from 'swr';
 import { Button } from '../../ui/button';
 import { CautionNote } from '../../ui/caution-note';
 import { Loading } from '../../ui/loading';
+import { draftIn, DRAFTS_URL } from './draft-exchange';
 import { fetchJson } from './fetch-json';
 import type { FormChoices } from './form-choices';
 import { emptyReleaseForm, type ReleaseForm as Values, reviveReleaseForm } from './form-values';
 import { LogFields, type SubmitRelease } from './log-fields';
-import { DRAFTS_URL } from './use-draft';
+import { newSubmissionKey } from './submission-key';
 
 /** Logging a release: what was typed before comes back first, then the form opens on it. */
 export function ReleaseForm({
@@ -20,7 +22,9 @@ export function ReleaseForm({
   personId: string;
   submit: SubmitRelease;
 }) {
-  const { data, error, isLoading, mutate } = useSWR([DRAFTS_URL, personId], readDraft, {
+  // Fetched anew whenever the form opens: one fetched before is older than what was typed since.
+  const [opening] = useState(newSubmissionKey);
+  const { data, error, isLoading, mutate } = useSWR([DRAFTS_URL, personId, opening], readDraft, {
     revalidateOnFocus: false,
     revalidateOnReconnect: false,
     revalidateIfStale: false,
@@ -41,9 +45,7 @@ export function ReleaseForm({
 export type Initial = { values: Values; savedAt: number | null };
 
 async function readDraft([url]: string[]): Promise<Initial> {
-  const kept = await fetchJson(url ?? DRAFTS_URL, { method: 'GET' });
-  if (typeof kept !== 'object' || kept === null || !('body' in kept))
-    return { values: emptyReleaseForm(), savedAt: null };
-  const savedAt = 'savedAt' in kept && typeof kept.savedAt === 'number' ? kept.savedAt : null;
-  return { values: reviveReleaseForm(kept.body), savedAt };
+  const kept = draftIn(await fetchJson(url ?? DRAFTS_URL, { method: 'GET' }));
+  if (!kept) return { values: emptyReleaseForm(), savedAt: null };
+  return { values: reviveReleaseForm(kept.body), savedAt: kept.savedAt };
 }

@@ -1,40 +1,42 @@
 import { useCallback, useEffect, useRef, useState } from 'react';
-import { fetchJson, Refused } from './fetch-json';
+import { draftExchange, type Kept, type KeptDraft } from './draft-exchange';
+import { Refused } from './fetch-json';
 
-export const DRAFTS_URL = '/api/desk/drafts';
 const WAIT_MS = 700;
 
-export type DraftStatus =
-  { kind: 'idle' } | { kind: 'saving' } | { kind: 'saved'; at: number } | { kind: 'failed'; message: string };
+export type DraftStatus = { kind: 'idle' } | { kind: 'saving' } | Kept | { kind: 'failed'; message: string };
 
 /**
  * Keeps what is typed: a moment after the last change, when the page is left, and again when the window comes
  * back after a failure. Nothing typed is ever taken away, whatever the answer.
  *
  * @param read the whole form as it stands
+ * @param basedOn when the draft that the form opened with was kept
  */
-export function useDraft(read: () => unknown) {
+export function useDraft(read: () => unknown, basedOn: number | null) {
   const [status, setStatus] = useState<DraftStatus>({ kind: 'idle' });
+  const [exchange] = useState(() => draftExchange(basedOn));
   const timer = useRef<ReturnType<typeof setTimeout> | null>(null);
   const running = useRef<Promise<void>>(Promise.resolve());
   const isDirty = useRef(false);
   const isStopped = useRef(false);
+  const isContested = useRef(false);
 
   const send = useCallback(
     async (keepalive: boolean) => {
-      if (isStopped.current || !isDirty.current) return;
+      if (isStopped.current || isContested.current || !isDirty.current) return;
       isDirty.current = false;
       setStatus({ kind: 'saving' });
       try {
-        const body = { body: JSON.stringify(read()) };
-        const answer = await fetchJson(DRAFTS_URL, { method: 'PUT', body, keepalive });
-        setStatus({ kind: 'saved', at: savedAtOf(answer) });
+        const kept = await exchange.save(JSON.stringify(read()), keepalive);
+        isContested.current = kept.kind === 'conflict';
+        setStatus(kept);
       } catch (error) {
         isDirty.current = true;
         setStatus({ kind: 'failed', message: wordsFor(error) });
       }
     },
-    [read],
+    [read, exchange],
   );
 
   /** One save after the other, so that an older one never lands on top of a newer one. */
@@ -83,27 +85,39 @@ export function useDraft(read: () => unknown) {
     changed();
   }, [changed]);
 
-  const discard = useCallback(async () => {
-    await stop();
-    try {
-      await fetchJson(DRAFTS_URL, { method: 'DELETE', body: {} });
-      isDirty.current = false;
-      setStatus({ kind: 'idle' });
-      return true;
-    } catch (error) {
-      setStatus({ kind: 'failed', message: wordsFor(error) });
-      return false;
-    } finally {
-      isStopped.current = false;
-    }
-  }, [stop]);
+  /** The writer has seen the other version: what now stands in the form replaces it. */
+  const settle = useCallback(
+    (other: KeptDraft) => {
+      exchange.adopt(other);
+      isContested.current = false;
+      isDirty.current = true;
+      void save();
+    },
+    [exchange, save],
+  );
 
-  return { status, changed, stop, resume, discard };
-}
+  /** @param clear empties the form, which is not typing and is not kept */
+  const discard = useCallback(
+    async (clear: () => void) => {
+      await stop();
+      try {
+        await exchange.remove();
+        isDirty.current = false;
+        isContested.current = false;
+        clear();
+        setStatus({ kind: 'idle' });
+        return true;
+      } catch (error) {
+        setStatus({ kind: 'failed', message: wordsFor(error) });
+        return false;
+      } finally {
+        isStopped.current = false;
+      }
+    },
+    [stop, exchange],
+  );
 
-function savedAtOf(answer: unknown): number {
-  const isSaved = typeof answer === 'object' && answer !== null && 'savedAt' in answer;
-  return isSaved && typeof answer.savedAt === 'number' ? answer.savedAt : 0;
+  return { status, changed, stop, resume, settle, discard };
 }
 
 function wordsFor(error: unknown): string {

@@ -2,6 +2,7 @@ import 'server-only';
 import { z } from 'zod';
 import { deleteReleaseDraft, findReleaseDraft, upsertReleaseDraft } from '@/db/queries/release-draft';
 import { type Actor, canLogReleases } from '@/lib/domain/roles';
+import { AppError } from '@/lib/errors';
 import { authorize, type Ctx, parse, transact } from '../context';
 
 const MAX_DRAFT = 100_000;
@@ -12,16 +13,27 @@ const schema = z.strictObject({
     .string()
     .max(MAX_DRAFT, 'This draft is too large to keep.')
     .refine(isJsonObject, 'A draft is the form as JSON.'),
+  /** The `savedAt` of the draft that was typed on; null where there was none. */
+  basedOn: z.number().int().nullable(),
 });
 
-/** Keeps what a person has typed so far. Drafts are private and never part of the history. */
+/**
+ * Keeps what a person has typed so far, unless something else was kept since `basedOn`. Drafts are private and never
+ * part of the history.
+ */
 export function saveReleaseDraft(actor: Actor, input: unknown, ctx: Ctx): { savedAt: number } {
   authorize(canLogReleases(actor), 'Only reporters and editors log releases.');
-  const { body } = parse(schema, input);
-  transact(ctx, (tx) =>
-    upsertReleaseDraft(tx, { personId: actor.personId, key: KEY, body, updatedAt: ctx.now }),
-  );
-  return { savedAt: ctx.now };
+  const { body, basedOn } = parse(schema, input);
+  return transact(ctx, (tx) => {
+    const kept = findReleaseDraft(tx, actor.personId, KEY);
+    if (kept?.body === body) return { savedAt: kept.updatedAt };
+    if (kept && kept.updatedAt !== basedOn)
+      throw new AppError('conflict', 'This draft was changed in another tab.');
+    // Two saves within one tick of the clock are still told apart.
+    const savedAt = Math.max(ctx.now, (kept?.updatedAt ?? 0) + 1);
+    upsertReleaseDraft(tx, { personId: actor.personId, key: KEY, body, updatedAt: savedAt });
+    return { savedAt };
+  });
 }
 
 export function getReleaseDraft(

@@ -7,14 +7,21 @@ import { NOW } from '@/tests/support/database';
 export function deskServer() {
   const saved: unknown[] = [];
   const asked: unknown[] = [];
-  const kept: { draft: { body: unknown; savedAt: number } | null; compared: Compared } = {
+  type Draft = { body: unknown; savedAt: number } | null;
+  /** `elsewhere` is what another tab keeps once the form is open. */
+  const kept: { draft: Draft; elsewhere: Draft; compared: Compared } = {
     draft: null,
+    elsewhere: null,
     compared: { previous: null, comparison: null },
   };
   const server = setupServer(
     http.get('*/api/desk/drafts', () => HttpResponse.json(kept.draft)),
     http.put('*/api/desk/drafts', async ({ request }) => {
-      const { body } = (await request.json()) as { body: string };
+      const { body, basedOn } = (await request.json()) as { body: string; basedOn: number | null };
+      if (kept.elsewhere && basedOn !== kept.elsewhere.savedAt) {
+        kept.draft = kept.elsewhere;
+        return refuse(409, 'This draft was changed in another tab.');
+      }
       saved.push(JSON.parse(body));
       return HttpResponse.json({ savedAt: NOW });
     }),
@@ -32,6 +39,7 @@ export function deskServer() {
     saved.length = 0;
     asked.length = 0;
     kept.draft = null;
+    kept.elsewhere = null;
     kept.compared = { previous: null, comparison: null };
   };
   return { server, saved, asked, kept, reset };

@@ -121,9 +121,14 @@ describe('the draft', () => {
   it('goes only when it is asked for twice', async () => {
     await openTyped();
     press('Discard this draft');
+    expect(document.activeElement).toBe(screen.getByRole('button', { name: 'Keep it' }));
+    const before = saved.length;
     press('Discard the draft');
     await waitFor(() => expect(field('Pollster').value).toBe(''));
     expect(kept.draft).toBeNull();
+    await waitFor(() => expect(document.activeElement).toBe(field('Race')));
+    await new Promise((resolve) => setTimeout(resolve, 900));
+    expect(saved.length).toBe(before);
   });
 });
 

@@ -79,7 +79,7 @@ describe('logging a release', () => {
   });
 
   it('takes away the draft that it was typed as', () => {
-    saveReleaseDraft(reporter, { body: '{"pollster":"Kelmouth"}' }, desk.ctx());
+    saveReleaseDraft(reporter, { body: '{"pollster":"Kelmouth"}', basedOn: null }, desk.ctx());
     send(reporter, releaseForm());
     expect(getReleaseDraft(reporter, desk.ctx())).toBeNull();
   });
