@@ -262,3 +262,11 @@ export function moveSheetsToVersion(
 ): void {
   conn.update(sheets).set({ releaseVersionId, questionId }).where(eq(sheets.releaseId, releaseId)).run();
 }
+
+/** Removes a sheet with its lines. The schema refuses it for one that anything was done to. */
+export function deleteSheet(conn: Conn, id: number): void {
+  const itsLines = conn.select({ id: lines.id }).from(lines).where(eq(lines.sheetId, id));
+  conn.delete(lineVersions).where(inArray(lineVersions.lineId, itsLines)).run();
+  conn.delete(lines).where(eq(lines.sheetId, id)).run();
+  conn.delete(sheets).where(eq(sheets.id, id)).run();
+}

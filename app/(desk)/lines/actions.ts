@@ -5,6 +5,7 @@ import { createEmbed } from '@/lib/services/embed/create-embed';
 import { changeFiledSheet, reviseSheet } from '@/lib/services/sheet/change-filed';
 import { clearSheet, sendBack } from '@/lib/services/sheet/clear-sheet';
 import { createSheet } from '@/lib/services/sheet/create-sheet';
+import { discardSheet } from '@/lib/services/sheet/discard-sheet';
 import { fileSheet } from '@/lib/services/sheet/file-sheet';
 import { pullSheet } from '@/lib/services/sheet/pull-sheet';
 
@@ -38,4 +39,8 @@ export async function reviseSheetAction(input: unknown) {
 
 export async function createEmbedAction(input: unknown) {
   return deskAction((actor, ctx) => createEmbed(actor, input, ctx));
+}
+
+export async function discardSheetAction(input: unknown) {
+  return deskAction((actor, ctx) => discardSheet(actor, input, ctx));
 }

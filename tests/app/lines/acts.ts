@@ -13,6 +13,7 @@ export function sheetActs() {
     sendBack: vi.fn<SheetActions['sendBack']>().mockResolvedValue({ ok: true, value: undefined }),
     pull: vi.fn<SheetActions['pull']>().mockResolvedValue({ ok: true, value: undefined }),
     revise: vi.fn<SheetActions['revise']>().mockResolvedValue({ ok: true, value: { version: 9 } }),
+    discard: vi.fn<SheetActions['discard']>().mockResolvedValue({ ok: true, value: undefined }),
     embed: vi.fn<SheetActions['embed']>().mockResolvedValue({ ok: true, value: { id: 'embed' } }),
   };
 }

@@ -116,6 +116,20 @@ describe('a filed sheet before its second reader', () => {
     expect(acts.sendBack).toHaveBeenLastCalledWith({ id, hash: views.filed.hash, comment });
   });
 
+  it('stays as it is when the dialog is left by its plain button', async () => {
+    open(views.filed);
+    await press('Send back');
+    await press('Back');
+    expect(screen.queryByLabelText('What should change?')).toBeNull();
+    cleanup();
+    open(views.cleared);
+    await press('Pull');
+    await press('Keep them');
+    expect(screen.queryByLabelText('Why are they withdrawn?')).toBeNull();
+    expect(acts.sendBack).not.toHaveBeenCalled();
+    expect(acts.pull).not.toHaveBeenCalled();
+  });
+
   it('is changed in place by an editor, whose saving is filing', async () => {
     open(views.filed);
     await press('Change the words');

@@ -200,3 +200,18 @@ describe('a sheet that came back', () => {
     await waitFor(() => expect(acts.file).toHaveBeenCalledTimes(1));
   });
 });
+
+describe('a draft that nobody filed', () => {
+  it('is thrown away after one question, and kept by the button that stands first', async () => {
+    open();
+    await userEvent.click(screen.getByRole('button', { name: 'Discard the draft' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Keep it' }));
+    expect(acts.discard).not.toHaveBeenCalled();
+    acts.discard.mockResolvedValue(refused('This sheet was filed once, so it is kept.'));
+    await userEvent.click(screen.getByRole('button', { name: 'Discard the draft' }));
+    const [, inDialog] = screen.getAllByRole('button', { name: 'Discard the draft' });
+    await userEvent.click(inDialog!);
+    expect(acts.discard).toHaveBeenCalledWith({ id: draft.id });
+    expect(screen.getByText('This sheet was filed once, so it is kept.')).toBeTruthy();
+  });
+});

@@ -14,6 +14,7 @@ import {
   changeFiledSheetAction,
   clearSheetAction,
   createEmbedAction,
+  discardSheetAction,
   fileSheetAction,
   pullSheetAction,
   reviseSheetAction,
@@ -27,6 +28,7 @@ const ACTIONS = {
   sendBack: sendBackAction,
   pull: pullSheetAction,
   revise: reviseSheetAction,
+  discard: discardSheetAction,
   embed: createEmbedAction,
 };
 

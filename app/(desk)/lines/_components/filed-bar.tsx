@@ -3,8 +3,8 @@
 import { Button } from '@/components/ui/button';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
-import { ReasonDialog } from './reason-dialog';
 import { RefusedNote } from './refused-note';
+import { SendBackDialog } from './send-back-dialog';
 import type { SheetActions } from './sheet-actions';
 import { useAct } from './use-act';
 
@@ -43,17 +43,7 @@ export function FiledBar({
               </Button>
             ) : null}
             {view.may.sendBack && !isFiler && !clear.isPending ? (
-              <ReasonDialog
-                word="Send back"
-                pendingWord="Sending back…"
-                title="Send this sheet back"
-                label="What should change?"
-                hint={`${view.author} reads this on top of the sheet.`}
-                field="comment"
-                act={(comment) => back.act({ ...seen, comment })}
-                isPending={back.isPending}
-                failure={back.failure}
-              />
+              <SendBackDialog author={view.author} back={back} seen={seen} />
             ) : null}
             {view.may.clear && !back.isPending ? (
               <Button

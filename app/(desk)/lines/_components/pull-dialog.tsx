@@ -1,7 +1,8 @@
 'use client';
 
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
-import { ReasonDialog } from './reason-dialog';
+import { ReasonDialog } from '../../../_components/reason-dialog';
+import { RefusedNote } from './refused-note';
 import type { SheetActions } from './sheet-actions';
 import { useAct } from './use-act';
 
@@ -17,16 +18,21 @@ export function PullDialog({
   const { act, isPending, failure } = useAct(pull, () => onDone('Pulled. Nothing of it is served any more.'));
   return (
     <ReasonDialog
-      word="Pull"
-      pendingWord="Pulling…"
+      id="pull-reason"
+      opener="Pull"
+      openerTone="caution"
+      decide="Pull"
       tone="caution"
+      keep="Keep them"
+      pendingWord="Pulling…"
       title="Pull the cleared words"
       label="Why are they withdrawn?"
       hint="The copy desk loses the words at once, and the embed says that the chart was withdrawn. This reason stays with the desk."
-      field="reason"
+      maxLength={2000}
+      error={failure?.fields.reason}
+      refusal={<RefusedNote failure={failure?.code === 'invalid' ? null : failure} />}
       act={(reason) => act({ id: view.id, reason })}
       isPending={isPending}
-      failure={failure}
     />
   );
 }

@@ -13,5 +13,6 @@ export type SheetActions = {
   sendBack: Action<Reading & { comment: string }, void>;
   pull: Action<{ id: string; reason: string }, void>;
   revise: Action<{ id: string; version: number }, { version: number }>;
+  discard: Action<{ id: string }, void>;
   embed: Action<{ sheetId: string }, { id: string }>;
 };

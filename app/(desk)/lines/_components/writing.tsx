@@ -8,6 +8,7 @@ import { sameLines, useLines } from '@/components/forms/sheet/use-lines';
 import { Button } from '@/components/ui/button';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
+import { DiscardDraft } from './discard-draft';
 import { LastComment } from './last-comment';
 import { RefusedNote } from './refused-note';
 import { SaveStatus } from './save-status';
@@ -79,9 +80,14 @@ export function Writing({ view, actions, person, now, zone, onDone }: Props) {
       <RefusedNote failure={lines.some(({ kind }) => failure?.fields[kind]) ? null : failure} />
       <ActBar
         actions={
-          <Button tone="primary" pending={isPending || isFiling} pendingLabel="Filing…" onClick={file}>
-            {view.agreesAnew ? 'Agree and file again' : 'File'}
-          </Button>
+          <>
+            {view.acts.length === 0 ? (
+              <DiscardDraft id={view.id} discard={actions.discard} keptAs={keptAs} />
+            ) : null}
+            <Button tone="primary" pending={isPending || isFiling} pendingLabel="Filing…" onClick={file}>
+              {view.agreesAnew ? 'Agree and file again' : 'File'}
+            </Button>
+          </>
         }
       >
         {view.agreesAnew
