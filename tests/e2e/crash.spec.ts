@@ -1,6 +1,6 @@
 import { spawnSync } from 'node:child_process';
 import { expect, test } from '@playwright/test';
-import { readDatabase, signInByFetch, startServer, temporaryFolder } from './own-server';
+import { PASSWORD, readDatabase, signInByFetch, startServer, temporaryFolder } from './own-server';
 
 const PORT = 3111;
 /** When the process is killed: so many milliseconds after so many answers; fixed, so that it can be repeated. */
@@ -51,12 +51,26 @@ test('a kill -9 right after an answer loses nothing that was answered', async ()
   remove();
 });
 
-test('an empty newsroom is opened by whoever has the code on the console, and stops cleanly', async () => {
+test('an empty newsroom is opened by whoever has the code on the console, and stops cleanly', async ({
+  page,
+}) => {
   test.setTimeout(120_000);
   const { folder, remove } = temporaryFolder();
   const server = await startServer(PORT, folder, ['--empty']);
-  expect(server.printed()).toMatch(/[A-Z0-9]{5}(-[A-Z0-9]{5}){3}/);
+  const [code] = server.printed().match(/[A-Z0-9]{5}(-[A-Z0-9]{5}){3}/)!;
   expect(readDatabase(folder, (db) => db.prepare('select count(*) from people').pluck().get())).toBe(0);
+  await page.goto(server.origin);
+  await page.waitForURL(/\/first$/);
+  await page.getByLabel('Code from the console').fill(code);
+  await page.getByLabel('Your name').fill('Ned Harrow');
+  await page.getByLabel('Email', { exact: true }).fill('harrow@averil-courier.example');
+  await page.getByLabel('Password', { exact: true }).fill(PASSWORD);
+  await page.getByRole('button').last().click();
+  await page.waitForURL(/\/sign-in/);
+  await page.getByLabel('Email', { exact: true }).fill('harrow@averil-courier.example');
+  await page.getByLabel('Password', { exact: true }).fill(PASSWORD);
+  await page.getByRole('button', { name: 'Sign in' }).click();
+  await expect(page.getByRole('heading', { level: 1 })).toHaveText('Releases');
   expect(await server.end('SIGTERM')).toBe(0);
   remove();
 });
