@@ -2,7 +2,8 @@
 
 import { Radios } from '@/components/ui/radios';
 import type { ActionResult } from '@/lib/errors';
-import { ReasonDialog } from './reason-dialog';
+import { ReasonDialog } from '../../../../_components/reason-dialog';
+import { useDecision } from './use-decision';
 
 type Override = (input: unknown) => Promise<ActionResult<void>>;
 export type Candidate = { releaseId: string; label: string; differences: string };
@@ -17,17 +18,17 @@ export function OverrideComparison({
   candidates: readonly Candidate[];
   override: Override;
 }) {
+  const decision = useDecision('override-reason', (reason, form) =>
+    override({ id, comparedWith: String(form.get('comparedWith') ?? ''), reason }),
+  );
   return (
     <ReasonDialog
-      id="override-reason"
+      {...decision}
       opener="Compare all the same"
       title="Compare with a release that differs"
       label="Why may the two be compared?"
       hint="Your words go into the method note of whatever is printed."
       decide="Compare with it"
-      action={(reason, form) =>
-        override({ id, comparedWith: String(form.get('comparedWith') ?? ''), reason })
-      }
     >
       <Radios
         id="override-release"
