@@ -1,7 +1,9 @@
 import 'server-only';
 import { and, desc, eq, lt, type SQL, sql } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/sqlite-core';
 import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
+import { pollsters, races } from '@/db/schema/races';
 import { records } from '@/db/schema/records';
 import { releases } from '@/db/schema/releases';
 import { isPublic, type Viewer, visible } from './visible';
@@ -31,7 +33,13 @@ export type RecordPage = {
   entityId: string | null;
 };
 
-/** Newest first, with the actor's name and whether the embargo of its release lets this viewer see what changed. */
+/** The person whom an entry is about, apart from the one who acted. */
+const subjects = alias(people, 'subjects');
+
+/**
+ * Newest first, with the actor's name, whether the embargo of its release lets this viewer see what changed, and
+ * the names of the person or release that it is about.
+ */
 export function listRecords(conn: Conn, page: RecordPage, viewer: Viewer, now: number) {
   const conditions: SQL[] = [];
   if (page.before !== null) conditions.push(lt(records.seq, page.before));
@@ -41,12 +49,18 @@ export function listRecords(conn: Conn, page: RecordPage, viewer: Viewer, now: n
     .select({
       record: records,
       person: people.name,
+      subject: subjects.name,
+      race: races.name,
+      pollster: pollsters.name,
       isVisible: sql<number>`(${visible(conn, viewer, now)})`.mapWith(Boolean),
       isHeld: sql<number>`(not (${isPublic(now)}))`.mapWith(Boolean),
     })
     .from(records)
     .leftJoin(people, eq(people.id, records.personId))
+    .leftJoin(subjects, and(eq(records.entity, 'person'), eq(subjects.publicId, records.entityId)))
     .leftJoin(releases, eq(releases.id, records.releaseId))
+    .leftJoin(races, eq(races.id, releases.raceId))
+    .leftJoin(pollsters, eq(pollsters.id, releases.pollsterId))
     .where(and(...conditions))
     .orderBy(desc(records.seq))
     .limit(page.limit)

@@ -7,6 +7,7 @@ import { deskPage } from '@/lib/auth/desk-page';
 import { readEnv } from '@/lib/env';
 import { formatInstant } from '@/lib/format/date';
 import { type HistoryEntry, listHistory } from '@/lib/services/history/list-history';
+import { aboutWords } from './_components/about-words';
 import { EntryChanges } from './_components/entry-changes';
 import { HeadNote } from './_components/head-note';
 
@@ -84,13 +85,13 @@ function columnsFor(zone: string, only: Only | null): Column<HistoryEntry>[] {
     {
       key: 'entity',
       head: 'About',
-      cell: ({ entity, entityId, about }) =>
-        only?.id === entityId ? (
-          (about ?? entity)
+      cell: (entry) =>
+        only?.id === entry.entityId ? (
+          aboutWords(entry)
         ) : (
-          <Link href={addressOf({ id: entityId, kind: entity }, null)}>
-            {about ?? entity}
-            <span className="sr-only">, its own history {about === null ? entityId : ''}</span>
+          <Link href={addressOf({ id: entry.entityId, kind: entry.entity }, null)}>
+            {aboutWords(entry)}
+            <span className="sr-only">, its own history {entry.about === null ? entry.entityId : ''}</span>
           </Link>
         ),
     },

@@ -1,6 +1,5 @@
 import 'server-only';
 import { z } from 'zod';
-import { findPersonByPublicId } from '@/db/queries/person';
 import { findLastRecord, listRecords } from '@/db/queries/record';
 import { type Actor, canReadHistory, canReadUnpublished } from '@/lib/domain/roles';
 import { authorize, type Ctx, parse } from '../context';
@@ -19,7 +18,7 @@ export type HistoryEntry = {
   action: string;
   entity: string;
   entityId: string;
-  /** The name of the person whom the entry is about; null for anything else. */
+  /** The person, or the race and pollster of the release, sheet or embed, as far as this reader may know them. */
   about: string | null;
   before: unknown;
   after: unknown;
@@ -52,14 +51,14 @@ export function listHistory(actor: Actor, input: unknown, ctx: Ctx): HistoryPage
   recordViews(actor, page, ctx);
   const last = findLastRecord(ctx.db);
   return {
-    entries: page.map(({ record, person, isVisible }) => ({
+    entries: page.map(({ record, person, isVisible, ...names }) => ({
       seq: record.seq,
       at: record.at,
       person: person ?? THE_SYSTEM,
       action: record.action,
       entity: record.entity,
       entityId: record.entityId,
-      about: record.entity === 'person' ? nameOf(record.entityId, ctx) : null,
+      about: isVisible ? aboutOf(record.entity, names) : null,
       before: isVisible ? read(record.before) : null,
       after: isVisible ? read(record.after) : null,
       reason: isVisible ? record.reason : null,
@@ -78,8 +77,13 @@ function recordViews(actor: Actor, page: ReturnType<typeof listRecords>, ctx: Ct
   recordEmbargoViews(ctx, actor, new Set(read.map(({ record }) => record.releaseId!)), 'history');
 }
 
-function nameOf(publicId: string, ctx: Ctx): string | null {
-  return findPersonByPublicId(ctx.db, publicId)?.name ?? null;
+const OF_A_RELEASE = ['release', 'sheet', 'embed'];
+
+type Names = Pick<ReturnType<typeof listRecords>[number], 'subject' | 'race' | 'pollster'>;
+
+function aboutOf(entity: string, { subject, race, pollster }: Names): string | null {
+  if (!OF_A_RELEASE.includes(entity)) return subject;
+  return race !== null && pollster !== null ? `${race}, ${pollster}` : null;
 }
 
 function read(json: string | null): unknown {

@@ -3,11 +3,13 @@ import { listEmbargoViews } from '@/db/queries/embargo';
 import { findRelease } from '@/db/queries/release';
 import type { Role } from '@/lib/domain/roles';
 import { listHistory, PAGE_SIZE } from '@/lib/services/history/list-history';
+import { createEmbed } from '@/lib/services/embed/create-embed';
 import { addPerson } from '@/lib/services/people/add-person';
 import { liftEmbargo, setEmbargoReader } from '@/lib/services/release/embargo';
 import { freshDatabase, HOUR, makePerson, NOW } from '@/tests/support/database';
 import { refusal } from '@/tests/support/refusal';
 import { logRelease, sharesOf } from '@/tests/support/release';
+import { sheetDesk } from '@/tests/support/sheet';
 
 const desk = freshDatabase();
 afterAll(desk.closeAndRemove);
@@ -15,6 +17,8 @@ afterAll(desk.closeAndRemove);
 const person = (name: string, ...roles: Role[]) => makePerson(desk.db, { name, roles });
 const administrator = person('Ada Fenn', 'administrator');
 const editor = person('Edda Marsh', 'editor');
+const otherEditor = person('Isolde Varn', 'editor');
+const on = sheetDesk(desk.db);
 const reporter = person('Rolf Quill', 'reporter');
 const copyDesk = person('Cora Pell', 'copy-desk');
 const both = person('Bela Tarn', 'administrator', 'reporter');
@@ -62,7 +66,7 @@ describe('what an embargo hides', () => {
 
   beforeAll(() => {
     early = logRelease(desk.db, editor, { embargo });
-    listed = logRelease(desk.db, editor, { embargo, race: sameRaceAgain() });
+    listed = logRelease(desk.db, editor, { embargo, race: anotherRace('Bridge toll') });
     setEmbargoReader(editor, { id: listed, personId: administrator.publicId, listed: true }, desk.ctx());
   });
 
@@ -128,6 +132,41 @@ describe('what an embargo hides', () => {
   });
 });
 
+describe('what an entry is about', () => {
+  const abouts = (reader: typeof editor, entityId: string, later = 0) =>
+    new Set(listHistory(reader, { entityId }, desk.ctx(later)).entries.map(({ about }) => about));
+
+  it('is named by race and pollster for a release, its sheets and its embeds', () => {
+    const release = logRelease(desk.db, editor, { race: anotherRace('Harbour board') });
+    const sheet = on.cleared(editor, otherEditor, release);
+    const embed = createEmbed(editor, { sheetId: sheet }, desk.ctx()).id;
+    for (const id of [release, sheet, embed])
+      for (const reader of [reporter, administrator])
+        expect(abouts(reader, id)).toEqual(new Set(['Harbour board, Kelmouth Research']));
+  });
+
+  it('is not named, while an embargo holds, to who may not see the release', () => {
+    const release = logRelease(desk.db, editor, { embargo, race: anotherRace('Ferry fares') });
+    const sheet = on.draft(editor, release);
+    for (const id of [release, sheet]) {
+      expect(abouts(administrator, id, LIFTS - 1)).toEqual(new Set([null]));
+      expect(abouts(administrator, id, LIFTS)).toEqual(new Set(['Ferry fares, Kelmouth Research']));
+      expect(abouts(reporter, id)).toEqual(new Set(['Ferry fares, Kelmouth Research']));
+    }
+    const page = JSON.stringify(listHistory(administrator, { entity: 'sheet' }, desk.ctx()));
+    expect(page).not.toContain('Ferry fares');
+  });
+
+  it('is a person by name, and nothing more is said of anything else', () => {
+    const added = { name: 'Nora Sill', email: 'nora@courier.example', roles: ['reporter'] };
+    addPerson(administrator, added, desk.ctx());
+    const newest = (entity: string) => listHistory(administrator, { entity }, desk.ctx()).entries[0]?.about;
+    expect(newest('person')).toBe('Nora Sill');
+    expect(newest('policy')).toBeNull();
+    expect(newest('race')).toBeNull();
+  });
+});
+
 describe('paging', () => {
   beforeAll(() => {
     for (let count = 0; count < PAGE_SIZE + 5; count += 1) {
@@ -155,11 +194,11 @@ describe('paging', () => {
   });
 });
 
-function sameRaceAgain() {
+function anotherRace(name: string) {
   return {
     kind: 'new' as const,
     race: {
-      name: 'Bridge toll',
+      name,
       kind: 'candidate' as const,
       options: ['Alder', 'Brook', 'Someone else'],
       thresholds: [],
