@@ -92,21 +92,42 @@ function sideNodes(spec: SoundingSpec, size: Size, scale: SoundingScale, frame: 
 const LINE_PX = 17;
 const WEIGHT_PX = 12;
 
-/** What is said in the place of the water, on the roomier side of the line. */
+/** What is said in the place of the water, on the roomiest stretch that neither the line nor the shore crosses. */
 function noteNodes(spec: SoundingSpec, size: Size, scale: SoundingScale, frame: SoundingFrame): SceneNode[] {
   if (spec.untestedNote === null) return [];
-  const x = scale.x(spec.estimatePp);
-  const isRight = size.widthPx - x >= x;
-  const roomPx = (isRight ? size.widthPx - x : x) - WEIGHT_PX - EDGE_PX;
+  const { x, roomPx, anchor } = noteRoom(spec, size, scale);
   const lines = wrapText(spec.untestedNote, roomPx, SIDE_PX);
   const middle = (frame.topPx + frame.basePx) / 2 + SIDE_PX / 3;
   const first = middle - ((lines.length - 1) * LINE_PX) / 2;
   return lines.map((text, at) => ({
     kind: 'text',
     role: 'untested',
-    x: roundPx(x + (isRight ? WEIGHT_PX : -WEIGHT_PX)),
+    x: roundPx(x),
     y: roundPx(first + at * LINE_PX),
-    anchor: isRight ? 'start' : 'end',
+    anchor,
     text,
   }));
+}
+
+type Room = { x: number; roomPx: number; anchor: 'start' | 'end' };
+
+/** Where the note hangs: off the estimate where the roomiest stretch reaches it, else off the shore. */
+function noteRoom(spec: SoundingSpec, size: Size, scale: SoundingScale): Room {
+  const at = scale.x(spec.estimatePp);
+  const marks = [
+    { x: at, gapPx: WEIGHT_PX },
+    ...(spec.shorePp === null ? [] : [{ x: scale.x(spec.shorePp), gapPx: SHORE_GAP_PX }]),
+  ];
+  const edges = [
+    { x: 0, gapPx: EDGE_PX },
+    ...marks.toSorted((one, other) => one.x - other.x),
+    { x: size.widthPx, gapPx: EDGE_PX },
+  ];
+  const rooms = edges.slice(1).map((right, before): Room => {
+    const left = edges[before] ?? right;
+    const [from, to] = [left.x + left.gapPx, right.x - right.gapPx];
+    const hangsRight = before === 0 || right.x === at;
+    return { x: hangsRight ? to : from, roomPx: to - from, anchor: hangsRight ? 'end' : 'start' };
+  });
+  return rooms.reduce((best, room) => (room.roomPx >= best.roomPx ? room : best));
 }

@@ -55,6 +55,35 @@ describe('a sounding of any quantity at any width', () => {
     );
   });
 
+  it('keeps every label off the shore and off the line to the estimate', () => {
+    fc.assert(
+      fc.property(randomSpec, anyWidth, (spec, widthPx) => {
+        const scene = full(spec, widthPx);
+        const strokes = nodesOf(scene, 'shore', 'lead-line').flatMap((node) =>
+          node.kind === 'line'
+            ? [{ x: node.x1 - 0.8, y: node.y1, width: 1.6, height: node.y2 - node.y1 }]
+            : [],
+        );
+        for (const box of textBoxes(scene))
+          expect(strokes.filter((stroke) => overlap(box, stroke))).toEqual([]);
+      }),
+      { numRuns: 300 },
+    );
+  });
+
+  it('says in whole words why there is no water, at the narrowest too', () => {
+    const untested = randomSpec.filter(({ untestedNote }) => untestedNote !== null);
+    fc.assert(
+      fc.property(untested, anyWidth, (spec, widthPx) => {
+        const said = nodesOf(full(spec, widthPx), 'untested').map((node) =>
+          node.kind === 'text' ? node.text : '',
+        );
+        expect(said.join(' ')).toBe(spec.untestedNote);
+      }),
+      { numRuns: 150 },
+    );
+  });
+
   it('draws only finite numbers of three decimals, inside the picture', () => {
     fc.assert(
       fc.property(randomSpec, anyWidth, (spec, widthPx) => {
