@@ -93,12 +93,25 @@ export function sendBack(actor: Actor, input: unknown, ctx: Ctx): void {
   });
 }
 
+const CLEARED_ALREADY = 'This sheet is cleared already.';
+const NO_LONGER_FILED = 'It is no longer filed: it was taken back or sent back. Reload the page.';
+
 /** The filing that a filed sheet stands on. @throws AppError `conflict` unless it is filed now */
 export function filingOf(tx: Tx, opened: Opened): ClearingRow {
   const filing = findLastAct(tx, opened.sheet.id, 'filed');
-  const message = opened.state === 'cleared' ? 'This sheet is cleared already.' : 'This sheet is not filed.';
-  refuseUnless(opened.state === 'filed' && filing !== null && filing.evidenceId !== null, message);
+  refuseUnless(opened.state !== 'cleared', CLEARED_ALREADY);
+  refuseUnless(!isBack(tx, opened, filing), NO_LONGER_FILED);
+  refuseUnless(
+    opened.state === 'filed' && filing !== null && filing.evidenceId !== null,
+    'This sheet is not filed.',
+  );
   return filing;
+}
+
+/** Its last filing ended without being cleared. */
+function isBack(tx: Tx, { sheet, state }: Opened, filing: ClearingRow | null): boolean {
+  if (filing === null || (state !== 'sent-back' && state !== 'draft')) return false;
+  return (findLastAct(tx, sheet.id, 'cleared')?.id ?? 0) < filing.id;
 }
 
 export function endFiling(

@@ -5,6 +5,7 @@ import { readSession } from '@/lib/services/account/read-session';
 import { setDisabled, setRoles } from '@/lib/services/people/change-person';
 import { changeFiledSheet } from '@/lib/services/sheet/change-filed';
 import { clearSheet, sendBack } from '@/lib/services/sheet/clear-sheet';
+import { saveLines } from '@/lib/services/sheet/edit-lines';
 import { fileSheet } from '@/lib/services/sheet/file-sheet';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
 import { freshDatabase, makePerson } from '@/tests/support/database';
@@ -110,6 +111,18 @@ describe('words filed by a reporter', () => {
     expect(refusal(() => clearSheet(otherEditor, { id, hash }, desk.ctx()))[0]).toBe('conflict');
     const acts = getSheet(editor, id, desk.ctx()).acts.map(({ act }) => act);
     expect(acts).toEqual(['filed', 'cleared']);
+  });
+
+  it.each(['sent back', 'taken back'])('are refused in so many words once %s, also when rewritten', (how) => {
+    const hash = on.hashOf(editor, id);
+    const back = { id, hash, comment: 'Name the pollster first.' };
+    sendBack(how === 'taken back' ? reporter : otherEditor, back, desk.ctx());
+    const told = ['conflict', 'It is no longer filed: it was taken back or sent back. Reload the page.'];
+    expect(refusal(() => clearSheet(editor, { id, hash }, desk.ctx()))).toEqual(told);
+    expect(refusal(() => sendBack(editor, back, desk.ctx()))).toEqual(told);
+    const { lines, version } = on.filing(reporter, id);
+    saveLines(reporter, { id, version, lines }, desk.ctx());
+    expect(refusal(() => clearSheet(editor, { id, hash }, desk.ctx()))).toEqual(told);
   });
 
   it('are not cleared on the hash of other evidence', () => {
