@@ -39,6 +39,6 @@ export const EN_METHOD_NOTE: LanguagePack['methodNote'] = {
   source: 'Source: {url}',
   engine: 'Worked out with calculation engine {engine} and wording {templateVersion}.',
   'before-a-vote':
-    'Polls measure opinion at the time. Local law may restrict what is published and when: ask the desk’s lawyers and the election authority. Results are those certified by the authority.',
+    'Polls measure opinion at the time. Local law may restrict what is published and when: ask the desk’s lawyers and the election authority. Official results are those that the election authority certifies.',
   opinion: 'Polls measure opinion at the time.',
 };
