@@ -51,7 +51,14 @@ export function EmbedEntry({
       </p>
       <p className="mt-1 max-w-prose">{standing(embed, zone)}</p>
       <p className="mt-1 wrap-anywhere">
-        Address: {state === 'live' ? <a href={url}>{url}</a> : <code>{url}</code>}
+        Address:{' '}
+        {state === 'live' ? (
+          <a href={url} className="link-as-address">
+            {url}
+          </a>
+        ) : (
+          <code>{url}</code>
+        )}
       </p>
       {state === 'pulled' ? null : <CopyCode id={id} code={embedCode(embed)} />}
       {state === 'live' ? (

@@ -128,7 +128,12 @@ function SourceLink({ view: { facts } }: { view: ReleaseView }) {
   if (url === null || !/^https?:\/\//.test(url)) return <p>{statusWords(facts.sourceUrl.status)}</p>;
   return (
     <p>
-      <a href={url} rel="noopener noreferrer nofollow" target="_blank" className="[overflow-wrap:anywhere]">
+      <a
+        href={url}
+        rel="noopener noreferrer nofollow"
+        target="_blank"
+        className="link-as-address [overflow-wrap:anywhere]"
+      >
         {url}
         <span className="sr-only"> (opens another page)</span>
       </a>
