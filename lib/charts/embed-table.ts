@@ -33,7 +33,7 @@ type Column = { at: number; domainPp: [number, number]; hasRange: boolean };
 
 function tableRow(row: EmbedRow, { at, domainPp, hasRange }: Column, words: EmbedWords): string {
   const { option, isAnswer, share } = row;
-  const name = `<span>${escapeMarkup(option)}</span>`;
+  const name = `<bdi>${escapeMarkup(option)}</bdi>`;
   const picture =
     isAnswer && share
       ? sceneToInlineSvg(soundingScene(share, { widthPx: ROW_PX, kind: 'row', domainPp }, words), {

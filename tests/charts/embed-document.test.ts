@@ -109,6 +109,20 @@ describe('the public page of a chart', () => {
     ).toBe(true);
   });
 
+  it('sets every answer apart, so that a name written from right to left moves no figure', () => {
+    const rows = inputOf(documents.fragile).rows.map((row, at) =>
+      at === 0 ? { ...row, option: 'אלון 2' } : row,
+    );
+    const [table] = elementsOf(tree(page({ rows })), 'table');
+    const heads = elementsOf(table!, 'th').filter(({ attributes }) => attributes.scope === 'row');
+    expect(heads.map((head) => elementsOf(head, 'bdi').map(textOf))).toEqual([
+      ['אלון 2'],
+      ['Brook'],
+      ['Someone else'],
+      ['Don’t know'],
+    ]);
+  });
+
   it('lists non-answers last, quietly and without a picture', () => {
     const rows = elementsOf(elementsOf(tree(page()), 'tbody')[0]!, 'tr');
     expect(rows.at(-1)?.attributes.class).toBe('rest');
