@@ -89,10 +89,10 @@ export function ReasonDialog({
             error={error}
           />
           <div className="flex flex-wrap gap-3">
+            <Button onClick={close}>{keep}</Button>
             <Button type="submit" tone={tone} pending={isPending} pendingLabel={pendingWord}>
               {decide}
             </Button>
-            <Button onClick={close}>{keep}</Button>
           </div>
         </form>
       </Dialog>
