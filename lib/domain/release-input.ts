@@ -161,8 +161,8 @@ const share = z
         field.printed.trim() === ''
           ? 'Type the share as printed, or mark it as not disclosed.'
           : 'A share is a number from 0 to 100, as printed.';
+      // The name goes on, so that one which stands there twice is told in the same round.
       ctx.addIssue({ code: 'custom', path: ['printed'], message });
-      return z.NEVER;
     }
     return { option: field.option, printed, isAnswer: field.isAnswer };
   });
@@ -177,8 +177,13 @@ const threshold = z
     const pct = readDecimal(field.pct);
     if (pct !== null && pct > 0 && pct < 100) return { option: field.option, pct, base: field.base };
     ctx.addIssue({ code: 'custom', path: ['pct'], message: 'A threshold lies above 0 and below 100%.' });
-    return z.NEVER;
+    return { option: field.option, pct: 0, base: field.base };
   });
+
+// Names are looked at together with faults elsewhere, not only once those are mended.
+const named = z.array(z.looseObject({ option: z.string() }));
+const ofRace = z.looseObject({ options: z.array(z.string()), thresholds: named });
+const ofRelease = z.looseObject({ shares: named });
 
 export const newRaceInput = z
   .strictObject({
@@ -190,22 +195,25 @@ export const newRaceInput = z
       .max(MAX_OPTIONS, `At most ${MAX_OPTIONS} options.`),
     thresholds: z.array(threshold).max(10, 'At most ten thresholds.'),
   })
-  .superRefine((race, ctx) => {
-    refuseRepeats(race.options, (index) => ['options', index], ctx);
-    for (const [index, { option }] of race.thresholds.entries())
-      if (!race.options.includes(option))
-        ctx.addIssue({
-          code: 'custom',
-          path: ['thresholds', index, 'option'],
-          message: 'A threshold is about one of the options above.',
-        });
-  });
+  .superRefine(
+    (race, ctx) => {
+      refuseRepeats(race.options, (index) => ['options', index], ctx);
+      for (const [index, { option }] of race.thresholds.entries())
+        if (option !== '' && !race.options.includes(option))
+          ctx.addIssue({
+            code: 'custom',
+            path: ['thresholds', index, 'option'],
+            message: 'A threshold is about one of the options above.',
+          });
+    },
+    { when: ({ value }) => ofRace.safeParse(value).success },
+  );
 
 function refuseRepeats(names: string[], path: (index: number) => (string | number)[], ctx: z.RefinementCtx) {
   const seen = new Set<string>();
   for (const [index, name] of names.entries()) {
     const plain = name.normalize('NFC').toLowerCase();
-    if (seen.has(plain))
+    if (plain !== '' && seen.has(plain))
       ctx.addIssue({ code: 'custom', path: path(index), message: 'This option stands here twice.' });
     seen.add(plain);
   }
@@ -260,13 +268,16 @@ export const releaseInput = z
     sourceUrl: disclosed(readHttpUrl, 2000),
     methodNote: z.string().max(20_000, 'At most 20,000 characters.'),
   })
-  .superRefine((release, ctx) => {
-    refuseRepeats(
-      release.shares.map((entry) => entry.option),
-      (index) => ['shares', index, 'option'],
-      ctx,
-    );
-  })
+  .superRefine(
+    (release, ctx) => {
+      refuseRepeats(
+        release.shares.map((entry) => entry.option),
+        (index) => ['shares', index, 'option'],
+        ctx,
+      );
+    },
+    { when: ({ value }) => ofRelease.safeParse(value).success },
+  )
   // Told together with faults elsewhere, not only once those are mended.
   .superRefine(refuseDisorder, { when: ({ value }) => days.safeParse(value).success });
 

@@ -63,7 +63,7 @@ export function faultsOf(errors: FieldErrors): FieldFault[] {
 function labelOf(path: string, rank: number): string | null {
   const label = LABELS[rank]?.[1] ?? null;
   const row = /^shares\.(\d+)/.exec(path)?.[1];
-  return row === undefined ? label : `Share in row ${Number(row) + 1}`;
+  return row === undefined ? label : `Row ${Number(row) + 1}`;
 }
 
 function rankOf(path: string): number {

@@ -49,7 +49,9 @@ export function liveDocument(values: ReleaseForm, around: LiveAround): LiveDocum
     })),
   };
   for (const { option, pct } of uncountedThresholds(facts))
-    leftOut.push(`${option} is not held against ${pct}%: the rule counts another base than these shares.`);
+    leftOut.push(
+      `${option} is not tested against ${pct}%: the rule counts a different base from these shares.`,
+    );
   const previous = around.previous && withNamesOf(around.previous, facts);
   return {
     document: checkDocumentOf(facts, previous, around.policy),

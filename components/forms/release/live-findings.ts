@@ -26,11 +26,11 @@ export function judged(live: LiveDocument | null): LiveFindings {
     return { kind: 'answer', document, answer: check(document), leftOut };
   } catch (error) {
     if (!(error instanceof CheckRefused)) throw error;
-    return { kind: 'refused', field: fieldOf(error.path, rows), message: error.message, leftOut };
+    return { kind: 'refused', field: formFieldOf(error.path, rows), message: error.message, leftOut };
   }
 }
 
-/** The document has fewer rows than the form where some say nothing yet. */
-function fieldOf(path: string, rows: readonly number[]): string {
+/** Where in the form a refusal belongs: the document has fewer rows than the form where some say nothing yet. */
+export function formFieldOf(path: string, rows: readonly number[]): string {
   return fieldOfCheckPath(path).replace(/^shares\.(\d+)/, (_, row) => `shares.${rows[Number(row)] ?? row}`);
 }

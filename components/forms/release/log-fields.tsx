@@ -34,7 +34,7 @@ export function LogFields({
   submit: SubmitRelease;
   initial: { values: ReleaseForm; savedAt: number | null };
 }) {
-  const form = useReleaseForm(initial.values);
+  const form = useReleaseForm(initial.values, choices.policy);
   const [submissionKey, setSubmissionKey] = useState(newSubmissionKey);
   const [restoredAt, setRestoredAt] = useState(initial.savedAt);
   /** The version of two that was not chosen. */

@@ -32,7 +32,7 @@ export function ReviseForm({
   submit: ReviseRelease;
 }) {
   const { id, version, number } = stored;
-  const form = useReleaseForm(stored.values);
+  const form = useReleaseForm(stored.values, choices.policy);
   const { getValues } = form;
   useLeaveWarning(
     useCallback(() => getValues(), [getValues]),

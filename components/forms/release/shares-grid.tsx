@@ -1,6 +1,6 @@
 'use client';
 
-import { type ClipboardEvent, type KeyboardEvent, useState } from 'react';
+import { type ClipboardEvent, type KeyboardEvent, useEffect, useRef, useState } from 'react';
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { parsePastedShares } from '@/lib/import/paste-shares';
 import { Button } from '../../ui/button';
@@ -17,12 +17,22 @@ import { MAX_SHARES, mergedShares } from './merge-shares';
 export function SharesGrid({ form }: InForm) {
   const { fields, append, remove, move } = useFieldArray({ control: form.control, name: 'shares' });
   const [told, setTold] = useState<string | null>(null);
+  /** Where the cursor goes once the rows are drawn anew. */
+  const next = useRef<string | null>(null);
+  useEffect(() => {
+    if (next.current) focusOn(next.current);
+    next.current = null;
+  }, [fields]);
   const whole = useFault(form.control, 'shares') ?? undefined;
+
+  /** A fault of all rows together goes with the next change; the live one stays as long as it is true. */
+  const clearWhole = () => form.clearErrors('shares.root' as 'shares');
 
   function paste(event: ClipboardEvent) {
     const pasted = parsePastedShares(event.clipboardData.getData('text/plain'));
     if (pasted.length === 0) return;
     event.preventDefault();
+    clearWhole();
     form.setValue('shares', mergedShares(form.getValues('shares'), pasted), { shouldDirty: true });
     setTold(`${pasted.length} ${pasted.length === 1 ? 'option' : 'options'} taken from what was pasted.`);
   }
@@ -31,30 +41,52 @@ export function SharesGrid({ form }: InForm) {
     const to = at + by;
     if (to < 0 || to >= fields.length) return;
     const place = document.activeElement?.id.replace(`-${at}-`, `-${to}-`);
+    next.current = place ?? null;
     move(at, to);
     setTold(`Moved to row ${to + 1}.`);
-    if (place) requestAnimationFrame(() => document.getElementById(place)?.focus());
   }
 
   function drop(at: number) {
+    if (fields.length === 1) return;
+    clearWhole();
+    next.current = fieldId(`shares.${Math.min(at, fields.length - 2)}.option`);
     remove(at);
     setTold(`Row ${at + 1} removed.`);
-    const next = fieldId(`shares.${Math.max(0, Math.min(at, fields.length - 2))}.option`);
-    requestAnimationFrame(() => document.getElementById(next)?.focus());
+  }
+
+  function add() {
+    append(blankShare(), { focusName: `shares.${fields.length}.option` });
+  }
+
+  /** Down the column of shares; after the last one comes a new row, unless that one still is empty. */
+  function goDown(at: number) {
+    if (at + 1 < fields.length) return focusOn(fieldId(`shares.${at + 1}.printed`));
+    const { option, printed, notDisclosed } = form.getValues(`shares.${at}`);
+    const isUsed = option.trim() !== '' || printed.trim() !== '' || notDisclosed;
+    if (isUsed && fields.length < MAX_SHARES) add();
   }
 
   function onKeyDown(event: KeyboardEvent, at: number) {
-    if (!event.altKey || (event.key !== 'ArrowUp' && event.key !== 'ArrowDown')) return;
+    const act = actOf(event, at);
+    if (!act) return;
     event.preventDefault();
-    shift(at, event.key === 'ArrowUp' ? -1 : 1);
+    act();
+  }
+
+  function actOf({ key, altKey, ctrlKey, metaKey, target }: KeyboardEvent, at: number) {
+    if (altKey && key === 'ArrowUp') return () => shift(at, -1);
+    if (altKey && key === 'ArrowDown') return () => shift(at, 1);
+    if (altKey && key === 'Delete') return () => drop(at);
+    const isShare = target instanceof HTMLElement && target.id === fieldId(`shares.${at}.printed`);
+    return key === 'Enter' && isShare && !altKey && !ctrlKey && !metaKey ? () => goDown(at) : null;
   }
 
   return (
     <Group
       title="Shares as printed"
-      hint="Type every decimal that is printed: 47.0 is not 47. Two columns pasted from a spreadsheet or table fill the rows. Alt with the up or down arrow moves a row."
+      hint="Type every decimal that is printed: 47.0 is not 47. Two columns pasted from a spreadsheet or table fill the rows. Enter in a share goes on to the next row. Alt with the up or down arrow moves a row, Alt with Delete removes it."
     >
-      <div onPaste={paste}>
+      <div onPaste={paste} onChange={clearWhole}>
         {fields.map((row, at) => (
           <ShareFields
             key={row.id}
@@ -69,16 +101,16 @@ export function SharesGrid({ form }: InForm) {
       </div>
       <FieldError id={fieldId('shares.whole')} error={whole} />
       <div className="flex flex-wrap items-center gap-4">
-        {fields.length < MAX_SHARES ? (
-          <Button onClick={() => append(blankShare(), { focusName: `shares.${fields.length}.option` })}>
-            Add an option
-          </Button>
-        ) : null}
+        {fields.length < MAX_SHARES ? <Button onClick={add}>Add an option</Button> : null}
         <ShareSum form={form} />
       </div>
       <CopyStatus message={told} />
     </Group>
   );
+}
+
+function focusOn(id: string) {
+  document.getElementById(id)?.focus();
 }
 
 function ShareFields({
@@ -178,6 +210,7 @@ function RowButton({
   return (
     <Button
       id={id}
+      tabIndex={-1}
       className="min-h-7! px-2! py-0.5!"
       aria-disabled={isOff || undefined}
       onClick={isOff ? undefined : onPress}

@@ -101,7 +101,7 @@ describe('the check document of a form being typed', () => {
     const live = liveDocument(typedForm(), { ...around, thresholds });
     expect(live?.document.thresholds).toEqual([{ option: 'Alder', pct: 50 }]);
     expect(live?.leftOut).toEqual([
-      'Brook is not held against 50%: the rule counts another base than these shares.',
+      'Brook is not tested against 50%: the rule counts a different base from these shares.',
     ]);
   });
 

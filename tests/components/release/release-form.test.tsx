@@ -176,11 +176,31 @@ describe('sending the form', () => {
       'First day: When did interviewing begin?',
       'Last day: When did interviewing end?',
       'Publication date: When was or will it be published?',
-      'Share in row 1: Name the option.',
+      'Row 1: Name the option.',
     ]);
     expect(field('Pollster').getAttribute('aria-invalid')).toBe('true');
     fireEvent.click(within(summary).getByText('Pollster: Who did the fieldwork?'));
     expect(document.activeElement).toBe(field('Pollster'));
+    expect(submit).not.toHaveBeenCalled();
+  });
+
+  it('tells what the engine refuses in the same round as what is missing', async () => {
+    const submit = vi.fn<SubmitRelease>();
+    const form = typedForm({ pollster: '' });
+    form.shares[0]!.printed = '90';
+    form.statedMargin.unit = '0.5';
+    await openTyped(submit, form);
+    press('Log the release');
+    const summary = await screen.findByRole('group', { name: 'Something needs another look' });
+    const told = within(summary).getAllByRole('link');
+    expect(told.map((link) => link.textContent)).toEqual([
+      'Pollster: Who did the fieldwork?',
+      'Stated margin: This margin is not a multiple of 0.5, the unit it is said to be rounded to.',
+      'Shares: The shares sum to more than 100 percent and rounding allow.',
+    ]);
+    const [first] = screen.getAllByRole('textbox', { name: 'Share' });
+    fireEvent.change(first!, { target: { value: '47' } });
+    await waitFor(() => expect(within(summary).queryByText(/^Shares:/)).toBeNull());
     expect(submit).not.toHaveBeenCalled();
   });
 
@@ -249,8 +269,28 @@ describe('the shares', () => {
     expect([valueOf('Option 1'), valueOf('Option 2')]).toEqual(['Brook', 'Alder']);
     press('Remove option 1');
     expect(valueOf('Option 1')).toBe('Alder');
+    expect(document.activeElement).toBe(field('Option 1'));
+    fireEvent.keyDown(field('Option 3'), { key: 'Delete', altKey: true });
+    expect(document.activeElement).toBe(field('Option 2'));
     press('Add an option');
-    expect(valueOf('Option 4')).toBe('');
+    expect(valueOf('Option 3')).toBe('');
+    const tabbed = screen.getAllByRole('button', { name: /^(Move|Remove) option/ });
+    expect(tabbed.filter((button) => button.tabIndex !== -1)).toEqual([]);
+  });
+
+  it('are typed down the column with Enter, which adds a row at the end and never sends', async () => {
+    const submit = vi.fn<SubmitRelease>();
+    await openTyped(submit);
+    const shares = () => screen.getAllByRole('textbox', { name: 'Share' });
+    const enter = (at: number) => fireEvent.keyDown(shares()[at]!, { key: 'Enter' });
+    expect(enter(0)).toBe(false);
+    expect(document.activeElement).toBe(shares()[1]);
+    expect(enter(3)).toBe(false);
+    expect(shares()).toHaveLength(5);
+    await waitFor(() => expect(document.activeElement).toBe(field('Option 5')));
+    expect(enter(4)).toBe(false);
+    expect(shares()).toHaveLength(5);
+    expect(submit).not.toHaveBeenCalled();
   });
 });
 
