@@ -21,8 +21,18 @@ export function Interval({
     form.setValue(`${name}.unit`, unit);
   }
 
+  /** What the engine said of points, unit and level together goes with a change to any of them. */
+  function clearJudged() {
+    if (form.getFieldState(`${name}.pp`).error?.type === 'engine') form.clearErrors(`${name}.pp`);
+  }
+
   return (
-    <div role="group" aria-label={`${label}, as printed`} className="grid items-start gap-x-5 sm:grid-cols-3">
+    <div
+      role="group"
+      aria-label={`${label}, as printed`}
+      onChange={clearJudged}
+      className="grid items-start gap-x-5 sm:grid-cols-3"
+    >
       <TextField
         form={form}
         path={`${name}.pp`}

@@ -15,6 +15,8 @@ export type LiveDocument = {
   /** The form's row of each share of the document: rows that say nothing yet are left out. */
   rows: number[];
   leftOut: string[];
+  /** Why there is no sample size, where that is not the pollster's silence. */
+  sizeGap: string | null;
 };
 
 export type LiveAround = {
@@ -57,7 +59,14 @@ export function liveDocument(values: ReleaseForm, around: LiveAround): LiveDocum
     document: checkDocumentOf(facts, previous, around.policy),
     rows: read.map((row) => row.row),
     leftOut,
+    sizeGap: sizeGapOf(values),
   };
+}
+
+function sizeGapOf({ n: typed }: ReleaseForm): string | null {
+  const n = readable(fields.n.safeParse(typed));
+  if (!n) return 'The sample size cannot be read yet.';
+  return n.status === 'not-entered' ? 'There is no sample size yet.' : null;
 }
 
 /** What a release has only once it is logged; no figure rests on it. */
@@ -113,8 +122,8 @@ function readParticulars(values: ReleaseForm, leftOut: string[]): Particulars {
   const modelled = fields.modelledInterval.safeParse(values.modelledInterval);
   const isRandom = values.sampleSource === 'probability';
   if (values.sampleSource === '') leftOut.push('How people came into the sample is not chosen yet.');
-  if (!n) leftOut.push('The sample size cannot be read yet.');
-  else if (n.status === 'not-entered') leftOut.push('There is no sample size yet.');
+  const gap = sizeGapOf(values);
+  if (gap) leftOut.push(gap);
   if (!deff.success) leftOut.push('The design effect cannot be read yet, so it is left out.');
   if (!margin) leftOut.push('The stated margin cannot be read yet, so it is left out.');
   if (!modelled.success && !isRandom)

@@ -10,7 +10,13 @@ export type LiveFindings =
   | { kind: 'nothing' }
   /** The engine will not answer: at which field of the form, and why. */
   | { kind: 'refused'; field: string; message: string; leftOut: string[] }
-  | { kind: 'answer'; document: CheckDocument; answer: CheckAnswer; leftOut: string[] };
+  | {
+      kind: 'answer';
+      document: CheckDocument;
+      answer: CheckAnswer;
+      leftOut: string[];
+      sizeGap: string | null;
+    };
 
 /** What the numbers typed so far support, by the same code that the service uses. */
 export function liveFindings(values: ReleaseForm, around: LiveAround): LiveFindings {
@@ -20,10 +26,10 @@ export function liveFindings(values: ReleaseForm, around: LiveAround): LiveFindi
 /** The costly half, for a caller that knows whether anything that counts has changed. */
 export function judged(live: LiveDocument | null): LiveFindings {
   if (!live) return { kind: 'nothing' };
-  const { leftOut, rows } = live;
+  const { leftOut, rows, sizeGap } = live;
   try {
     const document = parseCheckDocument(live.document);
-    return { kind: 'answer', document, answer: check(document), leftOut };
+    return { kind: 'answer', document, answer: check(document), leftOut, sizeGap };
   } catch (error) {
     if (!(error instanceof CheckRefused)) throw error;
     return { kind: 'refused', field: formFieldOf(error.path, rows), message: error.message, leftOut };

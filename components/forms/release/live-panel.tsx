@@ -3,12 +3,13 @@
 import { memo } from 'react';
 import { betweenReleases } from '../../findings/between';
 import { ComparedWith } from '../../findings/compared-with';
-import { FindingList, testedFindings } from '../../findings/finding-list';
+import { testedFindings } from '../../findings/finding-list';
 import { verdictSummary } from '../../findings/verdict-summary';
 import { SectionHeading } from '../../ui/section-heading';
 import { formatLevel, ENGLISH_CHART_WORDS } from '@/lib/charts/chart-words';
 import { baseSummary, noteText } from '@/lib/wording/base-words';
 import { useLive } from './live';
+import { LiveCards } from './live-cards';
 import type { LiveFindings } from './live-findings';
 import type { ComparisonState } from './use-comparison';
 
@@ -48,14 +49,7 @@ const LiveList = memo(function LiveList({ findings, between }: { findings: LiveF
   const notes = findings.kind === 'answer' ? findings.answer.base.notes.map(noteText) : [];
   return (
     <>
-      {findings.kind === 'answer' ? (
-        <FindingList
-          idPrefix="live"
-          document={findings.document}
-          answer={findings.answer}
-          between={between}
-        />
-      ) : null}
+      {findings.kind === 'answer' ? <LiveCards findings={findings} between={between} /> : null}
       {findings.kind === 'answer' ? (
         <p className="mb-3 max-w-prose text-13 text-soft">{baseSummary(findings.answer.base)}</p>
       ) : null}

@@ -198,6 +198,8 @@ describe('sending the form', () => {
       'Stated margin: This margin is not a multiple of 0.5, the unit it is said to be rounded to.',
       'Shares: The shares sum to more than 100 percent and rounding allow.',
     ]);
+    type('Rounded to', '0.1');
+    await waitFor(() => expect(within(summary).queryByText(/^Stated margin:/)).toBeNull());
     const [first] = screen.getAllByRole('textbox', { name: 'Share' });
     fireEvent.change(first!, { target: { value: '47' } });
     await waitFor(() => expect(within(summary).queryByText(/^Shares:/)).toBeNull());
@@ -303,7 +305,9 @@ describe('the findings beside the form', () => {
     expect(await screen.findByRole('heading', { name: 'Alder minus Brook: +6' })).toBeTruthy();
     expect(screen.getByText('One finding is not shown by the numbers.')).toBeTruthy();
     type('Sample size', 'a thousand');
-    expect(await screen.findByText('The sample size cannot be read yet.')).toBeTruthy();
+    const unread = await screen.findAllByText('The sample size cannot be read yet.');
+    expect(unread.length).toBe(2);
+    expect(screen.queryByText(/people asked is not disclosed/)).toBeNull();
     expect(await screen.findByText('One finding cannot be tested.')).toBeTruthy();
   });
 
@@ -338,6 +342,7 @@ describe('what a pollster withholds', () => {
     expect(field('Sample size').readOnly).toBe(true);
     expect(field('Sample size').value).toBe('1,012');
     expect(await screen.findByText('One finding cannot be tested.')).toBeTruthy();
+    expect(screen.getByText(/people asked is not disclosed/)).toBeTruthy();
   });
 
   it('loses its mark when something is chosen after all', async () => {
