@@ -18,7 +18,10 @@ export default function NotFound() {
           </LinkButton>
         }
       >
-        <p>The address may be mistyped, or what it named may not be open to you. Nothing is ever deleted.</p>
+        <p>
+          The address may be mistyped, or what it named may not be open to you. What was filed is never
+          deleted.
+        </p>
       </EmptyState>
     </>
   );
