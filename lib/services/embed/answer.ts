@@ -9,6 +9,7 @@ import { THEME_CHOICES } from '@/lib/charts/tokens';
 import { sha256 } from '@/lib/security/ids';
 import type { Ctx } from '../context';
 import type { EvidenceBody } from '../sheet/evidence-body';
+import { encodeBody, type Encoding, encodingFor } from './encode-body';
 import { dataOf, pageOf, pictureOf, withdrawalOf } from './render-embed';
 
 export type EmbedRequest = {
@@ -51,7 +52,7 @@ const bodies = new LRUCache<string, Rendered>({
   sizeCalculation: (rendered) => rendered.body.byteLength + 200,
 });
 
-/** Answers a public address. Reads the state at every request; no cookie is ever looked at. */
+/** Answers a public address; each encoding of a body is made once and has its own ETag. Reads the state at every request; no cookie is ever looked at. */
 export function answerEmbed(request: EmbedRequest, ctx: Ctx = { db: getDb(), now: Date.now() }): EmbedAnswer {
   const match = PATH.exec(request.path);
   if (!match) return notFound();
@@ -60,26 +61,29 @@ export function answerEmbed(request: EmbedRequest, ctx: Ctx = { db: getDb(), now
   if (!found?.isPublic || found.version.pulledUnseen) return notFound();
   const theme = THEME_CHOICES.find((choice) => choice === request.query.get('theme')) ?? 'auto';
   if (found.version.state === 'pulled') return withdrawn(found, part, theme);
-  const rendered = render(found, part, theme, ctx);
+  const encoding = encodingFor(request.headers['accept-encoding']);
+  const rendered = render(found, part, theme, encoding, ctx);
   const headers = {
     ...SAFE,
     'Content-Type': TYPES[part],
     'Cache-Control': `public, max-age=${FRESH_SECONDS}, stale-while-revalidate=${STALE_SECONDS}, stale-if-error=${STALE_IF_ERROR_SECONDS}`,
     ETag: rendered.etag,
+    Vary: 'Accept-Encoding',
+    ...(encoding === 'identity' ? {} : { 'Content-Encoding': encoding }),
     ...(found.version.state === 'superseded' ? { Link: `</embed/${id}>; rel="latest-version"` } : {}),
   };
   if (matches(request.headers['if-none-match'], rendered.etag)) return { status: 304, headers, body: null };
   return { status: 200, headers, body: rendered.body };
 }
 
-function render(found: Found, part: Part, theme: ThemeChoice, ctx: Ctx): Rendered {
-  const key = `${found.hash} ${found.embedId} ${found.version.number} ${part} ${theme}`;
+function render(found: Found, part: Part, theme: ThemeChoice, encoding: Encoding, ctx: Ctx): Rendered {
+  const key = `${found.hash} ${found.embedId} ${found.version.number} ${part} ${theme} ${encoding}`;
   const kept = bodies.get(key);
   if (kept) return kept;
   const evidence = JSON.parse(findEvidence(ctx.db, found.evidenceId)!.bytes.toString('utf8')) as EvidenceBody;
   const subject = { evidence, id: found.embedId, version: found.version.number, at: found.version.createdAt };
   const text = { page: pageOf, 'chart.svg': pictureOf, 'data.json': dataOf }[part](subject, theme);
-  const body = Buffer.from(text, 'utf8');
+  const body = encodeBody(Buffer.from(text, 'utf8'), encoding);
   const rendered = { body, etag: `"${sha256(body).slice(0, 32)}"` };
   bodies.set(key, rendered);
   return rendered;

@@ -1,3 +1,4 @@
+import { brotliDecompressSync, gunzipSync } from 'node:zlib';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { listEmbargoViews } from '@/db/queries/embargo';
 import { findRelease } from '@/db/queries/release';
@@ -183,5 +184,33 @@ describe('the list of embeds', () => {
     expect(listEmbargoViews(db, release.id)).toEqual([view]);
     setEmbargoReader(editor, { ...input, listed: false }, desk.ctx());
     expect(seen()).not.toContain('Assembly');
+  });
+});
+
+describe('a body that travels compressed', () => {
+  const path = () => `/embed/${live.id}`;
+  const unpack = { br: brotliDecompressSync, gzip: gunzipSync };
+
+  it.each(['br', 'gzip'] as const)('is the same page in %s, smaller, with an ETag of its own', (encoding) => {
+    const plain = ask(path());
+    const packed = ask(path(), { 'accept-encoding': encoding });
+    expect(packed.headers).toMatchObject({ 'Content-Encoding': encoding, Vary: 'Accept-Encoding' });
+    expect(unpack[encoding](packed.body as Uint8Array).toString('utf8')).toBe(plain.text);
+    expect((packed.body as Uint8Array).byteLength).toBeLessThan(plain.text.length / 2);
+    expect(packed.headers.ETag).not.toBe(plain.headers.ETag);
+    const again = ask(path(), { 'accept-encoding': encoding, 'if-none-match': packed.headers.ETag! });
+    expect([again.status, again.body]).toEqual([304, null]);
+  });
+
+  it('goes as it is to whoever takes no encoding, or gives it weight 0', () => {
+    for (const accepted of ['', 'identity', 'gzip;q=0, br;q=0.0', 'zstd'])
+      expect(ask(path(), { 'accept-encoding': accepted }).headers['Content-Encoding']).toBeUndefined();
+    expect(ask(path(), { 'accept-encoding': 'gzip, deflate, br;q=0' }).headers['Content-Encoding']).toBe(
+      'gzip',
+    );
+  });
+
+  it('is never told of an address that is not public', () => {
+    expect(ask(`/embed/${waiting.id}`, { 'accept-encoding': 'br' })).toEqual(ask(`/embed/${'A'.repeat(22)}`));
   });
 });
