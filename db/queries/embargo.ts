@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, eq, isNull } from 'drizzle-orm';
+import { and, count, eq, isNull, sql } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
 import { embargoList, embargoViews, releases } from '@/db/schema/releases';
@@ -56,5 +56,17 @@ export function listEmbargoViews(conn: Conn, releaseId: number) {
     .innerJoin(people, eq(people.id, embargoViews.personId))
     .where(eq(embargoViews.releaseId, releaseId))
     .orderBy(embargoViews.id)
+    .all();
+}
+
+/** Who on a release's list has read it before its hour: how often, and last when. */
+export function summarizeEmbargoViews(conn: Conn, releaseId: number) {
+  return conn
+    .select({ name: people.name, count: count(), lastAt: sql<number>`max(${embargoViews.at})` })
+    .from(embargoViews)
+    .innerJoin(people, eq(people.id, embargoViews.personId))
+    .where(eq(embargoViews.releaseId, releaseId))
+    .groupBy(people.id)
+    .orderBy(people.name)
     .all();
 }

@@ -6,7 +6,7 @@ import { pollsters, races } from '@/db/schema/races';
 import { releases, releaseVersions } from '@/db/schema/releases';
 import { clearingLines, clearings, evidenceSources, lines, lineVersions, sheets } from '@/db/schema/sheets';
 import type { LineState } from '@/lib/domain/sheet';
-import { isPublic, isOnEmbargoList, type Viewer, visible } from './visible';
+import { isPublic, type Viewer, visible } from './visible';
 
 export type SheetRow = typeof sheets.$inferSelect;
 export type LineRow = typeof lines.$inferSelect;
@@ -180,10 +180,6 @@ export function listOpenSheets(conn: Conn, viewer: Viewer, now: number, limit: n
     .all();
 }
 
-export function listSheetsOfRelease(conn: Conn, releaseId: number) {
-  return listSelect(conn).where(eq(sheets.releaseId, releaseId)).orderBy(desc(sheets.id)).all();
-}
-
 const lastClearing = sql`(
   select max(acts.id) from clearings acts where acts.sheet_id = ${sheets.id} and acts.act = 'cleared'
 )`;
@@ -224,16 +220,6 @@ export function isReleasePublic(conn: Conn, releaseId: number, now: number): boo
       .select({ id: releases.id })
       .from(releases)
       .where(and(eq(releases.id, releaseId), isPublic(now)))
-      .get() !== undefined
-  );
-}
-
-export function mayCopyBeforeHour(conn: Conn, releaseId: number, viewer: Viewer): boolean {
-  return (
-    conn
-      .select({ id: releases.id })
-      .from(releases)
-      .where(and(eq(releases.id, releaseId), isOnEmbargoList(conn, viewer)))
       .get() !== undefined
   );
 }

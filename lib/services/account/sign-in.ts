@@ -1,6 +1,7 @@
 import 'server-only';
 import {
   countFailures,
+  deleteExpiredSessions,
   deleteFailure,
   deleteFailures,
   deleteFailuresBefore,
@@ -34,6 +35,7 @@ export async function signIn(input: SignInInput, ctx: Ctx): Promise<SignInResult
   const counted = transact(ctx, (tx) => {
     const since = ctx.now - WINDOW;
     deleteFailuresBefore(tx, since);
+    deleteExpiredSessions(tx, ctx.now);
     if (countFailures(tx, accountBucket, since) >= MAX_PER_ACCOUNT) return null;
     if (countFailures(tx, addressBucket, since) >= MAX_PER_ADDRESS) return null;
     insertFailure(tx, accountBucket, ctx.now);

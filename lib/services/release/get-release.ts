@@ -1,8 +1,8 @@
 import 'server-only';
-import { isListed, listEmbargoReaders } from '@/db/queries/embargo';
+import { isListed, listEmbargoReaders, summarizeEmbargoViews } from '@/db/queries/embargo';
 import { findRelease, findWholeVersion, listShares, type ReleaseRow } from '@/db/queries/release';
 import { isReleasePublic } from '@/db/queries/sheet';
-import { type Actor, canReadUnpublished } from '@/lib/domain/roles';
+import { type Actor, canActAsEditor, canReadUnpublished } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { renderMarkdown } from '@/lib/markdown/render-markdown';
 import { authorize, type Ctx } from '../context';
@@ -27,6 +27,8 @@ export type ReleaseView = Omit<Computed, 'settings' | 'comparison'> & {
   };
   embargo: EmbargoView | null;
   embargoReaders: { personId: string | null; name: string | null }[];
+  /** Readings from the embargo list, told to editors. */
+  embargoViews: { name: string; count: number; lastAt: number }[];
   isOnList: boolean;
   enteredBy: Record<string, string>;
   loggedBy: string;
@@ -53,6 +55,7 @@ export function getRelease(actor: Actor, id: string, ctx: Ctx): ReleaseView {
     comparison: { ...chosen, override: override && { reason: override.reason, by: override.by } },
     embargo: embargoView(release, isReleasePublic(ctx.db, release.id, ctx.now)),
     embargoReaders: listEmbargoReaders(ctx.db, release.id),
+    embargoViews: canActAsEditor(actor) ? summarizeEmbargoViews(ctx.db, release.id) : [],
     isOnList: isListed(ctx.db, release.id, actor),
     enteredBy: Object.fromEntries(
       listShares(ctx.db, whole.question.id).map(({ share, enteredBy }) => [share.option, enteredBy]),

@@ -28,6 +28,15 @@ const attempt = (email: string, password: string, { address = `a${(tries += 1)}`
   signIn({ email, password, address }, desk.ctx(later));
 
 describe('signing in', () => {
+  it('sweeps out sessions that have run out, and only those', async () => {
+    const begun = () =>
+      desk.db.$client.prepare('select created_at - ? from sessions order by 1').pluck().all(desk.ctx().now);
+    desk.db.$client.prepare('delete from sessions').run();
+    const after = SESSION_LIFETIME + MINUTE / 2;
+    for (const later of [0, MINUTE, after]) await attempt(KNOWN, PASSWORD, { later });
+    expect(begun()).toEqual([MINUTE, after]);
+  });
+
   it('opens a session for twelve hours', async () => {
     const result = await attempt(' Rolf.Quill@Courier.example', PASSWORD);
     if (!result.ok) throw new Error('the right password was refused');

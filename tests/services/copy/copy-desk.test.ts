@@ -5,6 +5,7 @@ import { findRelease } from '@/db/queries/release';
 import { copyLines } from '@/lib/services/copy/copy-lines';
 import { listCopyDesk } from '@/lib/services/copy/list-copy-desk';
 import { liftEmbargo, setEmbargoReader } from '@/lib/services/release/embargo';
+import { getRelease } from '@/lib/services/release/get-release';
 import { freshDatabase, HOUR, makePerson } from '@/tests/support/database';
 import { refusal } from '@/tests/support/refusal';
 import { GOVERNOR, logRelease, releaseForm } from '@/tests/support/release';
@@ -142,6 +143,9 @@ describe('under embargo', () => {
       at: desk.ctx().now,
       what: `copy desk: sheet ${embargoed}`,
     });
+    const told = (actor: typeof editor) => getRelease(actor, embargoedRelease, desk.ctx()).embargoViews;
+    expect(told(editor)).toContainEqual({ name: 'Wil Arden', count: 1, lastAt: desk.ctx().now });
+    expect(told(reporter)).toEqual([]);
     const row = db.$client.prepare('select under_embargo as under from copies order by id desc limit 1');
     expect(row.get()).toEqual({ under: 1 });
     list(named.publicId, false);

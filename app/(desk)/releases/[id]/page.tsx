@@ -24,6 +24,7 @@ import { listEmbargoCandidates } from '@/lib/services/release/list-embargo-candi
 import { liftEmbargoAction, setEmbargoReaderAction } from '../actions';
 import { ComparisonOverride } from './_components/comparison-override';
 import { EmbargoList } from './_components/embargo-list';
+import { EmbargoViews } from './_components/embargo-views';
 import { LiftEmbargo } from './_components/lift-embargo';
 import { Particulars } from './_components/particulars';
 import { missingSentence, particularsOf, tabOf, titleOf } from './_components/release-words';
@@ -81,6 +82,7 @@ export default async function ReleasePage({ params }: Props) {
               setReader={setEmbargoReaderAction}
             />
           ) : null}
+          <EmbargoViews views={view.embargoViews} zone={readEnv().LEADLINE_ZONE} />
         </aside>
       </div>
     </>
