@@ -6,37 +6,8 @@ import {
   tabOf,
   titleOf,
 } from '@/app/(desk)/releases/[id]/_components/release-words';
-import { given, NOT_DISCLOSED, NOT_ENTERED } from '@/lib/domain/disclosed';
-import type { ReleaseFacts } from '@/lib/domain/release-facts';
-
-const FACTS: ReleaseFacts = {
-  releaseId: 'r',
-  versionId: 'v',
-  version: 1,
-  race: { id: 'g', name: 'Averil Coast governor', kind: 'candidate', thresholds: [] },
-  pollster: { id: 'k', name: 'Kelmouth Research' },
-  sponsor: given({ id: 's', name: 'The Averil Courier' }),
-  population: given('likely-voters'),
-  sampleSource: 'probability',
-  mode: given('live-telephone'),
-  design: 'weighted',
-  fieldStartOn: '2026-09-14',
-  fieldEndOn: '2026-09-17',
-  publishedOn: '2026-09-18',
-  n: given(1012),
-  deff: null,
-  statedMargin: NOT_ENTERED,
-  modelledInterval: null,
-  questionWording: NOT_ENTERED,
-  decimals: 1,
-  shares: [
-    { option: 'Brook', units: 410, isAnswer: true },
-    { option: 'Don’t know', units: 600, isAnswer: false },
-    { option: 'Alder', units: 490, isAnswer: true },
-    { option: 'Someone else', units: null, isAnswer: true },
-  ],
-  sourceUrl: NOT_ENTERED,
-};
+import { NOT_DISCLOSED, NOT_ENTERED } from '@/lib/domain/disclosed';
+import { FACTS } from './example-facts';
 
 describe('the browser tab of a release', () => {
   it('names race, pollster and dates, and no figure', () => {
