@@ -1,5 +1,5 @@
-import type { Interval } from './interval';
-import { isPositive, isProportion, required } from './require';
+import type { Interval } from '../interval';
+import { isPositive, isProportion, required } from '../require';
 
 /**
  * The score interval of a share: the values that a score test would not reject.

@@ -1,4 +1,4 @@
-import { isPositive, required } from './require';
+import { isPositive, required } from '../require';
 
 /** The normal quantile of 80 percent: a test finds such a difference four times in five. */
 const POWER_80 = 0.8416212335729143;

@@ -1,6 +1,6 @@
 import studentQuantile from '@stdlib/stats-base-dists-t-quantile';
 import { normalQuantile } from './normal-quantile';
-import { isInside, required } from './require';
+import { isInside, required } from '../require';
 
 /**
  * The value that a test statistic must exceed on either side to be significant at alpha.

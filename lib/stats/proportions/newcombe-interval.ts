@@ -1,4 +1,4 @@
-import type { Interval } from './interval';
+import type { Interval } from '../interval';
 import { wilsonInterval } from './wilson-interval';
 
 /**

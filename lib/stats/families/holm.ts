@@ -1,5 +1,5 @@
-import { isProportion, required } from './require';
-import { nearlyEqual } from './nearly-equal';
+import { isProportion, required } from '../require';
+import { nearlyEqual } from '../nearly-equal';
 
 const ZERO_FOR_RANKING = 1e-300;
 

@@ -1,4 +1,4 @@
-import { isPositive, isProportion, required } from './require';
+import { isPositive, isProportion, required } from '../require';
 
 /**
  * Standard error of a share in a sample with a design effect.

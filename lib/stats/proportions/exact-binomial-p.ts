@@ -1,5 +1,5 @@
 import betainc from '@stdlib/math-base-special-betainc';
-import { isInside, isPositive, required } from './require';
+import { isInside, isPositive, required } from '../require';
 
 /**
  * Two-sided p-value of the exact test of a share against a fixed value, on an effective count that need not be

@@ -1,5 +1,5 @@
 import betainc from '@stdlib/math-base-special-betainc';
-import { required } from './require';
+import { required } from '../require';
 
 /**
  * Two-sided p-value of the sign test of a lead, on effective counts that need not be whole.

@@ -1,6 +1,6 @@
 import jstat from 'jstat';
 import { normalUpperTail } from './normal-upper-tail';
-import { isInside, required } from './require';
+import { isInside, required } from '../require';
 
 const JSTAT_TAIL = 1e-4;
 const CLOSE_ENOUGH = 1e-15;

@@ -1,6 +1,6 @@
 import erfc from '@stdlib/math-base-special-erfc';
 import jstat from 'jstat';
-import { required } from './require';
+import { required } from '../require';
 
 const JSTAT_REACH = 4;
 

@@ -1,4 +1,4 @@
-import { isInside, isPositive, required } from './require';
+import { isInside, isPositive, required } from '../require';
 
 /** Two-point Gauss–Legendre rule: exact for the cubic pieces that a sum of four uniforms is made of. */
 const GAUSS = 1 / Math.sqrt(3);

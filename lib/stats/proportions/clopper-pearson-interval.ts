@@ -1,6 +1,6 @@
 import betaQuantile from '@stdlib/stats-base-dists-beta-quantile';
-import type { Interval } from './interval';
-import { isInside, isPositive, required } from './require';
+import type { Interval } from '../interval';
+import { isInside, isPositive, required } from '../require';
 
 /** Below this the beta quantile of stdlib is not a number; the end of the interval is 0 to every digit anyway. */
 const NO_COUNT = 1e-300;

@@ -1,6 +1,6 @@
 import jstat from 'jstat';
-import { isInside, isPositive, required } from './require';
-import { criticalValue } from './critical-value';
+import { isInside, isPositive, required } from '../require';
+import { criticalValue } from '../distributions/critical-value';
 
 /**
  * The design effect that unequal weights alone bring (Kish).

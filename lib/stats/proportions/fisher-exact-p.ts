@@ -1,5 +1,5 @@
 import probabilityOf from '@stdlib/stats-base-dists-hypergeometric-pmf';
-import { required } from './require';
+import { required } from '../require';
 
 /** Tables whose probability is this much above the observed one still count as equally rare (R's rule). */
 const AS_RARE = 1 + 1e-7;

@@ -1,6 +1,6 @@
 import studentCdf from '@stdlib/stats-base-dists-t-cdf';
 import { normalUpperTail } from './normal-upper-tail';
-import { required } from './require';
+import { required } from '../require';
 
 /**
  * The two-sided p-value of a test statistic: normal, or Student's t where the variance was estimated.
