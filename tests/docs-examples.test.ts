@@ -8,8 +8,9 @@ const BRANCH = '  ';
 type Example = { file: string; line: number; code: string; promised: string };
 
 function modulesOf(folder: string): string[] {
-  return readdirSync(folder)
+  return readdirSync(folder, { recursive: true, encoding: 'utf8' })
     .filter((name) => name.endsWith('.ts') && !name.endsWith('.d.ts'))
+    .sort()
     .map((name) => `${folder}/${name}`);
 }
 
