@@ -1,0 +1,143 @@
+import type { ChangeFinding, LeadChangeFinding, LeadFinding, ThresholdFinding } from '../check-types';
+import type { FunctionName } from './functions';
+import { rName, type Labels } from './inputs';
+import { rNumber } from './r-literal';
+
+/** How a tested or untested question is asked in R. */
+export type AskedInR = {
+  /** The finding in words, safe inside a comment. */
+  words: string;
+  /** The call that makes the question. */
+  call: string;
+  /** The interval at the two-sided quantile q of the policy's level. */
+  interval: string;
+  /** Code that fills `second_tests`; empty where there are none. */
+  secondTests: string;
+  /** Code that sets `little_changed`; null where that is not asked. */
+  littleChanged: string | null;
+  breaking: 'breakingDeff' | 'breakingFactor';
+  needs: readonly FunctionName[];
+  secondNeeds: readonly FunctionName[];
+};
+
+type TestableFinding = LeadFinding | ChangeFinding | LeadChangeFinding | ThresholdFinding;
+
+const SYMMETRIC = 'interval <- estimate + c(-1, 1) * margin';
+
+/** The question behind a finding, in R. */
+export function askInR(finding: TestableFinding, labels: Labels): AskedInR {
+  switch (finding.kind) {
+    case 'lead':
+      return askLeadInR(finding, labels);
+    case 'change':
+      return askChangeInR(finding, labels);
+    case 'lead-change':
+      return askLeadChangeInR(finding, labels);
+    case 'threshold':
+      return askThresholdInR(finding, labels);
+  }
+}
+
+function askLeadInR({ pair }: LeadFinding, labels: Labels): AskedInR {
+  const [first, second] = pair.map((option) => rName(option, labels));
+  return {
+    words: `lead of ${first} over ${second}, one sample`,
+    call: `lead(release, ${first}, ${second})`,
+    interval: SYMMETRIC,
+    secondTests: leadTests(`${first}`, `${second}`),
+    littleChanged: null,
+    breaking: 'breakingDeff',
+    needs: ['lead'],
+    secondNeeds: ['exactSign'],
+  };
+}
+
+function leadTests(first: string, second: string): string {
+  return `a <- proportion(release, ${first})
+b <- proportion(release, ${second})
+
+# Score test: the variance as if the two were level, sqrt(d * (a + b) / n).
+se_level <- sqrt(release$deff * (a + b) / release$n)
+second_tests$score <- list(p = two_sided_p(estimate, se_level, finding$df))
+
+# Exact sign test where the two have fewer than 50 effective counts together.
+if (is_below(release$n_eff * (a + b), 50)) {
+  second_tests[["exact-sign"]] <- list(p = exact_sign_p(release$n_eff * a, release$n_eff * b))
+}`;
+}
+
+function askChangeInR({ option }: ChangeFinding, labels: Labels): AskedInR {
+  const name = rName(option, labels);
+  return {
+    words: `change of ${name} between two samples`,
+    call: `change(previous, release, ${name})`,
+    interval: SYMMETRIC,
+    secondTests: changeTests(name),
+    littleChanged: `# Little changed: two one-sided tests against the smaller of the margin of indifference and a fifth of the earlier
+# share, with rounding and the high design effects allowed for; only where no change is shown.
+one_sided <- critical_value(2 * (1 - policy$level), finding$df)
+reach <- abs(estimate_pp) + rounding_pp + 100 * one_sided * se_high
+little_changed <- verdict == "does-not-hold" && reach < min(policy$indifference_pp, 100 * p1 / 5)`,
+    breaking: 'breakingFactor',
+    needs: ['change'],
+    secondNeeds: ['newcombe', 'fisher'],
+  };
+}
+
+function changeTests(name: string): string {
+  return `p1 <- proportion(previous, ${name})
+p2 <- proportion(release, ${name})
+m1 <- previous$n_eff
+m2 <- release$n_eff
+
+# Pooled test: the variance as if both samples had one share, on effective counts.
+pooled <- (m1 * p1 + m2 * p2) / (m1 + m2)
+se_pooled <- sqrt(max(0, pooled * (1 - pooled)) * (1 / m1 + 1 / m2))
+second_tests$pooled <- list(p = two_sided_p(estimate, se_pooled, finding$df))
+
+# Hybrid score interval at this test's own level; it agrees where it excludes 0.
+second_tests$newcombe <- list(interval = newcombe_interval(p1, m1, p2, m2, critical_value(own_alpha, NULL)))
+
+# Fisher's exact test where any effective count is below ten.
+counts <- c(m1 * p1, m1 * (1 - p1), m2 * p2, m2 * (1 - p2))
+if (any(is_below(counts, 10))) {
+  whole <- round_half_up(counts)
+  second_tests$fisher <- list(p = fisher_p(whole[1], whole[2], whole[3], whole[4]))
+}`;
+}
+
+function askLeadChangeInR({ pair }: LeadChangeFinding, labels: Labels): AskedInR {
+  const [first, second] = pair.map((option) => rName(option, labels));
+  return {
+    words: `change of the lead of ${first} over ${second} between two samples`,
+    call: `lead_change(previous, release, ${first}, ${second})`,
+    interval: SYMMETRIC,
+    secondTests: '',
+    littleChanged: null,
+    breaking: 'breakingFactor',
+    needs: ['leadChange'],
+    secondNeeds: [],
+  };
+}
+
+function askThresholdInR({ option, thresholdPct }: ThresholdFinding, labels: Labels): AskedInR {
+  const name = rName(option, labels);
+  const pct = rNumber(thresholdPct);
+  return {
+    words: `${name} against ${pct} percent`,
+    call: `threshold(release, ${name}, ${pct})`,
+    interval: `# The interval is the share's own, less the threshold.
+p <- proportion(release, ${name})
+p0 <- ${pct} / 100
+interval <- share_interval(p, release, policy$level) - p0`,
+    secondTests: `# Exact test where any of the four effective counts is below ten.
+m <- release$n_eff
+if (any(is_below(m * c(p0, 1 - p0, p, 1 - p), 10))) {
+  second_tests[["exact-binomial"]] <- list(p = exact_binomial_p(min(m * p, m), m, p0))
+}`,
+    littleChanged: null,
+    breaking: 'breakingDeff',
+    needs: ['threshold'],
+    secondNeeds: ['exactBinomial', 'shareInterval'],
+  };
+}

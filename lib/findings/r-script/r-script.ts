@@ -1,0 +1,134 @@
+import type { Base, CheckAnswer, CheckDocument, Finding, Policy, ShareFinding } from '../check-types';
+import { ENGINE_VERSION } from '../engine-version';
+import { resolvePolicy } from '../policy';
+import { askInR, type AskedInR } from './asked-in-r';
+import { functionsFor, type FunctionName } from './functions';
+import { rName, writeBase, writePolicy, type Labels } from './inputs';
+import { labelsOf } from './r-literal';
+import { assemble, type Section } from './assemble';
+import { TESTED_NEEDS, testedOutput, testedSections } from './tested';
+
+type Testable = Exclude<Finding, ShareFinding>;
+
+/**
+ * A script in R that computes one finding again from the printed figures alone: its bases, estimate, test, family,
+ * second tests and verdict. Base R suffices, no package is needed.
+ *
+ * The script shares no code and no result with the engine: it starts from sizes, shares and design facts as
+ * printed, and takes its quantiles and tails from R. It prints one line for each figure, `name = value`, under
+ * the names of the check answer, an interval as `.low` and `.high`. It is plain ASCII; names are written so that
+ * none can end a string or a comment.
+ *
+ * @param document the document as parsed
+ * @param answer check(document)
+ * @param findingIndex which finding of the answer, from 0
+ * @returns the text of the script; the same for the same document
+ * @throws RangeError `rScript requires the index of a finding of the answer`
+ */
+export function rScript(document: CheckDocument, answer: CheckAnswer, findingIndex: number): string {
+  const finding = answer.findings[findingIndex];
+  if (!finding) throw new RangeError('rScript requires the index of a finding of the answer');
+  const labels = labelsOf(optionsOf(document));
+  const policy = resolvePolicy(document.policy);
+  if (finding.kind === 'share') return shareScript(document.release, finding, policy, labels);
+  const previous = isChange(finding) ? (document.previous ?? null) : null;
+  const asked = askInR(finding, labels);
+  const inputs = inputSections(document.release, previous, policy, labels);
+  const output = [
+    `show("kind", "${finding.kind}")`,
+    'show_base("base", release)',
+    ...(previous ? ['show_base("previousBase", previous)'] : []),
+  ];
+  if (finding.verdict === 'cannot-be-tested') {
+    return assemble({
+      words: asked.words,
+      engine: ENGINE_VERSION,
+      functions: functionsFor(['withDesignEffect', ...asked.needs, 'reasonsUntested', 'show']),
+      sections: [...inputs, untestedSection(asked)],
+      output: [...output, UNTESTED_OUTPUT].join('\n'),
+    });
+  }
+  const family = answer.findings.flatMap((one) => (isOfFamily(one, finding) ? [one] : []));
+  const questions = family.map((one) => askInR(one, labels));
+  const needs = [...TESTED_NEEDS, ...asked.secondNeeds, ...questions.flatMap((one) => one.needs)];
+  return assemble({
+    words: asked.words,
+    engine: ENGINE_VERSION,
+    functions: functionsFor(['withDesignEffect', ...needs, 'show']),
+    sections: [...inputs, ...testedSections(asked, questions, family.indexOf(finding))],
+    output: [...output, testedOutput(asked)].join('\n'),
+  });
+}
+
+function shareScript(release: Base, { option }: ShareFinding, policy: Policy, labels: Labels): string {
+  const name = rName(option, labels);
+  const needs: FunctionName[] = ['withDesignEffect', 'shareInterval', 'show'];
+  return assemble({
+    words: `share of ${name}`,
+    engine: ENGINE_VERSION,
+    functions: functionsFor(needs),
+    sections: [
+      ...inputSections(release, null, policy, labels),
+      {
+        title: 'Share and interval, unadjusted',
+        code: `p <- proportion(release, ${name})
+has_interval <- !is.na(p) && release$basis != "none"
+interval <- if (has_interval) share_interval(p, release, policy$level)
+method <- if (has_interval) share_method(p, release$n_eff)`,
+      },
+    ],
+    output: `show("kind", "share")
+show_base("base", release)
+show("estimatePct", 100 * p)
+show("intervalPct", if (has_interval) 100 * interval)
+show("method", method)`,
+  });
+}
+
+function inputSections(release: Base, previous: Base | null, policy: Policy, labels: Labels): Section[] {
+  return [
+    { title: 'Policy of the desk', code: writePolicy(policy) },
+    {
+      title: 'Printed figures, shares in percent; NULL and NA: not disclosed',
+      code: [
+        writeBase('release', release, labels),
+        ...(previous ? [writeBase('previous', previous, labels)] : []),
+      ].join('\n\n'),
+    },
+    {
+      title: 'Design effect, effective size, maximum margin',
+      code: [
+        'release <- with_design_effect(release, policy)',
+        ...(previous ? ['previous <- with_design_effect(previous, policy)'] : []),
+      ].join('\n'),
+    },
+  ];
+}
+
+function untestedSection({ call }: AskedInR): Section {
+  return {
+    title: 'What stands against a test',
+    code: `finding <- ${call}
+estimate_pp <- finding$estimate_pp
+reasons <- reasons_untested(finding, policy)
+stopifnot(length(reasons) > 0)`,
+  };
+}
+
+const UNTESTED_OUTPUT = `show("estimatePp", estimate_pp)
+show("verdict", "cannot-be-tested")
+show_list("reasons", reasons)`;
+
+function isChange({ kind }: Finding): boolean {
+  return kind === 'change' || kind === 'lead-change';
+}
+
+/** Changes and lead changes are one family; any other kind is its own. */
+function isOfFamily(one: Finding, finding: Testable): one is Testable {
+  if (one.kind === 'share') return false;
+  return isChange(finding) ? isChange(one) : one.kind === finding.kind;
+}
+
+function optionsOf({ release, previous }: CheckDocument): string[] {
+  return [...release.shares, ...(previous?.shares ?? [])].map(({ option }) => option);
+}
