@@ -1,3 +1,7 @@
+export type { Extended } from './accuracy/extended';
+export { mostellerMeasures, type MostellerMeasures } from './accuracy/mosteller-measures';
+export { multiPartyAccuracy, type MultiPartyAccuracy } from './accuracy/multi-party-accuracy';
+export { predictiveAccuracy, type PredictiveAccuracy } from './accuracy/predictive-accuracy';
 export type { Alternative } from './distributions/alternative';
 export { criticalValue } from './distributions/critical-value';
 export { normalP } from './distributions/normal-p';
@@ -13,7 +17,26 @@ export { equivalenceTest, type EquivalenceTest, type NoEquivalenceTest } from '.
 export { holm, type HolmResult } from './families/holm';
 export type { Interval } from './interval';
 export { isBelow, nearlyEqual, roundHalfUp } from './nearly-equal';
+export { changePower, type ChangePlan, type ChangePower } from './planning/change-power';
+export { detectableChange, type DetectableChange } from './planning/detectable-change';
 export { detectableDifference } from './planning/detectable-difference';
+export { leadPower, type LeadPlan, type LeadPower } from './planning/lead-power';
+export { sampleSizeForChange, type ChangeSampleSize } from './planning/sample-size-for-change';
+export { sampleSizeForLead, type LeadSampleSize } from './planning/sample-size-for-lead';
+export {
+  sampleSizeForMargin,
+  type MarginPlan,
+  type MarginSampleSize,
+} from './planning/sample-size-for-margin';
+export type { TestSides } from './planning/sides';
+export {
+  detectableLead,
+  smallestSignificantLead,
+  type LeadQuestion,
+  type SmallestLead,
+} from './planning/smallest-lead';
+export { leadPosterior, type LeadPosterior, type LeadPosteriorQuestion } from './posterior/lead-posterior';
+export { probabilityLargest } from './posterior/probability-largest';
 export { agrestiCoullInterval } from './proportions/agresti-coull-interval';
 export { binomialTestP } from './proportions/binomial-test-p';
 export { changeOfLead, changeOfShare, type Change, type ChangeOfLead } from './proportions/changes';
@@ -104,3 +127,18 @@ export {
   type KnownHouseOptions,
   type SmoothedLevelWithHouses,
 } from './series/smooth-level-with-houses';
+export { chiSquareUpperTail } from './waves/chi-square-upper-tail';
+export {
+  homogeneityOfAnswers,
+  type AnswerHomogeneity,
+  type PolledAnswers,
+} from './waves/homogeneity-of-answers';
+export { homogeneityOfShares, type ShareHomogeneity } from './waves/homogeneity-of-shares';
+export {
+  changeOfOverlappingAverages,
+  type AveragesChange,
+  type TrackingAverages,
+  type Wave,
+} from './waves/overlapping-averages';
+export type { PolledShare } from './waves/polls';
+export { trendOfShares, type ScoredShare, type ShareTrend } from './waves/trend-of-shares';
