@@ -1,9 +1,6 @@
-import betaQuantile from '@stdlib/stats-base-dists-beta-quantile';
+import { betaLowerQuantile, betaUpperQuantile } from '../distributions/beta-quantiles';
 import type { Interval } from '../interval';
 import { isInside, isPositive, required } from '../require';
-
-/** Below this the beta quantile of stdlib is not a number; the end of the interval is 0 to every digit anyway. */
-const NO_COUNT = 1e-300;
 
 /**
  * The exact interval of a share, from quantiles of the beta distribution; the count need not be whole.
@@ -26,7 +23,7 @@ export function clopperPearsonInterval(x: number, n: number, level: number): Int
   required(x >= 0 && x <= n, 'clopperPearsonInterval', 'x from 0 to n');
   required(isInside(level), 'clopperPearsonInterval', 'level inside 0 and 1');
   const tail = (1 - level) / 2;
-  const low = x < NO_COUNT ? 0 : betaQuantile(tail, x, n - x + 1);
-  const high = n - x < NO_COUNT ? 1 : 1 - betaQuantile(tail, n - x, x + 1);
+  const low = x === 0 ? 0 : betaLowerQuantile(tail, x, n - x + 1);
+  const high = x === n ? 1 : betaUpperQuantile(tail, x + 1, n - x);
   return [low, high];
 }

@@ -1,8 +1,8 @@
-import betainc from '@stdlib/math-base-special-betainc';
 import { required } from '../require';
+import { signTest } from './sign-test';
 
 /**
- * Two-sided p-value of the sign test of a lead, on effective counts that need not be whole.
+ * Two-sided p-value of the sign test of a lead, for a verdict: no counts speak for nobody and give 1.
  *
  * Use it where the two options together have few effective counts; with many it agrees with the score test.
  *
@@ -16,8 +16,7 @@ import { required } from '../require';
  * exactSignP(0, 0); // => 1
  */
 export function exactSignP(first: number, second: number): number {
-  required(first >= 0 && second >= 0, 'exactSignP', 'counts of at least 0');
-  const larger = Math.max(first, second);
-  if (larger === 0) return 1;
-  return Math.min(1, 2 * betainc(0.5, larger, Math.min(first, second) + 1));
+  const usable = first >= 0 && second >= 0 && Number.isFinite(first + second);
+  required(usable, 'exactSignP', 'counts of at least 0');
+  return signTest(first, second, 'two-sided') ?? 1;
 }

@@ -26,7 +26,7 @@ export function wilsonInterval(p: number, n: number, q: number): Interval {
   const centre = p + (q * q) / (2 * n);
   const half = q * Math.sqrt((p * (1 - p)) / n + (q * q) / (4 * n * n));
   const scale = 1 + (q * q) / n;
-  const low = p === 0 ? 0 : Math.max(0, (centre - half) / scale);
+  const low = p === 0 ? 0 : (p * p) / (centre + half);
   const high = p === 1 ? 1 : Math.min(1, (centre + half) / scale);
   return [low, high];
 }
