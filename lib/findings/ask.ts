@@ -4,11 +4,9 @@ import { measureChange, type SampledBase } from './measure-change';
 import { measureLead } from './measure-lead';
 import { measureLeadChange } from './measure-lead-change';
 import { measureThreshold } from './measure-threshold';
-import { sumOfShares, type Measured } from './measured';
+import { sumOfShares, type Measured, type Term } from './measured';
 import type { Question } from './settle';
 import { untestedReasons } from './untested';
-
-type Term = { base: BaseFigures; option: string; sign: 1 | -1 };
 
 /** The question of a lead on one base. */
 export function askLead(base: BaseFigures, pair: Pair, policy: Policy): Question {
@@ -54,14 +52,21 @@ export function askThreshold(base: BaseFigures, threshold: Threshold, policy: Po
   return { ...asked, estimatePp: asked.estimatePp === null ? null : asked.estimatePp - pct };
 }
 
-function leadTerms(base: BaseFigures, [first, second]: Pair, sign: 1 | -1): Term[] {
+/** The printed shares of a lead; with the sign −1 those of a lead taken away. */
+export function leadTerms(base: BaseFigures, [first, second]: Pair, sign: 1 | -1): Term[] {
   return [
     { base, option: first, sign },
     { base, option: second, sign: sign === 1 ? -1 : 1 },
   ];
 }
 
-function question(
+/** A base together with its sampled part; null on a base without any. */
+export function sampledBase(base: BaseFigures): SampledBase | null {
+  return base.sampled && { base, sampled: base.sampled };
+}
+
+/** A question on one base, or on a later and an earlier one, with what stands against testing it. */
+export function question(
   bases: readonly BaseFigures[],
   options: readonly string[],
   terms: readonly Term[],
@@ -71,7 +76,7 @@ function question(
   const reasons = untestedReasons(bases, options, policy);
   const isDisclosed = terms.every(({ base, option }) => typeof base.units.get(option) === 'number');
   const estimatePp = isDisclosed ? sumOfShares(terms) : null;
-  const [first, second] = bases.flatMap((base) => (base.sampled ? [{ base, sampled: base.sampled }] : []));
-  const measured = reasons.length === 0 && first ? measure([first, second]) : null;
-  return { reasons, estimatePp, measured };
+  const [first, second] = bases.map(sampledBase);
+  const measured = reasons.length === 0 && first ? measure([first, second ?? undefined]) : null;
+  return { terms, bases, reasons, estimatePp, measured };
 }

@@ -5,7 +5,7 @@ import type { BaseFigures } from './base-figures';
  * The pairs a document asks about: those it names, else the two answer options with the largest disclosed shares,
  * larger first, ties in order of appearance; none where fewer than two are disclosed.
  */
-export function askedPairs(document: CheckDocument, release: BaseFigures): readonly Pair[] {
+export function askedPairs(document: Pick<CheckDocument, 'pairs'>, release: BaseFigures): readonly Pair[] {
   if (document.pairs) return document.pairs;
   const ranked = release.answers
     .flatMap((option) => {

@@ -1,5 +1,6 @@
-import { criticalValue } from '@/lib/stats';
-import { proportionOf, readBase, type BaseFigures, type Sampled } from './base-figures';
+import { sampledBase } from './ask';
+import { criticalAt } from './critical-at';
+import { proportionOf, readBase, type Sampled } from './base-figures';
 import type { CheckDocument, Finding, Range } from './check-types';
 import { measureChange, type SampledBase } from './measure-change';
 import { measureLead } from './measure-lead';
@@ -68,10 +69,6 @@ function intervalsOf(finding: Finding, document: CheckDocument): Intervals | nul
   }
 }
 
-function sampledBase(base: BaseFigures): SampledBase | null {
-  return base.sampled && { base, sampled: base.sampled };
-}
-
 function ofShare({ base, sampled }: SampledBase, option: string): Intervals {
   const p = proportionOf(base, option);
   return (level, end) => shareInterval(p, atEnd(sampled, end), level).interval;
@@ -84,7 +81,7 @@ function atEnd(sampled: Sampled, end: DeffEnd): Sampled {
 function ofMeasured(measured: Measured): Intervals {
   const estimate = measured.estimatePp / 100;
   return (level, end) => {
-    const half = criticalValue(1 - level, measured.df) * measured.standardError(end);
+    const half = criticalAt(1 - level, measured.df) * measured.standardError(end);
     return [estimate - half, estimate + half];
   };
 }

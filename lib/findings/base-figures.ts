@@ -1,4 +1,5 @@
-import { criticalValue, maximumMargin } from '@/lib/stats';
+import { maximumMargin } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { Base, BaseAnswer, BaseNote, Policy } from './check-types';
 import { basisOf, chooseDesignEffect, type ChosenDeff } from './design-effect';
 
@@ -18,6 +19,8 @@ export type BaseFigures = {
   decimals: number;
   /** Shares in whole units of the last printed decimal; null where not disclosed. */
   units: ReadonlyMap<string, number | null>;
+  /** Rounding units in points of the printed figures that make up a share; absent: the last printed decimal. */
+  roundings?: ReadonlyMap<string, readonly number[]>;
   /** Options that count as answers, in order. */
   answers: readonly string[];
   /** null on basis `none`. */
@@ -67,6 +70,11 @@ export function unitsOf(base: BaseFigures, option: string): number {
   return units;
 }
 
+/** Rounding units, in points, of the printed figures that make up the share of an option. */
+export function roundingUnitsPp(base: BaseFigures, option: string): readonly number[] {
+  return base.roundings?.get(option) ?? [10 ** -base.decimals];
+}
+
 /** The part of the answer that describes the base. */
 export function baseAnswer({ sampled, notes }: BaseFigures, policy: Policy): BaseAnswer {
   if (!sampled) {
@@ -81,7 +89,7 @@ export function baseAnswer({ sampled, notes }: BaseFigures, policy: Policy): Bas
     };
   }
   const { basis, n, deff, nEff } = sampled;
-  const q = criticalValue(1 - policy.level, deff.df);
+  const q = criticalAt(1 - policy.level, deff.df);
   return {
     basis,
     deff: deff.value,

@@ -10,7 +10,12 @@ import type { CheckAnswer, Finding } from './check-types';
  * claimKey({ kind: 'threshold', option: 'Brook', thresholdPct: 50 }); // => 'threshold:Brook|50'
  */
 export function claimKey(finding: Finding): string {
-  return `${finding.kind}:${namesOf(finding).map(escaped).join('|')}`;
+  return keyOf(finding.kind, namesOf(finding));
+}
+
+/** The key of a kind of finding about these names. */
+export function keyOf(kind: string, names: readonly string[]): string {
+  return `${kind}:${names.map(escaped).join('|')}`;
 }
 
 /**

@@ -1,9 +1,9 @@
-import { criticalValue, detectableDifference, holm, roundingHalfWidth, type HolmResult } from '@/lib/stats';
+import { detectableDifference, holm, type HolmResult } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { Policy, SecondTest, TestFields } from './check-types';
 import { pOfRatio, type Measured, type SecondResult } from './measured';
+import { roundingAllowancePp } from './rounding-allowance';
 import { judgeVerdict } from './verdict';
-
-const ROUNDING_COVERAGE = 0.95;
 
 /** The test of one finding; `breaking` is the square of z over its critical value. */
 export type Judged = { fields: TestFields; breaking: number | null };
@@ -25,12 +25,9 @@ function judgeOne(measured: Measured, p: number, rank: HolmResult | undefined, p
   if (!rank) throw new TypeError('judgeFamily requires a rank for every finding');
   const { estimatePp, df, standardError } = measured;
   const se = { chosen: standardError('chosen'), low: standardError('low'), high: standardError('high') };
-  const critical = criticalValue(rank.alpha, df);
-  const q = criticalValue(1 - policy.level, df);
-  const roundingPp = roundingHalfWidth(
-    measured.unitsPp.map((unit) => unit / 2),
-    ROUNDING_COVERAGE,
-  );
+  const critical = criticalAt(rank.alpha, df);
+  const q = criticalAt(1 - policy.level, df);
+  const roundingPp = roundingAllowancePp(measured.unitsPp);
   const secondTests = measured
     .secondTests(rank.alpha)
     .map((test) => ({ ...test, significant: agrees(test, rank.alpha, estimatePp) }) satisfies SecondTest);

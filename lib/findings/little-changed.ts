@@ -1,4 +1,4 @@
-import { criticalValue } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { Policy, TestFields } from './check-types';
 import type { Measured } from './measured';
 
@@ -22,7 +22,7 @@ export function littleChanged(
   policy: Policy,
 ): boolean {
   if (verdict !== 'does-not-hold') return false;
-  const oneSided = criticalValue(2 * (1 - policy.level), measured.df);
+  const oneSided = criticalAt(2 * (1 - policy.level), measured.df);
   const reach = Math.abs(estimatePp) + roundingPp + oneSided * 100 * measured.standardError('high');
   return reach < Math.min(policy.indifferencePp, PART_OF_EARLIER * earlierPct);
 }

@@ -1,7 +1,8 @@
-import { criticalValue, fisherExactP, isBelow, newcombeInterval } from '@/lib/stats';
+import { fisherExactP, isBelow, newcombeInterval } from '@/lib/stats';
 import { pooledStandardError, roundHalfUp, shareStandardError } from '@/lib/stats';
-import { proportionOf, type BaseFigures, type Sampled } from './base-figures';
-import { deffAt, pOfRatio, smallestDf, sumOfShares, symmetric, unitPp } from './measured';
+import { criticalAt } from './critical-at';
+import { proportionOf, roundingUnitsPp, type BaseFigures, type Sampled } from './base-figures';
+import { deffAt, pOfRatio, smallestDf, sumOfShares, symmetric } from './measured';
 import type { DeffEnd, Measured, SecondResult } from './measured';
 
 const FEW_COUNTS = 10;
@@ -35,7 +36,7 @@ export function measureChange(earlier: SampledBase, later: SampledBase, option: 
     df: smallestDf(bases),
     standardError,
     interval: (q) => symmetric(estimatePp / 100, standardError('chosen'), q),
-    unitsPp: [unitPp(later.base), unitPp(earlier.base)],
+    unitsPp: [...roundingUnitsPp(later.base, option), ...roundingUnitsPp(earlier.base, option)],
     secondTests: (alpha) =>
       changeTests(
         { p: p1, nEff: earlier.sampled.nEff },
@@ -57,13 +58,7 @@ function changeTests(
   { estimate, df, alpha }: { estimate: number; df: number | null; alpha: number },
 ): SecondResult[] {
   const pooled = pooledStandardError(earlier.p, earlier.nEff, later.p, later.nEff);
-  const [low, high] = newcombeInterval(
-    earlier.p,
-    earlier.nEff,
-    later.p,
-    later.nEff,
-    criticalValue(alpha, null),
-  );
+  const [low, high] = newcombeInterval(earlier.p, earlier.nEff, later.p, later.nEff, criticalAt(alpha, null));
   const tests: SecondResult[] = [
     { name: 'pooled', p: pOfRatio(estimate, pooled, df) },
     { name: 'newcombe', intervalPp: [100 * low, 100 * high] },

@@ -1,7 +1,8 @@
 import type { Pair } from './check-types';
+import { roundingUnitsPp } from './base-figures';
 import type { SampledBase } from './measure-change';
 import { leadErrorAt } from './measure-lead';
-import { smallestDf, sumOfShares, symmetric, unitPp } from './measured';
+import { smallestDf, sumOfShares, symmetric } from './measured';
 import type { DeffEnd, Measured } from './measured';
 
 /**
@@ -31,7 +32,9 @@ export function measureLeadChange(earlier: SampledBase, later: SampledBase, pair
     df: smallestDf(bases),
     standardError,
     interval: (q) => symmetric(estimatePp / 100, standardError('chosen'), q),
-    unitsPp: [later.base, later.base, earlier.base, earlier.base].map(unitPp),
+    unitsPp: [later.base, earlier.base].flatMap((base) =>
+      pair.flatMap((name) => roundingUnitsPp(base, name)),
+    ),
     secondTests: () => [],
   };
 }

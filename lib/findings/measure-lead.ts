@@ -1,7 +1,7 @@
 import { exactSignP, isBelow, leadNullStandardError, leadStandardError } from '@/lib/stats';
 import type { Pair } from './check-types';
-import { proportionOf, type BaseFigures, type Sampled } from './base-figures';
-import { deffAt, pOfRatio, smallestDf, sumOfShares, symmetric, unitPp } from './measured';
+import { proportionOf, roundingUnitsPp, type BaseFigures, type Sampled } from './base-figures';
+import { deffAt, pOfRatio, smallestDf, sumOfShares, symmetric } from './measured';
 import type { DeffEnd, Measured, SecondResult } from './measured';
 
 const FEW_FOR_SIGN = 50;
@@ -34,7 +34,7 @@ export function measureLead(base: BaseFigures, sampled: Sampled, pair: Pair): Me
     df,
     standardError,
     interval: (q) => symmetric(estimatePp / 100, standardError('chosen'), q),
-    unitsPp: [unitPp(base), unitPp(base)],
+    unitsPp: [...roundingUnitsPp(base, first), ...roundingUnitsPp(base, second)],
     secondTests: () => {
       const nullError = leadNullStandardError(a, b, sampled.n, sampled.deff.value);
       const tests: SecondResult[] = [{ name: 'score', p: pOfRatio(estimatePp / 100, nullError, df) }];

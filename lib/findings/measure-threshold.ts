@@ -1,7 +1,7 @@
 import { exactBinomialP, isBelow, shareStandardError } from '@/lib/stats';
 import type { Threshold } from './check-types';
-import { proportionOf, unitsOf, type BaseFigures, type Sampled } from './base-figures';
-import { deffAt, smallestDf, unitPp } from './measured';
+import { proportionOf, roundingUnitsPp, unitsOf, type BaseFigures, type Sampled } from './base-figures';
+import { deffAt, smallestDf } from './measured';
 import type { DeffEnd, Measured } from './measured';
 import { shareInterval } from './share-interval';
 
@@ -32,7 +32,7 @@ export function measureThreshold(
     df: smallestDf([sampled]),
     standardError: (end: DeffEnd) => shareStandardError(p0, n, deffAt(sampled, end)),
     interval: () => [low - p0, high - p0],
-    unitsPp: [unitPp(base)],
+    unitsPp: roundingUnitsPp(base, option),
     secondTests: () => {
       const counts = [p0, 1 - p0, p, 1 - p].map((share) => nEff * share);
       if (!counts.some((count) => isBelow(count, FEW_COUNTS))) return [];

@@ -5,6 +5,9 @@ import { unitsOf, type BaseFigures, type Sampled } from './base-figures';
 /** Which design effect of each base a standard error takes: the chosen one, or an end of its range. */
 export type DeffEnd = 'chosen' | 'low' | 'high';
 
+/** One printed share in an estimate, added or taken away. */
+export type Term = { base: BaseFigures; option: string; sign: 1 | -1 };
+
 /** A second test before it is known whether it agrees: a p-value, or an interval that must exclude 0. */
 export type SecondResult =
   { name: Exclude<SecondTest['name'], 'newcombe'>; p: number } | { name: 'newcombe'; intervalPp: Range };
@@ -31,22 +34,21 @@ export function deffAt({ deff }: Sampled, end: DeffEnd): number {
 
 /** The smallest degrees of freedom among bases; null where none has any. */
 export function smallestDf(bases: readonly Sampled[]): number | null {
-  const known = bases.flatMap(({ deff }) => (deff.df === null ? [] : [deff.df]));
-  return known.length > 0 ? Math.min(...known) : null;
-}
-
-/** The unit of the last printed decimal, in points. */
-export function unitPp(base: BaseFigures): number {
-  return 10 ** -base.decimals;
+  let smallest: number | null = null;
+  for (const { deff } of bases) {
+    if (deff.df !== null && (smallest === null || deff.df < smallest)) smallest = deff.df;
+  }
+  return smallest;
 }
 
 /** A signed sum of printed shares in points, exact in the finest printed decimal. */
-export function sumOfShares(terms: readonly { base: BaseFigures; option: string; sign: 1 | -1 }[]): number {
-  const decimals = Math.max(...terms.map(({ base }) => base.decimals));
-  const units = terms.reduce(
-    (sum, { base, option, sign }) => sum + sign * unitsOf(base, option) * 10 ** (decimals - base.decimals),
-    0,
-  );
+export function sumOfShares(terms: readonly Term[]): number {
+  let decimals = 0;
+  for (const { base } of terms) decimals = Math.max(decimals, base.decimals);
+  let units = 0;
+  for (const { base, option, sign } of terms) {
+    units += sign * unitsOf(base, option) * 10 ** (decimals - base.decimals);
+  }
   return (units + 0) / 10 ** decimals;
 }
 

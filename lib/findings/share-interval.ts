@@ -1,4 +1,5 @@
-import { clopperPearsonInterval, criticalValue, isBelow, wilsonInterval, type Interval } from '@/lib/stats';
+import { clopperPearsonInterval, isBelow, wilsonInterval, type Interval } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { ShareFinding } from './check-types';
 import { proportionOf, type BaseFigures, type Sampled } from './base-figures';
 
@@ -21,7 +22,7 @@ export function shareInterval(
     const count = Math.min(nEff * p, nEff);
     return { interval: clopperPearsonInterval(count, nEff, level), method: 'clopper-pearson' };
   }
-  return { interval: wilsonInterval(p, nEff, criticalValue(1 - level, deff.df)), method: 'wilson' };
+  return { interval: wilsonInterval(p, nEff, criticalAt(1 - level, deff.df)), method: 'wilson' };
 }
 
 /** The finding of one printed share: its interval where it is disclosed and its base has a margin. */

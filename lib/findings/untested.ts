@@ -16,13 +16,14 @@ export function untestedReasons(
   options: readonly string[],
   policy: Policy,
 ): UntestedReason[] {
+  const first = bases[0];
   const applies: Record<UntestedReason, boolean> = {
     'no-sample-size': bases.some((base) => !base.isSizeDisclosed),
     'no-sampling-basis': bases.some((base) => lacksBasis(base, policy)),
     'too-small': bases.some(({ sampled }) => sampled !== null && isBelow(sampled.nEff, policy.minimumNEff)),
     'few-clusters': bases.some(({ sampled }) => (sampled?.deff.df ?? FEWEST_DF) < FEWEST_DF),
     'not-comparable':
-      new Set(bases.map((base) => base.isProbability)).size > 1 ||
+      bases.some((base) => base.isProbability !== first?.isProbability) ||
       bases.some((base) => options.some((option) => !base.units.has(option))),
     'not-disclosed': bases.some((base) => options.some((option) => base.units.get(option) === null)),
   };

@@ -1,4 +1,4 @@
-import { criticalValue } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { Base, BaseAnswer, DeffSource, Policy } from './check-types';
 import { figure, figures, type WorkingStep } from './working-step';
 
@@ -47,7 +47,7 @@ function impliedSteps(
   { basis, deff, deffRange, notes }: BaseAnswer,
   suffix: string,
 ): WorkingStep[] {
-  const z = figure(criticalValue(1 - level, null));
+  const z = figure(criticalAt(1 - level, null));
   const raised = deff === 1 && notes.includes('deff-below-one');
   const implied = (margin: number) => `(${figure(margin / 100)} / (${z} · √(0.25 / ${n})))²`;
   const source = basis === 'modelled' ? 'modelled interval' : 'stated margin';

@@ -1,4 +1,4 @@
-import { criticalValue } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { BaseAnswer, Policy, ShareFinding } from './check-types';
 import { figure, figures, inBrackets, type WorkingStep } from './working-step';
 
@@ -20,7 +20,7 @@ export function shareSteps(
   const { deff, nEff, maximumMarginPp } = answer;
   if (estimatePct === null || !intervalPct || nEff === null || deff === null || n === null) return [printed];
 
-  const q = criticalValue(1 - policy.level, df);
+  const q = criticalAt(1 - policy.level, df);
   const interval =
     method === 'wilson' ? wilsonStep(estimatePct / 100, nEff, q) : exactStep(estimatePct / 100, nEff, policy);
   return [

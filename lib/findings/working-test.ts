@@ -1,4 +1,4 @@
-import { criticalValue } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { Policy, SecondTest, TestFields } from './check-types';
 import type { Measured } from './measured';
 import { quantileStep } from './working-share';
@@ -14,7 +14,7 @@ export function testSteps(
 ): WorkingStep[] {
   const { df } = measured;
   const { estimatePp, sePp } = fields;
-  const q = criticalValue(1 - policy.level, df);
+  const q = criticalAt(1 - policy.level, df);
   return [
     { label: 'Estimate', ...writing.estimate, result: figure(estimatePp), unit: 'points' },
     { label: 'Standard error', ...writing.error('chosen'), result: figure(sePp), unit: 'points' },
@@ -89,7 +89,7 @@ function criticalStep({ alpha }: TestFields, df: number | null): WorkingStep {
     label: 'Critical value at that level',
     formula: df === null ? 'c = z(1 − α / 2)' : 'c = t(1 − α / 2; df)',
     substituted: df === null ? `z(1 − ${figure(alpha)} / 2)` : `t(1 − ${figure(alpha)} / 2; ${df})`,
-    result: figure(criticalValue(alpha, df)),
+    result: figure(criticalAt(alpha, df)),
     unit: '',
   };
 }

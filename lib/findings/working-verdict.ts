@@ -1,4 +1,4 @@
-import { criticalValue } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import type { Policy, TestFields, Verdict } from './check-types';
 import type { Measured } from './measured';
 import type { EstimateWriting } from './working-error';
@@ -25,7 +25,7 @@ export function verdictSteps(
     unit: 'points',
   }));
   const facts = {
-    critical: criticalValue(fields.alpha, measured.df),
+    critical: criticalAt(fields.alpha, measured.df),
     low: 100 * measured.standardError('low'),
     high: 100 * measured.standardError('high'),
   };

@@ -1,4 +1,4 @@
-import { criticalValue } from '@/lib/stats';
+import { criticalAt } from './critical-at';
 import { readBase, type BaseFigures } from './base-figures';
 import type { CheckAnswer, CheckDocument, Finding, Policy, TestableFinding, TestFields } from './check-types';
 import { measureChange, type SampledBase } from './measure-change';
@@ -121,7 +121,7 @@ function sampledOf(base: BaseFigures | null): SampledBase {
 }
 
 function breakingSteps(finding: TestableFinding, fields: TestFields, { df, bases }: Measured): WorkingStep[] {
-  const c = criticalValue(fields.alpha, df);
+  const c = criticalAt(fields.alpha, df);
   const ratio = fields.z === null ? null : `(${figure(Math.abs(fields.z))} / ${figure(c)})²`;
   if ('breakingDeff' in finding && finding.breakingDeff !== null && ratio) {
     const deff = bases[0]?.deff.value ?? 1;
@@ -157,7 +157,7 @@ function littleSteps(
 ): WorkingStep[] {
   if (finding.kind !== 'change' || finding.verdict !== 'does-not-hold' || !previous) return [];
   const earlier = (previous.units.get(finding.option) ?? 0) / 10 ** previous.decimals;
-  const oneSided = criticalValue(2 * (1 - policy.level), measured.df);
+  const oneSided = criticalAt(2 * (1 - policy.level), measured.df);
   const [size, high] = [Math.abs(finding.estimatePp), 100 * measured.standardError('high')];
   return [
     {
