@@ -1,7 +1,7 @@
 import { required } from '../require';
 import type { HouseList } from './house-list';
 import type { LevelDays } from './polls';
-import { isDay, isValue, isVariance } from './refuse-series';
+import { isValue, isVariance } from './refuse-series';
 
 /**
  * A series laid out for the filter. A knot is a day with an observation, a cell the observations of one house on
@@ -46,16 +46,22 @@ export function arrangePolls<Poll extends Measured>(
   const value = new Float64Array(count);
   const sampling = new Float64Array(count);
   const isPoll = new Uint8Array(count).fill(1, 0, polls.length);
+  const { firstDay, lastDay } = days;
   for (let index = 0; index < polls.length; index += 1) {
     const poll = polls[index]!;
+    const { day } = poll;
+    const measured = poll.value;
     const variance = varianceOf(poll);
-    if (!isDay(poll.day, days)) required(false, fn, 'every poll on a whole day from firstDay to lastDay');
-    if (!isValue(poll.value)) required(false, fn, 'values that are finite numbers');
+    const isDay = Number.isInteger(day) && day >= firstDay && day <= lastDay;
+    if (!isDay) required(false, fn, 'every poll on a whole day from firstDay to lastDay');
+    if (!isValue(measured)) required(false, fn, 'values that are finite numbers');
     if (!isVariance(variance)) required(false, fn, 'variances above 0');
-    dayOf[index] = poll.day - days.firstDay;
-    value[index] = poll.value;
+    dayOf[index] = day - firstDay;
+    value[index] = measured;
     sampling[index] = variance;
-    if (houses > 0) houseOf[index] = houseList.indexOf.get(poll.house!)!;
+  }
+  for (let index = 0; houses > 0 && index < polls.length; index += 1) {
+    houseOf[index] = houseList.indexOf.get(polls[index]!.house!)!;
   }
   inexact.forEach((result, index) => {
     dayOf[polls.length + index] = result.day - days.firstDay;
@@ -73,7 +79,10 @@ export function arrangePolls<Poll extends Measured>(
     exactValue[knot] = result.value;
   });
   for (let index = 0; index < count; index += 1) dayOf[index] = knotOfDay[dayOf[index]!]!;
-  const cells = findCells(dayOf, houseOf, knotDay.length, houses + 1);
+  const cells =
+    houses > 0
+      ? findCells(dayOf, houseOf, knotDay.length, houses + 1)
+      : { knotCells: upTo(knotDay.length), cellHouse: new Int32Array(knotDay.length), cellOf: dayOf };
   const observations = count + exact.length;
   return { days, houses, knotDay, ...cells, value, sampling, isPoll, isExact, exactValue, observations };
 }
@@ -91,6 +100,13 @@ function findKnots(dayOf: Int32Array, exactDays: readonly number[], dayCount: nu
     knots += 1;
   }
   return { knotDay: knotDay.slice(0, knots), knotOfDay };
+}
+
+/** 0, 1, … up to and including the number. */
+function upTo(last: number): Int32Array {
+  const all = new Int32Array(last + 1);
+  for (let index = 1; index <= last; index += 1) all[index] = index;
+  return all;
 }
 
 /** Cells by a counting sort on knots; within a knot a stamp per house finds the cell that is already there. */

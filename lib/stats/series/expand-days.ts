@@ -59,8 +59,10 @@ export function filteredDays(level: Level): FilteredLevel {
   const { arranged, gains, means, stateVariance } = level;
   const { knotDay, days } = arranged;
   const dayCount = days.lastDay - days.firstDay + 1;
-  const mean = new Array<number | null>(dayCount).fill(null);
-  const variance = new Array<number | null>(dayCount).fill(null);
+  const mean = new Array<number | null>(dayCount);
+  const variance = new Array<number | null>(dayCount);
+  mean.fill(null, 0, knotDay[0]);
+  variance.fill(null, 0, knotDay[0]);
   for (let knot = 0; knot < knotDay.length; knot += 1) {
     const next = knot + 1 < knotDay.length ? knotDay[knot + 1]! : dayCount;
     for (let day = knotDay[knot]!; day < next; day += 1) {

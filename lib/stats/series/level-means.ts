@@ -34,11 +34,17 @@ export function computeMeans(
     let mean = 0;
     for (let cell = knotCells[knot]!; cell < knotCells[knot + 1]!; cell += 1) {
       const precision = weighed.precision[cell]!;
-      const before = weighed.mean[cell]! - effects[cellHouse[cell]!]! - mean;
-      const after = before * (total / (total + precision));
+      const value = weighed.mean[cell]! - effects[cellHouse[cell]!]!;
+      if (total === 0) {
+        total = precision;
+        mean = value;
+        continue;
+      }
+      const distance = value - mean;
+      const inverse = 1 / (total + precision);
+      mean += distance * precision * inverse;
+      squares += distance * distance * precision * total * inverse;
       total += precision;
-      mean += before * (precision / total);
-      squares += precision * before * after;
     }
     if (isExact[knot] === 1) {
       const surprise = exactValue[knot]! - level;

@@ -33,11 +33,11 @@ export function weighPolls(arranged: Arranged, extraVariance: number, weighed: W
     const variance = sampling[index]! + extraVariance * isPoll[index]!;
     const weight = 1 / variance;
     const total = precision[cell]! + weight;
-    const before = value[index]! - mean[cell]!;
-    const after = before * (precision[cell]! / total);
+    const share = weight / total;
+    const distance = value[index]! - mean[cell]!;
     precision[cell] = total;
-    mean[cell]! += before * (weight / total);
-    squares += weight * before * after;
+    mean[cell]! += distance * share;
+    squares += weight * distance * distance * (1 - share);
     variances.times(variance);
   }
   weighed.logVariances = variances.log();
