@@ -30,7 +30,9 @@ const BASE_R =
   `abs all any anyNA c cat character cumprod cumsum data.frame dhyper floor for function if ifelse
   invisible is.character is.logical is.na is.null is.numeric isTRUE lapply length list logical mapply match max mean
   min names na.omit numeric order p.adjust paste paste0 pbeta pmax pnorm pt qbeta qnorm qt rep_len return round
-  seq_len sprintf sqrt stopifnot sum switch tolower uniroot unique unlist vapply as.numeric`.split(/\s+/);
+  seq_len sprintf sqrt stopifnot sum switch tolower uniroot unique unlist vapply new.env rep seq_along tabulate which`.split(
+    /\s+/,
+  );
 
 const numbersIn = (value: unknown): number[] => {
   if (typeof value === 'number') return [value];

@@ -54,21 +54,30 @@ holm_levels <- function(p, alpha) {
 `;
 
 export const ROUNDING = String.raw`
-# Distribution of a sum of independent errors, each uniform on 0 to its own width (exact convolution). Writing x
-# as the same fraction t of every width makes the convolution a mean of those with one error fewer:
-# F(x) = mean over i of t * F_without_i(x) + (1 - t) * F_without_i(x - width_i), t = x / sum(widths).
+# Distribution of a sum of independent errors, each uniform on 0 to its own width: the exact convolution. With x
+# written as one fraction t of the sum of all widths, it is the mean over the errors of the distribution without
+# that error, taken at x with weight t and at x less its width with weight 1 - t; no digits cancel.
 # de Boor and Hollig (1982), Journal d'Analyse Mathematique 42, 99-115 (recurrence of box splines, from memory).
 sum_of_uniforms_cdf <- function(x, widths) {
-  if (x <= 0) return(0)
-  if (x >= sum(widths)) return(1)
-  t <- x / sum(widths)
-  distinct <- unique(widths)
-  without <- function(width, x) {
-    rest <- widths[-match(width, widths)]
-    if (length(rest) == 0) as.numeric(x >= 0) else sum_of_uniforms_cdf(x, rest)
+  width <- unique(widths)
+  known <- new.env()
+  below <- function(left, shifted) {
+    from <- x - sum(shifted * width)
+    reach <- sum(left * width)
+    if (from <= 0) return(0)
+    if (from >= reach) return(1)
+    key <- paste(c(left, shifted), collapse = " ")
+    if (is.null(known[[key]])) {
+      t <- from / reach
+      without <- function(i) {
+        one <- seq_along(width) == i
+        left[i] * (t * below(left - one, shifted) + (1 - t) * below(left - one, shifted + one))
+      }
+      known[[key]] <- sum(vapply(which(left > 0), without, numeric(1))) / sum(left)
+    }
+    known[[key]]
   }
-  each <- vapply(distinct, function(width) t * without(width, x) + (1 - t) * without(width, x - width), numeric(1))
-  sum(each * vapply(distinct, function(width) mean(widths == width), numeric(1)))
+  below(tabulate(match(widths, width)), rep(0, length(width)))
 }
 
 # Half-width that holds 95 percent of the summed rounding errors, each within half a unit of its printed share.
