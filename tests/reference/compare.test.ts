@@ -16,7 +16,7 @@ describe('an answer that agrees', () => {
       figures: 5,
       faults: [],
       worst: { relative: 0, at: 'se' },
-      bySize: 0,
+      bySize: { count: 0, largest: 0 },
     });
   });
 
@@ -32,7 +32,9 @@ describe('an answer that agrees', () => {
   });
 
   test('counts a number near 0 that only the absolute part lets through', () => {
-    expect(compare({ a: 3e-13 }, { a: 1e-13 }, figure)).toMatchObject({ faults: [], bySize: 1, worst: null });
+    const { faults, bySize, worst } = compare({ a: 3e-13, b: 5 }, { a: 1e-13, b: 5 }, figure);
+    expect([faults, bySize.count, worst]).toEqual([[], 1, { relative: 0, at: 'b' }]);
+    expect(bySize.largest).toBeCloseTo(2e-13, 20);
   });
 });
 
@@ -97,7 +99,7 @@ describe('the table of tolerances', () => {
 test('several comparisons add up, and the worst of all is kept', () => {
   const parts = [compare(1, 1, figure), compare(1 + 1e-10, 1, figure), compare(2, 1, figure)];
   const sum = combine(parts);
-  expect(sum).toMatchObject({ figures: 3, bySize: 0 });
+  expect(sum).toMatchObject({ figures: 3, bySize: { count: 0 } });
   expect(sum.faults).toHaveLength(1);
   expect(sum.worst?.relative).toBeCloseTo(1e-10, 15);
 });

@@ -9,11 +9,11 @@ export type Comparison = {
   readonly faults: readonly string[];
   /** The largest relative error among the numbers that agree by part of themselves. */
   readonly worst: { readonly relative: number; readonly at: string } | null;
-  /** Numbers so near 0 that only the absolute part of their tolerance lets them agree. */
-  readonly bySize: number;
+  /** Numbers so near 0 that only the absolute part of their tolerance lets them agree, and how far off at most. */
+  readonly bySize: { readonly count: number; readonly largest: number };
 };
 
-const nothing: Comparison = { figures: 0, faults: [], worst: null, bySize: 0 };
+export const nothing: Comparison = { figures: 0, faults: [], worst: null, bySize: { count: 0, largest: 0 } };
 
 /**
  * Holds an answer against what is expected, at every depth. Lists must be equally long, null is no number, and a
@@ -58,7 +58,9 @@ function compareNumbers(given: unknown, wanted: number, tolerance: Tolerance | n
   const error = difference === 0 ? 0 : difference / Math.abs(wanted);
   if (error <= relative) return { ...nothing, figures: 1, worst: { relative: error, at } };
   const isNearZero = Math.abs(given) < vanishing && Math.abs(wanted) < vanishing;
-  if (difference <= absolute || isNearZero) return { ...nothing, figures: 1, bySize: 1 };
+  if (difference <= absolute || isNearZero) {
+    return { ...nothing, figures: 1, bySize: { count: 1, largest: difference } };
+  }
   return failed(`${at}: ${given} instead of ${wanted}, off by ${error.toExponential(1)} of it`);
 }
 
@@ -69,7 +71,10 @@ export function combine(parts: readonly Comparison[]): Comparison {
       figures: sum.figures + one.figures,
       faults: one.faults.length === 0 ? sum.faults : [...sum.faults, ...one.faults],
       worst: !sum.worst || (one.worst && one.worst.relative > sum.worst.relative) ? one.worst : sum.worst,
-      bySize: sum.bySize + one.bySize,
+      bySize: {
+        count: sum.bySize.count + one.bySize.count,
+        largest: Math.max(sum.bySize.largest, one.bySize.largest),
+      },
     }),
     nothing,
   );

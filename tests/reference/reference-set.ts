@@ -7,6 +7,9 @@ import type { ReadTable, Table } from './entry';
 /** The project's own copy. */
 export const ownSet = fileURLToPath(new URL('.', import.meta.url));
 
+/** The R script's record of its own checks, left beside the cases it made. */
+const NO_CASES = 'verification.json';
+
 const FOLDERS = ['engine', 'findings'] as const;
 
 /** A file of a reference set: `name` is `lead_one_sample`, `path` `engine/lead_one_sample.json`. */
@@ -19,7 +22,7 @@ export type ReferenceCase = { readonly id: string; readonly input: unknown; read
 export function listFiles(set: string): ReferenceFile[] {
   return FOLDERS.filter((folder) => existsSync(join(set, folder))).flatMap((folder) =>
     readdirSync(join(set, folder))
-      .filter((file) => file.endsWith('.json'))
+      .filter((file) => file.endsWith('.json') && file !== NO_CASES)
       .sort()
       .map((file) => ({ name: file.slice(0, -'.json'.length), path: `${folder}/${file}` })),
   );

@@ -12,7 +12,7 @@ export function printFile(report: FileReport): string {
     `${figures} figures`.padStart(15),
     `  worst relative error ${worst ? printError(worst.relative) : 'none'}`,
     worst && worst.relative > 0 ? ` (${worst.at})` : '',
-    bySize > 0 ? `; ${bySize} near 0 by size` : '',
+    bySize.count > 0 ? `; ${bySize.count} near 0, off by at most ${printError(bySize.largest)}` : '',
   ].join('');
   const more = faults.length - MOST_FAULTS;
   const shown = faults.slice(0, MOST_FAULTS).map((fault) => `  FAILED ${fault}`);

@@ -1,4 +1,4 @@
-import { combine, compare, type Comparison } from './compare';
+import { combine, compare, nothing, type Comparison } from './compare';
 import type { Entry, Figures, ReadTable } from './entry';
 import { readCases, type ReferenceCase, type ReferenceFile } from './reference-set';
 import { toleranceOf } from './tolerances';
@@ -9,7 +9,7 @@ export type FileReport = {
   readonly failedCases: number;
   readonly figures: number;
   readonly worst: Comparison['worst'];
-  readonly bySize: number;
+  readonly bySize: Comparison['bySize'];
   /** One line for every fault, beginning with the case where it is one case's. */
   readonly faults: readonly string[];
 };
@@ -47,13 +47,13 @@ function runCase(one: ReferenceCase, file: ReferenceFile, run: Entry, readTable:
     const worst = result.worst && { ...result.worst, at: `${one.id} ${result.worst.at}` };
     return { ...result, worst, faults: result.faults.map(named) };
   } catch (error) {
-    return { figures: 0, faults: [named(`threw ${messageOf(error)}`)], worst: null, bySize: 0 };
+    return { ...nothing, faults: [named(`threw ${messageOf(error)}`)] };
   }
 }
 
 /** A file that fails as a whole: none of its cases was run. */
 export function faulty(path: string, fault: string): FileReport {
-  return { path, cases: 0, failedCases: 0, figures: 0, worst: null, bySize: 0, faults: [fault] };
+  return { path, cases: 0, failedCases: 0, ...nothing, faults: [fault] };
 }
 
 function messageOf(error: unknown): string {
