@@ -1,22 +1,22 @@
 import { expect } from 'vitest';
-
-/** A figure of R must be met to this part of itself, or to this much where it is near 0 (see statistics in lib). */
-const RELATIVE = 1e-9;
-const ABSOLUTE = 1e-12;
+import { kinds } from '../reference/tolerances';
 
 /** Whether a number agrees with a reference figure to the accuracy asked of the engine. */
 export function agrees(actual: number, reference: number): boolean {
-  return Math.abs(actual - reference) <= Math.max(RELATIVE * Math.abs(reference), ABSOLUTE);
+  const { relative, absolute } = kinds.figure;
+  return Math.abs(actual - reference) <= Math.max(relative * Math.abs(reference), absolute);
 }
 
-/** Fails unless the number agrees; p-values are compared by part alone, however small. */
+/** Fails unless the number agrees. */
 export function expectFigure(actual: number, reference: number, what: string): void {
   expect(agrees(actual, reference), `${what}: ${actual} instead of ${reference}`).toBe(true);
 }
 
+/** Fails unless the p-value agrees by part of itself, however small. */
 export function expectP(actual: number, reference: number, what: string): void {
+  const { relative, vanishing } = kinds.pValue;
   const isClose =
-    Math.abs(actual - reference) <= RELATIVE * reference || (actual < 1e-300 && reference < 1e-300);
+    Math.abs(actual - reference) <= relative * reference || (actual < vanishing && reference < vanishing);
   expect(isClose, `${what}: ${actual} instead of ${reference}`).toBe(true);
 }
 
