@@ -1,18 +1,19 @@
 # Times and figures of svymean on a respondent file, by weights and by replicate weights. Arguments: a folder with
-# respondents.csv (answer, weight), and replicates.bin (doubles, one replicate after another) with their number.
+# respondents.csv (answer, weight) and replicates.bin (doubles, one respondent after another); number of replicates.
 suppressPackageStartupMessages(library(survey))
 folder <- commandArgs(TRUE)[1]
 replicates <- as.integer(commandArgs(TRUE)[2])
 rows <- read.csv(file.path(folder, "respondents.csv"))
 weights <- matrix(
   readBin(file.path(folder, "replicates.bin"), "double", n = nrow(rows) * replicates, endian = "little"),
-  nrow = nrow(rows)
+  nrow = nrow(rows), byrow = TRUE
 )
 median_seconds <- function(f, batches) {
   f()
   median(replicate(batches, system.time(f())[[3]]))
 }
-by_weights <- svydesign(ids = ~1, weights = ~weight, data = rows)
+design <- function() svydesign(ids = ~1, weights = ~weight, data = rows)
+by_weights <- design()
 by_replicates <- svrepdesign(
   data = rows, repweights = weights, weights = rows$weight, type = "bootstrap", combined.weights = TRUE,
   scale = 1 / replicates, rscales = 1, mse = TRUE, degf = replicates - 1
@@ -26,8 +27,8 @@ write.csv(
 )
 write.csv(
   format(data.frame(
-    name = c("weights", "replicates"),
-    seconds = c(median_seconds(linear, 11), median_seconds(replicate_mean, 7))
+    name = c("design", "weights", "replicates"),
+    seconds = c(median_seconds(design, 5), median_seconds(linear, 11), median_seconds(replicate_mean, 7))
   ), digits = 17),
   file.path(folder, "times.csv"), row.names = FALSE, quote = FALSE
 )

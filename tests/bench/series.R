@@ -6,9 +6,9 @@ daily <- as.numeric(commandArgs(TRUE)[2])
 error <- as.numeric(commandArgs(TRUE)[3])
 days <- read.csv(file.path(folder, "days.csv"))$y
 model <- list(
-  T = matrix(1), V = matrix(daily), h = error, Z = 1, a = 0, P = matrix(1e7), Pn = matrix(1e7)
+  T = matrix(1), V = matrix(daily), h = error, Z = 1, a = 0, P = matrix(1e4), Pn = matrix(1e4)
 )
-smooth <- KalmanSmooth(days, model, nit = -1L)
+smooth <- KalmanSmooth(days, model, nit = 0L)
 median_seconds <- function(f, per_batch, batches = 15) {
   f()
   median(replicate(batches, system.time(for (i in seq_len(per_batch)) f())[[3]] / per_batch))

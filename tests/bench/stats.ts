@@ -3,6 +3,8 @@ import { mkdtempSync, rmSync } from 'node:fs';
 import { cpus, tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { benchFindings, benchMemory } from './bench-findings';
+import { benchRespondents } from './bench-respondents';
+import { benchSeries } from './bench-series';
 import { ensureR, versionOfR } from './r';
 import { Report } from './report';
 
@@ -16,6 +18,8 @@ async function main(): Promise<number> {
   try {
     await benchFindings(report, folder);
     benchMemory(report);
+    await benchRespondents(report, folder);
+    await benchSeries(report, folder);
   } finally {
     rmSync(folder, { recursive: true, force: true });
   }
