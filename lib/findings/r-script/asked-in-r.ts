@@ -18,6 +18,17 @@ export type AskedInR = {
   breaking: 'breakingDeff' | 'breakingFactor';
   needs: readonly FunctionName[];
   secondNeeds: readonly FunctionName[];
+  /** What only some findings of a whole release have beside their test. */
+  further?: FurtherInR;
+};
+
+/** Code that a finding has beyond its test, and the lines that print what it computes. */
+export type FurtherInR = {
+  /** Printed whatever the verdict. */
+  output: string;
+  /** Computed and printed only where the finding cannot be tested. */
+  untested?: string;
+  untestedOutput?: string;
 };
 
 type TestableFinding = LeadFinding | ChangeFinding | LeadChangeFinding | ThresholdFinding;

@@ -15,7 +15,10 @@ critical_value <- function(alpha, df) {
 
 export const SHARES = String.raw`
 # A printed share: in whole units of its last decimal, so that equal figures differ by exactly 0, and as a proportion.
-share_units <- function(base, option) round(base$pct[match(option, base$options)] * 10^base$decimals)
+share_units <- function(base, option) {
+  units <- base$pct[match(option, base$options)] * 10^base$decimals
+  if (isTRUE(base$is_computed)) units else round(units)
+}
 proportion <- function(base, option) share_units(base, option) / (100 * 10^base$decimals)
 `;
 

@@ -1,17 +1,24 @@
 /** R functions for the questions that can be asked of printed shares, each with what its test needs. */
 
 export const QUESTION = String.raw`
+# Rounding units, in points, of the printed figures that make up a share.
+rounding_units <- function(base, option) {
+  if (is.null(base$rounding)) 10^-base$decimals else base$rounding[[match(option, base$options)]]
+}
+
 # A question: its bases, its options, the estimate as a signed sum of printed shares in points, its standard error
 # (proportions) with every base at the "chosen", "low" or "high" design effect, the smallest degrees of freedom
-# among its bases, and the decimals that each share in the estimate is printed with.
+# among its bases, and the rounding unit of each printed figure in the estimate.
 question <- function(bases, options, signs, base_of_share, se) {
   printed <- bases[base_of_share]
+  named <- rep_len(options, length(signs))
   decimals <- vapply(printed, function(base) base$decimals, numeric(1))
-  units <- mapply(share_units, printed, rep_len(options, length(signs)))
+  units <- mapply(share_units, printed, named)
   known_df <- unlist(lapply(bases, function(base) base$df))
   list(bases = bases, options = options,
        estimate_pp = sum(signs * units * 10^(max(decimals) - decimals)) / 10^max(decimals),
-       se = se, df = if (length(known_df) > 0) min(known_df), decimals = decimals)
+       se = se, df = if (length(known_df) > 0) min(known_df),
+       units_pp = unlist(mapply(rounding_units, printed, named, SIMPLIFY = FALSE)))
 }
 deff_at <- function(base, end) switch(end, chosen = base$deff, low = base$deff_range[1], high = base$deff_range[2])
 `;

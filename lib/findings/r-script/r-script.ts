@@ -1,12 +1,12 @@
 import type { Base, CheckAnswer, CheckDocument, Finding, Policy, ShareFinding } from '../check-types';
 import { ENGINE_VERSION } from '../engine-version';
 import { resolvePolicy } from '../policy';
-import { askInR, type AskedInR } from './asked-in-r';
+import { askInR } from './asked-in-r';
+import { findingScript } from './finding-script';
 import { functionsFor, type FunctionName } from './functions';
 import { rName, writeBase, writePolicy, type Labels } from './inputs';
 import { labelsOf } from './r-literal';
 import { assemble, type Section } from './assemble';
-import { TESTED_NEEDS, testedOutput, testedSections } from './tested';
 
 type Testable = Exclude<Finding, ShareFinding>;
 
@@ -32,31 +32,16 @@ export function rScript(document: CheckDocument, answer: CheckAnswer, findingInd
   const policy = resolvePolicy(document.policy);
   if (finding.kind === 'share') return shareScript(document.release, finding, policy, labels);
   const previous = isChange(finding) ? (document.previous ?? null) : null;
-  const asked = askInR(finding, labels);
-  const inputs = inputSections(document.release, previous, policy, labels);
-  const output = [
-    `show("kind", "${finding.kind}")`,
-    'show_base("base", release)',
-    ...(previous ? ['show_base("previousBase", previous)'] : []),
-  ];
-  if (finding.verdict === 'cannot-be-tested') {
-    return assemble({
-      words: asked.words,
-      engine: ENGINE_VERSION,
-      functions: functionsFor(['withDesignEffect', ...asked.needs, 'reasonsUntested', 'show']),
-      sections: [...inputs, untestedSection(asked)],
-      output: [...output, UNTESTED_OUTPUT].join('\n'),
-    });
-  }
   const family = answer.findings.flatMap((one) => (isOfFamily(one, finding) ? [one] : []));
-  const questions = family.map((one) => askInR(one, labels));
-  const needs = [...TESTED_NEEDS, ...asked.secondNeeds, ...questions.flatMap((one) => one.needs)];
-  return assemble({
-    words: asked.words,
-    engine: ENGINE_VERSION,
-    functions: functionsFor(['withDesignEffect', ...needs, 'show']),
-    sections: [...inputs, ...testedSections(asked, questions, family.indexOf(finding))],
-    output: [...output, testedOutput(asked)].join('\n'),
+  return findingScript({
+    kind: finding.kind,
+    asked: askInR(finding, labels),
+    family: family.map((one) => askInR(one, labels)),
+    place: family.indexOf(finding),
+    isTested: finding.verdict !== 'cannot-be-tested',
+    inputs: inputSections(document.release, previous, policy, labels),
+    needs: ['withDesignEffect'],
+    output: ['show_base("base", release)', ...(previous ? ['show_base("previousBase", previous)'] : [])],
   });
 }
 
@@ -104,20 +89,6 @@ function inputSections(release: Base, previous: Base | null, policy: Policy, lab
     },
   ];
 }
-
-function untestedSection({ call }: AskedInR): Section {
-  return {
-    title: 'What stands against a test',
-    code: `finding <- ${call}
-estimate_pp <- finding$estimate_pp
-reasons <- reasons_untested(finding, policy)
-stopifnot(length(reasons) > 0)`,
-  };
-}
-
-const UNTESTED_OUTPUT = `show("estimatePp", estimate_pp)
-show("verdict", "cannot-be-tested")
-show_list("reasons", reasons)`;
 
 function isChange({ kind }: Finding): boolean {
   return kind === 'change' || kind === 'lead-change';

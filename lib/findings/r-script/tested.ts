@@ -78,7 +78,7 @@ p_value <- family_p[rank]
 critical <- critical_value(own_alpha, finding$df)`;
 }
 
-const ROUNDING_CODE = 'rounding_pp <- rounding_allowance(10^-finding$decimals)';
+const ROUNDING_CODE = 'rounding_pp <- rounding_allowance(finding$units_pp)';
 
 function secondCode({ secondTests }: AskedInR): string {
   if (secondTests === '')
