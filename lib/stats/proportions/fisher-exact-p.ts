@@ -3,6 +3,8 @@ import { required } from '../require';
 
 /** Tables whose probability is this much above the observed one still count as equally rare (R's rule). */
 const AS_RARE = 1 + 1e-7;
+/** Smaller numbers are no longer held to all digits, and a product of them may stand still short of 0. */
+const LEAST_WEIGHT = 1e-307;
 
 /**
  * Fisher's exact test of two shares; two-sided, all tables at most as probable as the observed one.
@@ -16,7 +18,7 @@ const AS_RARE = 1 + 1e-7;
  * @param hits2 whole count in the second
  * @param n2 whole size of the second, at least hits2
  * @param alternative what the test looks for in first − second; two-sided unless said
- * @returns probability 0–1; 1 where only one table has these margins; 0 below about 1e-308
+ * @returns probability 0–1; 1 where only one table has these margins; 0 below about 1e-307
  * @throws RangeError `fisherExactP requires whole counts of at least 0, none above its sample`
  * @see R 4.2.2 `fisher.test(matrix(c(hits1, hits2, n1 - hits1, n2 - hits2), 2), alternative = alternative)`
  * @example
@@ -47,7 +49,7 @@ export function fisherExactP(
   return Math.min(1, sum(counted) / sum(weights));
 }
 
-/** Weights of all tables with these margins, by the first sample's count from `lowest` on; those of 0 are left out. */
+/** Weights of all tables with these margins, by the first sample's count from `lowest` on; those too small to hold are left out. */
 function weighTables(hits: number, n1: number, n2: number): { lowest: number; weights: number[] } {
   const least = Math.max(0, hits - n2);
   const most = Math.min(hits, n1);
@@ -56,13 +58,13 @@ function weighTables(hits: number, n1: number, n2: number): { lowest: number; we
   const above: number[] = [];
   for (let count = mode, weight = 1; count < most; count += 1) {
     weight *= ((hits - count) / (count + 1)) * ((n1 - count) / (n2 - hits + count + 1));
-    if (weight === 0) break;
+    if (weight < LEAST_WEIGHT) break;
     above.push(weight);
   }
   const below: number[] = [];
   for (let count = mode, weight = 1; count > least; count -= 1) {
     weight *= (count / (hits - count + 1)) * ((n2 - hits + count) / (n1 - count + 1));
-    if (weight === 0) break;
+    if (weight < LEAST_WEIGHT) break;
     below.push(weight);
   }
   return { lowest: mode - below.length, weights: [...below.reverse(), 1, ...above] };

@@ -1,6 +1,7 @@
 import type { Alternative } from '../distributions/alternative';
 import { zTest, type ZTest } from '../distributions/z-test';
 import { isInside, isPositive, required } from '../require';
+import { lessened } from './lessened';
 import { requireShares, type SampleShare } from './sample-share';
 
 const HALF_A_PERSON = 0.5;
@@ -16,7 +17,7 @@ const HALF_A_PERSON = 0.5;
  * @param p0 the share tested against, inside 0–1
  * @param alternative what the test looks for in x/n − p0
  * @param correction 'none', or 'continuity': |x − n·p0| is lessened by half a person, never below 0, also one-sided
- * @returns difference and standard error in proportions; the variance is never 0
+ * @returns difference (lessened if corrected) and standard error in proportions; the variance is never 0
  * @throws RangeError `oneProportionScoreTest requires n above 0`
  * @throws RangeError `oneProportionScoreTest requires x from 0 to n`
  * @throws RangeError `oneProportionScoreTest requires p0 inside 0 and 1`
@@ -35,10 +36,8 @@ export function oneProportionScoreTest(
   required(isPositive(n), 'oneProportionScoreTest', 'n above 0');
   required(x >= 0 && x <= n, 'oneProportionScoreTest', 'x from 0 to n');
   required(isInside(p0), 'oneProportionScoreTest', 'p0 inside 0 and 1');
-  const surplus = x - n * p0;
-  const lessened =
-    correction === 'none' ? surplus : Math.sign(surplus) * Math.max(0, Math.abs(surplus) - HALF_A_PERSON);
-  return zTest(lessened / n, Math.sqrt((p0 * (1 - p0)) / n), alternative);
+  const surplus = lessened(x - n * p0, correction === 'none' ? 0 : HALF_A_PERSON);
+  return zTest(surplus / n, Math.sqrt((p0 * (1 - p0)) / n), alternative);
 }
 
 /**

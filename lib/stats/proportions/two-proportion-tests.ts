@@ -1,5 +1,6 @@
 import type { Alternative } from '../distributions/alternative';
 import { zTest, type ZTest } from '../distributions/z-test';
+import { lessened } from './lessened';
 import { pooledStandardError, shareStandardError } from './standard-errors';
 import { requireShares, type SampleShare } from './sample-share';
 
@@ -17,7 +18,7 @@ export type PooledTest = ZTest & { readonly pooled: number };
  * @param alternative what the test looks for in first − second
  * @param correction 'none', or 'continuity': the difference is lessened by half the sum of 1 / effective size, never
  *   below 0, also one-sided
- * @returns difference first − second; z and p null (kind 'no-variance') where both shares are 0 or both are 1
+ * @returns difference first − second, lessened if corrected; z and p null (kind 'no-variance') where both shares are 0 or both are 1
  * @throws RangeError `pooledTest requires p from 0 to 1`
  * @throws RangeError `pooledTest requires n and deff above 0`
  * @see R 4.2.2 `prop.test(c(x1, x2), c(n1, n2), alternative, correct = FALSE | TRUE)`, on effective counts
@@ -34,11 +35,10 @@ export function pooledTest(
   requireShares('pooledTest', first, second);
   const n1 = first.n / first.deff;
   const n2 = second.n / second.deff;
-  const difference = first.p - second.p;
   const allowance = correction === 'none' ? 0 : (1 / n1 + 1 / n2) / 2;
-  const lessened = Math.sign(difference) * Math.max(0, Math.abs(difference) - allowance);
+  const difference = lessened(first.p - second.p, allowance);
   return {
-    ...zTest(lessened, pooledStandardError(first.p, n1, second.p, n2), alternative),
+    ...zTest(difference, pooledStandardError(first.p, n1, second.p, n2), alternative),
     pooled: Math.min(1, (n1 * first.p + n2 * second.p) / (n1 + n2)),
   };
 }
