@@ -7,10 +7,11 @@ const MOST_STEPS = 200;
  * Bisection that takes the step of inverse quadratic interpolation wherever that is safe: never slower than
  * halving, and a handful of calls for a smooth function.
  *
- * @returns a point within a few units of its last place of the crossing
+ * @param tolerance how close is close enough, at least 0; a few units in the last place are always enough
+ * @returns a point that close to the crossing
  * @see Chandrupatla (1997), Advances in Engineering Software 28, 145–149 (from memory)
  */
-export function findRoot(f: (x: number) => number, from: number, to: number): number {
+export function findRoot(f: (x: number) => number, from: number, to: number, tolerance = 0): number {
   let [newest, opposite, older] = [to, from, from];
   let [atNewest, atOpposite] = [f(to), f(from)];
   let atOlder = atOpposite;
@@ -19,7 +20,7 @@ export function findRoot(f: (x: number) => number, from: number, to: number): nu
     const closest = Math.abs(atOpposite) < Math.abs(atNewest) ? opposite : newest;
     if (atNewest === 0 || atOpposite === 0) return closest;
     const width = Math.abs(opposite - newest);
-    const smallest = (2 * EPSILON * Math.abs(closest) + Number.MIN_VALUE) / width;
+    const smallest = (2 * EPSILON * Math.abs(closest) + tolerance / 2 + Number.MIN_VALUE) / width;
     if (smallest > 0.5) return closest;
     const next = newest + Math.min(1 - smallest, Math.max(smallest, part)) * (opposite - newest);
     const atNext = f(next);

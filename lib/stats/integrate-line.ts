@@ -1,5 +1,5 @@
 const NEGLIGIBLE = 1e-18;
-const SETTLED = 1e-8;
+const SETTLED = 1e-7;
 const MOST_HALVINGS = 14;
 const MOST_TERMS = 200_000;
 
@@ -7,7 +7,7 @@ const MOST_TERMS = 200_000;
  * The integral over the whole line of a smooth function with one hump that dies out exponentially on both sides.
  *
  * The plain trapezoidal rule is what converges fastest here: each halving of the step at least squares the error,
- * so that two sums that agree to 1e-8 leave an error below rounding.
+ * so that two sums that agree to 1e-7 leave an error below rounding.
  *
  * @param term never negative
  * @param start a point where the function is not negligible

@@ -3,7 +3,7 @@ import { normalQuantile } from '../distributions/normal-quantile';
 import { findRoot } from '../find-root';
 import type { Interval } from '../interval';
 import { isInside, isPositive, required } from '../require';
-import { leadUpperTail, type LeadDirichlet } from './lead-tail';
+import { leadUpperTail } from './lead-tail';
 import { probabilityLargest } from './probability-largest';
 
 export type LeadPosteriorQuestion = {
@@ -63,17 +63,18 @@ export function leadPosterior({ counts, deff, level, threshold }: LeadPosteriorQ
   const total = first + second + rest;
   const meanLead = (first - second) / total;
   const sdLead = Math.sqrt(((first + second) / total - meanLead ** 2) / (total + 1));
-  const dirichlet = { first, second, rest };
+  const exceeds = leadUpperTail({ first, second, rest });
   const tail = (1 - level) / 2;
+  const reach = -normalQuantile(tail) * sdLead;
   return {
     alpha,
-    firstAheadOfSecond: leadUpperTail(0, dirichlet),
-    leadOverThreshold: leadUpperTail(threshold, dirichlet),
+    firstAheadOfSecond: exceeds(0),
+    leadOverThreshold: exceeds(threshold),
     meanLead,
     sdLead,
     credibleLead: [
-      leadAt(1 - tail, meanLead - normalQuantile(1 - tail) * sdLead, sdLead, dirichlet),
-      leadAt(tail, meanLead + normalQuantile(1 - tail) * sdLead, sdLead, dirichlet),
+      leadAt(1 - tail, meanLead - reach, sdLead, exceeds),
+      leadAt(tail, meanLead + reach, sdLead, exceeds),
     ],
     largest: probabilityLargest(alpha),
     credibleFirstShare: [
@@ -84,15 +85,21 @@ export function leadPosterior({ counts, deff, level, threshold }: LeadPosteriorQ
 }
 
 const FIRST_BRACKET = 0.2;
+const CLOSE_ENOUGH = 1e-13;
 
 /** The lead that is exceeded with a probability, looked for around a guess in brackets that grow. */
-function leadAt(probability: number, guess: number, sd: number, dirichlet: LeadDirichlet): number {
-  const excess = (lead: number) => leadUpperTail(lead, dirichlet) - probability;
+function leadAt(probability: number, guess: number, sd: number, exceeds: (lead: number) => number): number {
+  const known = new Map<number, number>();
+  const excess = (lead: number) => {
+    const value = known.get(lead) ?? exceeds(lead) - probability;
+    known.set(lead, value);
+    return value;
+  };
   const middle = Math.min(1, Math.max(-1, guess));
   for (let half = FIRST_BRACKET * sd; half < 2; half *= 4) {
     const low = Math.max(-1, middle - half);
     const high = Math.min(1, middle + half);
-    if (excess(low) >= 0 && excess(high) <= 0) return findRoot(excess, low, high);
+    if (excess(low) >= 0 && excess(high) <= 0) return findRoot(excess, low, high, CLOSE_ENOUGH);
   }
-  return findRoot(excess, -1, 1);
+  return findRoot(excess, -1, 1, CLOSE_ENOUGH);
 }

@@ -7,22 +7,27 @@ export type LeadDirichlet = { first: number; second: number; rest: number };
 
 const FAR = 8;
 const WIDEST_STEP = 1;
-const STEP_IN_SD = 1.2;
+const STEP_IN_SD = 0.95;
 
 /**
- * Probability that the first share exceeds the second by more than a lead.
+ * For any lead, −1 to 1, the probability that the first share exceeds the second by more than it.
  *
  * The two together are S ~ Beta(first + second, rest), and the first one's part of them is Beta(first, second)
  * whatever S is. So the lead exceeds m where that part exceeds (1 + m/S)/2, integrated over S.
- *
- * @param lead inside −1 to 1
  */
-export function leadUpperTail(lead: number, dirichlet: LeadDirichlet): number {
+export function leadUpperTail(dirichlet: LeadDirichlet): (lead: number) => number {
   const { first, second, rest } = dirichlet;
-  if (lead < 0) return 1 - leadUpperTail(-lead, { first: second, second: first, rest });
+  const mirrored = { first: second, second: first, rest };
+  const all = rest === 0 ? 1 : overTogether(0, dirichlet, () => 1);
+  return (lead) => (lead < 0 ? 1 - tailAbove(-lead, mirrored, all) : tailAbove(lead, dirichlet, all));
+}
+
+function tailAbove(lead: number, dirichlet: LeadDirichlet, all: number): number {
+  if (lead >= 1) return 0;
+  const { first, second, rest } = dirichlet;
   if (rest === 0 || lead === 0) return betainc((1 - lead) / 2, second, first);
   const inside = (s: number, above: number) => betainc(above / (2 * s), second, first);
-  return Math.min(1, overTogether(lead, dirichlet, inside) / overTogether(0, dirichlet, () => 1));
+  return Math.min(1, overTogether(lead, dirichlet, inside) / all);
 }
 
 /**
