@@ -109,24 +109,6 @@ export { surveyDesign, type LonelyPsu, type SurveyColumns, type SurveyDesign } f
 export { weightedLead, type WeightedLead } from './samples/weighted-lead';
 export { weightedMean, type WeightedMean } from './samples/weighted-mean';
 export { weightedProportion, type WeightedProportion } from './samples/weighted-proportion';
-export type {
-  CertifiedResult,
-  HouseChoice,
-  HouseEffect,
-  HousePoll,
-  LevelChange,
-  LevelDays,
-  LevelPoll,
-  LevelSpan,
-  PlacePrediction,
-  PollPlace,
-} from './series/polls';
-export { smoothLevel, type KnownLevelOptions, type SmoothedLevel } from './series/smooth-level';
-export {
-  smoothLevelWithHouses,
-  type KnownHouseOptions,
-  type SmoothedLevelWithHouses,
-} from './series/smooth-level-with-houses';
 export { chiSquareUpperTail } from './waves/chi-square-upper-tail';
 export {
   homogeneityOfAnswers,
@@ -142,3 +124,37 @@ export {
 } from './waves/overlapping-averages';
 export type { PolledShare } from './waves/polls';
 export { trendOfShares, type ScoredShare, type ShareTrend } from './waves/trend-of-shares';
+export {
+  fitLevel,
+  type FitOptions,
+  type FitPoll,
+  type FittedLevel,
+  type LevelVariances,
+} from './series/fit-level';
+export { leftOutFit, leftOutPoll, type LeftOutPoll } from './series/left-out-poll';
+export { levelBands } from './series/level-bands';
+export type {
+  CertifiedResult,
+  HouseChoice,
+  HouseEffect,
+  HousePoll,
+  LevelChange,
+  LevelDays,
+  LevelPoll,
+  LevelSpan,
+  PlacePrediction,
+  PollPlace,
+} from './series/polls';
+export type { Sampling } from './series/sampling-variance';
+export { smoothLevel, type KnownLevelOptions, type SmoothedLevel } from './series/smooth-level';
+export {
+  smoothLevelWithHouses,
+  type KnownHouseOptions,
+  type SmoothedLevelWithHouses,
+} from './series/smooth-level-with-houses';
+export {
+  changeStandardError,
+  waveToWaveVariance,
+  type ChangeError,
+  type WaveToWave,
+} from './series/wave-to-wave';
