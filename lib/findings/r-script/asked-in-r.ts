@@ -1,4 +1,4 @@
-import type { ChangeFinding, LeadChangeFinding, LeadFinding, ThresholdFinding } from '../check-types';
+import type { Pair } from '../check-types';
 import type { FunctionName } from './functions';
 import { rName, type Labels } from './inputs';
 import { rNumber } from './r-literal';
@@ -31,31 +31,19 @@ export type FurtherInR = {
   untestedOutput?: string;
 };
 
-type TestableFinding = LeadFinding | ChangeFinding | LeadChangeFinding | ThresholdFinding;
+/** The variables that hold a later and an earlier base, or a group and what it is held against. */
+export type TwoVariables = { later: string; earlier: string };
 
-const SYMMETRIC = 'interval <- estimate + c(-1, 1) * margin';
+export const SYMMETRIC = 'interval <- estimate + c(-1, 1) * margin';
 
-/** The question behind a finding, in R. */
-export function askInR(finding: TestableFinding, labels: Labels): AskedInR {
-  switch (finding.kind) {
-    case 'lead':
-      return askLeadInR(finding, labels);
-    case 'change':
-      return askChangeInR(finding, labels);
-    case 'lead-change':
-      return askLeadChangeInR(finding, labels);
-    case 'threshold':
-      return askThresholdInR(finding, labels);
-  }
-}
-
-function askLeadInR({ pair }: LeadFinding, labels: Labels): AskedInR {
-  const [first, second] = pair.map((option) => rName(option, labels));
+/** A lead, or a net score, on the base in `release`. */
+export function leadInR(pair: Pair, labels: Labels, what = 'lead'): AskedInR {
+  const [first, second] = [rName(pair[0], labels), rName(pair[1], labels)];
   return {
-    words: `lead of ${first} over ${second}, one sample`,
+    words: `${what} of ${first} over ${second}, one sample`,
     call: `lead(release, ${first}, ${second})`,
     interval: SYMMETRIC,
-    secondTests: leadTests(`${first}`, `${second}`),
+    secondTests: leadTests(first, second),
     littleChanged: null,
     breaking: 'breakingDeff',
     needs: ['lead'],
@@ -77,29 +65,36 @@ if (is_below(release$n_eff * (a + b), 50)) {
 }`;
 }
 
-function askChangeInR({ option }: ChangeFinding, labels: Labels): AskedInR {
+/** The difference of one option's share between two independent bases. */
+export function changeInR(option: string, { later, earlier }: TwoVariables, labels: Labels): AskedInR {
   const name = rName(option, labels);
   return {
     words: `change of ${name} between two samples`,
-    call: `change(previous, release, ${name})`,
+    call: `change(${earlier}, ${later}, ${name})`,
     interval: SYMMETRIC,
-    secondTests: changeTests(name),
-    littleChanged: `# Little changed: two one-sided tests against the smaller of the margin of indifference and a fifth of the earlier
-# share, with rounding and the high design effects allowed for; only where no change is shown.
-one_sided <- critical_value(2 * (1 - policy$level), finding$df)
-reach <- abs(estimate_pp) + rounding_pp + 100 * one_sided * se_high
-little_changed <- verdict == "does-not-hold" && reach < min(policy$indifference_pp, 100 * p1 / 5)`,
+    secondTests: changeTests(name, { later, earlier }),
+    littleChanged: null,
     breaking: 'breakingFactor',
     needs: ['change'],
     secondNeeds: ['newcombe', 'fisher'],
   };
 }
 
-function changeTests(name: string): string {
-  return `p1 <- proportion(previous, ${name})
-p2 <- proportion(release, ${name})
-m1 <- previous$n_eff
-m2 <- release$n_eff
+/** Whether a change that is not shown is shown to be small. */
+export function littleChangedInR(option: string, labels: Labels): string {
+  return `# Little changed: two one-sided tests against the smaller of the margin of indifference and a fifth of the earlier
+# share, with rounding and the high design effects allowed for; only where no change is shown.
+one_sided <- critical_value(2 * (1 - policy$level), finding$df)
+reach <- abs(estimate_pp) + rounding_pp + 100 * one_sided * se_high
+fifth_pp <- 100 * proportion(previous, ${rName(option, labels)}) / 5
+little_changed <- verdict == "does-not-hold" && reach < min(policy$indifference_pp, fifth_pp)`;
+}
+
+function changeTests(name: string, { later, earlier }: TwoVariables): string {
+  return `p1 <- proportion(${earlier}, ${name})
+p2 <- proportion(${later}, ${name})
+m1 <- ${earlier}$n_eff
+m2 <- ${later}$n_eff
 
 # Pooled test: the variance as if both samples had one share, on effective counts.
 pooled <- (m1 * p1 + m2 * p2) / (m1 + m2)
@@ -117,10 +112,11 @@ if (any(is_below(counts, 10))) {
 }`;
 }
 
-function askLeadChangeInR({ pair }: LeadChangeFinding, labels: Labels): AskedInR {
-  const [first, second] = pair.map((option) => rName(option, labels));
+/** The change of a lead, or of a net score, between the bases in `previous` and `release`. */
+export function leadChangeInR(pair: Pair, labels: Labels, what = 'lead'): AskedInR {
+  const [first, second] = [rName(pair[0], labels), rName(pair[1], labels)];
   return {
-    words: `change of the lead of ${first} over ${second} between two samples`,
+    words: `change of the ${what} of ${first} over ${second} between two samples`,
     call: `lead_change(previous, release, ${first}, ${second})`,
     interval: SYMMETRIC,
     secondTests: '',
@@ -131,7 +127,8 @@ function askLeadChangeInR({ pair }: LeadChangeFinding, labels: Labels): AskedInR
   };
 }
 
-function askThresholdInR({ option, thresholdPct }: ThresholdFinding, labels: Labels): AskedInR {
+/** A share of the base in `release` against a fixed value in percent. */
+export function thresholdInR(option: string, thresholdPct: number, labels: Labels): AskedInR {
   const name = rName(option, labels);
   const pct = rNumber(thresholdPct);
   return {

@@ -1,7 +1,14 @@
 import type { Base, CheckAnswer, CheckDocument, Finding, Policy, ShareFinding } from '../check-types';
 import { ENGINE_VERSION } from '../engine-version';
 import { resolvePolicy } from '../policy';
-import { askInR } from './asked-in-r';
+import {
+  changeInR,
+  leadChangeInR,
+  leadInR,
+  littleChangedInR,
+  thresholdInR,
+  type AskedInR,
+} from './asked-in-r';
 import { findingScript } from './finding-script';
 import { functionsFor, type FunctionName } from './functions';
 import { rName, writeBase, writePolicy, type Labels } from './inputs';
@@ -88,6 +95,23 @@ function inputSections(release: Base, previous: Base | null, policy: Policy, lab
       ].join('\n'),
     },
   ];
+}
+
+/** The question behind a finding, in R. */
+function askInR(finding: Testable, labels: Labels): AskedInR {
+  switch (finding.kind) {
+    case 'lead':
+      return leadInR(finding.pair, labels);
+    case 'change':
+      return {
+        ...changeInR(finding.option, { later: 'release', earlier: 'previous' }, labels),
+        littleChanged: littleChangedInR(finding.option, labels),
+      };
+    case 'lead-change':
+      return leadChangeInR(finding.pair, labels);
+    case 'threshold':
+      return thresholdInR(finding.option, finding.thresholdPct, labels);
+  }
 }
 
 function isChange({ kind }: Finding): boolean {
