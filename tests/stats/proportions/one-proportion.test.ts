@@ -84,6 +84,24 @@ describe('the score test of a share', () => {
   });
 });
 
+describe('the exact binomial test of effective counts', () => {
+  test('doubles the smaller tail, which includes the count itself, and is at most 1', () => {
+    expectP(exactBinomialP(2, 4, 0.5), 1, 'middle');
+    expectP(exactBinomialP(0, 4, 0.5), 2 / 16, 'none');
+    expectP(exactBinomialP(4, 4, 0.5), 2 / 16, 'all');
+    expectP(exactBinomialP(3, 4, 0.5), 10 / 16, 'three of four');
+  });
+
+  test('is twice the smaller one-sided test for whole counts', () => {
+    fc.assert(
+      fc.property(counts, inside, ([x, n], p0) => {
+        const smaller = Math.min(binomialTestP(x, n, p0, 'less'), binomialTestP(x, n, p0, 'greater'));
+        expect(exactBinomialP(x, n, p0)).toBeCloseTo(Math.min(1, 2 * smaller), 10);
+      }),
+    );
+  });
+});
+
 describe('the exact binomial test', () => {
   test('counts every outcome at most as probable as the observed one', () => {
     fc.assert(
