@@ -8,7 +8,7 @@ import { restrictedMaximum } from './restricted-maximum';
 import { refuseSampling, samplingVariance, type Sampling } from './sampling-variance';
 import { daysOf } from './smooth-level';
 import { makeLevel, solveLevel, type Level } from './solve-level';
-import { bestNode, evaluateGrid, narrowGrid, wideGrid, zoom, type GridLikelihood } from './variance-grid';
+import { bestNode, evaluateGrid, narrowGrid, wideGrid, type GridLikelihood } from './variance-grid';
 
 /** A poll whose sampling error depends on the level, or is given; houses on every poll or on none. */
 export type FitPoll = {
@@ -33,10 +33,8 @@ export type FittedLevel = {
   readonly grid: readonly (LevelVariances & { readonly weight: number })[];
 };
 
-const STATE_SEARCH = 7;
-const EXTRA_SEARCH = 5;
-const STATE_STEPS = 11;
-const EXTRA_STEPS = 7;
+const SEARCH = { state: 7, extra: 5 };
+const STEPS = { state: 11, extra: 7 };
 const FEWEST_DAYS = 4;
 const FEWEST_SPARE = 3;
 const ENOUGH = 'observations on at least 4 days, at least 3 more of them than house effects and level';
@@ -147,9 +145,9 @@ function housesOf(fn: string, polls: readonly FitPoll[], options: FitOptions): H
 function findVariances(level: Level, polls: readonly FitPoll[]): GridLikelihood {
   const wide = evaluateGrid(level, wideGrid(level));
   resample(level, polls, wide);
-  const narrow = zoom(level, wide, STATE_SEARCH, EXTRA_SEARCH);
+  const narrow = evaluateGrid(level, narrowGrid(level, wide, SEARCH));
   resample(level, polls, narrow);
-  return evaluateGrid(level, narrowGrid(narrow, STATE_STEPS, EXTRA_STEPS));
+  return evaluateGrid(level, narrowGrid(level, narrow, STEPS));
 }
 
 /** Sets each poll's sampling variance at the smoothed level of its day, by the best variances of a grid. */

@@ -6,7 +6,9 @@ type Move = { readonly x: number; readonly y: number };
 
 const MOST_ROUNDS = 40;
 const SHRINK = 0.1;
-const PRECISE = 1e-4;
+/** In steps of the first stencil, which are about a standard error wide. */
+const PRECISE = 0.005;
+const AS_ZERO = 0.001;
 
 /**
  * The standard deviations with the largest restricted likelihood near a starting point, by Newton steps on a stencil
@@ -31,7 +33,7 @@ export function restrictedMaximum(level: Level, start: Sds, firstSteps: Sds): Sd
     extraSd = Math.abs(extraSd + move.y * scale * firstSteps.extraSd);
     if (Math.abs(move.x) < 1 && Math.abs(move.y) < 1) scale *= SHRINK;
   }
-  const settled = (sd: number, step: number) => (sd < 10 * PRECISE * step ? 0 : sd);
+  const settled = (sd: number, step: number) => (sd < AS_ZERO * step ? 0 : sd);
   return {
     stateSd: settled(stateSd, firstSteps.stateSd),
     extraSd: settled(extraSd, firstSteps.extraSd),

@@ -4,6 +4,8 @@ import { weighPolls } from './weigh-polls';
 /** Standard deviations, ascending, at which the restricted likelihood is looked at: of a day's step, and extra per poll. */
 export type VarianceGrid = { readonly stateSds: readonly number[]; readonly extraSds: readonly number[] };
 
+export type GridCounts = { readonly state: number; readonly extra: number };
+
 /** Log likelihoods of a grid, one row per extra standard deviation. */
 export type GridLikelihood = { readonly grid: VarianceGrid; readonly rows: readonly (readonly number[])[] };
 
@@ -11,8 +13,8 @@ const STEP = 4;
 const SMALL = 0.1;
 /** Below the maximum by more than this, a value of the profile has no weight that shows. */
 const NEGLIGIBLE = 7;
-const ENOUGH = 3;
-const MOST_ZOOMS = 8;
+const SPREAD = 2;
+const MOST_ROUNDS = 8;
 
 export function evaluateGrid(level: Level, grid: VarianceGrid): GridLikelihood {
   const rows = grid.extraSds.map((extraSd) => {
@@ -46,34 +48,26 @@ function geometric(smallest: number, largest: number): number[] {
   return [...values, largest];
 }
 
-/** The region of a grid that has weight, with one more step on either side, cut into equal steps. */
-export function narrowGrid(found: GridLikelihood, stateCount: number, extraCount: number): VarianceGrid {
-  const { stateProfile, extraProfile } = profiles(found);
-  const state = support(stateProfile);
-  const extra = support(extraProfile);
-  return {
-    stateSds: equalSteps(found.grid.stateSds, state, stateCount),
-    extraSds: equalSteps(found.grid.extraSds, extra, extraCount),
-  };
-}
-
-/** Narrows a grid until the weight spreads over most of it. */
-export function zoom(level: Level, found: GridLikelihood, stateCount: number, extraCount: number) {
-  let current = found;
-  for (let round = 0; round < MOST_ZOOMS; round += 1) {
-    current = evaluateGrid(level, narrowGrid(current, stateCount, extraCount));
-    const { stateProfile, extraProfile } = profiles(current);
-    const [firstState, lastState] = support(stateProfile);
-    const [firstExtra, lastExtra] = support(extraProfile);
-    if (lastState - firstState >= ENOUGH - 1 && lastExtra - firstExtra >= ENOUGH - 1) break;
+/**
+ * The region of a grid that has weight, cut into equal steps. It is narrowed one standard deviation at a time, the
+ * other held at its best, until the weight spreads over several steps of both.
+ */
+export function narrowGrid(level: Level, found: GridLikelihood, counts: GridCounts): VarianceGrid {
+  let { stateSds, extraSds } = found.grid;
+  let { stateSd, extraSd } = bestNode(found);
+  let isSpread = false;
+  for (let round = 0; round < MOST_ROUNDS && !isSpread; round += 1) {
+    const alongState = evaluateGrid(level, { stateSds, extraSds: [extraSd] });
+    ({ stateSd } = bestNode(alongState));
+    const alongExtra = evaluateGrid(level, { stateSds: [stateSd], extraSds });
+    ({ extraSd } = bestNode(alongExtra));
+    const [firstState, lastState] = support(alongState.rows.flat());
+    const [firstExtra, lastExtra] = support(alongExtra.rows.flat());
+    isSpread = round > 0 && lastState - firstState >= SPREAD && lastExtra - firstExtra >= SPREAD;
+    stateSds = equalSteps(stateSds, [firstState, lastState], counts.state);
+    extraSds = equalSteps(extraSds, [firstExtra, lastExtra], counts.extra);
   }
-  return current;
-}
-
-function profiles({ grid, rows }: GridLikelihood) {
-  const stateProfile = grid.stateSds.map((_, column) => Math.max(...rows.map((row) => row[column]!)));
-  const extraProfile = rows.map((row) => Math.max(...row));
-  return { stateProfile, extraProfile };
+  return { stateSds, extraSds };
 }
 
 function support(profile: readonly number[]): [first: number, last: number] {
