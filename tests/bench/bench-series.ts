@@ -2,7 +2,8 @@ import { writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { smoothLevel, smoothLevelWithHouses, type HousePoll } from '@/lib/stats';
 import { normalDraw, seeded } from '../simulation/random';
-import { growth, medianSeconds } from './measure';
+import { benchFit } from './bench-fit';
+import { growth, fastestSeconds } from './measure';
 import { readRows, readTimes, runR } from './r';
 import type { Report } from './report';
 
@@ -37,14 +38,16 @@ export async function benchSeries(report: Report, folder: string): Promise<void>
   });
 
   const times = readTimes(folder);
-  const plain = await medianSeconds(() => smoothLevel(polls, options));
-  const housed = await medianSeconds(() => smoothLevelWithHouses(polls, options), { time: 1000 });
+  const plain = await fastestSeconds(() => smoothLevel(polls, options));
+  const housed = await fastestSeconds(() => smoothLevelWithHouses(polls, options), { time: 1000 });
   report.title(`${polls.length} polls over ${DAYS} days`);
   report.time('level, variances known, no houses (filter, smoother, likelihood)', plain);
   report.time('R: KalmanSmooth over the days, polls averaged beforehand', times.get('KalmanSmooth') ?? 0);
   report.aim('ours over KalmanSmooth, no houses', plain / (times.get('KalmanSmooth') ?? 0), 5, 'at most');
   report.time(`level and ${HOUSES} house effects, variances known`, housed);
   report.say(`  ${HOUSES} houses cost ${(housed / plain).toFixed(1)} times the smoothing without`);
+  await benchFit(report, folder, { polls, days: DAYS, aDay: A_DAY, pollVariance: POLL_VARIANCE });
+  report.title('Growth of the series');
   await growthOfSeries(report);
 }
 

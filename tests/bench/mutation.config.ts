@@ -11,6 +11,7 @@ export default defineConfig({
     include: ['tests/{stats,findings,reference,published}/**/*.test.ts'],
     // The frozen engines are other code, and a simulation asks thousands of times what one test asks once.
     exclude: ['tests/findings/archive.test.ts', 'node_modules/**'],
+    isolate: false,
     testTimeout: 20_000,
     setupFiles: ['tests/support/setup.ts'],
   },

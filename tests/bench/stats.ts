@@ -16,6 +16,7 @@ async function main(): Promise<number> {
   );
   const folder = mkdtempSync(join(tmpdir(), 'leadline-bench-'));
   try {
+    report.say("Times are the fastest of many: ours by the clock, R's in processor time.");
     await benchFindings(report, folder);
     benchMemory(report);
     await benchRespondents(report, folder);
