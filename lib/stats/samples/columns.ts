@@ -18,10 +18,23 @@ export function sameLength(fn: string, name: string, column: ArrayLike<unknown>,
   }
 }
 
+/** A copy as numbers of one kind, into memory of the same length; what is not a number becomes NaN, never 0. */
+export function copyNumbers(column: Column, copy: Float64Array): Float64Array {
+  if (ArrayBuffer.isView(column)) {
+    copy.set(column);
+    return copy;
+  }
+  for (let row = 0; row < column.length; row += 1) {
+    const value: unknown = column[row];
+    copy[row] = typeof value === 'number' ? value : Number.NaN;
+  }
+  return copy;
+}
+
 /** A copy of the weights, each of them above 0. */
 export function readWeights(fn: string, weights: Column): Float64Array {
   if (weights.length === 0) refuse(fn, 'at least one respondent');
-  const copy = Float64Array.from(weights);
+  const copy = copyNumbers(weights, new Float64Array(weights.length));
   const faulty = copy.findIndex((weight) => !(weight >= LEAST_WEIGHT && weight <= LARGEST_WEIGHT));
   if (faulty >= 0) {
     const condition = `weights from ${LEAST_WEIGHT} to ${LARGEST_WEIGHT}`;

@@ -121,7 +121,7 @@ export function impliedDesignEffect(margin: number, n: number, level: number): n
  * @see closed form in R 4.2.2 `(margin / (qnorm((1 + level) / 2) * sqrt(0.25 / n)))^2`
  * @example
  * impliedDesignEffectRange(0.037, 1012, 0.95, 0.001).range; // => [1.4038..., 1.4818...]
- * impliedDesignEffectRange(0.037, 1012, 0.95, 0.001).effectiveN; // => 701.4...
+ * impliedDesignEffectRange(0.037, 1012, 0.95, 0.001).effectiveN; // => 701.5...
  */
 export function impliedDesignEffectRange(
   margin: number,

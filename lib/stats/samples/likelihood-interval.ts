@@ -18,7 +18,7 @@ const CLOSE_ENOUGH = 4e-16;
  * @see Rao and Scott (1984), Annals of Statistics 12, 46–60 (from memory), as in survey 4.1.1
  *   `svyciprop(method = "likelihood")`; checked against R 4.2.2 `uniroot` on the closed equation
  * @example
- * likelihoodInterval(0.5, 100, 1.959963984540054); // => [0.40295..., 0.59704...]
+ * likelihoodInterval(0.5, 100, 1.959963984540054); // => [0.402935..., 0.597064...]
  */
 export function likelihoodInterval(p: number, effectiveN: number, q: number): Interval {
   required(isInside(p), 'likelihoodInterval', 'p inside 0 and 1');

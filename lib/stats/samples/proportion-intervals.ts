@@ -57,7 +57,7 @@ export type ShareFigures = {
  * @see R 4.2.2, survey 4.1.1 `svyciprop` (mean, xlogit, asin, beta); Korn and Graubard (1998), Survey Methodology
  *   24, 193–201 (from memory); the cap as the presentation standard of NCHS (2017) asks (from memory)
  * @example
- * proportionIntervals({ p: 0.4, se: 0.02, n: 900, df: 58, level: 0.95 }).logitT; // => [0.36066..., 0.44064...]
+ * proportionIntervals({ p: 0.4, se: 0.02, n: 900, df: 58, level: 0.95 }).logitT; // => [0.360712..., 0.440617...]
  * proportionIntervals({ p: 0, se: 0, n: 900, df: 58, level: 0.95 }).wilson; // => null
  */
 export function proportionIntervals({ p, se, n, df, level }: ShareFigures): ProportionIntervals {

@@ -1,6 +1,7 @@
 import type { Column } from './columns';
-import { readWeights, refuse, sameLength } from './columns';
+import { copyNumbers, readWeights, refuse, sameLength } from './columns';
 import { replicateRank } from './replicate-rank';
+import { weightedSums } from './replicate-variance';
 
 export type ReplicateType = 'JK1' | 'JKn' | 'BRR' | 'Fay' | 'bootstrap' | 'subbootstrap';
 
@@ -105,27 +106,24 @@ function rowByRow(given: readonly Column[] | Float64Array, rows: number): Float6
   }
   if (given instanceof Float64Array) return given;
   const matrix = new Float64Array(rows * given.length);
+  const copy = new Float64Array(rows);
   given.forEach((column, replicate) => {
     sameLength(FN, `replicateWeights[${replicate}]`, column, rows);
-    for (let row = 0; row < rows; row += 1)
-      matrix[row * given.length + replicate] = column[row] ?? Number.NaN;
+    copyNumbers(column, copy).forEach((weight, row) => {
+      matrix[row * given.length + replicate] = weight;
+    });
   });
   return matrix;
 }
 
 function checkedSums(matrix: Float64Array, replicates: number): Float64Array {
-  const sums = new Float64Array(replicates);
-  for (let start = 0; start < matrix.length; start += replicates) {
-    for (let replicate = 0; replicate < replicates; replicate += 1) {
-      const weight = matrix[start + replicate] ?? Number.NaN;
-      if (!(weight >= 0 && weight <= LARGEST_WEIGHT)) {
-        const where = `replicate ${replicate} of respondent ${start / replicates}`;
-        refuse(FN, `replicate weights from 0 to ${LARGEST_WEIGHT}; ${where} is ${weight}`);
-      }
-      sums[replicate] = (sums[replicate] ?? 0) + weight;
-    }
+  for (let index = 0; index < matrix.length; index += 1) {
+    const weight = matrix[index] as number;
+    if (weight >= 0 && weight <= LARGEST_WEIGHT) continue;
+    const where = `replicate ${index % replicates} of respondent ${Math.floor(index / replicates)}`;
+    refuse(FN, `replicate weights from 0 to ${LARGEST_WEIGHT}; ${where} is ${weight}`);
   }
-  return sums;
+  return weightedSums(matrix, replicates, new Float64Array(matrix.length / replicates).fill(1));
 }
 
 function scaleOf({ type, scale, fayRho }: ReplicateColumns, replicates: number): number {
@@ -158,7 +156,9 @@ function rscalesOf({ type, rscales }: ReplicateColumns, replicates: number): Flo
   if (rscales === undefined && type === 'JKn') refuse(FN, 'rscales for JKn');
   const given = rscales ?? 1;
   const each =
-    typeof given === 'number' ? new Float64Array(replicates).fill(given) : Float64Array.from(given);
+    typeof given === 'number'
+      ? new Float64Array(replicates).fill(given)
+      : copyNumbers(given, new Float64Array(given.length));
   const usable = each.every((rscale) => rscale >= 0 && Number.isFinite(rscale));
   if (!(usable && each.length === replicates && each.some((rscale) => rscale > 0))) {
     refuse(FN, `rscales of at least 0, not all 0, one or one each of ${replicates} replicates`);

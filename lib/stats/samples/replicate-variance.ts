@@ -1,6 +1,8 @@
 import { refuse } from './columns';
 import type { ReplicateDesign } from './replicate-design';
 
+const BATCH = 4;
+
 /**
  * The variance of a weighted mean from its replicates: scale · Σ rscalesᵣ (θᵣ − centre)².
  *
@@ -19,9 +21,9 @@ export function replicateVariance(
   domain: Uint8Array | null,
   estimate: number,
 ): number {
-  const { replicates, scale, rscales, mse } = design;
-  const sums = domain === null ? design.sums : sumsIn(design, domain);
-  const thetas = weightedSums(design, values);
+  const { matrix, replicates, scale, rscales, mse } = design;
+  const sums = domain === null ? design.sums : weightedSums(matrix, replicates, Float64Array.from(domain));
+  const thetas = weightedSums(matrix, replicates, values);
   let mean = 0;
   let used = 0;
   for (let replicate = 0; replicate < replicates; replicate += 1) {
@@ -42,12 +44,28 @@ export function replicateVariance(
   return scale * squares;
 }
 
-/** Respondents whose value is 0 are passed over: their weights need not be read. */
-function weightedSums({ matrix, replicates, rows }: ReplicateDesign, values: Float64Array): Float64Array {
+/**
+ * Σ of value × replicate weight in each replicate. Respondents whose value is 0 are passed over; the rest are
+ * taken four at a time, always in the same order, so that equal inputs give equal sums to the last digit.
+ */
+export function weightedSums(
+  matrix: Float64Array,
+  replicates: number,
+  values: ArrayLike<number>,
+): Float64Array {
   const sums = new Float64Array(replicates);
-  for (let row = 0; row < rows; row += 1) {
+  const batch = new Int32Array(BATCH);
+  let filled = 0;
+  for (let row = 0; row < values.length; row += 1) {
+    if (values[row] === 0) continue;
+    batch[filled] = row;
+    filled += 1;
+    if (filled < BATCH) continue;
+    addFour(sums, matrix, batch, values);
+    filled = 0;
+  }
+  for (const row of batch.subarray(0, filled)) {
     const value = values[row] as number;
-    if (value === 0) continue;
     const start = row * replicates;
     for (let replicate = 0; replicate < replicates; replicate += 1) {
       sums[replicate] = (sums[replicate] as number) + value * (matrix[start + replicate] as number);
@@ -56,14 +74,19 @@ function weightedSums({ matrix, replicates, rows }: ReplicateDesign, values: Flo
   return sums;
 }
 
-function sumsIn({ matrix, replicates, rows }: ReplicateDesign, domain: Uint8Array): Float64Array {
-  const sums = new Float64Array(replicates);
-  for (let row = 0; row < rows; row += 1) {
-    if (domain[row] === 0) continue;
-    const start = row * replicates;
-    for (let replicate = 0; replicate < replicates; replicate += 1) {
-      sums[replicate] = (sums[replicate] as number) + (matrix[start + replicate] as number);
-    }
+function addFour(
+  sums: Float64Array,
+  matrix: Float64Array,
+  [first = 0, second = 0, third = 0, fourth = 0]: Int32Array,
+  values: ArrayLike<number>,
+): void {
+  const replicates = sums.length;
+  const [v1, v2] = [values[first] as number, values[second] as number];
+  const [v3, v4] = [values[third] as number, values[fourth] as number];
+  const [m1, m2, m3, m4] = [first * replicates, second * replicates, third * replicates, fourth * replicates];
+  for (let replicate = 0; replicate < replicates; replicate += 1) {
+    const one = v1 * (matrix[m1 + replicate] as number) + v2 * (matrix[m2 + replicate] as number);
+    const other = v3 * (matrix[m3 + replicate] as number) + v4 * (matrix[m4 + replicate] as number);
+    sums[replicate] = (sums[replicate] as number) + (one + other);
   }
-  return sums;
 }

@@ -1,9 +1,10 @@
 import type { Column } from './columns';
-import { refuse, sameLength } from './columns';
+import { copyNumbers, refuse, sameLength } from './columns';
 import { linearizedVariance } from './linearized-variance';
 import type { ReplicateDesign } from './replicate-design';
 import { replicateRank } from './replicate-rank';
 import { replicateVariance } from './replicate-variance';
+import { scratch } from './scratch';
 import type { LonelyPsu, SurveyDesign } from './survey-design';
 
 /** A sample as it was drawn, or as its replicate weights describe it. */
@@ -41,7 +42,7 @@ export type SampleMean = EstimateMethod & {
   readonly kishDeff: number;
 };
 
-/** A standard error this small beside the values themselves is what rounding leaves of 0. */
+/** A standard error this small beside the mean and the spread is what rounding leaves of 0. */
 const NO_VARIANCE = 1e-12;
 const LARGEST_VALUE = 1e100;
 
@@ -59,28 +60,32 @@ export function inDomain(fn: string, design: SampleDesign, domain: Domain | unde
   return members === design.rows ? null : mask;
 }
 
-/** The values of an outcome, 0 outside the domain, where they are not looked at. */
+/** A copy of an outcome in the memory given, 0 outside the domain, where it is not looked at. */
 export function readOutcome(
   fn: string,
   name: string,
   outcome: Column,
   domain: Uint8Array | null,
   isBinary: boolean,
-  rows: number,
+  memory: Float64Array,
 ): Float64Array {
-  sameLength(fn, name, outcome, rows);
-  const values = new Float64Array(rows);
-  for (let row = 0; row < rows; row += 1) {
-    if (domain !== null && domain[row] === 0) continue;
-    const value = outcome[row] ?? Number.NaN;
-    const usable = isBinary ? value === 0 || value === 1 : Math.abs(value) <= LARGEST_VALUE;
-    if (!usable) refuse(fn, `${isBinary ? '0 or 1' : 'a number'} as ${name}; ${name}[${row}] is ${value}`);
-    values[row] = value;
+  sameLength(fn, name, outcome, memory.length);
+  const values = copyNumbers(outcome, memory);
+  for (let row = 0; row < values.length; row += 1) {
+    const value = values[row] as number;
+    if (value === 0 || value === 1) {
+      if (domain !== null && domain[row] === 0) values[row] = 0;
+    } else if (domain !== null && domain[row] === 0) {
+      values[row] = 0;
+    } else if (isBinary || !(Math.abs(value) <= LARGEST_VALUE)) {
+      const given = String(outcome[row]);
+      refuse(fn, `${isBinary ? '0 or 1' : 'a number'} as ${name}; ${name}[${row}] is ${given}`);
+    }
   }
   return values;
 }
 
-/** The weighted mean of values already read, with its variance. */
+/** The weighted mean of values from `readOutcome`, which are used up, with its variance. */
 export function sampleMean(
   fn: string,
   design: SampleDesign,
@@ -88,29 +93,15 @@ export function sampleMean(
   domain: Uint8Array | null,
 ): SampleMean {
   const { weights } = design;
-  let n = 0;
-  let sumWeights = 0;
-  let sumSquares = 0;
-  let sumValues = 0;
-  let largest = 0;
-  for (let row = 0; row < design.rows; row += 1) {
-    if (domain !== null && domain[row] === 0) continue;
-    const weight = weights[row] as number;
-    const value = values[row] as number;
-    n += 1;
-    sumWeights += weight;
-    sumSquares += weight * weight;
-    sumValues += weight * value;
-    if (value > largest) largest = value;
-    else if (-value > largest) largest = -value;
-  }
+  const { n, sumWeights, sumSquares, sumValues } = weightedTotals(weights, values, domain);
   const estimate = sumValues / sumWeights;
-  const { totals, spread } = unitTotals(design, values, domain, estimate, sumWeights);
+  const replicated =
+    design.method === 'replicates' ? replicateVariance(fn, design, values, domain, estimate) : 0;
+  const spread = intoParts(weights, values, domain, estimate, sumWeights);
   const variance =
-    design.method === 'linearized'
-      ? linearizedVariance(design, totals)
-      : replicateVariance(fn, design, values, domain, estimate);
-  const se = Math.sqrt(variance) <= NO_VARIANCE * largest ? 0 : Math.sqrt(variance);
+    design.method === 'replicates' ? replicated : linearizedVariance(design, unitTotals(design, values));
+  const isNothing = Math.sqrt(variance) <= NO_VARIANCE * (Math.abs(estimate) + Math.sqrt(spread));
+  const se = isNothing ? 0 : Math.sqrt(variance);
   return {
     method: design.method,
     lonelyPsu: design.method === 'linearized' ? design.lonelyPsu : null,
@@ -124,28 +115,51 @@ export function sampleMean(
   };
 }
 
-/** Σ of wᵢ(yᵢ − mean)/Σw by sampling unit, and Σ of wᵢ(yᵢ − mean)²/Σw. */
-function unitTotals(
-  design: SampleDesign,
+/** How many respondents there are, Σw, Σw² and Σwy. */
+function weightedTotals(weights: Float64Array, values: Float64Array, domain: Uint8Array | null) {
+  let n = 0;
+  let sumWeights = 0;
+  let sumSquares = 0;
+  let sumValues = 0;
+  for (let row = 0; row < weights.length; row += 1) {
+    if (domain !== null && domain[row] === 0) continue;
+    const weight = weights[row] as number;
+    n += 1;
+    sumWeights += weight;
+    sumSquares += weight * weight;
+    sumValues += weight * (values[row] as number);
+  }
+  return { n, sumWeights, sumSquares, sumValues };
+}
+
+/** Puts wᵢ(yᵢ − mean)/Σw in the place of each value; gives Σ wᵢ(yᵢ − mean)²/Σw. */
+function intoParts(
+  weights: Float64Array,
   values: Float64Array,
   domain: Uint8Array | null,
   estimate: number,
   sumWeights: number,
-): { totals: Float64Array; spread: number } {
-  const { weights } = design;
-  const isLinearized = design.method === 'linearized';
-  const totals = new Float64Array(isLinearized ? design.stratumOfPsu.length : 0);
+): number {
   let spread = 0;
-  for (let row = 0; row < design.rows; row += 1) {
+  for (let row = 0; row < values.length; row += 1) {
     if (domain !== null && domain[row] === 0) continue;
     const deviation = (values[row] as number) - estimate;
     const part = ((weights[row] as number) * deviation) / sumWeights;
     spread += part * deviation;
-    if (!isLinearized) continue;
-    const psu = design.psuOfRow[row] as number;
-    totals[psu] = (totals[psu] as number) + part;
+    values[row] = part;
   }
-  return { totals, spread };
+  return spread;
+}
+
+function unitTotals(design: SurveyDesign, parts: Float64Array): Float64Array {
+  const { psuOfRow, stratumOfPsu } = design;
+  if (psuOfRow === null) return parts;
+  const totals = scratch(design, 'totals', stratumOfPsu.length).fill(0);
+  for (let row = 0; row < parts.length; row += 1) {
+    const psu = psuOfRow[row] as number;
+    totals[psu] = (totals[psu] as number) + (parts[row] as number);
+  }
+  return totals;
 }
 
 /** Degrees of freedom counted in the domain: its units less its strata, or the rank of its replicates less 1. */
@@ -153,10 +167,18 @@ function domainDf(design: SampleDesign, domain: Uint8Array): number {
   if (design.method === 'replicates') {
     return design.dfStated ? design.df : replicateRank(design.matrix, design.replicates, domain) - 1;
   }
-  const psus = new Uint8Array(design.stratumOfPsu.length);
-  domain.forEach((inside, row) => {
-    if (inside === 1) psus[design.psuOfRow[row] as number] = 1;
-  });
-  const strata = new Set(design.stratumOfPsu.filter((_, psu) => psus[psu] === 1));
-  return psus.reduce((sum, used) => sum + used, 0) - strata.size;
+  const { psuOfRow, stratumOfPsu, psusInStratum } = design;
+  const psus = new Uint8Array(stratumOfPsu.length);
+  const strata = new Uint8Array(psusInStratum.length);
+  let df = 0;
+  for (let row = 0; row < domain.length; row += 1) {
+    if (domain[row] === 0) continue;
+    const psu = psuOfRow === null ? row : (psuOfRow[row] as number);
+    const stratum = stratumOfPsu[psu] as number;
+    if (psus[psu] === 0) df += 1;
+    if (strata[stratum] === 0) df -= 1;
+    psus[psu] = 1;
+    strata[stratum] = 1;
+  }
+  return df;
 }

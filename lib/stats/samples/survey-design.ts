@@ -18,8 +18,8 @@ export type SurveyDesign = {
   readonly method: 'linearized';
   readonly rows: number;
   readonly weights: Float64Array;
-  /** For each respondent the number of the primary sampling unit, for each unit that of its stratum. */
-  readonly psuOfRow: Int32Array;
+  /** For each respondent the number of the primary sampling unit; null where every respondent is one. */
+  readonly psuOfRow: Int32Array | null;
   readonly stratumOfPsu: Int32Array;
   readonly psusInStratum: Int32Array;
   /** For each stratum 1 − units in the sample / units in the population; 1 where no size is stated. */
@@ -87,6 +87,7 @@ export function surveyDesign(columns: SurveyColumns): SurveyDesign {
   });
 }
 
+type Units = Pick<SurveyDesign, 'psuOfRow' | 'stratumOfPsu'>;
 type Strata = { indices: Int32Array; names: readonly (string | number)[] };
 
 function stratumOfRows(stratum: Labels | undefined, rows: number): Strata {
@@ -95,11 +96,7 @@ function stratumOfRows(stratum: Labels | undefined, rows: number): Strata {
   return readLabels(FN, 'stratum', stratum);
 }
 
-function unitsOfRows(
-  { psu, nest = false }: SurveyColumns,
-  strata: Strata,
-  rows: number,
-): { psuOfRow: Int32Array; stratumOfPsu: Int32Array } {
+function unitsOfRows({ psu, nest = false }: SurveyColumns, strata: Strata, rows: number): Units {
   if (!psu)
     return { psuOfRow: Int32Array.from({ length: rows }, (_, row) => row), stratumOfPsu: strata.indices };
   sameLength(FN, 'psu', psu, rows);
@@ -108,7 +105,7 @@ function unitsOfRows(
 }
 
 /** Units that are numbered through the whole sample: none may lie in two strata. */
-function wholeUnits(units: Strata, strata: Strata): { psuOfRow: Int32Array; stratumOfPsu: Int32Array } {
+function wholeUnits(units: Strata, strata: Strata): Units {
   const stratumOfPsu = new Int32Array(units.names.length).fill(-1);
   units.indices.forEach((unit, row) => {
     const stratum = strata.indices[row] ?? 0;
@@ -123,7 +120,7 @@ function wholeUnits(units: Strata, strata: Strata): { psuOfRow: Int32Array; stra
 }
 
 /** Units that are numbered anew in each stratum: a pair of stratum and number is one unit. */
-function nestedUnits(units: Strata, strata: Strata): { psuOfRow: Int32Array; stratumOfPsu: Int32Array } {
+function nestedUnits(units: Strata, strata: Strata): Units {
   const known = new Map<number, number>();
   const stratumOfPsu: number[] = [];
   const psuOfRow = units.indices.map((unit, row) => {

@@ -6,6 +6,7 @@ import type { MeanIntervals } from './mean-intervals';
 import { meanIntervals } from './mean-intervals';
 import type { EstimateOptions, SampleDesign, SampleMean } from './sample-mean';
 import { inDomain, readOutcome, sampleMean } from './sample-mean';
+import { scratch } from './scratch';
 
 export type WeightedLead = SampleMean & {
   /** Weighted share of the first outcome. */
@@ -55,8 +56,8 @@ export function weightedLead(
 ): WeightedLead {
   required(isInside(level), FN, 'level inside 0 and 1');
   const members = inDomain(FN, design, domain);
-  const values = readOutcome(FN, 'first', first, members, true, design.rows);
-  const others = readOutcome(FN, 'second', second, members, true, design.rows);
+  const values = readOutcome(FN, 'first', first, members, true, scratch(design, 'values', design.rows));
+  const others = readOutcome(FN, 'second', second, members, true, scratch(design, 'others', design.rows));
   let ahead = 0;
   let behind = 0;
   for (let row = 0; row < design.rows; row += 1) {

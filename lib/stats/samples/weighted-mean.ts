@@ -4,6 +4,7 @@ import type { MeanIntervals } from './mean-intervals';
 import { meanIntervals } from './mean-intervals';
 import type { EstimateOptions, SampleDesign, SampleMean } from './sample-mean';
 import { inDomain, readOutcome, sampleMean } from './sample-mean';
+import { scratch } from './scratch';
 
 export type WeightedMean = SampleMean & {
   readonly level: number;
@@ -41,11 +42,8 @@ export function weightedMean(
 ): WeightedMean {
   required(isInside(level), FN, 'level inside 0 and 1');
   const members = inDomain(FN, design, domain);
-  const mean = sampleMean(
-    FN,
-    design,
-    readOutcome(FN, 'values', values, members, false, design.rows),
-    members,
-  );
+  const memory = scratch(design, 'values', design.rows);
+  const copy = readOutcome(FN, 'values', values, members, false, memory);
+  const mean = sampleMean(FN, design, copy, members);
   return { ...mean, level, ci: meanIntervals(mean.estimate, mean.se, mean.df, level) };
 }

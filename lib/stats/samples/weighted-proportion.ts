@@ -4,6 +4,7 @@ import type { ProportionIntervals } from './proportion-intervals';
 import { proportionIntervals } from './proportion-intervals';
 import type { EstimateOptions, SampleDesign, SampleMean } from './sample-mean';
 import { inDomain, readOutcome, sampleMean } from './sample-mean';
+import { scratch } from './scratch';
 
 export type WeightedProportion = SampleMean & {
   /** Size of a simple random sample with the same variance, p(1 − p)/se²; null where there is no variance. */
@@ -49,7 +50,7 @@ export function weightedProportion(
 ): WeightedProportion {
   required(isInside(level), FN, 'level inside 0 and 1');
   const members = inDomain(FN, design, domain);
-  const values = readOutcome(FN, 'outcome', outcome, members, true, design.rows);
+  const values = readOutcome(FN, 'outcome', outcome, members, true, scratch(design, 'values', design.rows));
   const mean = sampleMean(FN, design, values, members);
   const { estimate: p, se, n, df } = mean;
   return {
