@@ -3,7 +3,7 @@ import * as z from 'zod';
 /** The form of a check document: keys, kinds and the range of each single field. What joins fields comes after. */
 
 const NUMBER = 'Enter a number.';
-const number = z.number({ error: NUMBER });
+export const number = z.number({ error: NUMBER });
 
 const level = number.refine((value) => value > 0.5 && value < 1, {
   error: 'A level lies between 0.5 and 1, such as 0.95.',
@@ -11,7 +11,7 @@ const level = number.refine((value) => value > 0.5 && value < 1, {
 const deffValue = number.refine((value) => value >= 0.5 && value <= 10, {
   error: 'A design effect lies from 0.5 to 10.',
 });
-const wholeFrom = (least: number, error: string) =>
+export const wholeFrom = (least: number, error: string) =>
   number.refine((value) => Number.isInteger(value) && value >= least, { error });
 
 const statedInterval = z.strictObject({
@@ -32,7 +32,7 @@ const deff = z.strictObject({
   df: wholeFrom(1, 'Degrees of freedom are a whole number of at least 1.').optional(),
 });
 
-const option = z.string({ error: 'An option needs its name.' });
+export const option = z.string({ error: 'An option needs its name.' });
 
 const share = z.strictObject({
   option,
@@ -42,7 +42,7 @@ const share = z.strictObject({
   answer: z.boolean({ error: 'answer is true or false.' }).optional(),
 });
 
-const base = z.strictObject({
+export const base = z.strictObject({
   sampleSource: z.enum(['probability', 'quota', 'opt-in', 'blended', 'unknown'], {
     error: 'The sample source is probability, quota, opt-in, blended or unknown.',
   }),
@@ -64,7 +64,7 @@ const base = z.strictObject({
 const range = z.tuple([number, number], { error: 'A range has a low and a high end.' });
 const assumed = z.strictObject({ value: deffValue, range });
 
-const policy = z.strictObject({
+export const policy = z.strictObject({
   level: level.optional(),
   assumed: z
     .strictObject({
@@ -83,7 +83,7 @@ const policy = z.strictObject({
     .optional(),
 });
 
-const threshold = z.strictObject({
+export const threshold = z.strictObject({
   option,
   pct: number.refine((value) => value > 0 && value < 100, {
     error: 'A threshold lies between 0 and 100 percent.',

@@ -8,11 +8,11 @@ import { basisOf, impliedByMargin, LARGEST_IMPLIED_DEFF, usesStatedMargin } from
  * Refuses a base whose fields do not fit each other.
  *
  * @param base of the right form
- * @param path `release` or `previous`
+ * @param path of the base, such as `release`
  * @param policy the desk's policy, complete
  * @throws CheckRefused with the path of the field
  */
-export function refuseFaultyBase(base: Base, path: 'release' | 'previous', policy: Policy): void {
+export function refuseFaultyBase(base: Base, path: string, policy: Policy): void {
   refuseFaultyShares(base, path);
   if (base.deff?.df !== undefined && base.deff.source !== 'design') {
     throw new CheckRefused(

@@ -1,7 +1,7 @@
 import { CheckRefused } from './check-refused';
 import type { CheckDocument, Pair } from './check-types';
 
-const UNKNOWN_OPTION = 'This option is not in the release.';
+export const UNKNOWN_OPTION = 'This option is not in the release.';
 const REPEATED = 'This is asked already.';
 
 /**
@@ -28,7 +28,8 @@ export function refuseFaultyQuestions(document: CheckDocument): void {
   });
 }
 
-function refuseFaultyPairs(pairs: readonly Pair[], options: ReadonlySet<string>): void {
+/** Refuses pairs of unknown names, of one name, or asked twice in either order. */
+export function refuseFaultyPairs(pairs: readonly Pair[], options: ReadonlySet<string>): void {
   const asked = new Set<string>();
   pairs.forEach((pair, index) => {
     pair.forEach((option, place) => {
@@ -41,7 +42,8 @@ function refuseFaultyPairs(pairs: readonly Pair[], options: ReadonlySet<string>)
   });
 }
 
-function refuseRepeated(asked: Set<string>, key: string, path: string): void {
+/** Refuses what was asked before, and keeps note of it. */
+export function refuseRepeated(asked: Set<string>, key: string, path: string): void {
   if (asked.has(key)) throw new CheckRefused(path, REPEATED);
   asked.add(key);
 }

@@ -3,12 +3,14 @@ import type { Base, BaseAnswer, DeffSource, Policy } from './check-types';
 import { figure, figures, type WorkingStep } from './working-step';
 
 /** Which base a step is about, where there are two. */
-export type BaseRole = 'only' | 'this' | 'earlier';
+export type BaseRole = 'only' | 'this' | 'earlier' | 'group' | 'against';
 
 export const ROLE_SUFFIX: Record<BaseRole, string> = {
   only: '',
   this: ', this release',
   earlier: ', earlier release',
+  group: ', first group',
+  against: ', second group',
 };
 
 const SOURCE_WORDS: Record<Exclude<DeffSource, 'implied'>, [formula: string, given: string]> = {

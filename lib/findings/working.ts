@@ -1,6 +1,5 @@
-import { criticalAt } from './critical-at';
-import { readBase, type BaseFigures } from './base-figures';
-import type { CheckAnswer, CheckDocument, Finding, Policy, TestableFinding, TestFields } from './check-types';
+import { readBase, unitsOf, type BaseFigures } from './base-figures';
+import type { CheckAnswer, CheckDocument, Finding, Policy, TestableFinding } from './check-types';
 import { measureChange, type SampledBase } from './measure-change';
 import { measureLead } from './measure-lead';
 import { measureLeadChange } from './measure-lead-change';
@@ -8,6 +7,7 @@ import { measureThreshold } from './measure-threshold';
 import type { Measured } from './measured';
 import { resolvePolicy } from './policy';
 import { baseSteps } from './working-base';
+import { breakingSteps, littleSteps } from './working-beside';
 import {
   writeChange,
   writeLead,
@@ -16,7 +16,7 @@ import {
   type EstimateWriting,
 } from './working-error';
 import { shareSteps } from './working-share';
-import { figure, yesOrNo, type WorkingStep } from './working-step';
+import type { WorkingStep } from './working-step';
 import { testSteps } from './working-test';
 import { untestedSteps } from './working-untested';
 import { verdictSteps } from './working-verdict';
@@ -53,8 +53,10 @@ export function working(document: CheckDocument, answer: CheckAnswer, findingInd
     ...bases,
     ...testSteps(measured, finding, writing, policy),
     ...verdictSteps(measured, finding, writing, policy),
-    ...breakingSteps(finding, finding, measured),
-    ...littleSteps(finding, measured, policy, previous),
+    ...breakingSteps(finding, measured),
+    ...(finding.kind === 'change' && previous
+      ? littleSteps(finding, measured, unitsOf(previous, finding.option) / 10 ** previous.decimals, policy)
+      : []),
   ];
 }
 
@@ -118,54 +120,4 @@ function retrace(
 function sampledOf(base: BaseFigures | null): SampledBase {
   if (!base?.sampled) throw new TypeError('working requires the document that the answer answers');
   return { base, sampled: base.sampled };
-}
-
-function breakingSteps(finding: TestableFinding, fields: TestFields, { df, bases }: Measured): WorkingStep[] {
-  const c = criticalAt(fields.alpha, df);
-  const ratio = fields.z === null ? null : `(${figure(Math.abs(fields.z))} / ${figure(c)})²`;
-  if ('breakingDeff' in finding && finding.breakingDeff !== null && ratio) {
-    const deff = bases[0]?.deff.value ?? 1;
-    return [
-      {
-        label: 'Design effect at which it would cease to be significant',
-        formula: 'd · (z / c)²',
-        substituted: `${figure(deff)} · ${ratio}`,
-        result: figure(finding.breakingDeff),
-        unit: '',
-      },
-    ];
-  }
-  if ('breakingFactor' in finding && finding.breakingFactor !== null && ratio) {
-    return [
-      {
-        label: 'Factor on both design effects at which it would cease to be significant',
-        formula: '(z / c)²',
-        substituted: ratio,
-        result: figure(finding.breakingFactor),
-        unit: '',
-      },
-    ];
-  }
-  return [];
-}
-
-function littleSteps(
-  finding: TestableFinding,
-  measured: Measured,
-  policy: Policy,
-  previous: BaseFigures | null,
-): WorkingStep[] {
-  if (finding.kind !== 'change' || finding.verdict !== 'does-not-hold' || !previous) return [];
-  const earlier = (previous.units.get(finding.option) ?? 0) / 10 ** previous.decimals;
-  const oneSided = criticalAt(2 * (1 - policy.level), measured.df);
-  const [size, high] = [Math.abs(finding.estimatePp), 100 * measured.standardError('high')];
-  return [
-    {
-      label: 'Little changed',
-      formula: '|p₂ − p₁| + r + q₁ · SE high < the smaller of the margin of indifference and p₁ / 5',
-      substituted: `${figure(size)} + ${figure(finding.roundingPp)} + ${figure(oneSided)} · ${figure(high)} < min(${figure(policy.indifferencePp)}, ${figure(earlier)} / 5)`,
-      result: yesOrNo(finding.littleChanged),
-      unit: '',
-    },
-  ];
 }
