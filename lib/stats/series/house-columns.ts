@@ -85,11 +85,16 @@ function filterColumns(arranged: Arranged, weighed: Weighed, gains: Gains, colum
   }
 }
 
-/** Rows sum to 0, so the diagonal is taken from the rest of its row, which loses no digits. */
+/**
+ * Makes the matrix symmetric; the row of the results lacks exact ones, so their column stands for it. Rows sum to 0,
+ * so the diagonal is taken from the rest of its row, which loses no digits.
+ */
 function balance(information: Float64Array, groups: number): void {
   for (let row = 0; row < groups; row += 1) {
     for (let column = 0; column < row; column += 1) {
-      const both = (information[row * groups + column]! + information[column * groups + row]!) / 2;
+      const above = information[column * groups + row]!;
+      const below = row === groups - 1 ? above : information[row * groups + column]!;
+      const both = (above + below) / 2;
       information[row * groups + column] = both;
       information[column * groups + row] = both;
     }

@@ -20,6 +20,7 @@ export function listHouses(
   choice: HouseChoice,
   days: LevelDays,
 ): HouseList {
+  required(polls.length > 0, fn, 'at least one poll');
   const seen = new Set<string>();
   for (const { house } of polls) {
     required(typeof house === 'string' && house !== '', fn, 'a house for every poll');
