@@ -12,7 +12,7 @@ import {
 import { verdictMarkdown, verdictTable } from './verdict-table';
 
 const SEED = 20_040_701;
-const DRAWS = 20_000;
+const DRAWS = 10_000;
 
 const draws = Number(process.argv.find((one) => one.startsWith('--draws='))?.slice(8) ?? DRAWS);
 if (!Number.isInteger(draws) || draws < 100) throw new RangeError('--draws requires a whole number from 100');

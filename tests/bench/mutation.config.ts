@@ -9,8 +9,9 @@ export default defineConfig({
   test: {
     environment: 'node',
     include: ['tests/{stats,findings,reference,published}/**/*.test.ts'],
-    // The frozen engines are other code, and a simulation asks thousands of times what one test asks once.
-    exclude: ['tests/findings/archive.test.ts', 'node_modules/**'],
+    // The frozen engines are other code; a command's own process runs the engine unchanged.
+    exclude: ['tests/findings/archive.test.ts', 'tests/reference/run-set.test.ts', 'node_modules/**'],
+    // One worker for all files, so that packages are loaded once for each change.
     isolate: false,
     testTimeout: 20_000,
     setupFiles: ['tests/support/setup.ts'],

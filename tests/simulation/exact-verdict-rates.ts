@@ -1,5 +1,5 @@
 import gammaln from '@stdlib/math-base-special-gammaln';
-import { printedLead, TWO_OPTIONS } from './printed-lead';
+import { leadPrinter, TWO_OPTIONS } from './printed-lead';
 
 /** Counts further out than this many standard deviations add less than 1e-14. */
 const REACH = 8;
@@ -14,26 +14,17 @@ export type ExactRates = { n: number; lead: number; holds: number; fragile: numb
 export function exactVerdictRates(n: number, lead: number): ExactRates {
   const rates = { n, lead, holds: 0, fragile: 0, plainPrinted: 0 };
   const part = (TWO_OPTIONS + lead) / 2 / TWO_OPTIONS;
-  for (const [printed, probability] of printedOutcomes(n, part)) {
-    const [a = 0, b = 0] = printed.split(' ').map((pct) => (Number(pct) * n) / 100);
-    const finding = printedLead({ n, deff: 1, knowledge: 'known' }, a, b).printed;
-    if (finding.verdict === 'holds') rates.holds += probability;
-    if (finding.verdict === 'fragile') rates.fragile += probability;
-    if (finding.p < finding.alpha) rates.plainPrinted += probability;
-  }
-  return rates;
-}
-
-/** Probability of each pair of printed whole percents. */
-function printedOutcomes(n: number, part: number): Map<string, number> {
-  const outcomes = new Map<string, number>();
+  const leadOf = leadPrinter({ n, deff: 1, knowledge: 'known' });
   for (const [sum, ofSum] of binomial(n, TWO_OPTIONS)) {
     for (const [first, ofFirst] of binomial(sum, part)) {
-      const key = `${Math.round((100 * first) / n)} ${Math.round((100 * (sum - first)) / n)}`;
-      outcomes.set(key, (outcomes.get(key) ?? 0) + ofSum * ofFirst);
+      const { verdict, p, alpha } = leadOf(first, sum - first).printed;
+      const probability = ofSum * ofFirst;
+      if (verdict === 'holds') rates.holds += probability;
+      if (verdict === 'fragile') rates.fragile += probability;
+      if (p < alpha) rates.plainPrinted += probability;
     }
   }
-  return outcomes;
+  return rates;
 }
 
 /** The likely counts of a binomial distribution with their probabilities. */

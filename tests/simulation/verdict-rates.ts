@@ -1,6 +1,6 @@
 import { criticalValue, leadStandardError } from '@/lib/stats';
 import { drawPoll } from './draws';
-import { printedLead, TWO_OPTIONS, type Knowledge } from './printed-lead';
+import { leadPrinter, TWO_OPTIONS, type Knowledge } from './printed-lead';
 import { rateOf, type Rate } from './rate';
 import { seeded } from './random';
 
@@ -28,13 +28,14 @@ export type VerdictRates = VerdictCase & {
 /** How often a lead gets each verdict at printed whole percents. */
 export function verdictRates(asked: VerdictCase, draws: number, seed: number): VerdictRates {
   const random = seeded(seed);
+  const leadOf = leadPrinter(asked);
   const critical = criticalValue(0.05, null);
   const first = (TWO_OPTIONS + asked.lead) / 2;
   const population = { shares: [first, first - asked.lead], deff: asked.deff };
   const hits = { holds: 0, fragile: 0, holdsWrongly: 0, plainPrinted: 0, plainUnrounded: 0 };
   for (let draw = 0; draw < draws; draw += 1) {
     const [a = 0, b = 0] = drawPoll(random, asked.n, population);
-    const { printed, deff } = printedLead(asked, a, b);
+    const { printed, deff } = leadOf(a, b);
     if (printed.verdict === 'holds') {
       hits.holds += 1;
       if (asked.lead === 0 || printed.estimatePp < 0) hits.holdsWrongly += 1;
