@@ -12,9 +12,7 @@ export type Figure = number | string | boolean | null | readonly Figure[] | Figu
 export type Entry = (input: Figures, readTable: ReadTable) => Figures;
 
 /** An entry whose input has the shape that the file's cases have; the figures are R's own, so no parsing is lost. */
-export function entry<Input extends object>(
-  map: (input: Input, readTable: ReadTable) => Figures,
-): Entry {
+export function entry<Input extends object>(map: (input: Input, readTable: ReadTable) => Figures): Entry {
   return (input, readTable) => map(input as unknown as Input, readTable);
 }
 
