@@ -2,7 +2,19 @@ import type { BaseAnswer, SecondTest } from '@/lib/findings/check-types';
 import type { Figure } from './compare';
 
 /** Names of a finding are in the script, not among its results; its working and trace are the engine's own. */
-const NOT_PRINTED = new Set(['option', 'pair', 'thresholdPct', 'bloc', 'key', 'working', 'trace']);
+const NOT_PRINTED = new Set([
+  'option',
+  'pair',
+  'question',
+  'groups',
+  'thresholdPct',
+  'bloc',
+  'key',
+  'working',
+  'trace',
+]);
+
+const SIDES = ['group', 'against'];
 
 type Answered = Readonly<Record<string, unknown>>;
 
@@ -14,7 +26,9 @@ export function expectedFigures(
   const figures = new Map<string, Figure>();
   for (const [name, base] of Object.entries(bases)) flatten(name, base, figures);
   for (const [name, value] of Object.entries(finding)) {
-    if (!NOT_PRINTED.has(name)) flatten(name, value, figures);
+    if (name === 'presentation' && Array.isArray(value)) {
+      SIDES.forEach((side, place) => flatten(`${name}.${side}`, value[place], figures));
+    } else if (!NOT_PRINTED.has(name)) flatten(name, value, figures);
   }
   return figures;
 }

@@ -25,7 +25,7 @@ export type AskedInR = {
 /** Code that a finding has beyond its test, and the lines that print what it computes. */
 export type FurtherInR = {
   /** Printed whatever the verdict. */
-  output: string;
+  output?: string;
   /** Computed and printed only where the finding cannot be tested. */
   untested?: string;
   untestedOutput?: string;

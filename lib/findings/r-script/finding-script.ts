@@ -2,6 +2,7 @@ import { ENGINE_VERSION } from '../engine-version';
 import { assemble, type Section } from './assemble';
 import type { AskedInR } from './asked-in-r';
 import { functionsFor, type FunctionName } from './functions';
+import type { InputsInR } from './inputs';
 import { TESTED_NEEDS, testedOutput, testedSections } from './tested';
 
 /** Everything a script is made of but the figures of the engine. */
@@ -12,12 +13,7 @@ export type ScriptPlan = {
   family: readonly AskedInR[];
   place: number;
   isTested: boolean;
-  /** Policy, printed figures, and what is made of them. */
-  inputs: readonly Section[];
-  /** What the inputs call. */
-  needs: readonly FunctionName[];
-  /** Lines that print the bases. */
-  output: readonly string[];
+  inputs: InputsInR;
 };
 
 /** The script of a finding with a verdict. */
@@ -30,13 +26,13 @@ export function findingScript(plan: ScriptPlan): string {
   return assemble({
     words: asked.words,
     engine: ENGINE_VERSION,
-    functions: functionsFor([...plan.needs, ...own, 'reasonsUntested', 'show']),
-    sections: [...plan.inputs, ...steps],
+    functions: functionsFor([...plan.inputs.needs, ...own, 'reasonsUntested', 'show']),
+    sections: [...plan.inputs.sections, ...steps],
     output: [
       `show("kind", "${plan.kind}")`,
-      ...plan.output,
+      ...plan.inputs.output,
       isTested ? testedOutput(asked) : untestedOutput(asked),
-      ...(asked.further ? [asked.further.output] : []),
+      ...(asked.further?.output ? [asked.further.output] : []),
     ].join('\n'),
   });
 }

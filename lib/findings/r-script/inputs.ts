@@ -1,5 +1,14 @@
 import type { AssumedDeff, Base, GivenDeff, Policy, StatedInterval } from '../check-types';
+import type { Section } from './assemble';
+import type { FunctionName } from './functions';
 import { rLogical, rNumber, rNumbers, rString, rStrings } from './r-literal';
+
+/** What a script starts from, the functions that it calls for that, and the lines that print the bases. */
+export type InputsInR = {
+  sections: readonly Section[];
+  needs: readonly FunctionName[];
+  output: readonly string[];
+};
 
 export type Labels = ReadonlyMap<string, string>;
 
@@ -8,8 +17,29 @@ export function rName(option: string, labels: Labels): string {
   return rString(labels.get(option) ?? option);
 }
 
+/**
+ * The sections that every script begins with.
+ *
+ * @param printed code that holds the printed figures
+ * @param made code that makes bases of them
+ */
+export function inputSections(
+  policy: Policy,
+  printed: readonly string[],
+  made: readonly string[],
+): Section[] {
+  return [
+    { title: 'Policy of the desk', code: writePolicy(policy) },
+    {
+      title: 'Printed figures, shares in percent; NULL and NA: not disclosed',
+      code: printed.join('\n\n'),
+    },
+    { title: 'Design effect, effective size, maximum margin', code: made.join('\n') },
+  ];
+}
+
 /** The policy as a list of R. */
-export function writePolicy(policy: Policy): string {
+function writePolicy(policy: Policy): string {
   const { weighted, clustered, unweighted } = policy.assumed;
   return [
     'policy <- list(',

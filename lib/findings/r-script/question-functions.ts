@@ -1,11 +1,13 @@
 /** R functions for the questions that can be asked of printed shares, each with what its test needs. */
 
-export const QUESTION = String.raw`
+export const ROUNDING_UNITS = String.raw`
 # Rounding units, in points, of the printed figures that make up a share.
 rounding_units <- function(base, option) {
   if (is.null(base$rounding)) 10^-base$decimals else base$rounding[[match(option, base$options)]]
 }
+`;
 
+export const QUESTION = String.raw`
 # A question: its bases, its options, the estimate as a signed sum of printed shares in points, its standard error
 # (proportions) with every base at the "chosen", "low" or "high" design effect, the smallest degrees of freedom
 # among its bases, and the rounding unit of each printed figure in the estimate.

@@ -1,5 +1,4 @@
 import type { Base, CheckAnswer, CheckDocument, Finding, Policy, ShareFinding } from '../check-types';
-import { ENGINE_VERSION } from '../engine-version';
 import { resolvePolicy } from '../policy';
 import {
   changeInR,
@@ -10,10 +9,9 @@ import {
   type AskedInR,
 } from './asked-in-r';
 import { findingScript } from './finding-script';
-import { functionsFor, type FunctionName } from './functions';
-import { rName, writeBase, writePolicy, type Labels } from './inputs';
+import { inputSections, writeBase, type InputsInR, type Labels } from './inputs';
 import { labelsOf } from './r-literal';
-import { assemble, type Section } from './assemble';
+import { shareScript } from './share-script';
 
 type Testable = Exclude<Finding, ShareFinding>;
 
@@ -37,7 +35,9 @@ export function rScript(document: CheckDocument, answer: CheckAnswer, findingInd
   if (!finding) throw new RangeError('rScript requires the index of a finding of the answer');
   const labels = labelsOf(optionsOf(document));
   const policy = resolvePolicy(document.policy);
-  if (finding.kind === 'share') return shareScript(document.release, finding, policy, labels);
+  if (finding.kind === 'share') {
+    return shareScript(finding.option, inputsOf(document.release, null, policy, labels), labels);
+  }
   const previous = isChange(finding) ? (document.previous ?? null) : null;
   const family = answer.findings.flatMap((one) => (isOfFamily(one, finding) ? [one] : []));
   return findingScript({
@@ -46,55 +46,24 @@ export function rScript(document: CheckDocument, answer: CheckAnswer, findingInd
     family: family.map((one) => askInR(one, labels)),
     place: family.indexOf(finding),
     isTested: finding.verdict !== 'cannot-be-tested',
-    inputs: inputSections(document.release, previous, policy, labels),
-    needs: ['withDesignEffect'],
-    output: ['show_base("base", release)', ...(previous ? ['show_base("previousBase", previous)'] : [])],
+    inputs: inputsOf(document.release, previous, policy, labels),
   });
 }
 
-function shareScript(release: Base, { option }: ShareFinding, policy: Policy, labels: Labels): string {
-  const name = rName(option, labels);
-  const needs: FunctionName[] = ['withDesignEffect', 'shareInterval', 'show'];
-  return assemble({
-    words: `share of ${name}`,
-    engine: ENGINE_VERSION,
-    functions: functionsFor(needs),
-    sections: [
-      ...inputSections(release, null, policy, labels),
-      {
-        title: 'Share and interval, unadjusted',
-        code: `p <- proportion(release, ${name})
-has_interval <- !is.na(p) && release$basis != "none"
-interval <- if (has_interval) share_interval(p, release, policy$level)
-method <- if (has_interval) share_method(p, release$n_eff)`,
-      },
-    ],
-    output: `show("kind", "share")
-show_base("base", release)
-show("estimatePct", 100 * p)
-show("intervalPct", if (has_interval) 100 * interval)
-show("method", method)`,
-  });
-}
-
-function inputSections(release: Base, previous: Base | null, policy: Policy, labels: Labels): Section[] {
-  return [
-    { title: 'Policy of the desk', code: writePolicy(policy) },
-    {
-      title: 'Printed figures, shares in percent; NULL and NA: not disclosed',
-      code: [
-        writeBase('release', release, labels),
-        ...(previous ? [writeBase('previous', previous, labels)] : []),
-      ].join('\n\n'),
-    },
-    {
-      title: 'Design effect, effective size, maximum margin',
-      code: [
-        'release <- with_design_effect(release, policy)',
-        ...(previous ? ['previous <- with_design_effect(previous, policy)'] : []),
-      ].join('\n'),
-    },
+function inputsOf(release: Base, previous: Base | null, policy: Policy, labels: Labels): InputsInR {
+  const bases = [
+    { variable: 'release', base: release, answerName: 'base' },
+    ...(previous ? [{ variable: 'previous', base: previous, answerName: 'previousBase' }] : []),
   ];
+  return {
+    sections: inputSections(
+      policy,
+      bases.map(({ variable, base }) => writeBase(variable, base, labels)),
+      bases.map(({ variable }) => `${variable} <- with_design_effect(${variable}, policy)`),
+    ),
+    needs: ['withDesignEffect'],
+    output: bases.map(({ variable, answerName }) => `show_base("${answerName}", ${variable})`),
+  };
 }
 
 /** The question behind a finding, in R. */
