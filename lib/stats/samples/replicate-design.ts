@@ -72,8 +72,12 @@ const LARGEST_WEIGHT = 1e100;
  * @throws RangeError `replicateDesign requires df whole and at least 1`
  * @see R 4.2.2, survey 4.1.1 `svrepdesign(combined.weights = TRUE)`, `svrVar`, `degf`
  * @example
- * const columns = { weights: [1, 1, 1], type: 'JK1', mse: true };
- * replicateDesign({ ...columns, replicateWeights: [[0, 1.5, 1.5], [1.5, 0, 1.5], [1.5, 1.5, 0]] }).df; // => 2
+ * replicateDesign({
+ *   weights: [1, 1, 1],
+ *   replicateWeights: [[0, 1.5, 1.5], [1.5, 0, 1.5], [1.5, 1.5, 0]],
+ *   type: 'JK1',
+ *   mse: true,
+ * }).df; // => 2
  */
 export function replicateDesign(columns: ReplicateColumns): ReplicateDesign {
   const weights = readWeights(FN, columns.weights);

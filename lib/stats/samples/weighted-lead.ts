@@ -44,8 +44,7 @@ const FN = 'weightedLead';
  * @throws RangeError `weightedLead requires weight in the domain in every replicate; replicate <r> has none`
  * @see R 4.2.2, survey 4.1.1 `svycontrast(svymean(~factor(vote), design), c(1, -1, 0))`
  * @example
- * const design = surveyDesign({ weights: [1, 2, 1, 1] });
- * weightedLead(design, [1, 0, 1, 0], [0, 1, 0, 0], { level: 0.95 }).estimate; // => 0
+ * weightedLead(surveyDesign({ weights: [1, 2, 2] }), [1, 0, 1], [0, 1, 0], { level: 0.95 }).estimate; // => 0.2
  * weightedLead(surveyDesign({ weights: [1, 1, 2] }), [1, 1, 0], [0, 0, 0], { level: 0.95 }).first; // => 0.5
  */
 export function weightedLead(

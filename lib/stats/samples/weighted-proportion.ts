@@ -39,8 +39,7 @@ const FN = 'weightedProportion';
  * @see R 4.2.2, survey 4.1.1 `svymean(deff = "replace")`, `svyciprop`, `degf`; Woodruff (1971), Journal of the
  *   American Statistical Association 66, 411–414 (from memory)
  * @example
- * const design = surveyDesign({ weights: [1, 3, 1, 1] });
- * weightedProportion(design, [1, 0, 1, 0], { level: 0.95 }).estimate; // => 0.3333333333333333
+ * weightedProportion(surveyDesign({ weights: [1, 3, 1] }), [1, 0, 1], { level: 0.95 }).estimate; // => 0.4
  * weightedProportion(surveyDesign({ weights: [2, 2, 2] }), [1, 0, 1], { level: 0.95 }).deff; // => 1
  */
 export function weightedProportion(
