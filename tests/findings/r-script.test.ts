@@ -8,7 +8,7 @@ import { resolvePolicy } from '@/lib/findings/policy';
 import { checkDocuments } from '../r/documents';
 import { expectedFigures } from '../r/expected';
 import cases from '../reference/findings/cases.json';
-import { namesIn, piecesOf, readString, structureOf } from './r-source';
+import { idleFunctions, numbersWritten, piecesOf, readString, structureOf, unknownCalls } from './r-source';
 
 const documents = [
   ...cases.map(({ input }) => input as unknown as CheckDocument),
@@ -24,15 +24,6 @@ const scripts = documents.flatMap((document) => {
     script: rScript(document, answer, index),
   }));
 });
-
-/** Functions and words of base R and its stats that the scripts call. */
-const BASE_R =
-  `abs all any anyNA c cat character cumprod cumsum data.frame dhyper floor for function if ifelse
-  invisible is.character is.logical is.na is.null is.numeric isTRUE lapply length list logical mapply match max mean
-  min names na.omit numeric order p.adjust paste paste0 pbeta pmax pnorm pt qbeta qnorm qt rep_len return round
-  seq_len sprintf sqrt stopifnot sum switch tolower uniroot unique unlist vapply new.env rep seq_along tabulate which`.split(
-    /\s+/,
-  );
 
 const numbersIn = (value: unknown): number[] => {
   if (typeof value === 'number') return [value];
@@ -75,9 +66,7 @@ describe('rScript', () => {
         isChange ? document.previous : null,
         finding.kind === 'threshold' ? finding.thresholdPct : null,
       ]);
-      const written = new Set(
-        [...script.matchAll(/(?<![\w.])\d[\d.]*(e[+-]?\d+)?/g)].map(([text]) => Number(text)),
-      );
+      const written = numbersWritten(script);
       expect(inputs.filter((value) => !written.has(value))).toEqual([]);
     }
   });
@@ -92,20 +81,13 @@ describe('rScript', () => {
   test('needs no package, and defines every function that base R lacks', () => {
     for (const { script } of scripts) {
       expect(script).not.toMatch(/\b(library|require|requireNamespace|source|system|eval|parse)\(|::/);
-      const { called, given } = namesIn(script);
-      const locals = ['at', 'test', 'se', 'excess'];
-      const unknown = [...called].filter(
-        (name) => !given.has(name) && ![...BASE_R, ...locals].includes(name),
-      );
-      expect(unknown).toEqual([]);
+      expect(unknownCalls(script)).toEqual([]);
     }
   });
 
   test('defines no function that it does not use', () => {
     for (const { script } of scripts) {
-      const defined = [...script.matchAll(/^(\w+) <- function\(/gm)].map(([, name = '']) => name);
-      const uses = (name: string) => script.match(new RegExp(`\\b${name}\\b`, 'g'))?.length ?? 0;
-      expect(defined.filter((name) => uses(name) < 2)).toEqual([]);
+      expect(idleFunctions(script)).toEqual([]);
     }
   });
 

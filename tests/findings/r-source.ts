@@ -38,12 +38,36 @@ export function structureOf(script: string): string {
     .join('');
 }
 
-/** Names that are called as functions, and names that the script gives to something. */
-export function namesIn(script: string): { called: Set<string>; given: Set<string> } {
+/** Functions and words of base R and its stats that the scripts call. */
+const BASE_R =
+  `abs all any anyNA c cat character cumprod cumsum data.frame dhyper floor for function if ifelse
+  invisible is.character is.logical is.na is.null is.numeric isTRUE lapply length list logical mapply match max mean
+  min names na.omit numeric order p.adjust paste paste0 pbeta pmax pnorm pt qbeta qnorm qt rep_len return round
+  seq_len sprintf sqrt stopifnot sum switch tolower uniroot unique unlist vapply new.env rep seq_along tabulate which`.split(
+    /\s+/,
+  );
+
+/** Parameters of the scripts' own functions that are called as functions. */
+const PARAMETERS = ['at', 'test', 'se', 'excess'];
+
+/** Functions that a script calls and that neither it nor base R has. */
+export function unknownCalls(script: string): string[] {
   const code = piecesOf(script)
     .map(({ kind, text }) => (kind === 'code' ? text : ' '))
     .join('');
-  const called = [...code.matchAll(/(?<![\w.$])([A-Za-z][\w.]*)\(/g)].map(([, name = '']) => name);
-  const given = [...code.matchAll(/(?<![\w.$])([A-Za-z][\w.]*) <- /g)].map(([, name = '']) => name);
-  return { called: new Set(called), given: new Set(given) };
+  const named = (pattern: RegExp) => [...code.matchAll(pattern)].map(([, name = '']) => name);
+  const known = new Set([...named(/(?<![\w.$])([A-Za-z][\w.]*) <- /g), ...BASE_R, ...PARAMETERS]);
+  return named(/(?<![\w.$])([A-Za-z][\w.]*)\(/g).filter((name) => !known.has(name));
+}
+
+/** Functions that a script defines and does not use. */
+export function idleFunctions(script: string): string[] {
+  const defined = [...script.matchAll(/^(\w+) <- function\(/gm)].map(([, name = '']) => name);
+  const uses = (name: string) => script.match(new RegExp(`\\b${name}\\b`, 'g'))?.length ?? 0;
+  return defined.filter((name) => uses(name) < 2);
+}
+
+/** Every number that stands in a script. */
+export function numbersWritten(script: string): Set<number> {
+  return new Set([...script.matchAll(/(?<![\w.])\d[\d.]*(e[+-]?\d+)?/g)].map(([text]) => Number(text)));
 }
