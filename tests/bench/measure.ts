@@ -5,7 +5,7 @@ import { Bench } from 'tinybench';
  * its batches are too long to be left alone on a busy machine, and no call takes less time by the clock.
  */
 export async function fastestSeconds(run: () => void, { time = 400, iterations = 9 } = {}): Promise<number> {
-  const bench = new Bench({ time, iterations, warmupTime: Math.min(200, time), warmupIterations: 3 });
+  const bench = new Bench({ time, iterations, warmupTime: Math.min(200, time), warmupIterations: 10 });
   bench.add('run', run, { async: false });
   const [task] = await bench.run();
   if (task?.result.state !== 'completed') throw new Error('a measured call failed', { cause: task?.result });
@@ -30,7 +30,7 @@ export async function growth(
 ): Promise<Point[]> {
   const points: Point[] = [];
   for (const size of sizes) {
-    points.push({ size, seconds: await fastestSeconds(prepare(size), { time: 250, iterations: 5 }) });
+    points.push({ size, seconds: await fastestSeconds(prepare(size), { time: 300, iterations: 40 }) });
   }
   return points;
 }
