@@ -1,0 +1,48 @@
+import { createHash } from 'node:crypto';
+import { readFileSync } from 'node:fs';
+import { describe, expect, it } from 'vitest';
+import { fileOf, FIRST, sentencesOf, type LabelledSentence } from './sentences';
+
+const LISTS = [FIRST].map((name) => ({ name, sentences: sentencesOf(name) }));
+const all = LISTS.flatMap(({ sentences }) => sentences);
+const idsOf = (sentences: LabelledSentence[]) => sentences.map(({ id }) => id);
+const timesIn = (text: string, phrase: string) => text.split(phrase).length - 1;
+
+describe('the labelled sentences', () => {
+  it('have ids and texts of their own', () => {
+    expect(new Set(idsOf(all)).size).toBe(all.length);
+    expect(new Set(all.map(({ language, text }) => `${language} ${text}`)).size).toBe(all.length);
+  });
+
+  it('name phrases that stand in their text once, or the whole text for what is missing', () => {
+    const misplaced = all.filter(({ text, expect: marks }) =>
+      marks.some(({ phrase, rule }) =>
+        phrase === '' ? rule !== 'missing' : rule === 'missing' || timesIn(text, phrase) !== 1,
+      ),
+    );
+    expect(idsOf(misplaced)).toEqual([]);
+  });
+
+  it('never grade what somebody else is quoted with above cannot-judge', () => {
+    const graded = all.filter((one) =>
+      one.expect.some((mark) => mark.quoted && mark.grade !== 'cannot-judge'),
+    );
+    expect(idsOf(graded)).toEqual([]);
+  });
+
+  it.each(LISTS)('let at least two in five pass: $name', ({ sentences }) => {
+    const passing = sentences.filter((one) => one.expect.length === 0);
+    expect(passing.length / sentences.length).toBeGreaterThanOrEqual(0.4);
+  });
+
+  it('are at least 170 in the list that was written before the rules', () => {
+    expect(sentencesOf(FIRST).length).toBeGreaterThanOrEqual(170);
+  });
+
+  it('were frozen before the rules were tuned', () => {
+    const hash = createHash('sha256')
+      .update(readFileSync(fileOf(FIRST)))
+      .digest('hex');
+    expect(readFileSync(fileOf('sentences-first.sha256'), 'utf8')).toBe(`${hash}  ${FIRST}\n`);
+  });
+});

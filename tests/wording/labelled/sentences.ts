@@ -1,0 +1,60 @@
+import { readFileSync } from 'node:fs';
+import { z } from 'zod';
+import { CONTEXTS, type ContextName } from './contexts';
+
+/** What a phrase can be marked for. */
+export const RULES = [
+  'lead',
+  'level',
+  'change',
+  'no-change',
+  'majority',
+  'plurality',
+  'threshold',
+  'forecast',
+  'proof',
+  'record',
+  'figure',
+  'date',
+  'percent-points',
+  'margin',
+  'margin-basis',
+  'not-comparable',
+  'subgroup',
+  'population',
+  'missing',
+  'by-eye',
+  'significance',
+] as const;
+
+export const GRADES = ['wrong', 'not-supported', 'house-style', 'cannot-judge'] as const;
+
+const contextNames = Object.keys(CONTEXTS) as [ContextName, ...ContextName[]];
+
+const sentence = z.strictObject({
+  id: z.string().regex(/^(en|es|fr|de)-\d{3}$/),
+  language: z.enum(['en', 'es', 'fr', 'de']),
+  context: z.enum(contextNames),
+  text: z.string().min(1),
+  /** Every mark that the text must get; none where it must pass. */
+  expect: z.array(
+    z.strictObject({
+      /** Occurs once in the text; empty only where the whole text is meant. */
+      phrase: z.string(),
+      rule: z.enum(RULES),
+      grade: z.enum(GRADES),
+      quoted: z.literal(true).optional(),
+    }),
+  ),
+});
+
+export type LabelledSentence = z.infer<typeof sentence>;
+
+export const FIRST = 'sentences-first.json';
+
+export const fileOf = (name: string) => new URL(`./${name}`, import.meta.url);
+
+/** One list of labelled sentences, refused where its form is not as above. */
+export function sentencesOf(name: string): LabelledSentence[] {
+  return z.array(sentence).parse(JSON.parse(readFileSync(fileOf(name), 'utf8')));
+}
