@@ -1,3 +1,4 @@
+import type { NotRandom } from '@/lib/domain/house-style';
 import type { Language } from '@/lib/domain/vocabulary';
 import type { Verdict } from '@/lib/findings/check-types';
 import type { LanguagePack } from './language-pack';
@@ -13,7 +14,10 @@ export type HouseStyle = {
   newsroom: string;
   /** The legal or house rule under which a comparison basis is printed; it is named beside the margin. */
   comparisonRule: string;
-  percent: 'sign' | 'word';
+  /** The rule named instead, per kind of sample that the desk computes as if random; empty for the one above. */
+  comparisonRules: Record<NotRandom, string>;
+  /** 47%, 47 percent, 47 per cent. */
+  percent: 'sign' | 'word' | 'per-cent';
   /** Whole points in running text: always figures, or words up to nine. Shares are always figures. */
   numbers: 'figures' | 'words-to-nine';
   /** Rounding of margins and ranges in text; finer where it would move one across what it is compared with. */
@@ -22,6 +26,18 @@ export type HouseStyle = {
   /** Per verdict, the verbs its sentences stand on, strongest first; every draft uses one of its own rung. */
   ladder: Record<Verdict, string[]>;
   messages: Record<Language, LanguagePack>;
+  /** Phrases that no line of this desk uses. */
+  banned: string[];
+  /** What this desk says, and what it is said instead of. */
+  preferred: { say: string; insteadOf: string }[];
+  /** The house reading "more than twice the margin" beside the verdict, which it never exceeds. */
+  twiceTheMargin: boolean;
+  /** Headlines that rest on one poll. */
+  onePollHeadlines: 'allow' | 'warn' | 'refuse';
+  /** One editor alone may release an unedited sheet of printed figures at night. */
+  asPrintedNight: boolean;
+  /** Days after its field dates from which a cleared sheet is no longer current; null for never. */
+  shelfLifeDays: number | null;
 };
 
 /**
@@ -30,9 +46,10 @@ export type HouseStyle = {
  * NCPP advice (a weaker verb between one and two margins), from memory, put on a test of the lead.
  */
 export const DEFAULT_HOUSE_STYLE: HouseStyle = {
-  templateVersion: '1.0.0',
+  templateVersion: '1.1.0',
   newsroom: 'our desk',
   comparisonRule: 'a rule of this newsroom',
+  comparisonRules: { quota: '', 'opt-in': '', blended: '', unknown: '' },
   percent: 'sign',
   numbers: 'figures',
   margins: 'half',
@@ -52,4 +69,10 @@ export const DEFAULT_HOUSE_STYLE: HouseStyle = {
     ],
   },
   messages: { en: EN },
+  banned: [],
+  preferred: [],
+  twiceTheMargin: false,
+  onePollHeadlines: 'allow',
+  asPrintedNight: false,
+  shelfLifeDays: null,
 };
