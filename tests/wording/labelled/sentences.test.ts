@@ -1,9 +1,19 @@
 import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { fileOf, FIRST, sentencesOf, type LabelledSentence } from './sentences';
+import { CONTEXTS } from './contexts';
+import {
+  GRADES,
+  fileOf,
+  FIRST,
+  LANGUAGES,
+  MORE,
+  RULES,
+  sentencesOf,
+  type LabelledSentence,
+} from './sentences';
 
-const LISTS = [FIRST].map((name) => ({ name, sentences: sentencesOf(name) }));
+const LISTS = [FIRST, MORE].map((name) => ({ name, sentences: sentencesOf(name) }));
 const all = LISTS.flatMap(({ sentences }) => sentences);
 const idsOf = (sentences: LabelledSentence[]) => sentences.map(({ id }) => id);
 const timesIn = (text: string, phrase: string) => text.split(phrase).length - 1;
@@ -33,6 +43,37 @@ describe('the labelled sentences', () => {
   it.each(LISTS)('let at least two in five pass: $name', ({ sentences }) => {
     const passing = sentences.filter((one) => one.expect.length === 0);
     expect(passing.length / sentences.length).toBeGreaterThanOrEqual(0.4);
+  });
+
+  it.each(LANGUAGES)('let at least two in five pass in each language: %s', (language) => {
+    const inLanguage = all.filter((one) => one.language === language);
+    const passing = inLanguage.filter((one) => one.expect.length === 0);
+    expect(passing.length / inLanguage.length).toBeGreaterThanOrEqual(0.4);
+  });
+
+  it.each([
+    ['en', 300],
+    ['es', 40],
+    ['fr', 40],
+    ['de', 40],
+  ] as const)('are enough to measure by: %s', (language, least) => {
+    expect(all.filter((one) => one.language === language).length).toBeGreaterThanOrEqual(least);
+  });
+
+  it.each(RULES)('ask for every rule at least eight times in English: %s', (rule) => {
+    const marks = all.filter((one) => one.language === 'en').flatMap((one) => one.expect);
+    expect(marks.filter((mark) => mark.rule === rule).length).toBeGreaterThanOrEqual(8);
+  });
+
+  it('ask for every grade, and for marks in quotations', () => {
+    const marks = all.flatMap((one) => one.expect);
+    expect(new Set(marks.map(({ grade }) => grade))).toEqual(new Set(GRADES));
+    expect(marks.filter(({ quoted }) => quoted).length).toBeGreaterThanOrEqual(8);
+  });
+
+  it('use every context', () => {
+    const used = new Set<string>(all.map(({ context }) => context));
+    expect(Object.keys(CONTEXTS).filter((name) => !used.has(name))).toEqual([]);
   });
 
   it('are at least 170 in the list that was written before the rules', () => {

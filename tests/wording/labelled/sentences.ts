@@ -29,11 +29,14 @@ export const RULES = [
 
 export const GRADES = ['wrong', 'not-supported', 'house-style', 'cannot-judge'] as const;
 
+/** Languages that sentences are labelled in, whether or not the product speaks them yet. */
+export const LANGUAGES = ['en', 'es', 'fr', 'de'] as const;
+
 const contextNames = Object.keys(CONTEXTS) as [ContextName, ...ContextName[]];
 
 const sentence = z.strictObject({
   id: z.string().regex(/^(en|es|fr|de)-\d{3}$/),
-  language: z.enum(['en', 'es', 'fr', 'de']),
+  language: z.enum(LANGUAGES),
   context: z.enum(contextNames),
   text: z.string().min(1),
   /** Every mark that the text must get; none where it must pass. */
@@ -51,6 +54,7 @@ const sentence = z.strictObject({
 export type LabelledSentence = z.infer<typeof sentence>;
 
 export const FIRST = 'sentences-first.json';
+export const MORE = 'sentences-more.json';
 
 export const fileOf = (name: string) => new URL(`./${name}`, import.meta.url);
 
