@@ -215,18 +215,11 @@ BEGIN SELECT RAISE(ABORT, 'a release by one reader is read by a second person on
 --> statement-breakpoint
 CREATE TRIGGER one_reader_releases_at_night BEFORE INSERT ON one_reader_releases
 WHEN NEW.second_at IS NOT NULL OR NEW.second_person_id IS NOT NULL
-  OR NOT (
-    (NEW.night_from <= NEW.night_to AND NEW.night_from <= NEW.local_time AND NEW.local_time < NEW.night_to)
-    OR (NEW.night_from > NEW.night_to AND (NEW.night_from <= NEW.local_time OR NEW.local_time < NEW.night_to))
-  )
+  OR NEW.night_from <> '22:00' OR NEW.night_to <> '06:00'
+  OR NOT (NEW.local_time GLOB '[0-2][0-9]:[0-5][0-9]' AND (NEW.local_time >= NEW.night_from OR NEW.local_time < NEW.night_to))
   OR NEW.house_style_id <> (SELECT max(id) FROM house_styles)
   OR NOT EXISTS (
-    SELECT 1 FROM house_styles h WHERE h.id = NEW.house_style_id AND (
-      json_type(h.body, '$.asPrintedNightRule') = 'true'
-      OR (json_type(h.body, '$.asPrintedNightRule') = 'object'
-        AND coalesce(json_extract(h.body, '$.asPrintedNightRule.on'), json_extract(h.body, '$.asPrintedNightRule.isOn'),
-          json_extract(h.body, '$.asPrintedNightRule.enabled'), 1) = 1)
-    )
+    SELECT 1 FROM house_styles h WHERE h.id = NEW.house_style_id AND json_type(h.body, '$.asPrintedNight') = 'true'
   )
 BEGIN SELECT RAISE(ABORT, 'one reader releases only at night, and only where the desk switched it on'); END;
 --> statement-breakpoint

@@ -53,7 +53,7 @@ export const clearingLineReasons = sqliteTable(
   ],
 );
 
-/** When a sheet is wanted, as typed and as an instant, and for how many days its words keep. */
+/** When a sheet is wanted, as typed and as an instant, and how long its words keep where it is not as house style says. */
 export const sheetTerms = sqliteTable(
   'sheet_terms',
   {
@@ -63,7 +63,7 @@ export const sheetTerms = sqliteTable(
     wantedAt: integer('wanted_at'),
     wantedLocal: text('wanted_local'),
     wantedZone: text('wanted_zone'),
-    /** Days after clearing. */
+    /** Days after the field dates. */
     shelfDays: integer('shelf_days'),
     setBy: integer('set_by')
       .notNull()
