@@ -26,7 +26,7 @@ import { findLeads, findShares, findThresholds } from './release-one-base';
  *     shares: [{ option: 'Approve', pct: 42 }, { option: 'Disapprove', pct: 53 }],
  *   },
  *   netScores: [{ approve: 'Approve', disapprove: 'Disapprove' }],
- * }).findings[2].marginPp; // => 6.34...
+ * }).findings[2].marginPp; // => 6.3271059...
  */
 export function judgeRelease(document: ReleaseDocument): ReleaseJudgement {
   const context = readContext(document);

@@ -8,7 +8,7 @@ import { measureChange } from './measure-change';
 import { measureLeadChange } from './measure-lead-change';
 import { measureOverlap, waveShares, type Named } from './measure-overlap';
 import { sideSource, type ReadComparison, type ReleaseContext } from './release-context';
-import { settleEntries, type Entry } from './release-entry';
+import { settleEntries, type BaseSource, type Entry } from './release-entry';
 import { requireSampled } from './release-one-base';
 import { carry, onTwoBases, workingOf } from './release-outcome';
 import { withReasons } from './release-reasons';
@@ -40,8 +40,9 @@ export function findChanges(
     ...pairs.map((pair): Head => ({ kind: 'lead-change', pair, named: pair })),
     ...netScores.map((pair): Head => ({ kind: 'net-score-change', pair, named: pair })),
   ];
+  const sources = [sideSource(context.release, 'this', policy), sideSource(earlier, 'earlier', policy)];
   const outcomes = settleEntries(
-    heads.map(({ named }) => entryOf(context, earlier, named)),
+    heads.map(({ named }) => entryOf(context, earlier, sources, named)),
     policy,
   );
   return outcomes.flatMap((outcome, index): ReleaseFinding[] => {
@@ -75,7 +76,12 @@ export function findChanges(
   });
 }
 
-function entryOf(context: ReleaseContext, earlier: ReadComparison, named: Named): Entry {
+function entryOf(
+  context: ReleaseContext,
+  earlier: ReadComparison,
+  sources: readonly BaseSource[],
+  named: Named,
+): Entry {
   const { policy, release } = context;
   const [late, early] = [release.read.figures, earlier.read.figures];
   const { overlap, course } = earlier;
@@ -91,7 +97,7 @@ function entryOf(context: ReleaseContext, earlier: ReadComparison, named: Named)
   const sides = () => [requireSampled(late), requireSampled(early)] as const;
   return {
     question: judged,
-    sources: [sideSource(release, 'this', policy), sideSource(earlier, 'earlier', policy)],
+    sources,
     waves,
     write: () => {
       const [later, before] = sides();

@@ -5,7 +5,7 @@ import type { AskedThreshold, ReleaseFinding } from './judge-types';
 import type { SampledBase } from './measure-change';
 import type { ReleaseContext } from './release-context';
 import { sideSource } from './release-context';
-import { settleEntries, type Entry } from './release-entry';
+import { settleEntries, type BaseSource, type Entry } from './release-entry';
 import { carry, onOneBase, workingOf } from './release-outcome';
 import { withReasons, type ReleaseQuestion } from './release-reasons';
 import { blocSteps, namesIn, sourceSteps } from './release-working';
@@ -44,9 +44,13 @@ export function findLeads(
     ...pairs.map((pair) => ({ kind: 'lead' as const, pair })),
     ...netScores.map((pair) => ({ kind: 'net-score' as const, pair })),
   ];
+  const sources = [sideSource(release, 'only', policy)];
   const entries = asked.map(({ pair }) =>
-    entryOf(context, withReasons(askLead(release.read.figures, pair, policy), release.reasons), (one) =>
-      writeLead({ pair }, one),
+    entryOf(
+      context,
+      sources,
+      withReasons(askLead(release.read.figures, pair, policy), release.reasons),
+      (one) => writeLead({ pair }, one),
     ),
   );
   return settleEntries(entries, policy).flatMap((outcome, index) => {
@@ -67,13 +71,16 @@ export function findThresholds(
     hasNonAnswers: document.release.shares.some(({ answer }) => answer === false),
     population: document.release.population ?? null,
   };
+  const sources = [sideSource(release, 'only', policy)];
   const entries = thresholds.map(({ option, pct, countedBase }): Entry => {
     const isCounted = countedBase === undefined || countsTheBase(countedBase, shares);
     const question = withReasons(askThreshold(release.read.figures, { option, pct }, policy), [
       ...release.reasons,
       ...(isCounted ? [] : (['other-base'] as const)),
     ]);
-    const entry = entryOf(context, question, (one) => writeThreshold({ option, thresholdPct: pct }, one));
+    const entry = entryOf(context, sources, question, (one) =>
+      writeThreshold({ option, thresholdPct: pct }, one),
+    );
     return { ...entry, thresholdPct: pct };
   });
   return settleEntries(entries, policy).flatMap((outcome, index): ReleaseFinding[] => {
@@ -91,14 +98,15 @@ export function findThresholds(
 }
 
 function entryOf(
-  { policy, release }: ReleaseContext,
+  { release }: ReleaseContext,
+  sources: readonly BaseSource[],
   question: ReleaseQuestion,
   write: (one: SampledBase) => EstimateWriting,
 ): Entry {
   const { figures } = release.read;
   return {
     question,
-    sources: [sideSource(release, 'only', policy)],
+    sources,
     write: () => write(requireSampled(figures)),
     before: () => blocSteps(figures, namesIn(question.terms), release.blocs, 'only'),
     waves: null,

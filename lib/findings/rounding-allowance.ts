@@ -22,7 +22,7 @@ const LARGEST_TERM = 1e3;
  * @example
  * roundingAllowancePp([1]); // => 0.475
  * roundingAllowancePp([1, 1]); // => 0.776393202250021
- * roundingAllowancePp([1, 1, 1, 1, 1]); // => 1.254...
+ * roundingAllowancePp([1, 1, 1, 1, 1]); // => 1.2538943...
  */
 export function roundingAllowancePp(unitsPp: readonly number[]): number {
   if (unitsPp.length === 0 || !unitsPp.every((unit) => unit > 0 && unit < Infinity)) {

@@ -29,8 +29,9 @@ export function shareInterval(
 export function findShare(base: BaseFigures, option: string, level: number): ShareFinding {
   if (typeof base.units.get(option) !== 'number') return { kind: 'share', option, estimatePct: null };
   const p = proportionOf(base, option);
-  const finding: ShareFinding = { kind: 'share', option, estimatePct: 100 * p };
-  if (!base.sampled) return finding;
+  const estimatePct = 100 * p;
+  if (!base.sampled) return { kind: 'share', option, estimatePct };
   const { interval, method } = shareInterval(p, base.sampled, level);
-  return { ...finding, intervalPct: [100 * interval[0], 100 * interval[1]], method };
+  const intervalPct = [100 * interval[0], 100 * interval[1]] as const;
+  return { kind: 'share', option, estimatePct, intervalPct, method };
 }
