@@ -168,6 +168,16 @@ describe("Fisher's exact test", () => {
     expect(fisherExactP(600_000, n, 400_000, n, 'greater')).toBe(0);
     expect(fisherExactP(600_000, n, 400_000, n, 'less')).toBe(1);
   });
+
+  test('answers at once however many people there are', () => {
+    const n = 1e15;
+    expect(fisherExactP(0, n, n / 2, n)).toBe(0);
+    expect(fisherExactP(0, n, n / 2, n, 'less')).toBe(0);
+    expect(fisherExactP(0, n, n / 2, n, 'greater')).toBe(1);
+    expect(fisherExactP(n / 2, n, 4, 1e6, 'greater')).toBe(0);
+    expect(fisherExactP(n / 2, n, 4, 1e6, 'less')).toBe(1);
+    expect(fisherExactP(3, n, 9, n)).toBeCloseTo(598 / 4096, 12);
+  });
 });
 
 describe('the intervals of a difference', () => {
