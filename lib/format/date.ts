@@ -15,7 +15,37 @@ const DAY = /^(\d{4})-(\d{2})-(\d{2})$/;
  * @example formatDay('2026-09-14', 'en-GB') // => '14 September 2026'
  */
 export function formatDay(day: string, locale: string, style: DayStyle = { withYear: true }): string {
-  return dayFormatter(locale, style.withYear).format(utcOf(day, 'formatDay'));
+  return written(dayFormatter(locale, style.withYear).formatToParts(utcOf(day, 'formatDay')), locale);
+}
+
+/**
+ * Field dates as two ends, for languages that put a word before each: "del 14 al 17 de septiembre". Within a month
+ * the start is its day alone, as the language writes it; of one day both ends are alike.
+ *
+ * @throws RangeError `formatDayEnds requires a day as YYYY-MM-DD`
+ * @throws RangeError `formatDayEnds requires a start that is not after its end`
+ * @example formatDayEnds('2026-09-01', '2026-09-17', 'fr-FR').start // => '1er'
+ */
+export function formatDayEnds(
+  start: string,
+  end: string,
+  locale: string,
+  style: DayStyle = { withYear: false },
+): { start: string; end: string } {
+  const from = utcOf(start, 'formatDayEnds');
+  if (from > utcOf(end, 'formatDayEnds')) {
+    throw new RangeError('formatDayEnds requires a start that is not after its end');
+  }
+  const crossesYear = start.slice(0, 4) !== end.slice(0, 4);
+  const last = formatDay(end, locale, { withYear: style.withYear || crossesYear });
+  if (start === end) return { start: last, end: last };
+  if (start.slice(0, 7) !== end.slice(0, 7)) {
+    return { start: formatDay(start, locale, { withYear: crossesYear }), end: last };
+  }
+  const whole = dayFormatter(locale, false).formatToParts(from);
+  const at = whole.findIndex(({ type }) => type === 'day');
+  const isPointed = whole[at + 1]?.value.startsWith('.') ?? false;
+  return { start: written(whole.slice(at, at + 1), locale) + (isPointed ? '.' : ''), end: last };
 }
 
 /**
@@ -36,7 +66,7 @@ export function formatDayRange(
   const to = utcOf(end, 'formatDayRange');
   if (from > to) throw new RangeError('formatDayRange requires a start that is not after its end');
   const withYear = style.withYear || start.slice(0, 4) !== end.slice(0, 4);
-  return closeDash(dayFormatter(locale, withYear).formatRange(from, to));
+  return closeDash(written(dayFormatter(locale, withYear).formatRangeToParts(from, to), locale));
 }
 
 /**
@@ -61,11 +91,19 @@ export function formatTime(atMs: number, zone: string, locale: string): string {
   return time.format(atMs);
 }
 
+/** The first of a month is an ordinal in French alone, and no formatter knows it. */
+function written(parts: readonly { type: string; value: string }[], locale: string): string {
+  const isFrench = locale.split('-')[0] === 'fr';
+  return parts
+    .map(({ type, value }) => (isFrench && type === 'day' && value === '1' ? '1er' : value))
+    .join('');
+}
+
 /** Beside a bare day of the month the dash stands close, between longer dates it keeps plain spaces. */
 function closeDash(range: string): string {
   const [before = '', after] = range.split(/\s*–\s*/u);
   if (after === undefined) return range;
-  const isClose = /^\d+\.?$/.test(before) || /^\d+(, \d{4})?$/.test(after);
+  const isClose = /^\d+(?:er|\.)?$/.test(before) || /^\d+(, \d{4})?$/.test(after);
   return isClose ? `${before}–${after}` : `${before} – ${after}`;
 }
 

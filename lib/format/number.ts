@@ -1,6 +1,7 @@
 /** Numbers as they are printed. The locale is always the caller's; a minus is U+2212. */
 
 const MINUS = '\u2212';
+const NO_BREAK_SPACE = '\u00a0';
 const NARROW_NO_BREAK_SPACE = '\u202f';
 
 const formatters = new Map<string, Intl.NumberFormat>();
@@ -57,8 +58,10 @@ export function formatTrimmed(value: number, decimals: number, locale: string): 
 }
 
 /**
- * A percentage with its sign where the language puts it: 95% in English, with a narrow no-break space before
- * the sign in languages that set one there. The value is in percent, already as it should be printed.
+ * A percentage with its sign where the language puts it: 95% in English, with a no-break space before the sign in
+ * languages that set one there, a narrow one in French. The value is in percent, already as it should be printed.
+ *
+ * @see CLDR, percent patterns per locale; DIN 5008 for German and the RAE's Ortografía for Spanish, from memory
  */
 export function formatPercent(pct: number, decimals: number, locale: string): string {
   return formatterOf(locale, {
@@ -68,7 +71,7 @@ export function formatPercent(pct: number, decimals: number, locale: string): st
   })
     .format(roundHalfUp(pct, decimals) / 100)
     .replace('-', MINUS)
-    .replace(/[\u00a0\u202f](?=%)/, NARROW_NO_BREAK_SPACE);
+    .replace(/[\u00a0\u202f](?=%)/, locale.split('-')[0] === 'fr' ? NARROW_NO_BREAK_SPACE : NO_BREAK_SPACE);
 }
 
 /** A p-value as printed: `p = 0.031`, or `p < 0.001` where three decimals would show none of it. */

@@ -73,11 +73,21 @@ describe('printed numbers', () => {
 
   it('sets the percent sign as the language does', () => {
     expect(formatPercent(95, 0, 'en-GB')).toBe('95%');
-    expect(['es', 'fr', 'de'].map((locale) => formatPercent(47.5, 1, locale))).toEqual([
+    expect(['es-ES', 'fr-FR', 'de-DE', 'es-MX'].map((locale) => formatPercent(47.5, 1, locale))).toEqual([
+      '47,5\u00a0%',
       '47,5\u202f%',
-      '47,5\u202f%',
-      '47,5\u202f%',
+      '47,5\u00a0%',
+      expect.stringMatching(/^47\.5\u00a0?%$/),
     ]);
+  });
+
+  it('writes the comma, the minus and the groups of each language', () => {
+    const locales = ['es-ES', 'fr-FR', 'de-DE'];
+    expect(locales.map((locale) => formatPoints(-6.5, 1, locale))).toEqual(['−6,5', '−6,5', '−6,5']);
+    expect(locales.map((locale) => formatSigned(6, 0, locale))).toEqual(['+6', '+6', '+6']);
+    expect(locales.map((locale) => formatCount(1012, locale))).toEqual(['1012', '1\u202f012', '1.012']);
+    expect(locales.map((locale) => formatCount(12012, locale))).toEqual(['12.012', '12\u202f012', '12.012']);
+    expect(locales.map((locale) => formatP(0.0004, locale))).toEqual(['p < 0,001', 'p < 0,001', 'p < 0,001']);
   });
 
   it('prints p to three decimals and never as zero', () => {
