@@ -33,7 +33,7 @@ const assumed = z
 
 /** What a desk decides about its statistics; the check document of a release gets its own kind of sample's part. */
 export const deskPolicySchema = z.strictObject({
-  level: z.number().min(0.5, 'From 50 to 99.9.').max(0.999, 'From 50 to 99.9.'),
+  level: z.number().gt(0.5, 'From 50 to 99.9.').max(0.999, 'From 50 to 99.9.'),
   assumed: z.strictObject({ weighted: assumed, clustered: assumed, unweighted: assumed }),
   kishRange: range.refine(([low, high]) => low <= 1 && high >= 1, 'The range contains 1.'),
   comparisonBasis: z.strictObject({
@@ -46,3 +46,16 @@ export const deskPolicySchema = z.strictObject({
   minimumNEff: z.number().min(1, 'At least 1.').max(100_000, 'At most 100,000.'),
 });
 export type DeskPolicy = z.output<typeof deskPolicySchema>;
+
+/**
+ * The policy of a check document on these kinds of sample.
+ *
+ * @param policy the desk's
+ * @param sources of the release and, where there is one, of the release it is compared with
+ * @returns the same with one comparison basis: on where the desk has one for every sample that is not random
+ */
+export function policyFor(policy: DeskPolicy, sources: readonly ('probability' | NotRandom)[]) {
+  const odd = sources.filter((source): source is NotRandom => source !== 'probability');
+  const comparisonBasis = odd.length > 0 && odd.every((source) => policy.comparisonBasis[source]);
+  return { ...policy, comparisonBasis };
+}

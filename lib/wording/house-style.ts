@@ -16,8 +16,7 @@ export type HouseStyle = {
   comparisonRule: string;
   /** The rule named instead, per kind of sample that the desk computes as if random; empty for the one above. */
   comparisonRules: Record<NotRandom, string>;
-  /** 47%, 47 percent, 47 per cent. */
-  percent: 'sign' | 'word' | 'per-cent';
+  percent: 'sign' | 'word';
   /** Whole points in running text: always figures, or words up to nine. Shares are always figures. */
   numbers: 'figures' | 'words-to-nine';
   /** Rounding of margins and ranges in text; finer where it would move one across what it is compared with. */
@@ -46,7 +45,7 @@ export type HouseStyle = {
  * NCPP advice (a weaker verb between one and two margins), from memory, put on a test of the lead.
  */
 export const DEFAULT_HOUSE_STYLE: HouseStyle = {
-  templateVersion: '1.1.0',
+  templateVersion: '1.0.0',
   newsroom: 'our desk',
   comparisonRule: 'a rule of this newsroom',
   comparisonRules: { quota: '', 'opt-in': '', blended: '', unknown: '' },

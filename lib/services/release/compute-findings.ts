@@ -28,14 +28,18 @@ export type Computed = {
 export function computeFindings(conn: Conn, versionId: number, now: number): Computed {
   const whole = findWholeVersion(conn, versionId);
   if (!whole) throw new AppError('not-found', 'There is no such release.');
-  const settings = readDeskSettings(conn);
   const facts = factsOf(conn, versionId);
   const comparison = comparisonOf(conn, whole, now);
   const previous =
     comparison.versionId === null ? null : withNamesOf(factsOf(conn, comparison.versionId), facts);
+  const settings = readDeskSettings(conn, sourcesOf(facts, previous));
   const document = parseCheckDocument(checkDocumentOf(facts, previous, settings.policy.body));
   const missing = missingDisclosure(disclosureOf(facts));
   return { facts, previous, comparison, settings, document, answer: check(document), missing };
+}
+
+function sourcesOf(...releases: readonly (ReleaseFacts | null)[]) {
+  return releases.flatMap((release) => (release ? [release.sampleSource] : []));
 }
 
 /** How each item of the disclosure list stands in a release. */

@@ -65,7 +65,7 @@ export function createReleaseIn(
   const who = { releaseId: release.id, number: 1, personId: actor.personId, now };
   const version = storeVersion(tx, input, who);
   const facts = factsOf(tx, version.id);
-  refuseImpossibleFigures(facts, readDeskSettings(tx).policy.body);
+  refuseImpossibleFigures(facts, readDeskSettings(tx, [facts.sampleSource]).policy.body);
   reindexSeries(tx, { ...release, from: facts.fieldEndOn }, now);
   appendRecord(
     tx,

@@ -47,7 +47,7 @@ export function reviseRelease(actor: Actor, input: unknown, ctx: Ctx): { version
       now: ctx.now,
     });
     const after = factsOf(tx, stored.id);
-    refuseImpossibleFigures(after, readDeskSettings(tx).policy.body);
+    refuseImpossibleFigures(after, readDeskSettings(tx, [after.sampleSource]).policy.body);
     const from = [before.fieldEndOn, after.fieldEndOn].sort()[0]!;
     for (const series of new Set([release.pollsterId, pollsterId]))
       reindexSeries(tx, { raceId: release.raceId, pollsterId: series, from }, ctx.now);

@@ -1,0 +1,243 @@
+import 'server-only';
+import { LANGUAGES } from '@/lib/domain/vocabulary';
+import type { Verdict } from '@/lib/findings/check-types';
+import type { DraftInput } from '@/lib/wording/draft-input';
+import { draftSheet } from '@/lib/wording/draft-sheet';
+import { DEFAULT_HOUSE_STYLE, type HouseStyle } from '@/lib/wording/house-style';
+import { claimsAbove } from '@/lib/wording/never-says-more';
+import { exampleInputs, HOSTILE_NAMES, PLAIN_NAMES } from './example-inputs';
+import { leafAt, withLeaf } from './leaves';
+import { type Place, type Shape, shapeOf, syntaxFault } from './message-shape';
+import {
+  neededSlots,
+  placeOfSentence,
+  type SentencePlace,
+  slotsFor,
+  UNSETTLED,
+  wrongDirection,
+  wrongOrder,
+} from './sentence-rules';
+
+export type SentenceFault = {
+  message: string;
+  place: Place | null;
+  /** The words that say too much, where that is what is wrong. */
+  phrase: string | null;
+};
+
+const VERDICT_WORDS: Record<Verdict, string> = {
+  holds: 'Holds',
+  fragile: 'Fragile',
+  'does-not-hold': 'Not shown',
+  'cannot-be-tested': 'Cannot be tested',
+};
+
+const SHIPPED = { style: DEFAULT_HOUSE_STYLE };
+
+/**
+ * What is wrong with one sentence of a house style: braces, slots, words above its verdict, the wrong way round, no
+ * verb of its rung. It is read in every combination of its choices, then drafted over a table of findings with
+ * names that break what is careless.
+ *
+ * @param path such as `style.messages.en.headline.lead.fragile`
+ * @returns nothing where it may be saved
+ */
+export function faultsOfSentence(path: string, message: string, style: HouseStyle): SentenceFault[] {
+  const faults = faultsAsWritten(path, message, style);
+  const shipped = leafAt(SHIPPED, path);
+  const place = placeOfSentence(path);
+  if (faults.length > 0 || !place || typeof shipped !== 'string') return faults;
+  return draftFaults(path, message, style, shipped, place);
+}
+
+/** The part of it that needs no drafting: quick enough for every sentence of a version. */
+export function faultsAsWritten(path: string, message: string, style: HouseStyle): SentenceFault[] {
+  const place = placeOfSentence(path);
+  const locale = localeOf(place, style);
+  const shipped = leafAt(SHIPPED, path);
+  if (!place || !locale || typeof shipped !== 'string')
+    return [fault('There is no such sentence in this house style.')];
+  const broken = syntaxFault(message, locale);
+  if (broken) return [{ ...broken, phrase: null }];
+  const shape = shapeOf(message, locale);
+  const faults = [...slotFaults(path, message, shape, locale), ...strayBraces(message, shape)];
+  if (faults.length > 0) return faults;
+  return [
+    ...missingSlots(shape, shapeOf(shipped, locale)),
+    ...claimFaults(message, shape, place, shapeOf(shipped, locale), style),
+    ...phraseFaults(message, shape, style),
+  ].filter((one, at, all) => all.findIndex((other) => other.message === one.message) === at);
+}
+
+function localeOf(place: SentencePlace | null, style: HouseStyle): string | null {
+  const language = LANGUAGES.find((one) => one === place?.language);
+  return language ? style.locales[language] : null;
+}
+
+function fault(message: string, phrase: string | null = null, place: Place | null = null): SentenceFault {
+  return { message, place, phrase };
+}
+
+function slotFaults(path: string, message: string, shape: Shape, locale: string): SentenceFault[] {
+  const known = slotsFor(path, SHIPPED, locale);
+  return [...shape.slots].flatMap(([name, choices]) => {
+    const at = placeIn(message, `{${name}`);
+    const offered = known.get(name);
+    if (!offered) return [fault(`There is no slot {${name}} here. Take one from the list.`, null, at)];
+    if (name.endsWith('Count')) return [];
+    const odd = choices.find((choice) => !offered.includes(choice));
+    return odd && offered.length > 0
+      ? [fault(`{${name}} never has the choice “${odd}”; it has ${offered.join(', ')}.`, null, at)]
+      : [];
+  });
+}
+
+function strayBraces(message: string, { variants }: Shape): SentenceFault[] {
+  const isStray = variants.some(({ text }) => /[{}]/.test(text.replace(/\{[A-Za-z]+\}/g, '')));
+  return isStray ? [fault('There is a } too many.', null, placeIn(message, '}'))] : [];
+}
+
+function missingSlots(shape: Shape, shipped: Shape): SentenceFault[] {
+  return neededSlots(shipped)
+    .filter((twins) => !twins.some((name) => shape.slots.has(name)))
+    .map((twins) => fault(`This sentence has to name {${twins[0]}}.`));
+}
+
+function claimFaults(
+  message: string,
+  shape: Shape,
+  place: SentencePlace,
+  shipped: Shape,
+  style: HouseStyle,
+): SentenceFault[] {
+  const verdict = place.verdict ?? 'cannot-be-tested';
+  const usual = new Set(shipped.variants.flatMap(({ text }) => claimsAbove(verdict, bare(text))));
+  const faults = shape.variants.flatMap(({ text, chosen }): SentenceFault[] => {
+    const above = claimsAbove(verdict, bare(text)).filter(
+      (phrase) => place.verdict !== null || !usual.has(phrase),
+    );
+    const turned = place.verdict && place.language === 'en' ? wrongDirection(text, chosen) : null;
+    const order = wrongOrder(text, place);
+    return [
+      ...above.map((phrase) => fault(tooMuch(phrase, place.verdict), phrase, placeIn(message, phrase))),
+      ...(turned
+        ? [fault(`“${turned}” is the wrong way round for this choice.`, turned, placeIn(message, turned))]
+        : []),
+      ...(order ? [fault(order)] : []),
+    ];
+  });
+  return [...faults, ...rungFaults(shape, place, style)];
+}
+
+function tooMuch(phrase: string, verdict: Verdict | null): string {
+  return verdict === null
+    ? `“${phrase}” claims something that this sentence cannot know.`
+    : `“${phrase}” says more than the verdict ${VERDICT_WORDS[verdict]} supports.`;
+}
+
+/** Headline and title stand on a verb of their rung; a fragile finding is left open wherever it is told. */
+function rungFaults({ variants }: Shape, place: SentencePlace, style: HouseStyle): SentenceFault[] {
+  if (!place.verdict || place.language !== 'en') return [];
+  const verbs = style.ladder[place.verdict];
+  const isTitle = place.part === 'headline' || place.part === 'chartTitle';
+  const isBare = variants.some(
+    ({ text }) => !verbs.some((verb) => text.toLowerCase().includes(verb.toLowerCase())),
+  );
+  const isOpen = place.verdict !== 'fragile' || variants.every(({ text }) => UNSETTLED.test(text));
+  return [
+    ...(isTitle && isBare
+      ? [
+          fault(
+            `No verb of the rung ${VERDICT_WORDS[place.verdict]} in it: ${verbs.join(', ')}. Use one, or add yours to the ladder first.`,
+          ),
+        ]
+      : []),
+    ...(isOpen ? [] : [fault('A fragile finding is left open: say that the poll cannot settle it.')]),
+  ];
+}
+
+function phraseFaults(message: string, { variants }: Shape, { banned }: HouseStyle): SentenceFault[] {
+  const text = variants
+    .map((variant) => bare(variant.text))
+    .join('\n')
+    .toLowerCase();
+  return banned
+    .filter((phrase) => new RegExp(`(?<!\\p{L})${escaped(phrase.toLowerCase())}(?!\\p{L})`, 'u').test(text))
+    .map((phrase) => fault(`“${phrase}” is banned by this house style.`, phrase, placeIn(message, phrase)));
+}
+
+const OPEN = '\uE000';
+const CLOSE = '\uE001';
+
+const table = new Map<string, DraftInput[]>();
+
+function inputsFor(language: string): DraftInput[] {
+  const kept = table.get(language);
+  if (kept) return kept;
+  const inputs = [PLAIN_NAMES, ...HOSTILE_NAMES].flatMap(exampleInputs);
+  const made = inputs.map((input) => ({ ...input, language: language as DraftInput['language'] }));
+  table.set(language, made);
+  return made;
+}
+
+/** The sentence as drafting prints it, marked so that it can be told from its neighbours. */
+export function filledSentences(
+  path: string,
+  message: string,
+  style: HouseStyle,
+  inputs: readonly DraftInput[],
+): { input: DraftInput; text: string }[] {
+  const marked = withLeaf({ style }, path, `${OPEN}${message}${CLOSE}`).style;
+  return inputs.flatMap((input) => {
+    const own = { ...marked, comparisonRule: input.houseStyle.comparisonRule };
+    const lines = draftSheet({ ...input, houseStyle: own });
+    const text = lines.map((line) => between(line.text)).find((one) => one !== null);
+    return text ? [{ input, text }] : [];
+  });
+}
+
+function between(text: string): string | null {
+  const [start, end] = [text.indexOf(OPEN), text.indexOf(CLOSE)];
+  return start >= 0 && end > start ? text.slice(start + 1, end) : null;
+}
+
+function draftFaults(
+  path: string,
+  message: string,
+  style: HouseStyle,
+  shipped: string,
+  place: SentencePlace,
+): SentenceFault[] {
+  const inputs = inputsFor(place.language);
+  const isHeard = new Set(DEFAULT_NAMES.flatMap((name) => claimsAbove('cannot-be-tested', name)));
+  try {
+    return filledSentences(path, message, style, inputs).flatMap(({ input, text }) => {
+      const { verdict } = input.finding;
+      if (!place.verdict) return [];
+      return claimsAbove(verdict, text)
+        .filter((phrase) => !isHeard.has(phrase))
+        .map((phrase) => fault(tooMuch(phrase, verdict), phrase, placeIn(message, phrase)));
+    });
+  } catch (cause) {
+    const name = /variable "([A-Za-z]+)"/.exec(cause instanceof Error ? cause.message : '')?.[1];
+    const isShippedToo = name !== undefined && shipped.includes(`{${name}`);
+    return [
+      fault(
+        name && !isShippedToo
+          ? `{${name}} is not filled for every finding that this sentence is for.`
+          : 'This sentence cannot be drafted for every finding that it is for.',
+      ),
+    ];
+  }
+}
+
+const DEFAULT_NAMES = [PLAIN_NAMES, ...HOSTILE_NAMES].flatMap((names) => Object.values(names));
+
+const bare = (text: string) => text.replace(/\{[^}]*\}/g, 'Name');
+
+function placeIn(message: string, words: string): Place | null {
+  const start = message.toLowerCase().indexOf(words.toLowerCase());
+  return start < 0 ? null : { start, end: start + words.length };
+}
+
+const escaped = (text: string) => text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');
