@@ -1,5 +1,5 @@
 import 'server-only';
-import { desc } from 'drizzle-orm';
+import { desc, eq } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { houseStyles, policies } from '@/db/schema/sheets';
 
@@ -13,6 +13,10 @@ export function insertPolicy(conn: Conn, body: string, createdAt: number): numbe
 
 export function findLatestHouseStyle(conn: Conn) {
   return conn.select().from(houseStyles).orderBy(desc(houseStyles.id)).limit(1).get() ?? null;
+}
+
+export function findHouseStyle(conn: Conn, id: number) {
+  return conn.select().from(houseStyles).where(eq(houseStyles.id, id)).get() ?? null;
 }
 
 export function insertHouseStyle(conn: Conn, body: string, createdAt: number): number {

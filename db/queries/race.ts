@@ -10,6 +10,10 @@ export function findRaceByPublicId(conn: Conn, publicId: string): RaceRow | null
   return conn.select().from(races).where(eq(races.publicId, publicId)).get() ?? null;
 }
 
+export function findRaceById(conn: Conn, id: number): RaceRow {
+  return conn.select().from(races).where(eq(races.id, id)).get()!;
+}
+
 export function findRaceByName(conn: Conn, name: string): RaceRow | null {
   return (
     conn

@@ -101,6 +101,29 @@ export function listEarlierTexts(conn: Conn, sheetId: number): Map<number, strin
   return new Map(rows.map(({ lineId, text }) => [lineId, text]));
 }
 
+/** What each line of a sheet said when it was last filed before its newest version, and when it was last cleared. */
+export function listEarlierAgreed(conn: Conn, sheetId: number) {
+  const rows = conn
+    .select({
+      lineId: lines.id,
+      text: lineVersions.text,
+      state: lineVersions.state,
+      filedBy: lineVersions.filedBy,
+    })
+    .from(lines)
+    .innerJoin(
+      lineVersions,
+      and(eq(lineVersions.lineId, lines.id), sql`${lineVersions.number} < ${newestVersion}`),
+    )
+    .where(eq(lines.sheetId, sheetId))
+    .orderBy(asc(lineVersions.number))
+    .all();
+  const filed = rows.filter(({ filedBy }) => filedBy !== null);
+  const cleared = rows.filter(({ state }) => ['cleared', 'superseded', 'pulled'].includes(state));
+  const byLine = (some: typeof rows) => new Map(some.map(({ lineId, text }) => [lineId, text]));
+  return { filed: byLine(filed), cleared: byLine(cleared) };
+}
+
 /** The cleared words of a sheet, in the order drafted. */
 export function listClearedLines(conn: Conn, sheetId: number) {
   return listClearedLinesOf(conn, [sheetId]);

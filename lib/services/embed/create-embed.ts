@@ -4,8 +4,10 @@ import { findLastAct } from '@/db/queries/clearing';
 import { findEmbedOfSheet, insertEmbed, insertEmbedVersion } from '@/db/queries/embed';
 import { findSheet, listClearedLines } from '@/db/queries/sheet';
 import { type Actor, canMakeEmbeds } from '@/lib/domain/roles';
+import { isAsPrinted } from '@/lib/domain/as-printed';
 import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
+import { refuseUnderBan } from '../bans/hold';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 
@@ -20,6 +22,9 @@ export function createEmbed(actor: Actor, input: unknown, ctx: Ctx): { id: strin
     if (!found) throw new AppError('not-found', 'There is no such sheet.');
     const before = findEmbedOfSheet(tx, found.sheet.id);
     if (before) return { id: before.publicId };
+    if (isAsPrinted(found.sheet))
+      throw new AppError('conflict', 'Figures as printed have no chart: an embed shows what they support.');
+    refuseUnderBan(tx, found.release.raceId, ctx.now);
     const cleared = findLastAct(tx, found.sheet.id, 'cleared');
     if (listClearedLines(tx, found.sheet.id).length === 0 || !cleared?.evidenceId)
       throw new AppError('conflict', 'An embed is made from cleared words, and these are not cleared now.');

@@ -8,8 +8,10 @@ import { type Actor, canDraftSheets, isTwoPersonAgreement, type Role } from '@/l
 import { newId } from '@/lib/security/ids';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
-import { refuseUnsigned } from '../house-style/sign-language';
-import { assemble } from './assemble-evidence';
+import { refuseUnderBan } from '../bans/hold';
+import { assembleSheet } from './assemble-sheet';
+import { markSiblings } from './languages';
+import { type LineReasons, lineReasons, storeLineReasons } from './line-reasons';
 import { MOVED_ON, openSheet, type Opened, refuseUnless } from './sheet-state';
 
 export const readerInput = z.strictObject({
@@ -51,22 +53,15 @@ export function clearSheetIn(
     isTwoPersonAgreement(filer, actor),
     'One of the two who agree has to be an editor. Leave this one to an editor.',
   );
-  refuseUnsigned(tx, opened.sheet.language);
-  if (assemble(tx, opened.sheet, now).withTexts(opened.texts).hash !== evidence.hash) {
+  if (assembleSheet(tx, opened.sheet, now).withTexts(opened.texts).hash !== evidence.hash) {
     endFiling(tx, actor, opened, filing, now, {
       act: 'returned',
       comment: 'Figures, policy or house style changed since filing. Agree to the sheet as it is now.',
     });
     return { outcome: 'returned' };
   }
-  const ids = opened.kept.map(({ version }) => version.id);
-  for (const { version } of listClearedLines(tx, opened.sheet.id))
-    refuseUnless(moveLineVersions(tx, [version.id], 'cleared', { state: 'superseded' }), MOVED_ON);
-  refuseUnless(moveLineVersions(tx, ids, 'filed', { state: 'cleared' }), MOVED_ON);
-  insertAct(tx, actor, opened, evidence.id, 'cleared', null, now);
-  refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
-  const embed = findEmbedOfSheet(tx, opened.sheet.id);
-  if (embed) insertEmbedVersion(tx, embed.id, evidence.id, now);
+  refuseUnderBan(tx, opened.release.raceId, now);
+  publishIn(tx, actor, opened, evidence.id, now);
   const entry = { action: 'cleared sheet', entity: 'sheet', entityId: opened.sheet.publicId };
   const after = { state: 'cleared', evidence: evidence.hash, texts: opened.texts };
   const before = { state: 'filed', filedBy: filer.personId };
@@ -74,14 +69,34 @@ export function clearSheetIn(
   return { outcome: 'cleared', version: opened.sheet.version + 1 };
 }
 
-const back = readerInput.extend({
-  comment: z.string().trim().min(3, 'Say what should change.').max(2000, 'At most 2,000 characters.'),
-});
+/** Words that were filed are printable from here on; what was cleared before is superseded. */
+export function publishIn(tx: Tx, actor: Actor, opened: Opened, evidenceId: number, now: number): void {
+  const ids = opened.kept.map(({ version }) => version.id);
+  const isAnew = findLastAct(tx, opened.sheet.id, 'cleared') !== null;
+  for (const { version } of listClearedLines(tx, opened.sheet.id))
+    refuseUnless(moveLineVersions(tx, [version.id], 'cleared', { state: 'superseded' }), MOVED_ON);
+  refuseUnless(moveLineVersions(tx, ids, 'filed', { state: 'cleared' }), MOVED_ON);
+  insertAct(tx, actor, opened, evidenceId, 'cleared', null, now);
+  refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
+  const embed = findEmbedOfSheet(tx, opened.sheet.id);
+  if (embed) insertEmbedVersion(tx, embed.id, evidenceId, now);
+  if (isAnew) markSiblings(tx, opened.sheet, 'cleared', now);
+}
 
-/** Sends a filed sheet back to its author with a comment. Its filer may take it back the same way. */
+const back = readerInput
+  .extend({
+    comment: z.string().trim().max(2000, 'At most 2,000 characters.'),
+    lines: lineReasons.default([]),
+  })
+  .refine(({ comment, lines }) => comment.length >= 3 || lines.length > 0, {
+    path: ['comment'],
+    error: 'Say what should change.',
+  });
+
+/** Sends a filed sheet back to its author, with reasons for the whole or for single lines. Its filer may take it back. */
 export function sendBack(actor: Actor, input: unknown, ctx: Ctx): void {
   authorize(canDraftSheets(actor), 'Only reporters and editors read filed sheets.');
-  const { id, hash, comment } = parse(back, input);
+  const { id, hash, comment, lines } = parse(back, input);
   transact(ctx, (tx) => {
     const opened = openSheet(tx, actor, id, ctx.now);
     const filing = filingOf(tx, opened);
@@ -91,7 +106,7 @@ export function sendBack(actor: Actor, input: unknown, ctx: Ctx): void {
       filer.personId === actor.personId || isTwoPersonAgreement(filer, actor),
       'An editor reads this sheet: only they send it back.',
     );
-    endFiling(tx, actor, opened, filing, ctx.now, { act: 'sent-back', comment });
+    endFiling(tx, actor, opened, filing, ctx.now, { act: 'sent-back', comment, lines });
   });
 }
 
@@ -122,15 +137,17 @@ export function endFiling(
   opened: Opened,
   filing: ClearingRow,
   now: number,
-  end: { act: 'sent-back' | 'returned'; comment: string },
+  end: { act: 'sent-back' | 'returned'; comment: string; lines?: LineReasons },
 ): void {
   const ids = opened.kept.map(({ version }) => version.id);
   refuseUnless(moveLineVersions(tx, ids, 'filed', { state: 'sent-back' }), MOVED_ON);
-  insertAct(tx, actor, opened, filing.evidenceId!, end.act, end.comment, now);
+  const actId = insertAct(tx, actor, opened, filing.evidenceId!, end.act, end.comment, now);
+  storeLineReasons(tx, actId, opened.kept, end.lines ?? []);
   refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
   const action = end.act === 'returned' ? 'returned sheet to its filer' : 'sent sheet back';
   const entry = { action, entity: 'sheet', entityId: opened.sheet.publicId, reason: end.comment };
-  const [before, after] = [{ state: 'filed' }, { state: 'sent-back' }];
+  const lines = end.lines?.length ? { lines: end.lines } : {};
+  const [before, after] = [{ state: 'filed' }, { state: 'sent-back', ...lines }];
   appendRecord(tx, { personId: actor.personId, ...entry, before, after, releaseId: opened.release.id }, now);
 }
 
@@ -142,9 +159,9 @@ export function insertAct(
   act: ClearingRow['act'],
   comment: string | null,
   now: number,
-): void {
+): number {
   const ids = opened.kept.map(({ version }) => version.id);
-  insertClearing(
+  const { id } = insertClearing(
     tx,
     {
       publicId: newId(),
@@ -158,4 +175,5 @@ export function insertAct(
     },
     ids,
   );
+  return id;
 }

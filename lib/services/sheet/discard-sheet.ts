@@ -1,7 +1,9 @@
 import 'server-only';
 import { z } from 'zod';
 import { listActs } from '@/db/queries/clearing';
+import { deleteCommentsOf } from '@/db/queries/comments';
 import { deleteSheet } from '@/db/queries/sheet';
+import { deleteDeskRowsOf } from '@/db/queries/sheet-desk';
 import { type Actor, canActAsEditor, canDraftSheets } from '@/lib/domain/roles';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
@@ -21,6 +23,8 @@ export function discardSheet(actor: Actor, input: unknown, ctx: Ctx): void {
       listActs(tx, opened.sheet.id).length === 0,
       'This sheet was filed once, so it is kept. Only a draft that nobody filed is discarded.',
     );
+    deleteCommentsOf(tx, opened.sheet.id);
+    deleteDeskRowsOf(tx, opened.sheet.id);
     deleteSheet(tx, opened.sheet.id);
     const entry = {
       action: 'discarded draft',

@@ -7,7 +7,8 @@ import { LINE_KIND_NAMES, LINE_KINDS, REQUIRED_LINE_KINDS } from '@/lib/domain/s
 import { AppError, type FieldErrors } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
-import { assemble } from './assemble-evidence';
+import { isAsPrinted } from '@/lib/domain/as-printed';
+import { assembleSheet } from './assemble-sheet';
 import { MOVED_ON, type NewestLine, openSheet, type Opened, refuseUnless } from './sheet-state';
 
 export const lineEdits = z
@@ -63,6 +64,11 @@ export function applyEdits(tx: Tx, actor: Actor, opened: Opened, edits: LineEdit
       throw new AppError('invalid', 'Some lines need another look.', {
         fields: { [edit.kind]: 'The chart cannot do without this line.' },
       });
+    if (isAsPrinted(opened.sheet) && (edit.knockedOut || plainText(edit.text) !== target.version.text))
+      throw new AppError(
+        'invalid',
+        'Figures as printed stay in the words of house style. Draft a claim instead.',
+      );
     if (edit.knockedOut !== target.line.knockedOut) setKnockedOut(tx, target.line.id, edit.knockedOut);
     const text = plainText(edit.text);
     if (text === target.version.text) continue;
@@ -73,7 +79,7 @@ export function applyEdits(tx: Tx, actor: Actor, opened: Opened, edits: LineEdit
 
 /** New draft versions of every line, drafted from what is stored now, with the words as they stand. */
 export function renewLines(tx: Tx, actor: Actor, opened: Opened, now: number): NewestLine[] {
-  const { draft, computed } = assemble(tx, opened.sheet, now);
+  const { draft, templateVersion } = assembleSheet(tx, opened.sheet, now);
   return opened.lines.map(({ line, version, changedBy }) => ({
     line,
     changedBy,
@@ -84,7 +90,7 @@ export function renewLines(tx: Tx, actor: Actor, opened: Opened, now: number): N
       draftText: draft.find(({ kind }) => kind === line.kind)!.text,
       text: version.text,
       state: 'draft',
-      templateVersion: computed.settings.houseStyle.body.templateVersion,
+      templateVersion,
       changedBy: actor.personId,
       changedAt: now,
     }),

@@ -1,7 +1,7 @@
 import 'server-only';
 import { z } from 'zod';
 import type { Tx } from '@/db/client';
-import { insertClearing, insertEvidence } from '@/db/queries/clearing';
+import { findLastAct, insertClearing, insertEvidence } from '@/db/queries/clearing';
 import { freezeVersion } from '@/db/queries/release';
 import { moveLineVersions, touchSheet } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets } from '@/lib/domain/roles';
@@ -9,8 +9,10 @@ import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
-import { assemble } from './assemble-evidence';
+import { redraftAsPrinted } from './as-printed-words';
+import { assembleSheet } from './assemble-sheet';
 import { applyEdits, filingProblems, lineEdits, openForWriting } from './edit-lines';
+import { markSiblings, settleByFiling } from './languages';
 import { MOVED_ON, openSheet, refuseUnless } from './sheet-state';
 
 const schema = z.strictObject({
@@ -44,17 +46,19 @@ export function fileIn(
 ): Filed {
   const actor = actingNow(tx, asker);
   authorize(canDraftSheets(actor), 'Only reporters and editors file sheets.');
+  redraftAsPrinted(tx, actor, openSheet(tx, actor, seen.id, now), now);
   const opened = openSheet(tx, actor, seen.id, now);
   const fields = filingProblems(opened.texts);
   if (Object.keys(fields).length > 0)
     throw new AppError('invalid', 'Some lines need another look.', { fields });
-  const assembled = assemble(tx, opened.sheet, now);
+  const assembled = assembleSheet(tx, opened.sheet, now);
   refuseUnless(
     assembled.basisHash === seen.basisHash,
     'The figures or the house style changed since you opened this page. Reload it and read it once more.',
   );
-  const { bytes, hash, body } = assembled.withTexts(opened.texts);
-  const { comparison } = assembled.computed;
+  const { bytes, hash, engine } = assembled.withTexts(opened.texts);
+  const { comparisonVersionId } = assembled;
+  const isFiledAnew = findLastAct(tx, opened.sheet.id, 'filed') !== null;
   const evidence = insertEvidence(
     tx,
     {
@@ -62,20 +66,20 @@ export function fileIn(
       sheetId: opened.sheet.id,
       hash,
       bytes,
-      engine: body.engine,
+      engine,
       createdAt: now,
     },
     [
       { releaseVersionId: opened.sheet.releaseVersionId, part: 'release' as const },
-      ...(comparison.versionId === null
+      ...(comparisonVersionId === null
         ? []
-        : [{ releaseVersionId: comparison.versionId, part: 'comparison' as const }]),
+        : [{ releaseVersionId: comparisonVersionId, part: 'comparison' as const }]),
     ],
   );
   const ids = opened.kept.map(({ version }) => version.id);
   refuseUnless(moveLineVersions(tx, ids, 'draft', { state: 'filed', filedBy: actor.personId }), MOVED_ON);
   freezeVersion(tx, opened.sheet.releaseVersionId, now);
-  if (comparison.versionId !== null) freezeVersion(tx, comparison.versionId, now);
+  if (comparisonVersionId !== null) freezeVersion(tx, comparisonVersionId, now);
   insertClearing(
     tx,
     {
@@ -90,6 +94,8 @@ export function fileIn(
     ids,
   );
   refuseUnless(touchSheet(tx, opened.sheet.id, seen.version), MOVED_ON);
+  settleByFiling(tx, opened.sheet, actor, now);
+  if (isFiledAnew) markSiblings(tx, opened.sheet, 'changed', now);
   const entry = { action, entity: 'sheet', entityId: opened.sheet.publicId };
   const after = { state: 'filed', evidence: hash, texts: opened.texts };
   appendRecord(tx, { personId: actor.personId, ...entry, after, releaseId: opened.release.id }, now);

@@ -4,7 +4,7 @@ import { findEmbedOfSheet } from '@/db/queries/embed';
 import { isListed } from '@/db/queries/embargo';
 import { findPersonByPublicId } from '@/db/queries/person';
 import { findWholeVersionByPublicId, listShares } from '@/db/queries/release';
-import { listClearedLines, listEarlierTexts } from '@/db/queries/sheet';
+import { listClearedLines, listEarlierAgreed, listEarlierTexts } from '@/db/queries/sheet';
 import { type Actor, canReadUnpublished, type Role } from '@/lib/domain/roles';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { LineKind, LineState } from '@/lib/domain/sheet';
@@ -16,6 +16,7 @@ import { claimsAbove } from '@/lib/wording/never-says-more';
 import { authorize, type Ctx } from '../context';
 import { type EmbargoView, embargoView } from '../release/get-release';
 import { assemble } from './assemble-evidence';
+import { type DeskView, deskViewOf } from './desk-view';
 import type { EvidenceBody } from './evidence-body';
 import { permissionsOf, type SheetPermissions } from './sheet-permissions';
 import { type Opened, openSheet } from './sheet-state';
@@ -27,6 +28,9 @@ export type LineView = {
   text: string;
   /** What this line said in its version before, where there was one. */
   earlier: string | null;
+  /** What it said when it was last filed before, and when it was last cleared. */
+  filed: string | null;
+  cleared: string | null;
   knockedOut: boolean;
   changedBy: string;
   /** Phrases that say more than the verdict, as a caution. */
@@ -61,6 +65,7 @@ export type SheetView = SheetPermissions & {
   embargo: EmbargoView | null;
   isOnList: boolean;
   embedId: string | null;
+  desk: DeskView;
 };
 
 /** One sheet with its words, its evidence and what this person may do with it now. */
@@ -106,6 +111,7 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
     embargo: embargoView(release, Boolean(opened.isPublic)),
     isOnList: isListed(ctx.db, release.id, actor),
     embedId: findEmbedOfSheet(ctx.db, sheet.id)?.publicId ?? null,
+    desk: deskViewOf(ctx, actor, opened, frozen && { body: shown.body, verdict: finding.verdict }),
   };
 }
 
@@ -136,11 +142,14 @@ function findingOf({ answer, claimKey }: EvidenceBody): TestableFinding {
 
 function linesOf(ctx: Ctx, opened: Opened, body: EvidenceBody, finding: TestableFinding): LineView[] {
   const earlier = listEarlierTexts(ctx.db, opened.sheet.id);
+  const agreed = listEarlierAgreed(ctx.db, opened.sheet.id);
   return opened.lines.map(({ line, version, changedBy }) => ({
     kind: line.kind,
     draft: body.draft.find(({ kind }) => kind === line.kind)?.text ?? version.draftText,
     text: version.text,
     earlier: earlier.get(line.id) ?? null,
+    filed: agreed.filed.get(line.id) ?? null,
+    cleared: agreed.cleared.get(line.id) ?? null,
     knockedOut: line.knockedOut,
     changedBy,
     above: claimsAbove(finding.verdict, version.text),

@@ -1,9 +1,16 @@
 import 'server-only';
 import { listActsOf } from '@/db/queries/clearing';
+import { listOpenReviews } from '@/db/queries/languages';
+import { listFirstLooks, listTermsOf } from '@/db/queries/sheet-desk';
 import { listNewestLinesOf, listOpenSheets as listRows } from '@/db/queries/sheet';
 import { type Actor, canReadUnpublished, isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
+import { isAsPrinted } from '@/lib/domain/as-printed';
+import { type Look, lookOf } from '@/lib/domain/look';
 import type { LineState } from '@/lib/domain/sheet';
+import { inOrderOfWork, type Wanted } from '@/lib/domain/wanted';
+import { holdsOn } from '../bans/hold';
 import { authorize, type Ctx } from '../context';
+import { wantedOf } from './terms';
 
 export type OpenSheetItem = {
   id: string;
@@ -22,18 +29,37 @@ export type OpenSheetItem = {
   /** Whose move it is; a draft is being written and waits for nobody. */
   waitsFor: 'me' | 'others' | 'nobody';
   isUnderEmbargo: boolean;
+  wanted: Wanted | null;
+  /** Of a filed one: whether a second person has opened it. */
+  look: Look | null;
+  /** A place bars its figures now: it cannot be cleared. */
+  isHeld: boolean;
+  /** The same claim changed in another language. */
+  needsReview: boolean;
+  isAsPrinted: boolean;
 };
 
 const LIMIT = 200;
 
-/** The queue: what is being written, waits for a reader, or was sent back. */
+/** The queue: what is being written, waits for a reader, or was sent back; what is wanted first stands first. */
 export function listOpenSheets(actor: Actor, ctx: Ctx): OpenSheetItem[] {
   authorize(canReadUnpublished(actor), 'Sheets are written and read by reporters and editors.');
   const rows = listRows(ctx.db, actor, ctx.now, LIMIT);
   const sheetIds = rows.map(({ sheet }) => sheet.id);
   const allLines = listNewestLinesOf(ctx.db, sheetIds);
   const allActs = listActsOf(ctx.db, sheetIds);
-  return rows.map((row) => {
+  const terms = listTermsOf(ctx.db, sheetIds);
+  const looks = listFirstLooks(
+    ctx.db,
+    allActs.filter(({ act }) => act.act === 'filed').map(({ act }) => act.id),
+  );
+  const reviews = new Set(listOpenReviews(ctx.db, sheetIds).map(({ review }) => review.sheetId));
+  const held = new Map<number, boolean>();
+  const isHeld = (raceId: number) => {
+    if (!held.has(raceId)) held.set(raceId, holdsOn(ctx.db, raceId, ctx.now).length > 0);
+    return held.get(raceId)!;
+  };
+  const items = rows.map((row): OpenSheetItem => {
     const lines = allLines.filter(({ line }) => line.sheetId === row.sheet.id);
     const acts = allActs.filter(({ act }) => act.sheetId === row.sheet.id);
     const kept = lines.filter(({ line }) => !line.knockedOut);
@@ -58,8 +84,14 @@ export function listOpenSheets(actor: Actor, ctx: Ctx): OpenSheetItem[] {
       returned: state === 'sent-back' ? returnOf(acts) : null,
       waitsFor: waitsFor(actor, row.sheet.authorId, state, acts),
       isUnderEmbargo: embargoAt !== null && embargoLiftedAt === null && embargoAt > ctx.now,
+      wanted: wantedOf(terms.get(row.sheet.id)),
+      look: filing && lookOf(filing.act.at, looks.get(filing.act.id) ?? null, ctx.now),
+      isHeld: isHeld(row.release.raceId),
+      needsReview: reviews.has(row.sheet.id),
+      isAsPrinted: isAsPrinted(row.sheet),
     };
   });
+  return inOrderOfWork(items);
 }
 
 /** Of one sheet, newest first. */

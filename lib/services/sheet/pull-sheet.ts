@@ -7,6 +7,7 @@ import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { markSiblings } from './languages';
 import { MOVED_ON, openSheet, refuseUnless } from './sheet-state';
 
 const schema = z.strictObject({
@@ -42,6 +43,7 @@ export function pullSheet(actor: Actor, input: unknown, ctx: Ctx): void {
     const wasSeen = isReleasePublic(tx, opened.release.id, ctx.now);
     if (embed) pullEmbedVersions(tx, embed.id, ctx.now, !wasSeen);
     refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
+    markSiblings(tx, opened.sheet, 'pulled', ctx.now);
     const entry = { action: 'pulled sheet', entity: 'sheet', entityId: opened.sheet.publicId, reason };
     const [before, after] = [{ state: 'cleared' }, { state: 'pulled', embed: embed?.publicId ?? null }];
     appendRecord(
