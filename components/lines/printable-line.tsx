@@ -7,7 +7,14 @@ import { AboveNote } from './above-note';
 import { diffParts } from './diff-parts';
 
 /** Set smaller, so that claim, sentence and evidence fit one screen. */
-const SMALL: readonly LineKind[] = ['caveat', 'method-note', 'chart-title', 'alt-text'];
+const SMALL: readonly LineKind[] = [
+  'caveat',
+  'caveat-short',
+  'caveat-one-breath',
+  'method-note',
+  'chart-title',
+  'alt-text',
+];
 
 /** One line as it would be printed, marked against the wording it came from. */
 export function PrintableLine({

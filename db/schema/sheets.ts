@@ -51,7 +51,21 @@ export const sheets = sqliteTable(
   ],
 );
 
-const LINE_KIND = ['headline', 'body', 'caveat', 'method-note', 'chart-title', 'alt-text'] as const;
+const LINE_KIND = [
+  'headline',
+  'standfirst',
+  'body',
+  'change-sentence',
+  'caveat',
+  'caveat-short',
+  'caveat-one-breath',
+  'method-note',
+  'chart-title',
+  'alt-text',
+  'spoken-line',
+  'newsletter-line',
+  'correction-notice',
+] as const;
 const LINE_STATE = ['draft', 'filed', 'sent-back', 'cleared', 'superseded', 'pulled'] as const;
 
 export const lines = sqliteTable(

@@ -1,5 +1,7 @@
-import type { TestableFinding } from '@/lib/findings/check-types';
+import type { ReleaseUntestedReason } from '@/lib/findings/judge-types';
+import { contextSentences } from './context';
 import { hasRange, sayAll, type Draft } from './draft';
+import type { DraftFinding } from './draft-finding';
 import { isOfTwoReleases } from './draft-input';
 import { say } from './say';
 import { whichPoll } from './untested';
@@ -11,37 +13,49 @@ export function draftBody(draft: Draft): string {
   const { finding } = input;
   const found = claimMessage(pack.body, finding.kind, state);
   if (finding.verdict === 'cannot-be-tested') {
-    return [sayAll([found], draft), untestedSentences(draft, isSilent(draft))].join(' ');
+    const parts = [
+      sayAll([found], draft),
+      contextSentences(draft),
+      untestedSentences(draft, isSilent(draft)),
+    ];
+    return parts.filter((part) => part !== '').join(' ');
   }
   const isMissable = finding.verdict === 'does-not-hold' && state !== 'little-changed';
-  const isDetectable = isMissable && isOfTwoReleases(finding.kind) && finding.detectable80Pp !== null;
-  return sayAll(
+  const isOfTwoBases = isOfTwoReleases(finding.kind) || finding.kind === 'gap';
+  const isDetectable = isMissable && isOfTwoBases && finding.detectable80Pp !== null;
+  const limits = sayAll(
     [
-      found,
       ...doubts(finding).map((reason) => pack.fragile[reason]),
       hasRange(input) ? pack.range[finding.kind] : null,
       isDetectable ? pack.detectable : null,
     ],
     draft,
   );
+  return [sayAll([found], draft), contextSentences(draft), limits].filter((part) => part !== '').join(' ');
 }
 
 /** Whether the first sentence has already said that figures are not disclosed. */
 function isSilent({ slots }: Draft): boolean {
-  return slots.known === 'no' || slots.known === 'none';
+  return slots.known === 'no' || slots.known === 'none' || slots.known === 'hidden';
 }
 
 /** What a fragile finding depends on, after what it is as printed. */
-function doubts(finding: TestableFinding): (FragileReason | 'as-printed')[] {
+function doubts(finding: DraftFinding): (FragileReason | 'as-printed')[] {
   const reasons = fragileReasons(finding);
   return reasons.length > 0 ? ['as-printed', ...reasons] : [];
 }
+
+const SAID_AT_ONCE: readonly ReleaseUntestedReason[] = ['not-disclosed', 'below-presentation-standard'];
 
 /** Every reason why there was no test, and that it says nothing against the figures. */
 export function untestedSentences({ input, pack, slots, voice }: Draft, isSaid = false): string {
   if (input.finding.verdict !== 'cannot-be-tested') return '';
   const reasons = input.finding.reasons
-    .filter((reason) => !(isSaid && reason === 'not-disclosed'))
+    .filter((reason) => !(isSaid && SAID_AT_ONCE.includes(reason)))
     .map((reason) => say(pack.untested[reason], { ...slots, which: whichPoll(reason, input) }, voice.locale));
-  return [...reasons, say(pack.untested['no-sign-of-error'], slots, voice.locale)].join(' ');
+  const beside =
+    typeof input.finding.independentMarginPp === 'number'
+      ? [say(pack.untested['independent-margin'], slots, voice.locale)]
+      : [];
+  return [...reasons, ...beside, say(pack.untested['no-sign-of-error'], slots, voice.locale)].join(' ');
 }

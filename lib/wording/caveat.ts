@@ -2,7 +2,11 @@ import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
 import type { DisclosureStatus } from '@/lib/domain/disclosed';
 import type { CaveatSentence, Terms } from './language-pack';
 import { sayAll, type Draft } from './draft';
-import { isOfTwoReleases } from './draft-input';
+import { namesOf } from './draft-finding';
+import { figureOf, isOfTwoReleases } from './draft-input';
+
+/** Below this share the margin is well under the one that a pollster states for a share near half. */
+const SMALL_PCT = 15;
 
 /** Who, for whom, whom, how many, how, when; what kind of sample; whose margin of what; what margins leave out. */
 export function draftCaveat(draft: Draft): string {
@@ -14,6 +18,7 @@ export function draftCaveat(draft: Draft): string {
   const closing: (CaveatSentence | null)[] = [
     sampleSentence(draft),
     marginSentence(draft),
+    smallShareSentence(draft),
     errorSentence(draft),
   ];
   return [
@@ -29,7 +34,8 @@ export function draftCaveat(draft: Draft): string {
 const messageOf = (messages: Record<CaveatSentence, string>) => (key: CaveatSentence | null) =>
   key === null ? null : messages[key];
 
-function missing(status: DisclosureStatus, draft: Draft): string {
+/** What the release withholds, or nobody has entered; an empty text where nothing is missing. */
+export function missing(status: DisclosureStatus, draft: Draft): string {
   const { release } = draft.input;
   const items = (Object.keys(draft.pack.terms.particular) as (keyof Terms['particular'])[])
     .filter((item) => release[item].status === status)
@@ -44,6 +50,17 @@ function sampleSentence({ input }: Draft): CaveatSentence {
   if (input.release.sampleSource === 'probability') return 'sample-random';
   if (input.answer.base.basis === 'modelled') return 'sample-modelled';
   return input.answer.base.basis === 'comparison' ? 'sample-comparison' : 'sample-not-random';
+}
+
+/** Where a stated margin stands beside a small share, readers would take it for that share's own. */
+function smallShareSentence({ input }: Draft): CaveatSentence | null {
+  const { finding, release } = input;
+  const isStated = release.sampleSource === 'probability' && release.statedMargin.status === 'given';
+  const isSmall = namesOf(finding).some((name) => {
+    const figure = figureOf(name, input, 'now');
+    return figure?.units ? figure.units / 10 ** figure.decimals < SMALL_PCT : false;
+  });
+  return isStated && isSmall ? 'small-shares' : null;
 }
 
 function marginSentence({ input }: Draft): CaveatSentence | null {

@@ -1,130 +1,226 @@
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
 import { shareBaseOf } from '@/lib/findings/threshold-base';
-import type { TestableFinding } from '@/lib/findings/check-types';
-import type { DraftInput } from './draft-input';
-import { plain } from './names';
-import { printGap, printPercent, printShare, type Voice } from './print';
+import { namesOf, type DraftFinding, type GapDraft } from './draft-finding';
+import { figureOf, type DraftInput, type Figure } from './draft-input';
+import { isolated } from './names';
+import { printCount, printGap, printPercent, printShare, printSigned } from './print';
 import { say, type Slots } from './say';
+import type { Voice } from './voice';
 
 /** The figures and names of the claim itself. Leads are told from the higher figure, whatever the order asked in. */
 export function claimSlots(input: DraftInput, voice: Voice): Slots {
   const { finding } = input;
-  const claim = finding.kind === 'lead-change' ? 'leadChange' : finding.kind;
   switch (finding.kind) {
     case 'lead':
-      return { claim, ...ofLead(finding, input, voice) };
+      return { claim: 'lead', ...ofLead(finding, input, voice) };
+    case 'net-score':
+      return { claim: 'netScore', ...ofLead(finding, input, voice), ...ofNetScore(finding, input, voice) };
     case 'change':
-      return { claim, ...ofChange(finding, input, voice) };
+      return { claim: 'change', ...ofChange(finding, input, voice) };
     case 'lead-change':
-      return { claim, ...ofLeadChange(finding, input, voice) };
+      return { claim: 'leadChange', ...ofLeadChange(finding, input, voice) };
+    case 'net-score-change':
+      return { claim: 'netScoreChange', ...ofNetScoreChange(finding, input, voice) };
     case 'threshold':
-      return { claim, ...ofThreshold(finding, input, voice) };
+      return { claim: 'threshold', ...ofThreshold(finding, input, voice) };
+    case 'gap':
+      return { claim: 'gap', ...ofGap(finding, input, voice) };
   }
 }
 
-type Of<K extends TestableFinding['kind']> = Extract<TestableFinding, { kind: K }>;
+type OfPair = Extract<DraftFinding, { pair: unknown }>;
+type Of<K extends DraftFinding['kind']> = Extract<DraftFinding, { kind: K }>;
 
-function ofLead(finding: Of<'lead'>, { release }: DraftInput, voice: Voice): Slots {
-  const estimate = finding.estimatePp;
-  const [higher, lower] = (estimate ?? 0) < 0 ? [finding.pair[1], finding.pair[0]] : finding.pair;
-  const printed = (option: string) => printShare(unitsOf(release, option), release.decimals, voice);
+function ofLead({ pair, estimatePp }: OfPair, input: DraftInput, voice: Voice): Slots {
+  const { release } = input;
+  const [higher, lower] = (estimatePp ?? 0) < 0 ? [pair[1], pair[0]] : pair;
+  const figures = [higher, lower].map((name) => figureOf(name, input, 'now'));
   return {
-    setting: settingOf(release, finding.pair),
-    known: estimate === null ? 'no' : 'yes',
-    a: nameOf(higher, release, voice),
-    b: nameOf(lower, release, voice),
-    aShare: printed(higher),
-    bShare: printed(lower),
-    ...sizeSlots('gap', estimate, release.decimals, voice),
+    setting: settingOf(release, pair, input),
+    among: othersAbove(input).length > 0 ? 'several' : 'two',
+    known: estimatePp === null ? 'no' : 'yes',
+    a: nameOf(higher, input, voice),
+    b: nameOf(lower, input, voice),
+    aShare: printFigure(figures[0] ?? null, voice),
+    bShare: printFigure(figures[1] ?? null, voice),
+    ...sizeSlots('gap', estimatePp, decimalsOf(figures), voice),
   };
 }
 
-function ofChange(finding: Of<'change'>, { release, previous }: DraftInput, voice: Voice): Slots {
-  const { option, estimatePp } = finding;
+function ofNetScore({ pair, estimatePp }: Of<'net-score'>, input: DraftInput, voice: Voice): Slots {
+  const decimals = decimalsOf(pair.map((name) => figureOf(name, input, 'now')));
   return {
-    option: nameOf(option, release, voice),
-    known: knownOf([option], release, previous),
-    now: printShare(unitsOf(release, option), release.decimals, voice),
-    then: printShare(previous && unitsOf(previous, option), previous?.decimals ?? 0, voice),
+    setting: 'question',
+    name: nameOf(pair[0], input, voice),
+    net: estimatePp === null ? '' : printSigned(estimatePp, decimals, voice),
+  };
+}
+
+function ofChange({ option, estimatePp }: Of<'change'>, input: DraftInput, voice: Voice): Slots {
+  const [now, then] = bothTimes(option, input);
+  return {
+    option: nameOf(option, input, voice),
+    known: knownOf([option], input),
+    now: printFigure(now, voice),
+    then: printFigure(then, voice),
     direction: (estimatePp ?? 0) < 0 ? 'less' : 'more',
-    ...sizeSlots('move', estimatePp, Math.max(release.decimals, previous?.decimals ?? 0), voice),
+    ...sizeSlots('move', estimatePp, decimalsOf([now, then]), voice),
   };
 }
 
-function ofLeadChange(finding: Of<'lead-change'>, { release, previous }: DraftInput, voice: Voice): Slots {
-  const { pair, estimatePp } = finding;
+function ofLeadChange({ pair, estimatePp }: OfPair, input: DraftInput, voice: Voice): Slots {
   const [first, second] = pair;
-  const isReversed = (unitsOf(release, second) ?? 0) > (unitsOf(release, first) ?? 0);
+  const [now, then] = [pairAt(pair, input, 'now'), pairAt(pair, input, 'then')];
+  const isReversed = scaled(now[1]) > scaled(now[0]);
   const [higher, lower] = isReversed ? [second, first] : [first, second];
-  const [toward, away] =
-    estimatePp === null || estimatePp === 0
-      ? [higher, lower]
-      : estimatePp > 0
-        ? [first, second]
-        : [second, first];
-  const now = (option: string) => printShare(unitsOf(release, option), release.decimals, voice);
-  const then = (option: string) =>
-    printShare(previous && unitsOf(previous, option), previous?.decimals ?? 0, voice);
+  const [toward, away] = !estimatePp ? [higher, lower] : estimatePp > 0 ? [first, second] : [second, first];
+  const print = (name: string, which: 'now' | 'then') => printFigure(figureOf(name, input, which), voice);
   return {
-    known: knownOf(pair, release, previous),
-    a: nameOf(higher, release, voice),
-    b: nameOf(lower, release, voice),
-    toward: nameOf(toward, release, voice),
-    away: nameOf(away, release, voice),
-    aNow: now(higher),
-    bNow: now(lower),
-    aThen: then(higher),
-    bThen: then(lower),
-    ...sizeSlots('move', estimatePp, Math.max(release.decimals, previous?.decimals ?? 0), voice),
+    known: knownOf(pair, input),
+    a: nameOf(higher, input, voice),
+    b: nameOf(lower, input, voice),
+    toward: nameOf(toward, input, voice),
+    away: nameOf(away, input, voice),
+    aNow: print(higher, 'now'),
+    bNow: print(lower, 'now'),
+    aThen: print(higher, 'then'),
+    bThen: print(lower, 'then'),
+    ...sizeSlots('move', estimatePp, decimalsOf([...now, ...then]), voice),
   };
 }
 
-function ofThreshold(finding: Of<'threshold'>, { release }: DraftInput, voice: Voice): Slots {
-  const { option, thresholdPct, estimatePp } = finding;
+function ofNetScoreChange(finding: Of<'net-score-change'>, input: DraftInput, voice: Voice): Slots {
+  const { pair, estimatePp } = finding;
+  const [now, then] = [pairAt(pair, input, 'now'), pairAt(pair, input, 'then')];
+  const net = (figures: readonly (Figure | null)[]) =>
+    figures.every((figure) => figure?.units != null)
+      ? printSigned(scaled(figures[0]) - scaled(figures[1]), decimalsOf(figures), voice)
+      : printShare(null, 0, voice);
+  return {
+    known: knownOf(pair, input),
+    name: nameOf(pair[0], input, voice),
+    netNow: net(now),
+    netThen: net(then),
+    direction: (estimatePp ?? 0) < 0 ? 'less' : 'more',
+    ...sizeSlots('move', estimatePp, decimalsOf([...now, ...then]), voice),
+  };
+}
+
+function ofThreshold(
+  { option, thresholdPct, estimatePp }: Of<'threshold'>,
+  input: DraftInput,
+  voice: Voice,
+): Slots {
   const { terms } = voice.style.messages[voice.language];
   const decimals = [0, 1, 2, 3].find((places) => Number(thresholdPct.toFixed(places)) === thresholdPct) ?? 4;
   const pct = printPercent(thresholdPct, decimals, voice);
-  const asksEveryone = shareBaseOf(release).hasNonAnswers;
+  const asksEveryone = shareBaseOf(input.release).hasNonAnswers;
   return {
-    option: nameOf(option, release, voice),
+    option: nameOf(option, input, voice),
     known: estimatePp === null ? 'no' : 'yes',
-    share: printShare(unitsOf(release, option), release.decimals, voice),
-    line: thresholdPct === 50 ? terms.half : say(terms.threshold, { pct }, voice.locale),
+    share: printFigure(figureOf(option, input, 'now'), voice),
+    line:
+      thresholdPct === 50 ? terms.half : say(terms.threshold, { pct, pctCount: thresholdPct }, voice.locale),
     side: (estimatePp ?? 0) < 0 ? 'below' : 'above',
     asked: asksEveryone ? 'everyone' : 'unknown',
   };
 }
 
+function ofGap({ option, estimatePp }: GapDraft, input: DraftInput, voice: Voice): Slots {
+  const { terms } = voice.style.messages[voice.language];
+  const [one, other] = input.beside?.groups ?? [];
+  if (!one || !other) throw new RangeError('draftSheet requires both groups of a gap');
+  const [g, h] = (estimatePp ?? 0) < 0 ? [other, one] : [one, other];
+  const isSuppressed = one.isSuppressed || other.isSuppressed;
+  const named = (group: typeof g) => (group.name === '' ? terms.everyoneElse : isolated(group.name));
+  return {
+    setting: settingOf(input.release, [option], input),
+    option: nameOf(option, input, voice),
+    known: isSuppressed ? 'hidden' : estimatePp === null ? 'no' : 'yes',
+    g: named(g),
+    h: named(h),
+    gShare: printFigure(g.figure, voice),
+    hShare: printFigure(h.figure, voice),
+    gSized: g.n === null ? 'no' : 'yes',
+    hSized: h.n === null ? 'no' : 'yes',
+    gN: g.n === null ? '' : printCount(g.n, voice),
+    hN: h.n === null ? '' : printCount(h.n, voice),
+    ...sizeSlots('gap', estimatePp, decimalsOf([g.figure, h.figure]), voice),
+  };
+}
+
+/** Other answers whose printed share is not below the lower of a pair: the two are then not the first two. */
+export function othersAbove(input: DraftInput): string[] {
+  const { finding, release, beside } = input;
+  if (finding.kind !== 'lead' || finding.estimatePp === null) return [];
+  const members = (beside?.blocs ?? [])
+    .filter(({ name }) => finding.pair.includes(name))
+    .flatMap(({ options }) => options);
+  const inClaim = new Set([...finding.pair, ...members]);
+  const lower = Math.min(...finding.pair.map((name) => scaled(figureOf(name, input, 'now'))));
+  return release.shares
+    .filter(({ option, isAnswer, units }) => isAnswer && units !== null && !inClaim.has(option))
+    .filter(({ option }) => scaled(figureOf(option, input, 'now')) > lower)
+    .map(({ option }) => option);
+}
+
 /** Leads are for contests; of an approval or issue series, or a "don't know", one can only say that more say it. */
-function settingOf(release: ReleaseFacts, options: readonly string[]): 'contest' | 'question' {
-  const isContest =
-    ELECTION_KINDS.includes(release.race.kind) && options.every((option) => isAnswer(release, option));
+function settingOf(
+  release: ReleaseFacts,
+  names: readonly string[],
+  { beside }: Pick<DraftInput, 'beside'>,
+): 'contest' | 'question' {
+  const membersOf = (name: string) => beside?.blocs.find((bloc) => bloc.name === name)?.options ?? [name];
+  const isAnswer = (name: string) => release.shares.find((share) => share.option === name)?.isAnswer ?? true;
+  const isContest = ELECTION_KINDS.includes(release.race.kind) && names.flatMap(membersOf).every(isAnswer);
   return isContest ? 'contest' : 'question';
 }
 
-/** Candidates and parties stand as they are; an answer that is a phrase, such as "End the toll", is quoted. */
-function nameOf(option: string, release: ReleaseFacts, voice: Voice): string {
-  const isProperName = settingOf(release, [option]) === 'contest' && release.race.kind !== 'referendum';
-  if (isProperName) return plain(option);
-  return say(voice.style.messages[voice.language].terms.quoted, { name: plain(option) }, voice.locale);
+/** Candidates, parties and blocs stand as they are; an answer that is a phrase, such as "End the toll", is quoted. */
+export function nameOf(option: string, input: DraftInput, voice: Voice): string {
+  const { release, beside } = input;
+  const isBloc = beside?.blocs.some(({ name }) => name === option) ?? false;
+  const isProperName =
+    settingOf(release, [option], input) === 'contest' && release.race.kind !== 'referendum';
+  if (isBloc || isProperName) return isolated(option);
+  const { quoted } = voice.style.messages[voice.language].terms;
+  return say(quoted, { name: isolated(option) }, voice.locale);
 }
 
-function isAnswer(release: ReleaseFacts, option: string): boolean {
-  return release.shares.find((share) => share.option === option)?.isAnswer ?? true;
+export function printFigure(figure: Figure | null, voice: Voice): string {
+  return printShare(figure?.units ?? null, figure?.decimals ?? 0, voice);
 }
 
-function unitsOf(release: ReleaseFacts, option: string): number | null {
-  return release.shares.find((share) => share.option === option)?.units ?? null;
+function bothTimes(name: string, input: DraftInput): [Figure | null, Figure | null] {
+  return [figureOf(name, input, 'now'), figureOf(name, input, 'then')];
 }
 
-function knownOf(options: readonly string[], release: ReleaseFacts, previous: ReleaseFacts | null): string {
-  const isIn = (facts: ReleaseFacts) => options.every((option) => unitsOf(facts, option) !== null);
-  if (!isIn(release)) return 'none';
-  return previous && isIn(previous) ? 'both' : 'now';
+function pairAt(pair: readonly string[], input: DraftInput, which: 'now' | 'then'): (Figure | null)[] {
+  return pair.map((name) => figureOf(name, input, which));
+}
+
+function scaled(figure: Figure | null | undefined): number {
+  return figure?.units ? figure.units / 10 ** figure.decimals : 0;
+}
+
+function decimalsOf(figures: readonly (Figure | null)[]): number {
+  return Math.max(0, ...figures.map((figure) => figure?.decimals ?? 0));
+}
+
+function knownOf(names: readonly string[], input: DraftInput): string {
+  const isIn = (which: 'now' | 'then') => names.every((name) => figureOf(name, input, which)?.units != null);
+  if (!isIn('now')) return 'none';
+  return isIn('then') ? 'both' : 'now';
 }
 
 function sizeSlots(name: string, pp: number | null, decimals: number, voice: Voice): Slots {
   if (pp === null) return { [name]: '', [`${name}Count`]: 0 };
   return { [name]: printGap(pp, decimals, voice), [`${name}Count`]: Number(Math.abs(pp).toFixed(decimals)) };
+}
+
+/** Names of the claim that are blocs. */
+export function blocsOf({ finding, beside }: DraftInput) {
+  const names = namesOf(finding);
+  return (beside?.blocs ?? []).filter(({ name }) => names.includes(name));
 }

@@ -1,7 +1,8 @@
 import type { DraftInput } from './draft-input';
 import type { LanguagePack } from './language-pack';
-import type { Voice } from './print';
+
 import { say, type Slots } from './say';
+import type { Voice } from './voice';
 import type { WordingState } from './wording-state';
 
 /** A sheet being drafted: the input, how far its words may go, and every slot a message may name. */
@@ -13,10 +14,14 @@ export type Draft = {
   slots: Slots;
 };
 
-/** Whole sentences one after the other. */
-export function sayAll(messages: readonly (string | null)[], draft: Draft, extra: Slots = {}): string {
+/** Whole sentences one after the other; a pack from before a sentence was added leaves it out. */
+export function sayAll(
+  messages: readonly (string | null | undefined)[],
+  draft: Draft,
+  extra: Slots = {},
+): string {
   return messages
-    .filter((message) => message !== null)
+    .filter((message) => message !== null && message !== undefined)
     .map((message) => say(message, { ...draft.slots, ...extra }, draft.voice.locale))
     .join(' ');
 }

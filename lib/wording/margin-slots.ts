@@ -2,15 +2,25 @@ import { valueOf } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { uncertaintyOf } from '@/lib/findings/bands';
 import { checkDocumentOf } from '@/lib/findings/check-document-of';
-import type { BaseAnswer, Range, TestableFinding } from '@/lib/findings/check-types';
-import { formatTrimmed } from '@/lib/format/number';
-import { isOfTwoReleases, type DraftInput } from './draft-input';
-import { printPercent, roundBeside, roundUp, type Voice } from './print';
+import type { BaseAnswer, Range } from '@/lib/findings/check-types';
+import type { TestedDraft } from './draft-finding';
+import { figureOf, isOfTwoReleases, type DraftInput } from './draft-input';
+import { farFromTrace } from './far-ends';
+import { printNumber, printPercent, roundBeside, roundUp } from './print';
 import type { Slots } from './say';
+import type { Voice } from './voice';
 
-/** The bases a finding stands on, each with the release it belongs to: one, or the later and the earlier. */
-export function basesOf(input: DraftInput): { facts: ReleaseFacts; base: BaseAnswer | null }[] {
-  const { answer, release, previous, finding } = input;
+type ConcernedBase = {
+  facts: ReleaseFacts;
+  base: BaseAnswer | null;
+  /** The name of a subgroup; empty for everyone else in the sample. */
+  group?: string;
+};
+
+/** The bases a finding stands on, each with the release it belongs to: one, the later and the earlier, two groups. */
+export function basesOf(input: DraftInput): ConcernedBase[] {
+  const { answer, release, previous, finding, beside } = input;
+  if (beside?.groups) return beside.groups.map(({ name, base }) => ({ facts: release, base, group: name }));
   const own = { facts: release, base: answer.base };
   return isOfTwoReleases(finding.kind) && previous
     ? [own, { facts: previous, base: answer.previousBase }]
@@ -28,13 +38,18 @@ export function marginSlots(input: DraftInput, voice: Voice): Slots {
     level: printLevel(policy.level, voice),
     stated: statedStatus(input),
     sameLevel: !stated || stated.level === policy.level ? 'yes' : 'no',
-    statedPp: stated ? formatTrimmed(stated.pp, 2, voice.locale) : '',
+    statedPp: stated ? printNumber(stated.pp, 2, voice, 'points') : '',
     statedCount: stated?.pp ?? 0,
     statedLevel: stated ? printLevel(stated.level, voice) : '',
     ...sizeSlots('modelled', modelled?.pp ?? 0, voice),
     ...indifferenceSlots(input, voice),
   };
-  if (finding.verdict === 'cannot-be-tested') return shared;
+  if (finding.verdict === 'cannot-be-tested') {
+    return {
+      ...shared,
+      ...sizeSlots('independent', roundUp(finding.independentMarginPp ?? 0, voice.style), voice),
+    };
+  }
   const far = farEnds(finding, input);
   const size = Math.abs(finding.estimatePp);
   const margin = roundBeside(finding.marginPp, size, voice.style);
@@ -65,11 +80,12 @@ export function printLevel(level: number, voice: Voice): string {
   return printPercent(pct, Number.isInteger(pct) ? 0 : 1, voice);
 }
 
-type Tested = Exclude<TestableFinding, { verdict: 'cannot-be-tested' }>;
-
 /** Margin and interval at the high end of the design effects: the dashed reach of the chart. */
-function farEnds(finding: Tested, input: DraftInput): { marginPp: number; intervalPp: Range } {
+function farEnds(finding: TestedDraft, input: DraftInput): { marginPp: number; intervalPp: Range } {
   const near = { marginPp: finding.marginPp, intervalPp: finding.intervalPp };
+  if (finding.trace) return farFromTrace(finding, finding.trace, input.answer.base);
+  if (finding.kind === 'net-score' || finding.kind === 'net-score-change' || finding.kind === 'gap')
+    return near;
   const far = uncertaintyOf(finding, checkDocumentOf(input.release, input.previous, input.policy))?.far;
   if (!far) return near;
   if (finding.kind !== 'threshold') {
@@ -81,7 +97,10 @@ function farEnds(finding: Tested, input: DraftInput): { marginPp: number; interv
   return { marginPp: finding.marginPp * factor, intervalPp: [far.low - pct, far.high - pct] };
 }
 
-function rangeSlots(prefix: '' | 'wider', finding: Tested, [low, high]: Range, voice: Voice): Slots {
+/** Changes of one number keep their sign; the rest are told from the side that has more. */
+const TOLD_AS_ASKED: readonly string[] = ['change', 'net-score-change'];
+
+function rangeSlots(prefix: '' | 'wider', finding: TestedDraft, [low, high]: Range, voice: Voice): Slots {
   if (finding.kind === 'threshold') {
     const pct = finding.thresholdPct;
     const print = (end: number) => {
@@ -90,7 +109,7 @@ function rangeSlots(prefix: '' | 'wider', finding: Tested, [low, high]: Range, v
     };
     return { [slotName(prefix, 'low')]: print(low), [slotName(prefix, 'high')]: print(high) };
   }
-  const isMirrored = finding.kind !== 'change' && finding.estimatePp < 0;
+  const isMirrored = !TOLD_AS_ASKED.includes(finding.kind) && finding.estimatePp < 0;
   return spanSlots(prefix, isMirrored ? [-high, -low] : [low, high], voice);
 }
 
@@ -122,15 +141,15 @@ function statedStatus(input: DraftInput): 'given' | 'none' | 'unknown' {
 }
 
 /** What counts as little: the desk's margin of indifference or a fifth of the earlier share, whichever is smaller. */
-function indifferenceSlots({ finding, previous, policy }: DraftInput, voice: Voice): Slots {
-  const earlier =
-    finding.kind === 'change' ? previous?.shares.find(({ option }) => option === finding.option) : undefined;
-  const fifth = previous && earlier?.units ? earlier.units / 10 ** previous.decimals / 5 : Infinity;
+function indifferenceSlots(input: DraftInput, voice: Voice): Slots {
+  const { finding, policy } = input;
+  const earlier = finding.kind === 'change' ? figureOf(finding.option, input, 'then') : null;
+  const fifth = earlier?.units ? earlier.units / 10 ** earlier.decimals / 5 : Infinity;
   return sizeSlots('indifference', Math.min(policy.indifferencePp, fifth), voice);
 }
 
 function sizeSlots(name: string, pp: number, voice: Voice): Slots {
-  return { [name]: formatTrimmed(pp, 3, voice.locale), [`${name}Count`]: pp };
+  return { [name]: printNumber(pp, 3, voice, 'points'), [`${name}Count`]: pp };
 }
 
 const decimalsOf = (pct: number) => [0, 1, 2].find((places) => Number(pct.toFixed(places)) === pct) ?? 3;

@@ -1,14 +1,14 @@
 import { valueOf } from '@/lib/domain/disclosed';
-import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
-import type { BaseAnswer } from '@/lib/findings/check-types';
 import { formatPoints } from '@/lib/format/number';
 import { untestedSentences } from './body';
+import { blocsOf } from './claim-slots';
+import { blocSlots, sharesWaves, waveSlots } from './context';
 import { sayAll, type Draft } from './draft';
 import { isOfTwoReleases } from './draft-input';
 import { basesOf } from './margin-slots';
-import { inSentence, plain } from './names';
-import { printShare } from './print';
+import { inSentence, isolated, plain } from './names';
+import { printCount, printShare } from './print';
 import { say } from './say';
 import { testSentences } from './test-sentences';
 
@@ -20,6 +20,7 @@ export function draftMethodNote(draft: Draft): string {
     ...comparisonSentences(draft),
     questionSentence(draft),
     choiceSentence(draft),
+    ...besideSentences(draft),
     ...(usesDeff(draft) ? deffNotes(draft) : []),
     ...testSentences(draft),
     input.finding.verdict === 'cannot-be-tested'
@@ -55,7 +56,7 @@ function choiceSentence(draft: Draft): string {
   const { release } = draft.input;
   const shares = release.shares
     .filter((share) => !share.isAnswer)
-    .map(({ option, units }) => `${plain(option)} ${printShare(units, release.decimals, draft.voice)}`);
+    .map(({ option, units }) => `${isolated(option)} ${printShare(units, release.decimals, draft.voice)}`);
   return shares.length > 0
     ? sayAll([draft.pack.methodNote['no-choice']], draft, { shares: shares.join('; ') })
     : '';
@@ -67,14 +68,36 @@ function usesDeff({ input: { finding } }: Draft): boolean {
   return finding.reasons.includes('too-small') || finding.reasons.includes('few-clusters');
 }
 
+/** What the judgement of a whole release rests on beyond its printed shares. */
+function besideSentences(draft: Draft): string[] {
+  const { input, pack } = draft;
+  const { beside, finding } = input;
+  if (!beside) return [];
+  const rebasedN = beside.rebasedN;
+  return [
+    typeof rebasedN === 'number'
+      ? sayAll([pack.methodNote.rebased], draft, { rebasedN: printCount(rebasedN, draft.voice) })
+      : '',
+    ...blocsOf(input).map((bloc) => sayAll([pack.methodNote.bloc], draft, blocSlots(bloc, draft))),
+    finding.kind === 'net-score' || finding.kind === 'net-score-change'
+      ? sayAll([pack.methodNote['net-score']], draft)
+      : '',
+    sharesWaves(draft) ? sayAll([pack.methodNote['shared-waves']], draft, waveSlots(draft)) : '',
+  ];
+}
+
 function deffNotes(draft: Draft): string[] {
-  const sentences = basesOf(draft.input).flatMap(({ facts, base }, index) =>
-    deffSentences(draft, facts, base, index),
+  const sentences = basesOf(draft.input).flatMap((concerned, index) =>
+    deffSentences(draft, concerned, index),
   );
   return sentences.length > 0 ? [...sentences, sayAll([draft.pack.methodNote['one-deff']], draft)] : [];
 }
 
-function deffSentences(draft: Draft, facts: ReleaseFacts, base: BaseAnswer | null, index: number): string[] {
+function deffSentences(
+  draft: Draft,
+  { facts, base, group }: ReturnType<typeof basesOf>[number],
+  index: number,
+): string[] {
   if (!base?.deffSource || base.deff === null || !base.deffRange) return [];
   const { pack, voice, slots } = draft;
   const hundredths = [base.deff, ...base.deffRange].some((deff) => !isOneDecimal(deff));
@@ -83,7 +106,8 @@ function deffSentences(draft: Draft, facts: ReleaseFacts, base: BaseAnswer | nul
   const extra = {
     ...slots,
     stated: base.basis === 'modelled' ? 'modelled' : 'margin',
-    poll: index === 0 ? 'this' : 'earlier',
+    poll: group !== undefined ? 'group' : index === 0 ? 'this' : 'earlier',
+    group: group ? isolated(group) : pack.terms.everyoneElse,
     pollster: inSentence(facts.pollster.name),
     deff: shown(base.deff),
     deffLow: shown(low),

@@ -1,15 +1,17 @@
-import { formatPercent, formatPoints, formatTrimmed, roundHalfUp } from '@/lib/format/number';
+import {
+  formatCount,
+  formatPercent,
+  formatPoints,
+  formatSigned,
+  formatTrimmed,
+  roundHalfUp,
+} from '@/lib/format/number';
 import type { HouseStyle } from './house-style';
 import { say } from './say';
-
-/** How one house style prints in one language. */
-export type Voice = { style: HouseStyle; language: keyof HouseStyle['messages']; locale: string };
+import { speakNumber, speakSigned, type Noun } from './speak';
+import type { Voice } from './voice';
 
 const UNITS: Record<HouseStyle['margins'], number> = { whole: 1, half: 0.5, tenth: 0.1 };
-
-export function voiceOf(style: HouseStyle, language: Voice['language']): Voice {
-  return { style, language, locale: style.locales[language] };
-}
 
 /** A share as the release printed it, with the desk's percent style; the language's words where undisclosed. */
 export function printShare(units: number | null, decimals: number, voice: Voice): string {
@@ -17,16 +19,44 @@ export function printShare(units: number | null, decimals: number, voice: Voice)
   return printPercent(units / 10 ** decimals, decimals, voice);
 }
 
-export function printPercent(pct: number, decimals: number, { style, language, locale }: Voice): string {
-  if (style.percent === 'sign') return formatPercent(pct, decimals, locale);
-  return say(style.messages[language].terms.percent, { n: formatPoints(pct, decimals, locale) }, locale);
+export function printPercent(pct: number, decimals: number, voice: Voice): string {
+  const { style, language, locale, isSpoken } = voice;
+  if (style.percent === 'sign' && !isSpoken) return formatPercent(pct, decimals, locale);
+  const { terms } = style.messages[language];
+  const n = isSpoken
+    ? speakNumber(roundHalfUp(pct, decimals), voice, 'percent')
+    : formatPoints(pct, decimals, locale);
+  return say(style.percent === 'per-cent' ? terms.perCent : terms.percent, { n }, locale);
 }
 
 /** A difference of printed shares, without its sign; in words up to nine where the desk writes them so. */
-export function printGap(pp: number, decimals: number, { style, language, locale }: Voice): string {
+export function printGap(pp: number, decimals: number, voice: Voice): string {
   const size = roundHalfUp(Math.abs(pp), decimals);
-  const word = style.numbers === 'words-to-nine' ? style.messages[language].terms.numbers[size] : undefined;
-  return word ?? formatTrimmed(size, decimals, locale);
+  const { style, language } = voice;
+  if (style.numbers === 'words-to-nine' && !voice.isSpoken) {
+    const word = style.messages[language].terms.numbers[size];
+    if (word !== undefined) return word;
+  }
+  return printNumber(size, decimals, voice, 'points');
+}
+
+/** A number with at most so many decimals. */
+export function printNumber(value: number, decimals: number, voice: Voice, noun?: Noun): string {
+  if (voice.isSpoken) return speakNumber(roundHalfUp(value, decimals), voice, noun);
+  return formatTrimmed(value, decimals, voice.locale);
+}
+
+/** A net score: always with its sign, but for zero. */
+export function printSigned(pp: number, decimals: number, voice: Voice): string {
+  if (voice.isSpoken) return speakSigned(roundHalfUp(pp, decimals), voice);
+  return formatSigned(pp, decimals, voice.locale);
+}
+
+/** A number of people. */
+export function printCount(count: number, voice: Voice): string {
+  return voice.isSpoken
+    ? speakNumber(roundHalfUp(count, 0), voice, 'people')
+    : formatCount(count, voice.locale);
 }
 
 /**

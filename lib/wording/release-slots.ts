@@ -2,15 +2,18 @@ import { valueOf } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { baseOf } from '@/lib/findings/check-document-of';
 import { formatDay, formatDayRange } from '@/lib/format/date';
-import { formatCount } from '@/lib/format/number';
-import { atStart, inSentence, plain } from './names';
-import type { Voice } from './print';
-import type { Slots } from './say';
+import { atStart, inSentence, isolated, plain } from './names';
+import { printCount } from './print';
+import { say, type Slots } from './say';
+import { speakDay, speakDays } from './speak';
+import { habitOf, type Voice } from './voice';
 
 /** Who asked whom, how many, how, when and for whom, of a release and of the one it is compared with. */
 export function releaseSlots(release: ReleaseFacts, previous: ReleaseFacts | null, voice: Voice): Slots {
   const withYear = previous !== null && yearOf(previous.fieldStartOn) !== yearOf(release.fieldEndOn);
   return {
+    habit: habitOf(voice.locale),
+    spoken: voice.isSpoken ? 'yes' : 'no',
     ...aboutSelf(release, voice),
     ...fieldDates(release, withYear, voice),
     ...(previous ? aboutEarlier(release, previous, withYear, voice) : {}),
@@ -23,16 +26,17 @@ function aboutSelf(release: ReleaseFacts, voice: Voice): Slots {
   const mode = valueOf(release.mode);
   const sponsor = valueOf(release.sponsor);
   return {
-    race: plain(release.race.name),
+    race: isolated(release.race.name),
     pollster: inSentence(release.pollster.name),
     pollsterStart: atStart(release.pollster.name),
-    newsroom: inSentence(voice.style.newsroom),
-    newsroomStart: atStart(voice.style.newsroom),
-    comparisonRule: plain(voice.style.comparisonRule),
+    newsroom: inSentence(terms.newsroom ?? voice.style.newsroom),
+    newsroomStart: atStart(terms.newsroom ?? voice.style.newsroom),
+    comparisonRule: plain(terms.comparisonRule ?? voice.style.comparisonRule),
     populated: valueOf(release.population) ? 'yes' : 'no',
     population: terms.population[valueOf(release.population) ?? 'unknown'],
+    ofWhom: terms.ofWhom?.[valueOf(release.population) ?? 'unknown'] ?? '',
     sized: n === null ? 'no' : 'yes',
-    n: n === null ? '' : formatCount(n, voice.locale),
+    n: n === null ? '' : printCount(n, voice),
     modeKnown: mode ? 'yes' : 'no',
     mode: mode ? terms.mode[mode] : '',
     sponsored: release.sponsor.status === 'not-applicable' ? 'own' : sponsor ? 'given' : 'unknown',
@@ -43,18 +47,19 @@ function aboutSelf(release: ReleaseFacts, voice: Voice): Slots {
   };
 }
 
-function fieldDates(release: ReleaseFacts, withYear: boolean, { locale }: Voice): Slots {
+/** Field dates with all that a sentence may ask of them. In speech `dates` brings its own word before it. */
+function fieldDates(release: ReleaseFacts, withYear: boolean, voice: Voice): Slots {
   const { fieldStartOn: start, fieldEndOn: end } = release;
   const crossesYear = yearOf(start) !== yearOf(end);
   return {
     dateSpan: spanOf(start, end),
-    dates: formatDayRange(start, end, locale, { withYear }),
-    start: formatDay(start, locale, { withYear: crossesYear }),
-    end: formatDay(end, locale, { withYear: withYear || crossesYear }),
+    dates: printDays(start, end, withYear, voice),
+    start: printDay(start, crossesYear, voice),
+    end: printDay(end, withYear || crossesYear, voice),
     longSpan: start === end ? 'day' : 'days',
-    startLong: formatDay(start, locale),
-    startShort: formatDay(start, locale, { withYear: crossesYear }),
-    endLong: formatDay(end, locale),
+    startLong: printDay(start, true, voice),
+    startShort: printDay(start, crossesYear, voice),
+    endLong: printDay(end, true, voice),
   };
 }
 
@@ -62,27 +67,70 @@ function aboutEarlier(release: ReleaseFacts, previous: ReleaseFacts, withYear: b
   const own = aboutSelf(previous, voice);
   const dates = fieldDates(previous, withYear, voice);
   const pollsters = [...new Set([release, previous].map(({ pollster }) => inSentence(pollster.name)))];
-  return {
+  const slots: Slots = {
     samePollster: release.pollster.id === previous.pollster.id ? 'yes' : 'no',
     pollsters: new Intl.ListFormat(voice.locale, { type: 'conjunction' }).format(pollsters),
     prevPollster: own.pollster ?? '',
     prevPopulated: own.populated ?? 'no',
     prevPopulation: own.population ?? '',
+    prevOfWhom: own.ofWhom ?? '',
     prevSized: own.sized ?? 'no',
     prevN: own.n ?? '',
     prevDateSpan: dates.dateSpan ?? '',
     prevDates: dates.dates ?? '',
     prevStart: dates.start ?? '',
     prevEnd: dates.end ?? '',
-    prevDatesLong: formatDayRange(previous.fieldStartOn, previous.fieldEndOn, voice.locale, {
-      withYear: true,
-    }),
+    prevDatesLong: printDays(previous.fieldStartOn, previous.fieldEndOn, true, voice),
   };
+  // A pack from before this term has no message that asks for it.
+  const { earlierPoll } = voice.style.messages[voice.language].terms as { earlierPoll?: string };
+  const named = { ...slots, spoken: voice.isSpoken ? 'yes' : 'no' };
+  return earlierPoll === undefined ? slots : { ...slots, prevPoll: say(earlierPoll, named, voice.locale) };
+}
+
+/** One day as it is printed or said. */
+export function printDay(day: string, withYear: boolean, voice: Voice): string {
+  return voice.isSpoken ? speakDay(day, withYear, voice) : formatDay(day, voice.locale, { withYear });
+}
+
+/** Field dates as they are printed, or said with the word that leads in. */
+export function printDays(start: string, end: string, withYear: boolean, voice: Voice): string {
+  if (voice.isSpoken) return speakDays(start, end, withYear, voice);
+  const { days } = voice.style.messages[voice.language].terms;
+  if (!days) return formatDayRange(start, end, voice.locale, { withYear });
+  const slots = {
+    start: startOf(start, end, voice),
+    end: formatDay(end, voice.locale, { withYear: withYear || yearOf(start) !== yearOf(end) }),
+  };
+  return say(start === end ? days.one : days.several, slots, voice.locale);
+}
+
+/** The first of several days: its number alone where the month is that of the last. */
+function startOf(start: string, end: string, { locale }: Voice): string {
+  if (spanOf(start, end) === 'month') return formatDayOfMonth(start, locale);
+  return formatDay(start, locale, { withYear: yearOf(start) !== yearOf(end) });
 }
 
 function spanOf(start: string, end: string): 'day' | 'month' | 'wider' {
   if (start === end) return 'day';
   return start.slice(0, 7) === end.slice(0, 7) ? 'month' : 'wider';
+}
+
+/** The day of the month as the language writes it before a month: 14, 14. */
+function formatDayOfMonth(day: string, locale: string): string {
+  const written = new Intl.DateTimeFormat(locale, { day: 'numeric', month: 'long', timeZone: 'UTC' });
+  const parts = written.formatToParts(Date.UTC(...dayParts(day)));
+  const month = parts.findIndex(({ type }) => type === 'month');
+  return parts
+    .slice(0, month)
+    .map(({ value }) => value)
+    .join('')
+    .replace(/\s+(de)?\s*$/u, '');
+}
+
+function dayParts(day: string): [number, number, number] {
+  const [year = 0, month = 1, date = 1] = day.split('-').map(Number);
+  return [year, month - 1, date];
 }
 
 const yearOf = (day: string) => day.slice(0, 4);

@@ -1,12 +1,11 @@
-import type { SecondTest, TestableFinding } from '@/lib/findings/check-types';
+import type { SecondTest } from '@/lib/findings/check-types';
 import { formatP, formatPoints, formatTrimmed } from '@/lib/format/number';
 import type { Draft } from './draft';
+import type { TestedDraft } from './draft-finding';
 import { isOfTwoReleases } from './draft-input';
 import { say, type Slots } from './say';
 import { familySize, isPlausibleBreaking } from './test-facts';
 import type { MethodSentence } from './language-pack';
-
-type Tested = Exclude<TestableFinding, { verdict: 'cannot-be-tested' }>;
 
 /** The part of the method note about the test: level, family, second tests, rounding and how far it carries. */
 export function testSentences(draft: Draft): string[] {
@@ -45,7 +44,7 @@ function secondTestSlots(test: SecondTest, { pack, voice }: Draft): Slots {
 }
 
 function breakingSentences(
-  finding: Tested,
+  finding: TestedDraft,
   { input, voice }: Draft,
   write: (key: MethodSentence, extra: Slots) => string,
 ): string[] {

@@ -1,13 +1,18 @@
 import { valueOf } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
-import type { Policy, TestableFinding, UntestedReason } from '@/lib/findings/check-types';
-import { isOfTwoReleases, type DraftInput } from './draft-input';
+import type { Policy } from '@/lib/findings/check-types';
+import type { ReleaseUntestedReason } from '@/lib/findings/judge-types';
+import { namesOf, type DraftFinding } from './draft-finding';
+import { figureOf, isOfTwoReleases, type DraftInput } from './draft-input';
 import type { Slots } from './say';
 
 /** Headlines name one reason: the first of these that applies. */
-const WEIGHT: readonly [UntestedReason, string][] = [
+const WEIGHT: readonly [ReleaseUntestedReason, string][] = [
   ['not-disclosed', 'notDisclosed'],
+  ['below-presentation-standard', 'belowPresentationStandard'],
   ['not-comparable', 'notComparable'],
+  ['shared-waves', 'sharedWaves'],
+  ['same-people', 'samePeople'],
   ['no-sampling-basis', 'noSamplingBasis'],
   ['no-sample-size', 'noSampleSize'],
   ['few-clusters', 'fewClusters'],
@@ -15,12 +20,11 @@ const WEIGHT: readonly [UntestedReason, string][] = [
 ];
 
 /** What the sentences about a finding that cannot be tested ask for; harmless for the others. */
-export function untestedSlots({ finding, previous }: DraftInput): Slots {
-  const applies = (reason: UntestedReason) =>
+export function untestedSlots(input: DraftInput): Slots {
+  const { finding } = input;
+  const applies = (reason: ReleaseUntestedReason) =>
     finding.verdict === 'cannot-be-tested' && finding.reasons.includes(reason);
-  const hasOptions = optionsOf(finding).every((option) =>
-    previous?.shares.some((share) => share.option === option),
-  );
+  const hasOptions = namesOf(input.finding).every((name) => figureOf(name, input, 'then') !== null);
   return {
     reason: WEIGHT.find(([reason]) => applies(reason))?.[1] ?? 'none',
     offered: hasOptions ? 'yes' : 'no',
@@ -28,33 +32,28 @@ export function untestedSlots({ finding, previous }: DraftInput): Slots {
 }
 
 /** Which of the polls a reason is true of. */
-export function whichPoll(reason: UntestedReason, input: DraftInput): 'this' | 'previous' | 'both' {
+export function whichPoll(reason: ReleaseUntestedReason, input: DraftInput): 'this' | 'previous' | 'both' {
   const { finding, release, previous, policy } = input;
-  const isTrueOf = (facts: ReleaseFacts) => appliesTo(reason, facts, finding, policy);
+  if (reason === 'not-disclosed' && previous) return whichHides(input);
+  const isTrueOf = (facts: ReleaseFacts) => appliesTo(reason, facts, policy);
   if (!isOfTwoReleases(finding.kind) || !previous || !isTrueOf(previous)) return 'this';
   return isTrueOf(release) ? 'both' : 'previous';
 }
 
-function appliesTo(
-  reason: UntestedReason,
-  facts: ReleaseFacts,
-  finding: TestableFinding,
-  policy: Policy,
-): boolean {
+function whichHides(input: DraftInput): 'this' | 'previous' | 'both' {
+  const hides = (which: 'now' | 'then') =>
+    namesOf(input.finding).some((name) => figureOf(name, input, which)?.units === null);
+  if (!isOfTwoReleases(input.finding.kind) || !hides('then')) return 'this';
+  return hides('now') ? 'both' : 'previous';
+}
+
+function appliesTo(reason: ReleaseUntestedReason, facts: ReleaseFacts, policy: Policy): boolean {
   switch (reason) {
     case 'no-sample-size':
       return valueOf(facts.n) === null;
     case 'no-sampling-basis':
       return facts.sampleSource !== 'probability' && !facts.modelledInterval && !policy.comparisonBasis;
-    case 'not-disclosed':
-      return optionsOf(finding).some(
-        (option) => facts.shares.find((share) => share.option === option)?.units === null,
-      );
     default:
       return false;
   }
-}
-
-function optionsOf(finding: TestableFinding): readonly string[] {
-  return 'pair' in finding ? finding.pair : [finding.option];
 }

@@ -2,19 +2,17 @@ import type {
   BaseAnswer,
   CheckAnswer,
   DeffSource,
-  Finding,
   SecondTest,
   ShareFinding,
-  TestableFinding,
-  UntestedReason,
 } from '@/lib/findings/check-types';
+import type { ReleaseUntestedReason } from '@/lib/findings/judge-types';
 import { formatP, formatPoints, formatTrimmed } from '@/lib/format/number';
+import type { DraftFinding, TestedDraft as Tested } from './draft-finding';
+import { isOfTwoReleases } from './draft-input';
 import { EN } from './messages/en';
 import { familySize, isPlausibleBreaking } from './test-facts';
 
 const LOCALE = 'en-GB';
-
-type Tested = Exclude<TestableFinding, { verdict: 'cannot-be-tested' }>;
 
 /**
  * Why a finding has its verdict, in plain sentences for staff; nothing here is meant for print.
@@ -23,7 +21,7 @@ type Tested = Exclude<TestableFinding, { verdict: 'cannot-be-tested' }>;
  * @param answer the whole answer: its bases say where the design effects come from
  * @returns at least one sentence
  */
-export function explain(finding: Finding, answer: CheckAnswer): string[] {
+export function explain(finding: ShareFinding | DraftFinding, answer: CheckAnswer): string[] {
   if (finding.kind === 'share') return [explainShare(finding)];
   if (finding.verdict === 'cannot-be-tested') return finding.reasons.map((reason) => UNTESTED[reason]);
   if (finding.verdict === 'does-not-hold') return explainNotShown(finding, answer);
@@ -45,7 +43,7 @@ function explainShare({ estimatePct, intervalPct, method }: ShareFinding): strin
   return `The range runs from ${low}% to ${high}% (${name}, on effective counts).`;
 }
 
-const UNTESTED: Record<UntestedReason, string> = {
+const UNTESTED: Record<ReleaseUntestedReason, string> = {
   'no-sample-size': 'The number of people asked is not disclosed, so no margin can be worked out.',
   'no-sampling-basis':
     'The sample is not known to be random and no modelled interval is stated: there is no recognised margin for it. That is no sign that the figures are wrong.',
@@ -55,6 +53,12 @@ const UNTESTED: Record<UntestedReason, string> = {
   'not-comparable':
     'The two samples differ in being random, or the earlier release does not have this answer, so they are not compared.',
   'not-disclosed': 'A share that this needs is not disclosed.',
+  'shared-waves':
+    'The two releases share interviews, and which waves they share is not known or leaves nothing to compare.',
+  'same-people': 'The same people were asked both times, and how many changed their answer is not disclosed.',
+  'rebased-size': 'How many people the re-based shares stand on is not disclosed.',
+  'other-base': 'The rule counts another base than the shares do.',
+  'below-presentation-standard': 'A share of a subgroup is below the presentation standard and is not shown.',
 };
 
 const EQUAL: Record<Tested['kind'], string> = {
@@ -62,10 +66,13 @@ const EQUAL: Record<Tested['kind'], string> = {
   change: 'The printed figures are equal.',
   'lead-change': 'The printed gaps are equal.',
   threshold: 'The printed figure is the threshold itself.',
+  'net-score': 'The printed figures are equal.',
+  'net-score-change': 'The printed net scores are equal.',
+  gap: 'The printed figures of the two groups are equal.',
 };
 
 function explainNotShown(finding: Tested, answer: CheckAnswer): string[] {
-  const what = finding.kind === 'change' || finding.kind === 'lead-change' ? 'change' : 'difference';
+  const what = isOfTwoReleases(finding.kind) ? 'change' : 'difference';
   const [low, high] = finding.intervalPp.map((end) => formatPoints(end, 1, LOCALE));
   const sentences = [`The ${what} could be anything from ${low} to ${high}.`];
   if (finding.estimatePp === 0) sentences.unshift(EQUAL[finding.kind]);
@@ -174,7 +181,7 @@ function totalErrorSentence({ survivesTwiceError }: Tested): string {
 }
 
 function basesOf(finding: Tested, answer: CheckAnswer): BaseAnswer[] {
-  const isOfTwo = finding.kind === 'change' || finding.kind === 'lead-change';
+  const isOfTwo = isOfTwoReleases(finding.kind) || finding.kind === 'gap';
   return isOfTwo && answer.previousBase ? [answer.base, answer.previousBase] : [answer.base];
 }
 

@@ -1,5 +1,7 @@
 import type { ClaimMessages } from './language-pack';
-import type { TestableFinding, TestedReason, Verdict } from '@/lib/findings/check-types';
+import type { ClaimKind } from '@/lib/domain/sheet';
+import type { TestedReason, Verdict } from '@/lib/findings/check-types';
+import type { DraftFinding } from './draft-finding';
 
 /** How far a sentence about a finding may go: the verdict, told apart where a different sentence is owed. */
 export type WordingState =
@@ -24,7 +26,7 @@ export const VERDICT_OF_STATE: Record<WordingState, Verdict> = {
  * `level` is equal printed figures, `family` a finding that only fails because several were tested together;
  * `little-changed` only where the test of equivalence passed.
  */
-export function wordingState(finding: TestableFinding): WordingState {
+export function wordingState(finding: DraftFinding): WordingState {
   if (finding.verdict === 'cannot-be-tested') return 'untested';
   if (finding.verdict === 'holds') return finding.survivesTwiceError ? 'holds-twice' : 'holds';
   if (finding.verdict === 'fragile') return 'fragile';
@@ -34,7 +36,7 @@ export function wordingState(finding: TestableFinding): WordingState {
 }
 
 /** The reasons of a fragile finding that a paper would print; empty for every other verdict. */
-export function fragileReasons(finding: TestableFinding): FragileReason[] {
+export function fragileReasons(finding: DraftFinding): FragileReason[] {
   if (finding.verdict !== 'fragile') return [];
   return finding.reasons.filter(
     (reason): reason is FragileReason => reason !== 'family' && reason !== 'would-hold-at-lower-deff',
@@ -42,11 +44,7 @@ export function fragileReasons(finding: TestableFinding): FragileReason[] {
 }
 
 /** The message of a kind of claim in a state. */
-export function claimMessage(
-  messages: ClaimMessages,
-  kind: TestableFinding['kind'],
-  state: WordingState,
-): string {
+export function claimMessage(messages: ClaimMessages, kind: ClaimKind, state: WordingState): string {
   const ofKind: Partial<Record<WordingState, string>> = messages[kind];
   const message = ofKind[state];
   if (message === undefined) throw new RangeError('claimMessage requires a state of its kind of claim');

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { given, NOT_DISCLOSED, type Disclosed } from '@/lib/domain/disclosed';
-import { LINE_KINDS } from '@/lib/domain/sheet';
+import { STANDING_LINE_KINDS } from '@/lib/domain/sheet';
 import {
   DESIGNS,
   MODES,
@@ -150,7 +150,7 @@ describe('draftSheet, of any release', () => {
       fc.property(anyPair, ({ release, previous, rest: { comparisonBasis, style } }) => {
         for (const input of allInputs(release, previous, comparisonBasis, style)) {
           const lines = draftSheet(input);
-          expect(lines.map(({ kind }) => kind)).toEqual(LINE_KINDS);
+          expect(lines.map(({ kind }) => kind)).toEqual(STANDING_LINE_KINDS);
           for (const { text } of lines) {
             expect(claimsAbove(input.finding.verdict, text), text).toEqual([]);
             expect(text, text).toMatch(/^\S(?:.*\S)?$/u);
@@ -166,7 +166,7 @@ describe('draftSheet, of any release', () => {
 
 describe('draftSheet', () => {
   const lead: Claim = { kind: 'lead', pair: ['Alder', 'Brook'] };
-  const textOf = (input: DraftInput, kind: (typeof LINE_KINDS)[number]) =>
+  const textOf = (input: DraftInput, kind: (typeof STANDING_LINE_KINDS)[number]) =>
     draftSheet(input).find((line) => line.kind === kind)?.text ?? '';
 
   it('speaks of the error of pre-election polls only where there is a vote', () => {

@@ -4,10 +4,11 @@ import { claimSlots } from '@/lib/wording/claim-slots';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
 import { marginSlots } from '@/lib/wording/margin-slots';
 import { atStart, inSentence } from '@/lib/wording/names';
-import { roundBeside, roundUp, voiceOf } from '@/lib/wording/print';
+import { roundBeside, roundUp } from '@/lib/wording/print';
 import { releaseSlots } from '@/lib/wording/release-slots';
 import { say } from '@/lib/wording/say';
 import { untestedSlots } from '@/lib/wording/untested';
+import { voiceOf } from '@/lib/wording/voice';
 import { GOLDEN_CASES } from './golden-cases';
 
 describe('roundBeside', () => {

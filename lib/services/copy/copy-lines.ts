@@ -4,7 +4,7 @@ import { insertCopy } from '@/db/queries/clearing';
 import { isListed } from '@/db/queries/embargo';
 import { findSheet, isReleasePublic, listClearedLines } from '@/db/queries/sheet';
 import { type Actor, canReadCopyDesk } from '@/lib/domain/roles';
-import { LINE_KINDS } from '@/lib/domain/sheet';
+import { inScreenOrder, LINE_KINDS } from '@/lib/domain/sheet';
 import { AppError } from '@/lib/errors';
 import { asHtml, asMarkdown, asPlain } from '@/lib/wording/copy-forms';
 import { authorize, type Ctx, parse, transact } from '../context';
@@ -30,7 +30,9 @@ export function copyLines(actor: Actor, input: unknown, ctx: Ctx): Copied {
       isPublic || isListed(tx, found.release.id, actor),
       'This release is under embargo. Only people on its list copy from it before the hour.',
     );
-    const lines = listClearedLines(tx, found.sheet.id).filter(({ line }) => kinds.includes(line.kind));
+    const lines = inScreenOrder(listClearedLines(tx, found.sheet.id), ({ line }) => line.kind).filter(
+      ({ line }) => kinds.includes(line.kind),
+    );
     if (lines.length !== new Set(kinds).size)
       throw new AppError(
         'conflict',

@@ -4,7 +4,7 @@ import { listActsOf } from '@/db/queries/clearing';
 import { listEmbedsOf } from '@/db/queries/embed';
 import { isReleasePublic, listClearedLinesOf, listClearedSheets } from '@/db/queries/sheet';
 import { type Actor, canReadCopyDesk } from '@/lib/domain/roles';
-import type { LineText } from '@/lib/domain/sheet';
+import { inScreenOrder, type LineText } from '@/lib/domain/sheet';
 import { authorize, type Ctx, transact } from '../context';
 import { type EmbargoView, embargoView } from '../release/get-release';
 
@@ -52,9 +52,10 @@ export function listCopyDesk(
       fieldStartOn: row.fieldStartOn,
       fieldEndOn: row.fieldEndOn,
       clearedAt: clearing?.act.at ?? 0,
-      lines: allLines
-        .filter(({ line }) => line.sheetId === row.sheet.id)
-        .map(({ line, version }) => ({ kind: line.kind, text: version.text })),
+      lines: inScreenOrder(
+        allLines.filter(({ line }) => line.sheetId === row.sheet.id),
+        ({ line }) => line.kind,
+      ).map(({ line, version }) => ({ kind: line.kind, text: version.text })),
       embargo: embargoView(row.release, isPublic),
       mayCopy: isPublic || isOnList,
       embedId: embedIds.get(row.sheet.id) ?? null,

@@ -1,7 +1,7 @@
 import 'server-only';
 import type { Conn } from '@/db/client';
 import { findSheet, listNewestLines } from '@/db/queries/sheet';
-import type { LineState, LineText } from '@/lib/domain/sheet';
+import { inScreenOrder, type LineState, type LineText } from '@/lib/domain/sheet';
 import type { Actor } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 
@@ -20,7 +20,7 @@ export type Opened = FoundSheet & {
 export function openSheet(conn: Conn, actor: Actor, id: string, now: number): Opened {
   const found = findSheet(conn, id, actor, now);
   if (!found) throw new AppError('not-found', 'There is no such sheet.');
-  const lines = listNewestLines(conn, found.sheet.id);
+  const lines = inScreenOrder(listNewestLines(conn, found.sheet.id), ({ line }) => line.kind);
   const kept = lines.filter(({ line }) => !line.knockedOut);
   const state = kept[0]?.version.state ?? 'draft';
   return { ...found, lines, kept, state, texts: textsOf(kept) };

@@ -8,7 +8,7 @@ import {
   listEvidenceIds,
 } from '@/db/queries/clearing';
 import { isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
-import type { LineText } from '@/lib/domain/sheet';
+import { inScreenOrder, type LineText } from '@/lib/domain/sheet';
 import { canonicalJson } from '@/lib/security/canonical';
 import { sha256 } from '@/lib/security/ids';
 import type { EvidenceBody } from './evidence-body';
@@ -80,7 +80,7 @@ function agreementProblems(db: Db, evidenceId: number, texts: LineText[]): strin
   return [
     ...(isAgreed ? [] : ['was not agreed to by two people of whom one was an editor']),
     ...acts
-      .filter((act) => canonicalJson(act.texts) !== canonicalJson(texts))
+      .filter((act) => canonicalJson(inScreenOrder(act.texts, ({ kind }) => kind)) !== canonicalJson(texts))
       .map(({ act }) => `holds other words than those that were ${act}`),
   ];
 }

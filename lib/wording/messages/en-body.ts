@@ -1,14 +1,16 @@
-import type { ClaimMessages } from '@/lib/wording/language-pack';
+import type { ClaimMessages } from '../language-pack';
+import { EN_GAP } from './en-gap';
+import { EN_NET_SCORE, EN_NET_SCORE_CHANGE } from './en-net-score';
 
 /** The first sentences of a body: what the poll found. Range, reasons and limits follow as sentences of their own. */
 export const EN_BODY: ClaimMessages = {
   lead: {
     'holds-twice':
-      '{setting, select, contest {{a} leads {b} by {gap} percentage {gapCount, plural, one {point} other {points}}, {aShare} to {bShare}, a poll{populated, select, yes { of {population}} other {}} by {pollster} suggests.} other {More say {a} than {b}, {aShare} to {bShare}, a poll{populated, select, yes { of {population}} other {}} by {pollster} suggests.}} The gap would be larger than chance would usually produce even if the poll’s total error were twice its sampling error.',
+      '{setting, select, contest {{among, select, several {Of the two, {a}} other {{a}}} leads {b} by {gap} percentage {gapCount, plural, one {point} other {points}}, {aShare} to {bShare}, a poll{populated, select, yes { of {population}} other {}} by {pollster} suggests.} other {More say {a} than {b}, {aShare} to {bShare}, a poll{populated, select, yes { of {population}} other {}} by {pollster} suggests.}} The gap would be larger than chance would usually produce even if the poll’s total error were twice its sampling error.',
     holds:
-      '{setting, select, contest {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, {a} leads {b} by {gap} percentage {gapCount, plural, one {point} other {points}}, {aShare} to {bShare}.} other {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, more say {a} than {b}, {aShare} to {bShare}.}} That is a larger gap than sampling error alone would usually produce, also allowing for {design, select, unweighted {rounding} clustered {rounding and clustering} other {rounding and weighting}}.',
+      '{setting, select, contest {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, {among, select, several {of the two, {a}} other {{a}}} leads {b} by {gap} percentage {gapCount, plural, one {point} other {points}}, {aShare} to {bShare}.} other {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, more say {a} than {b}, {aShare} to {bShare}.}} That is a larger gap than sampling error alone would usually produce, also allowing for {design, select, unweighted {rounding} clustered {rounding and clustering} other {rounding and weighting}}.',
     fragile:
-      '{setting, select, contest {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, {a} is ahead of {b}, {aShare} to {bShare}, but the poll cannot settle it.} other {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, {a} has the higher figure, {aShare} to {bShare} for {b}, but the poll cannot settle it.}}',
+      '{setting, select, contest {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, {among, select, several {of the two, {a}} other {{a}}} is ahead of {b}, {aShare} to {bShare}, but the poll cannot settle it.} other {In this poll{populated, select, yes { of {population}} other {}} by {pollster}, {a} has the higher figure, {aShare} to {bShare} for {b}, but the poll cannot settle it.}}',
     level:
       '{a} and {b} are level in this poll{populated, select, yes { of {population}} other {}} by {pollster}, at {aShare} each. Equal figures do not mean that opinion is evenly split.',
     'not-shown':
@@ -38,11 +40,11 @@ export const EN_BODY: ClaimMessages = {
   },
   'lead-change': {
     'holds-twice':
-      'The gap between {a} and {b} has moved towards {toward} since {prevDates}, two polls{populated, select, yes { of {population}} other {}} by {pollsters} suggest. It was {aThen} to {bThen} and is now {aNow} to {bNow}. The move would be larger than chance would usually produce even if the total error of the polls were twice their sampling error.',
+      'The gap between {a} and {b} has moved {habit, select, US {toward} other {towards}} {toward} since {prevDates}, two polls{populated, select, yes { of {population}} other {}} by {pollsters} suggest. It was {aThen} to {bThen} and is now {aNow} to {bNow}. The move would be larger than chance would usually produce even if the total error of the polls were twice their sampling error.',
     holds:
-      'In this poll{populated, select, yes { of {population}} other {}} by {pollster}, the gap between {a} and {b} has moved towards {toward}: {aNow} to {bNow}, against {aThen} to {bThen} {samePollster, select, yes {in its poll of {prevDates}} other {in the poll by {prevPollster} on {prevDates}}}. The move is larger than sampling error alone would usually produce, also allowing for {design, select, unweighted {rounding} clustered {rounding and clustering} other {rounding and weighting}}.',
+      'In this poll{populated, select, yes { of {population}} other {}} by {pollster}, the gap between {a} and {b} has moved {habit, select, US {toward} other {towards}} {toward}: {aNow} to {bNow}, against {aThen} to {bThen} {samePollster, select, yes {in its poll of {prevDates}} other {in the poll by {prevPollster} on {prevDates}}}. The move is larger than sampling error alone would usually produce, also allowing for {design, select, unweighted {rounding} clustered {rounding and clustering} other {rounding and weighting}}.',
     fragile:
-      'In this poll{populated, select, yes { of {population}} other {}} by {pollster}, the gap between {a} and {b} is further towards {toward}, {aNow} to {bNow} against {aThen} to {bThen} {samePollster, select, yes {in its poll of {prevDates}} other {in the poll by {prevPollster} on {prevDates}}}, but the two polls cannot settle it.',
+      'In this poll{populated, select, yes { of {population}} other {}} by {pollster}, the gap between {a} and {b} is further {habit, select, US {toward} other {towards}} {toward}, {aNow} to {bNow} against {aThen} to {bThen} {samePollster, select, yes {in its poll of {prevDates}} other {in the poll by {prevPollster} on {prevDates}}}, but the two polls cannot settle it.',
     level:
       'The gap between {a} and {b} in this poll{populated, select, yes { of {population}} other {}} by {pollster}, {aNow} to {bNow}, has the same figure as {samePollster, select, yes {in its poll of {prevDates}} other {in the poll by {prevPollster} on {prevDates}}}, {aThen} to {bThen}. Equal figures do not mean that opinion stood still.',
     'not-shown':
@@ -68,4 +70,7 @@ export const EN_BODY: ClaimMessages = {
     untested:
       '{known, select, yes {{option} is at {share}{asked, select, everyone { of everyone asked} other {}} in this poll{populated, select, yes { of {population}} other {}} by {pollster}.} other {This poll{populated, select, yes { of {population}} other {}} by {pollster} does not disclose the figure for {option}.}}',
   },
+  'net-score': EN_NET_SCORE.body,
+  'net-score-change': EN_NET_SCORE_CHANGE.body,
+  gap: EN_GAP.body,
 };

@@ -1,4 +1,5 @@
-import type { LanguagePack } from '@/lib/wording/language-pack';
+import type { LanguagePack } from '../language-pack';
+import { QUANTITY } from './en-parts';
 
 /**
  * Who was asked, by whom, for whom, how and when; what kind of sample; whose margin it is and of what; other error.
@@ -20,12 +21,10 @@ export const EN_CAVEAT: LanguagePack['caveat'] = {
     '{drawn, select, unknown {How the sample was drawn is not stated.} other {The sample was not drawn at random ({sample}).}} {pollsterStart} states a modelled interval of ±{modelled} {modelledCount, plural, one {point} other {points}} for a share; it rests on a model and is not a margin of sampling error.',
   'sample-comparison':
     '{drawn, select, unknown {How the sample was drawn is not stated.} other {The sample was not drawn at random ({sample}).}} The margin given here is worked out as if it had been, for comparison only, under {comparisonRule}; it is not a margin of sampling error.',
-  margin:
-    '{stated, select, given {{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share{sameLevel, select, yes {} other { at {statedLevel} confidence}}; {newsroom} puts} none {{pollsterStart} states no margin; {newsroom} puts} other {{newsroomStart} puts}} {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}} at ±{margin} {marginCount, plural, one {point} other {points}}{wider, select, yes {, or ±{widerMargin} {basis, select, modelled {within the rounding of that interval} other {if {design, select, clustered {clustering} other {weighting}} cost more}}} other {}} ({level} confidence).',
-  'margin-stated-only':
-    '{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share at {statedLevel} confidence; none is given here for {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}}.',
-  'margin-none':
-    'No margin is given here for {claim, select, lead {the gap between {a} and {b}} change {the change} leadChange {the change in the gap} other {the distance from {line}}}.',
+  margin: `{stated, select, given {{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share{sameLevel, select, yes {} other { at {statedLevel} confidence}}; {newsroom} puts} none {{pollsterStart} states no margin; {newsroom} puts} other {{newsroomStart} puts}} ${QUANTITY} at ±{margin} {marginCount, plural, one {point} other {points}}{wider, select, yes {, or ±{widerMargin} {basis, select, modelled {within the rounding of that interval} other {if {design, select, clustered {clustering} other {weighting}} cost more}}} other {}} ({level} confidence).`,
+  'margin-stated-only': `{pollsterStart} states ±{statedPp} {statedCount, plural, one {point} other {points}} for a share at {statedLevel} confidence; none is given here for ${QUANTITY}.`,
+  'small-shares': 'The stated margin is for a share near half; small shares have smaller margins.',
+  'margin-none': `No margin is given here for ${QUANTITY}.`,
   'errors-before-a-vote':
     'Margins cover sampling error only; studies of pre-election polls found total error about twice the stated margins.',
   errors:

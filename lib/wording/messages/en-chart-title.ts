@@ -1,14 +1,16 @@
-import type { ClaimMessages } from '@/lib/wording/language-pack';
+import type { ClaimMessages } from '../language-pack';
+import { EN_GAP } from './en-gap';
+import { EN_NET_SCORE, EN_NET_SCORE_CHANGE } from './en-net-score';
 
 /** Chart titles: the chart names pollster and dates beneath, the title says how far the picture goes. */
 export const EN_CHART_TITLE: ClaimMessages = {
   lead: {
     'holds-twice':
-      '{setting, select, contest {{a} leads {b}, {aShare} to {bShare}} other {More say {a} than {b}, {aShare} to {bShare}}}',
+      '{setting, select, contest {{among, select, several {Of the two, {a}} other {{a}}} leads {b}, {aShare} to {bShare}} other {More say {a} than {b}, {aShare} to {bShare}}}',
     holds:
-      '{setting, select, contest {{a} leads {b} in this poll, {aShare} to {bShare}} other {More say {a} than {b} in this poll, {aShare} to {bShare}}}',
+      '{setting, select, contest {{among, select, several {Of the two, {a}} other {{a}}} leads {b} in this poll, {aShare} to {bShare}} other {More say {a} than {b} in this poll, {aShare} to {bShare}}}',
     fragile:
-      '{setting, select, contest {{a} is ahead of {b} in this poll, {aShare} to {bShare}, but the poll cannot settle it} other {{a} has the higher figure in this poll, {aShare} to {bShare} for {b}, but the poll cannot settle it}}',
+      '{setting, select, contest {{among, select, several {Of the two, {a}} other {{a}}} is ahead of {b} in this poll, {aShare} to {bShare}, but the poll cannot settle it} other {{a} has the higher figure in this poll, {aShare} to {bShare} for {b}, but the poll cannot settle it}}',
     level: '{a} and {b} are level in this poll, at {aShare} each',
     'not-shown': '{a} {aShare}, {b} {bShare}: chance alone could produce this gap',
     family: '{a} {aShare}, {b} {bShare}: chance could produce this gap among several comparisons',
@@ -32,10 +34,12 @@ export const EN_CHART_TITLE: ClaimMessages = {
       '{reason, select, notDisclosed {{option}: figures not disclosed} notComparable {{option} at {now}; not comparable with {prevDates}} noSamplingBasis {{option} at {now}, with no recognised margin of error} other {{option} at {now}: the change since {prevDates} cannot be tested}}',
   },
   'lead-change': {
-    'holds-twice': 'The gap between {a} and {b} has moved towards {toward} since {prevDates}',
-    holds: 'The gap between {a} and {b} has moved towards {toward} in this poll since {prevDates}',
+    'holds-twice':
+      'The gap between {a} and {b} has moved {habit, select, US {toward} other {towards}} {toward} since {prevDates}',
+    holds:
+      'The gap between {a} and {b} has moved {habit, select, US {toward} other {towards}} {toward} in this poll since {prevDates}',
     fragile:
-      'The gap between {a} and {b} is further towards {toward} than on {prevDates}, but the polls cannot settle it',
+      'The gap between {a} and {b} is further {habit, select, US {toward} other {towards}} {toward} than on {prevDates}, but the polls cannot settle it',
     level: 'The gap between {a} and {b} is at the same figure as on {prevDates}',
     'not-shown':
       'The gap between {a} and {b}, compared with {prevDates}: chance alone could produce the difference',
@@ -59,4 +63,7 @@ export const EN_CHART_TITLE: ClaimMessages = {
     untested:
       '{reason, select, notDisclosed {{option}: figure not disclosed} noSamplingBasis {{option} at {share}, with no recognised margin of error} other {{option} at {share}: cannot be tested against {line}}}',
   },
+  'net-score': EN_NET_SCORE.chartTitle,
+  'net-score-change': EN_NET_SCORE_CHANGE.chartTitle,
+  gap: EN_GAP.chartTitle,
 };

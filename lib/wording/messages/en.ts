@@ -1,10 +1,21 @@
-import type { LanguagePack } from '@/lib/wording/language-pack';
+import type { LanguagePack } from '../language-pack';
+import { EN_ALT_TEXT } from './en-alt-text';
 import { EN_BODY } from './en-body';
 import { EN_CAVEAT } from './en-caveat';
 import { EN_CHART_TITLE } from './en-chart-title';
 import { EN_HEADLINE } from './en-headline';
 import { EN_LIMITS } from './en-limits';
 import { EN_METHOD_NOTE } from './en-method-note';
+import {
+  EN_CAVEAT_SHORT,
+  EN_CORRECTION,
+  EN_FRAGILE_SHORT,
+  EN_NEWSLETTER,
+  EN_ONE_BREATH,
+  EN_SPOKEN,
+} from './en-short';
+import { EN_SPOKEN_WORDS } from './en-spoken-words';
+import { EN_TOLD } from './en-told';
 
 /** English as the product ships it. */
 export const EN: LanguagePack = {
@@ -22,20 +33,30 @@ export const EN: LanguagePack = {
     override:
       '{differing, select, yes {The two polls differ in {items}; the desk compares them all the same: {reason}} other {The desk chose the poll to compare with: {reason}}}',
   },
-  altText: {
-    intro:
-      '{claim, select, lead {Uncertainty chart of the difference between {a} and {b}, {race}.} change {Uncertainty chart of the change for {option}, {race}.} leadChange {Uncertainty chart of the change in the gap between {a} and {b}, {race}.} other {Uncertainty chart of {option} against {line}, {race}.}}',
-    title: '{title}.',
-    range:
-      'The {level} range runs from {claim, select, lead {{span, select, across {{low} {lowCount, plural, one {point} other {points}} more for {b} to {high} {highCount, plural, one {point} other {points}} more for {a}.} other {{low} to {high} {highCount, plural, one {point} other {points}} more for {a}.}}} leadChange {{span, select, across {{low} {lowCount, plural, one {point} other {points}} towards {away} to {high} {highCount, plural, one {point} other {points}} towards {toward}.} other {{low} to {high} {highCount, plural, one {point} other {points}} towards {toward}.}}} change {{span, select, across {minus {low} to plus {high} {highCount, plural, one {point} other {points}}.} above {plus {low} to plus {high} {highCount, plural, one {point} other {points}}.} other {minus {high} to minus {low} {lowCount, plural, one {point} other {points}}.}}} other {{low} to {high}.}}',
-    wider:
-      '{basis, select, modelled {Within the rounding of the stated interval, it could run from} other {If {design, select, clustered {clustering} other {weighting}} cost more, it would run from}} {claim, select, lead {{widerSpan, select, across {{widerLow} {widerLowCount, plural, one {point} other {points}} more for {b} to {widerHigh} {widerHighCount, plural, one {point} other {points}} more for {a}.} other {{widerLow} to {widerHigh} {widerHighCount, plural, one {point} other {points}} more for {a}.}}} leadChange {{widerSpan, select, across {{widerLow} {widerLowCount, plural, one {point} other {points}} towards {away} to {widerHigh} {widerHighCount, plural, one {point} other {points}} towards {toward}.} other {{widerLow} to {widerHigh} {widerHighCount, plural, one {point} other {points}} towards {toward}.}}} change {{widerSpan, select, across {minus {widerLow} to plus {widerHigh} {widerHighCount, plural, one {point} other {points}}.} above {plus {widerLow} to plus {widerHigh} {widerHighCount, plural, one {point} other {points}}.} other {minus {widerHigh} to minus {widerLow} {widerLowCount, plural, one {point} other {points}}.}}} other {{widerLow} to {widerHigh}.}}',
-    fieldwork:
-      '{pollsterStart} surveyed {sized, select, yes {{n} {population}} other {{population}}}{modeKnown, select, yes { {mode}} other {}} {longSpan, select, day {on {startLong}} other {from {startShort} to {endLong}}}.',
+  altText: EN_ALT_TEXT,
+  told: EN_TOLD,
+  fragileShort: EN_FRAGILE_SHORT,
+  context: {
+    others: 'Also in this poll: {others}.',
+    bloc: '{bloc} counts {members} together.',
+    'shared-waves':
+      'The two polls share {shared} of their {window} waves; only the others make the difference between them.',
+    groups:
+      'The figures rest on {gSized, select, yes {{gN} interviews} other {an undisclosed number of interviews}} among {g} and {hSized, select, yes {{hN}} other {an undisclosed number}} among {h}.',
   },
+  caveatShort: EN_CAVEAT_SHORT,
+  oneBreath: EN_ONE_BREATH,
+  spoken: EN_SPOKEN,
+  newsletter: EN_NEWSLETTER,
+  correction: EN_CORRECTION,
   terms: {
     percent: '{n} percent',
+    perCent: '{n} per cent',
     quoted: '“{name}”',
+    everyoneElse: 'everyone else',
+    figure: '{name} at {share}',
+    earlierPoll:
+      '{spoken, select, yes {the poll{samePollster, select, yes {} other { by {prevPollster}}} that ended on {prevEnd}} other {the poll{samePollster, select, yes {} other { by {prevPollster}}} of {prevDates}}}',
     notDisclosed: 'not disclosed',
     half: 'half',
     threshold: 'the {pct} threshold',
@@ -91,5 +112,6 @@ export const EN: LanguagePack = {
       n: 'how many were asked',
       mode: 'how they were asked',
     },
+    spoken: EN_SPOKEN_WORDS,
   },
 };

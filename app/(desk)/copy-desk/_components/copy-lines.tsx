@@ -24,11 +24,18 @@ const FORMS: { form: CopyForm; word: string }[] = [
 const SMALL = '[&_.copy-block]:py-2 [&_.copy-block]:text-15';
 const SIZES: Record<LineKind, string> = {
   headline: '',
+  standfirst: '',
   body: '',
+  'change-sentence': '',
   caveat: SMALL,
+  'caveat-short': SMALL,
+  'caveat-one-breath': SMALL,
   'method-note': SMALL,
   'chart-title': SMALL,
   'alt-text': SMALL,
+  'spoken-line': '',
+  'newsletter-line': '',
+  'correction-notice': '',
 };
 
 type Status = { message: string; isFault: boolean };
