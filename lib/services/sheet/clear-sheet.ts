@@ -8,6 +8,7 @@ import { type Actor, canDraftSheets, isTwoPersonAgreement, type Role } from '@/l
 import { newId } from '@/lib/security/ids';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { refuseUnsigned } from '../house-style/sign-language';
 import { refuseUnderBan } from '../bans/hold';
 import { assembleSheet } from './assemble-sheet';
 import { markSiblings } from './languages';
@@ -53,6 +54,7 @@ export function clearSheetIn(
     isTwoPersonAgreement(filer, actor),
     'One of the two who agree has to be an editor. Leave this one to an editor.',
   );
+  refuseUnsigned(tx, opened.sheet.language);
   if (assembleSheet(tx, opened.sheet, now).withTexts(opened.texts).hash !== evidence.hash) {
     endFiling(tx, actor, opened, filing, now, {
       act: 'returned',
