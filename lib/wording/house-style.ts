@@ -16,7 +16,8 @@ export type HouseStyle = {
   comparisonRule: string;
   /** The rule named instead, per kind of sample that the desk computes as if random; empty for the one above. */
   comparisonRules: Record<NotRandom, string>;
-  percent: 'sign' | 'word';
+  /** 47%, 47 percent, 47 per cent. */
+  percent: 'sign' | 'word' | 'per-cent';
   /** Whole points in running text: always figures, or words up to nine. Shares are always figures. */
   numbers: 'figures' | 'words-to-nine';
   /** Rounding of margins and ranges in text; finer where it would move one across what it is compared with. */
@@ -55,7 +56,16 @@ export const DEFAULT_HOUSE_STYLE: HouseStyle = {
   locales: { en: 'en-GB' },
   ladder: {
     holds: ['leads', 'more say', 'up', 'down', 'has moved', 'above', 'below'],
-    fragile: ['is ahead', 'has the higher figure', 'higher', 'lower', 'further towards', 'above', 'below'],
+    fragile: [
+      'is ahead',
+      'ahead of',
+      'has the higher figure',
+      'higher',
+      'lower',
+      'further towards',
+      'above',
+      'below',
+    ],
     'does-not-hold': ['level', 'same figure', 'could', 'too near', 'little changed', 'exactly at'],
     'cannot-be-tested': [
       'no recognised margin',
