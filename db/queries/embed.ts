@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, desc, eq, inArray, max } from 'drizzle-orm';
+import { and, desc, eq, inArray, lt, max, sql } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { embeds, embedVersions } from '@/db/schema/embeds';
 import { people } from '@/db/schema/people';
@@ -58,8 +58,16 @@ export function pullEmbedVersions(conn: Conn, embedId: number, now: number, unse
 /**
  * What the public address answers from: the newest version, or the one asked for, with its evidence and whether
  * the embargo is over.
+ *
+ * @param madeBefore only versions from before this moment; null: whenever made
  */
-export function findPublicEmbed(conn: Conn, publicId: string, number: number | null, now: number) {
+export function findPublicEmbed(
+  conn: Conn,
+  publicId: string,
+  number: number | null,
+  now: number,
+  madeBefore: number | null = null,
+) {
   return (
     conn
       .select({
@@ -68,6 +76,8 @@ export function findPublicEmbed(conn: Conn, publicId: string, number: number | n
         hash: evidence.hash,
         evidenceId: evidence.id,
         embargoAt: releases.embargoAt,
+        raceId: releases.raceId,
+        publicSince: sql<number>`max(${embedVersions.createdAt}, coalesce(${releases.embargoLiftedAt}, ${releases.embargoAt}, 0))`,
         isPublic: isPublic(now),
       })
       .from(embeds)
@@ -76,7 +86,11 @@ export function findPublicEmbed(conn: Conn, publicId: string, number: number | n
       .innerJoin(sheets, eq(sheets.id, embeds.sheetId))
       .innerJoin(releases, eq(releases.id, sheets.releaseId))
       .where(
-        and(eq(embeds.publicId, publicId), number === null ? undefined : eq(embedVersions.number, number)),
+        and(
+          eq(embeds.publicId, publicId),
+          number === null ? undefined : eq(embedVersions.number, number),
+          madeBefore === null ? undefined : lt(embedVersions.createdAt, madeBefore),
+        ),
       )
       .orderBy(desc(embedVersions.number))
       .limit(1)

@@ -7,9 +7,10 @@ import { formatPercent, formatTrimmed } from '@/lib/format/number';
 import { type AsPrintedMessages, EN_AS_PRINTED } from './as-printed-messages';
 import type { HouseStyle } from './house-style';
 import { plain } from './names';
-import { printShare, type Voice, voiceOf } from './print';
+import { printShare } from './print';
 import { releaseSlots } from './release-slots';
 import { say, type Slots } from './say';
+import { type Voice, voiceOf } from './voice';
 
 const MESSAGES: Partial<Record<string, AsPrintedMessages>> = { en: EN_AS_PRINTED };
 /** More answers than these do not stand in a headline. */

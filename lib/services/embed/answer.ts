@@ -7,9 +7,11 @@ import { notFoundDocument } from '@/lib/charts/withdrawal-document';
 import type { ThemeChoice } from '@/lib/charts/tokens';
 import { THEME_CHOICES } from '@/lib/charts/tokens';
 import { sha256 } from '@/lib/security/ids';
+import { barOn } from '../bans/hold';
 import type { Ctx } from '../context';
 import type { EvidenceBody } from '../sheet/evidence-body';
 import { encodeBody, type Encoding, encodingFor } from './encode-body';
+import { heldOf } from './held-embed';
 import { dataOf, pageOf, pictureOf, withdrawalOf } from './render-embed';
 
 export type EmbedRequest = {
@@ -61,16 +63,40 @@ export function answerEmbed(request: EmbedRequest, ctx: Ctx = { db: getDb(), now
   if (!found?.isPublic || found.version.pulledUnseen) return notFound();
   const theme = THEME_CHOICES.find((choice) => choice === request.query.get('theme')) ?? 'auto';
   if (found.version.state === 'pulled') return withdrawn(found, part, theme);
+  const bar = barOn(ctx.db, found.raceId, ctx.now);
+  const shown = bar.sinceAt === null ? found : frozenAt(ctx, found, number, bar.sinceAt);
+  if (!shown) return notFound();
+  if (bar.figures === 'all-figures') return held(bar.untilAt ?? 0, part, theme);
+  return served(shown, part, theme, request, ctx, secondsLeft(bar.nextAt, ctx.now));
+}
+
+/** The version that was public when a ban began; nothing that came after it is shown while it lasts. */
+function frozenAt(ctx: Ctx, found: Found, number: string | undefined, sinceAt: number): Found | null {
+  const asked = number ? Number(number) : null;
+  const before = findPublicEmbed(ctx.db, found.embedId, asked, ctx.now, sinceAt);
+  return before && before.publicSince < sinceAt && before.version.state !== 'pulled' ? before : null;
+}
+
+function served(
+  found: Found,
+  part: Part,
+  theme: ThemeChoice,
+  request: EmbedRequest,
+  ctx: Ctx,
+  secondsLeft: number,
+): EmbedAnswer {
   const encoding = encodingFor(request.headers['accept-encoding']);
   const rendered = render(found, part, theme, encoding, ctx);
   const headers = {
     ...SAFE,
     'Content-Type': TYPES[part],
-    'Cache-Control': `public, max-age=${FRESH_SECONDS}, stale-while-revalidate=${STALE_SECONDS}, stale-if-error=${STALE_IF_ERROR_SECONDS}`,
+    'Cache-Control': lifetime(secondsLeft),
     ETag: rendered.etag,
     Vary: 'Accept-Encoding',
     ...(encoding === 'identity' ? {} : { 'Content-Encoding': encoding }),
-    ...(found.version.state === 'superseded' ? { Link: `</embed/${id}>; rel="latest-version"` } : {}),
+    ...(found.version.state === 'superseded'
+      ? { Link: `</embed/${found.embedId}>; rel="latest-version"` }
+      : {}),
   };
   if (matches(request.headers['if-none-match'], rendered.etag)) return { status: 304, headers, body: null };
   return { status: 200, headers, body: rendered.body };
@@ -87,6 +113,27 @@ function render(found: Found, part: Part, theme: ThemeChoice, encoding: Encoding
   const rendered = { body, etag: `"${sha256(body).slice(0, 32)}"` };
   bodies.set(key, rendered);
   return rendered;
+}
+
+/** No cache keeps an answer, stale ones included, past the moment at which a ban begins. */
+function lifetime(secondsLeft: number): string {
+  const fresh = Math.min(FRESH_SECONDS, secondsLeft);
+  const stale = Math.min(STALE_SECONDS, secondsLeft - fresh);
+  const ifError = Math.min(STALE_IF_ERROR_SECONDS, secondsLeft - fresh);
+  return `public, max-age=${fresh}, stale-while-revalidate=${stale}, stale-if-error=${ifError}`;
+}
+
+function secondsLeft(until: number | null, now: number): number {
+  return until === null ? Number.POSITIVE_INFINITY : Math.max(0, Math.floor((until - now) / 1000));
+}
+
+/** 410 while a ban bars what was public too; what was not public before it is as unknown as ever. */
+function held(untilAt: number, part: Part, theme: ThemeChoice): EmbedAnswer {
+  return {
+    status: 410,
+    headers: { ...SAFE, 'Content-Type': TYPES[part], 'Cache-Control': 'no-store' },
+    body: heldOf(part, untilAt, theme),
+  };
 }
 
 /** 410: on purpose, with a dated note and no figure. */
