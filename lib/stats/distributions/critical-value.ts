@@ -2,6 +2,9 @@ import studentQuantile from '@stdlib/stats-base-dists-t-quantile';
 import { normalQuantile } from './normal-quantile';
 import { isInside, required } from '../require';
 
+/** From here on Student's t is normal to twelve digits; soon after, the library's quantile is 0 (measured at 1e17). */
+const AS_NORMAL = 1e15;
+
 /**
  * The value that a test statistic must exceed on either side to be significant at alpha.
  *
@@ -19,5 +22,5 @@ import { isInside, required } from '../require';
 export function criticalValue(alpha: number, df: number | null): number {
   required(isInside(alpha), 'criticalValue', 'alpha inside 0 and 1');
   required(df === null || df >= 1, 'criticalValue', 'df of at least 1, or null');
-  return df === null ? -normalQuantile(alpha / 2) : -studentQuantile(alpha / 2, df);
+  return df === null || df >= AS_NORMAL ? -normalQuantile(alpha / 2) : -studentQuantile(alpha / 2, df);
 }

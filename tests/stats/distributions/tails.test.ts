@@ -43,6 +43,11 @@ describe("Student's t", () => {
     expectP(twoSidedP(value, df), alpha, 'p');
   });
 
+  test.each([1e15, 1e17, 1e20, 1e300])('is the normal distribution with %d degrees of freedom', (df) => {
+    expectFigure(criticalValue(0.05, df), criticalValue(0.05, null), 'quantile');
+    expectFigure(criticalValue(1e-12, df), criticalValue(1e-12, null), 'far quantile');
+  });
+
   test('approaches the normal distribution', () => {
     expect(criticalValue(0.05, 1e9)).toBeCloseTo(criticalValue(0.05, null), 7);
     expect(twoSidedP(2, 1e9)).toBeCloseTo(twoSidedP(2, null), 8);
