@@ -24,22 +24,24 @@ export function likelihoodInterval(p: number, effectiveN: number, q: number): In
   required(isInside(p), 'likelihoodInterval', 'p inside 0 and 1');
   required(isPositive(effectiveN) && isPositive(q), 'likelihoodInterval', 'effectiveN and q above 0');
   const divergence = (q * q) / (2 * effectiveN);
-  return [lowerEnd(p, 1 - p, divergence), 1 - lowerEnd(1 - p, p, divergence)];
+  return [p * Math.exp(-logFall(p, 1 - p, divergence)), p + fallOf(1 - p, logFall(1 - p, p, divergence))];
 }
 
+/** How far a share falls in s = ln(p/x), without the cancellation of p − x. */
+const fallOf = (p: number, s: number): number => -p * Math.expm1(-s);
+
 /**
- * The x below p at the given divergence, sought as s = ln(p/x), where the divergence is convex and rises: Newton
+ * How far the x below p at the given divergence lies, as s = ln(p/x), where the divergence is convex and rises: Newton
  * from above cannot overshoot.
  */
-function lowerEnd(p: number, rest: number, divergence: number): number {
+function logFall(p: number, rest: number, divergence: number): number {
   let s = (divergence - rest * Math.log(rest)) / p;
   for (let step = 0; step < MOST_STEPS; step += 1) {
-    const x = p * Math.exp(-s);
-    const gap = -p * Math.expm1(-s);
-    const excess = p * s - rest * Math.log1p(gap / rest) - divergence;
-    const move = excess / (gap / (1 - x));
+    const fall = fallOf(p, s);
+    const excess = p * s - rest * Math.log1p(fall / rest) - divergence;
+    const move = excess / (fall / (rest + fall));
     s -= move;
     if (!(Math.abs(move) > CLOSE_ENOUGH * s)) break;
   }
-  return p * Math.exp(-s);
+  return s;
 }

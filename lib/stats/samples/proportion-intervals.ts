@@ -13,7 +13,7 @@ export type ProportionIntervals = {
   /** The same on the logit scale, turned back: inside 0–1. */
   readonly logitNormal: Interval | null;
   readonly logitT: Interval | null;
-  /** On the arcsine scale as in R's survey: an end beyond 0 or 1 is folded back, so it may miss the estimate. */
+  /** On the arcsine scale as in R's survey: an end beyond 0 or 1 is folded back, so its ends may miss the estimate or change places. */
   readonly arcsineT: Interval | null;
   /** On the arcsine scale, an end beyond 0 or 1 set to 0 or 1. */
   readonly arcsineClampedT: Interval | null;

@@ -31,6 +31,7 @@ export type SurveyDesign = {
 };
 
 const FN = 'surveyDesign';
+const CONVENTIONS: readonly LonelyPsu[] = ['fail', 'remove', 'average', 'adjust'];
 
 /**
  * How a sample was drawn, checked and indexed once, for every estimate that is made on it.
@@ -55,6 +56,7 @@ const FN = 'surveyDesign';
  * @throws RangeError `surveyDesign requires a <name> for every respondent; <name>[<row>] is missing`
  * @throws RangeError `surveyDesign requires units inside one stratum, or nest; psu "<unit>" is in strata "<a>"
  *   and "<b>"`
+ * @throws RangeError `surveyDesign requires lonelyPsu 'fail', 'remove', 'average' or 'adjust'`
  * @throws RangeError `surveyDesign requires two units or more in a stratum, or a lonelyPsu convention; stratum
  *   "<stratum>" has one`
  * @throws RangeError `surveyDesign requires two units or more in some stratum`
@@ -163,6 +165,7 @@ function conventionInUse(
   psusInStratum: Int32Array,
   correction: Float64Array,
 ): SurveyDesign['lonelyPsu'] {
+  if (!CONVENTIONS.includes(asked)) refuse(FN, "lonelyPsu 'fail', 'remove', 'average' or 'adjust'");
   const lonely = psusInStratum.findIndex((units, stratum) => units === 1 && correction[stratum] !== 0);
   if (lonely < 0) return null;
   if (asked === 'fail') {

@@ -59,6 +59,14 @@ describe('intervals of a share from its standard error', () => {
 });
 
 describe('the likelihood interval', () => {
+  test.each([1e-9, 1e-17, 1e-40])('keeps its digits, in order, for a share of %d', (p) => {
+    const [low, high] = likelihoodInterval(p, 4 / p, 1.959963984540054);
+    const [rareLow, rareHigh] = likelihoodInterval(1e-6, 4e6, 1.959963984540054);
+    expect(low).toBeLessThan(p);
+    expect(low / p).toBeCloseTo(rareLow / 1e-6, 5);
+    expect(high / p).toBeCloseTo(rareHigh / 1e-6, 5);
+  });
+
   test('ends where twice the effective divergence is the square of the critical value', () => {
     fc.assert(
       fc.property(share, fc.double({ min: 10, max: 1e6, noNaN: true }), share, (p, effectiveN, alpha) => {

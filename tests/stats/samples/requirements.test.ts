@@ -277,6 +277,13 @@ describe('a respondent file is refused, with the row or stratum named, for', () 
     expect(run).toThrow(new RangeError(message));
   });
 
+  test('a convention that there is not', () => {
+    const convention = 'mean' as stats.LonelyPsu;
+    expect(() => stats.surveyDesign({ weights: [1, 1, 1], lonelyPsu: convention })).toThrow(
+      "surveyDesign requires lonelyPsu 'fail', 'remove', 'average' or 'adjust'",
+    );
+  });
+
   test.each(ofFigures)('intervals from %s', (_name, change, condition) => {
     expect(() => stats.proportionIntervals({ ...figures, ...change })).toThrow(
       new RangeError(`proportionIntervals requires ${condition}`),
