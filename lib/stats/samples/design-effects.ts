@@ -53,7 +53,7 @@ export function weightVariation(weights: ArrayLike<number>): WeightVariation {
   }
   const sumSquaredWeights = squares * largest * largest;
   required(
-    isPositive(sum) && isPositive(sumSquaredWeights),
+    Number.isFinite(sum) && sumSquaredWeights > 0 && Number.isFinite(sumSquaredWeights),
     'weightVariation',
     'weights whose squares have a finite sum above 0',
   );

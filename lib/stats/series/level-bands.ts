@@ -1,6 +1,7 @@
 import { criticalValue } from '../distributions/critical-value';
 import type { Interval } from '../interval';
 import { isInside, required } from '../require';
+import { isValue } from './refuse-series';
 
 /**
  * The band of a level: an interval for each day, widened by a floor that the desk sets.
@@ -28,13 +29,12 @@ export function levelBands(
   floorSd: number,
 ): Interval[] {
   const fn = 'levelBands';
-  const isNumber = (value: number) => Number.isFinite(value);
   const variancesFit =
-    means.length === variances.length && variances.every((one) => one >= 0 && isNumber(one));
+    means.length === variances.length && variances.every((one) => one >= 0 && isValue(one));
   required(variancesFit, fn, 'as many variances as means, of at least 0');
-  required(means.every(isNumber), fn, 'means that are finite numbers');
+  required(means.every(isValue), fn, 'means that are finite numbers');
   required(isInside(confidence), fn, 'a confidence level inside 0 and 1');
-  required(floorSd >= 0 && isNumber(floorSd), fn, 'a floor of at least 0');
+  required(floorSd >= 0 && isValue(floorSd), fn, 'a floor of at least 0');
   const critical = criticalValue(1 - confidence, null);
   return means.map((mean, day) => {
     const half = critical * Math.sqrt(variances[day]! + floorSd * floorSd);
