@@ -11,11 +11,19 @@ const level = number.refine((value) => value > 0.5 && value < 1, {
 const deffValue = number.refine((value) => value >= 0.5 && value <= 10, {
   error: 'A design effect lies from 0.5 to 10.',
 });
+/** So that effective counts stay whole numbers that can be held exactly. */
+const MOST_PEOPLE = 1e15;
+/** Smaller ones would vanish when taken as a part of 1. */
+const LEAST_PCT = 1e-12;
+
 export const wholeFrom = (least: number, error: string) =>
   number.refine((value) => Number.isInteger(value) && value >= least, { error });
 
+export const people = (error: string) =>
+  wholeFrom(1, error).refine((value) => value <= MOST_PEOPLE, { error: 'No sample has so many people.' });
+
 const statedInterval = z.strictObject({
-  pp: number.refine((value) => value > 0 && value < 100, {
+  pp: number.refine((value) => value >= LEAST_PCT && value < 100, {
     error: 'A margin in points lies between 0 and 100.',
   }),
   unit: number.refine((value) => value > 0 && value <= 10, {
@@ -46,7 +54,7 @@ export const base = z.strictObject({
   sampleSource: z.enum(['probability', 'quota', 'opt-in', 'blended', 'unknown'], {
     error: 'The sample source is probability, quota, opt-in, blended or unknown.',
   }),
-  n: wholeFrom(1, 'The sample size is a whole number of at least 1.').nullable(),
+  n: people('The sample size is a whole number of at least 1.').nullable(),
   design: z.enum(['weighted', 'unweighted', 'clustered'], {
     error: 'The design is weighted, unweighted or clustered.',
   }),
@@ -85,7 +93,7 @@ export const policy = z.strictObject({
 
 export const threshold = z.strictObject({
   option,
-  pct: number.refine((value) => value > 0 && value < 100, {
+  pct: number.refine((value) => value >= LEAST_PCT && value < 100, {
     error: 'A threshold lies between 0 and 100 percent.',
   }),
 });

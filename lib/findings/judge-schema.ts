@@ -1,6 +1,6 @@
 import * as z from 'zod';
 import { THRESHOLD_BASES } from '@/lib/domain/vocabulary';
-import { base, number, option, policy, threshold, wholeFrom } from './check-schema';
+import { base, number, option, people as peopleFrom, policy, threshold, wholeFrom } from './check-schema';
 
 /** The form of a release document: keys, kinds and the range of each single field. What joins fields comes after. */
 
@@ -12,7 +12,9 @@ const pct = number.refine((value) => value >= 0 && value <= 100, {
 const decimals = number.refine((value) => Number.isInteger(value) && value >= 0 && value <= 6, {
   error: 'Decimals are a whole number from 0 to 6.',
 });
-const people = wholeFrom(1, 'A number of people is a whole number of at least 1.');
+const people = peopleFrom('A number of people is a whole number of at least 1.');
+const MOST_WAVES = 10_000;
+const WAVES = 'The waves of an average are a whole number from 1 to 10,000.';
 
 const questionBase = base.extend({
   rebased: z.strictObject({ n: people.nullable() }).optional(),
@@ -65,7 +67,7 @@ const comparability = z.strictObject({
 });
 
 const overlap = z.strictObject({
-  window: wholeFrom(1, 'The waves of an average are a whole number of at least 1.'),
+  window: wholeFrom(1, WAVES).refine((waves) => waves <= MOST_WAVES, { error: WAVES }),
   shared: wholeFrom(0, 'The waves shared are a whole number of at least 0.'),
   interviews: z.array(people).optional(),
   shares: z.array(z.strictObject({ option, pct: z.array(pct) })).optional(),

@@ -1,6 +1,10 @@
 import { CheckRefused } from './check-refused';
 import type { AssumedDeff, CheckDocument, Range } from './check-types';
 
+/** Far outside anything meant, so that no product leaves the range of a number. */
+const LEAST_PART = 1e-9;
+const MOST_TIMES = 1e9;
+
 /**
  * Refuses a policy whose ranges descend, leave their limits or miss their value.
  *
@@ -15,7 +19,8 @@ export function refuseFaultyPolicy(policy: CheckDocument['policy']): void {
       );
     }
   }
-  if (policy?.kishRange && !isAround(policy.kishRange, 1)) {
+  const { kishRange } = policy ?? {};
+  if (kishRange && !(isAround(kishRange, 1) && kishRange[0] >= LEAST_PART && kishRange[1] <= MOST_TIMES)) {
     throw new CheckRefused('policy.kishRange', 'The range is positive, ascends and contains 1.');
   }
 }

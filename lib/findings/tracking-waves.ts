@@ -31,14 +31,17 @@ export function trackedWaves(
   const sizes = interviews
     ? scaledTo(interviews, earlier.n + later.n, window, shared)
     : places.map((index) => (isEarlier(index) ? earlier.n : later.n) / window);
-  const weightIn = (index: number, isInside: (place: number) => boolean) => {
-    if (!isInside(index)) return 0;
-    if (!interviews) return 1 / window;
-    return (sizes[index] ?? 0) / sumOf(sizes.filter((_, place) => isInside(place)));
+  const weightIn = (isInside: (place: number) => boolean) => {
+    const asked = interviews ? sumOf(sizes.filter((_, place) => isInside(place))) : null;
+    return (index: number) => {
+      if (!isInside(index)) return 0;
+      return asked === null ? 1 / window : (sizes[index] ?? 0) / asked;
+    };
   };
+  const [inLater, inEarlier] = [weightIn(isLater), weightIn(isEarlier)];
   return places.map((index) => ({
     in: isEarlier(index) ? (isLater(index) ? 'both' : 'earlier') : 'later',
-    weightChange: weightIn(index, isLater) - weightIn(index, isEarlier),
+    weightChange: inLater(index) - inEarlier(index),
     interviews: sizes[index] ?? 0,
   }));
 }

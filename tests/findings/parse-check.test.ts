@@ -51,6 +51,18 @@ const faults: [what: string, input: unknown, path: string][] = [
   ['n that is not a number', release({ n: Number.NaN }), 'release.n'],
   ['infinite n', release({ n: Number.POSITIVE_INFINITY }), 'release.n'],
   ['n that is not whole', release({ n: 10.5 }), 'release.n'],
+  ['more people than counts can hold', release({ n: 1e16 }), 'release.n'],
+  [
+    'a margin that vanishes',
+    release({ statedMargin: { ...margin, pp: 5e-324, unit: 5e-324 } }),
+    'release.statedMargin.pp',
+  ],
+  [
+    'a threshold that vanishes',
+    { ...release({}), thresholds: [{ option: 'Alder', pct: 5e-324 }] },
+    'thresholds[0].pct',
+  ],
+  ['a range without end', policy({ kishRange: [0.5, 1e308] }), 'policy.kishRange'],
   ['n as text', release({ n: '1000' }), 'release.n'],
   ['a share above 100', release({ shares: [share('Alder', 101)] }), 'release.shares[0].pct'],
   ['a negative share', release({ shares: [share('Alder', -1)] }), 'release.shares[0].pct'],

@@ -122,6 +122,11 @@ const FAULTS: [title: string, document: object, path: string][] = [
     'comparison.overlap.shared',
   ],
   [
+    'more waves than anyone has asked',
+    { release, comparison: { base, overlap: { window: 1e10, shared: 1 } } },
+    'comparison.overlap.window',
+  ],
+  [
     'half a wave',
     { release, comparison: { base, overlap: { window: 2.5, shared: 1 } } },
     'comparison.overlap.window',
