@@ -103,8 +103,10 @@ function onTwoBases({ fields, breaking }: Judged) {
 }
 
 function zip<A, B>(first: readonly A[], second: readonly B[]): [A, B][] {
-  return first.flatMap((one, index) => {
+  const both: [A, B][] = [];
+  first.forEach((one, index) => {
     const other = second[index];
-    return other === undefined ? [] : [[one, other] as [A, B]];
+    if (other !== undefined) both.push([one, other]);
   });
+  return both;
 }

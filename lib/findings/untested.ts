@@ -17,27 +17,26 @@ export function untestedReasons(
   policy: Policy,
 ): UntestedReason[] {
   const first = bases[0];
-  const applies: Record<UntestedReason, boolean> = {
-    'no-sample-size': bases.some((base) => !base.isSizeDisclosed),
-    'no-sampling-basis': bases.some((base) => lacksBasis(base, policy)),
-    'too-small': bases.some(({ sampled }) => sampled !== null && isBelow(sampled.nEff, policy.minimumNEff)),
-    'few-clusters': bases.some(({ sampled }) => (sampled?.deff.df ?? FEWEST_DF) < FEWEST_DF),
-    'not-comparable':
-      bases.some((base) => base.isProbability !== first?.isProbability) ||
-      bases.some((base) => options.some((option) => !base.units.has(option))),
-    'not-disclosed': bases.some((base) => options.some((option) => base.units.get(option) === null)),
-  };
-  return ORDER.filter((reason) => applies[reason]);
+  const isAny = (applies: (base: BaseFigures) => boolean) => bases.some(applies);
+  const reasons: UntestedReason[] = [];
+  if (isAny((base) => !base.isSizeDisclosed)) reasons.push('no-sample-size');
+  if (isAny((base) => lacksBasis(base, policy))) reasons.push('no-sampling-basis');
+  if (isAny(({ sampled }) => sampled !== null && isBelow(sampled.nEff, policy.minimumNEff))) {
+    reasons.push('too-small');
+  }
+  if (isAny(({ sampled }) => (sampled?.deff.df ?? FEWEST_DF) < FEWEST_DF)) reasons.push('few-clusters');
+  if (isAny((base) => base.isProbability !== first?.isProbability || lacksOption(base, options))) {
+    reasons.push('not-comparable');
+  }
+  if (isAny((base) => options.some((option) => base.units.get(option) === null))) {
+    reasons.push('not-disclosed');
+  }
+  return reasons;
 }
 
-const ORDER: readonly UntestedReason[] = [
-  'no-sample-size',
-  'no-sampling-basis',
-  'too-small',
-  'few-clusters',
-  'not-comparable',
-  'not-disclosed',
-];
+function lacksOption(base: BaseFigures, options: readonly string[]): boolean {
+  return options.some((option) => !base.units.has(option));
+}
 
 function lacksBasis(base: BaseFigures, policy: Policy): boolean {
   return !base.isProbability && !base.hasModelledInterval && !policy.comparisonBasis;
