@@ -48,6 +48,7 @@ export type SmoothedLevelWithHouses = {
  *   variance of at least 0`
  * @throws RangeError `smoothLevelWithHouses requires at most one exact result a day`
  * @throws RangeError `smoothLevelWithHouses requires a state variance above 0 where there are several exact results`
+ * @throws RangeError `smoothLevelWithHouses requires variances near enough to each other to tell the houses apart`
  * @see dense generalized least squares in R 4.2.2 with `contr.sum` columns; Jackman (2005), Australian Journal of
  *   Political Science 40, 499–517, for the model (from memory)
  * @example
@@ -76,6 +77,7 @@ export function smoothLevelWithHouses(
     houseList,
   );
   solveLevel(level, options.stateVariancePerDay, 0);
+  required(isSolved(level), fn, 'variances near enough to each other to tell the houses apart');
   const smoothed = smoothedDays(level);
   return {
     days: daysOf(options),
@@ -86,6 +88,12 @@ export function smoothLevelWithHouses(
     changes: (options.changes ?? []).map((span) => changeOver(level, smoothed, span)),
     predictions: (options.predictions ?? []).map((place) => predictPlace(level, smoothed, place)),
   };
+}
+
+/** Variances that differ by more than the digits of a number leave nothing to solve for some house. */
+function isSolved({ houses, logLikelihoodFlat }: Level): boolean {
+  const figures = houses ? [...houses.effects, ...houses.covariance] : [];
+  return Number.isFinite(logLikelihoodFlat) && figures.every(Number.isFinite);
 }
 
 export function houseEffectsOf({ houseList, houses, arranged }: Level): HouseEffect[] {

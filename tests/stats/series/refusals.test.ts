@@ -115,6 +115,21 @@ describe('a level refuses', () => {
 });
 
 describe('a level with houses refuses', () => {
+  test('variances between which no number has digits enough', () => {
+    const variances: [day: number, variance: number, house: string][] = [
+      [2, 1e-80, 'Kelmouth'],
+      [5, 1e19, 'Norwater'],
+      [5, 1e-85, 'Kelmouth'],
+      [3, 1e38, 'Sund'],
+      [3, 1e-30, 'Vell'],
+    ];
+    const far = variances.map(([day, variance, house]) => ({ day, value: 0.4, variance, house }));
+    const restless = { ...known, stateVariancePerDay: 1e56 };
+    expect(() => smoothLevelWithHouses(far, restless)).toThrow(
+      'smoothLevelWithHouses requires variances near enough to each other to tell the houses apart',
+    );
+  });
+
   const housed = (change: Partial<KnownHouseOptions>, polls: readonly (typeof poll)[] = [poll, other]) =>
     smoothLevelWithHouses(polls, { ...known, ...change });
   const result = { day: 4, value: 0.42, variance: 0 };
