@@ -7,14 +7,27 @@ const labels = (...roles: Role[]) => sectionsFor({ roles }).map(({ label }) => l
 
 describe('the rail', () => {
   it('shows each role the sections that are open to it', () => {
-    expect(labels('reporter')).toEqual(['Releases', 'Lines', 'Copy desk', 'Embeds', 'History']);
-    expect(labels('editor')).toEqual(['Releases', 'Lines', 'Copy desk', 'Embeds', 'History']);
-    expect(labels('copy-desk')).toEqual(['Copy desk', 'Embeds']);
-    expect(labels('administrator')).toEqual(['Copy desk', 'People', 'History']);
+    expect(labels('reporter')).toEqual([
+      'Releases',
+      'Lines',
+      'Copy desk',
+      'Embeds',
+      'House style',
+      'History',
+    ]);
+    expect(labels('editor')).toEqual(['Releases', 'Lines', 'Copy desk', 'Embeds', 'House style', 'History']);
+    expect(labels('copy-desk')).toEqual(['Copy desk', 'Embeds', 'House style']);
+    expect(labels('administrator')).toEqual(['Copy desk', 'House style', 'People', 'History']);
   });
 
   it('adds up the sections of several roles', () => {
-    expect(labels('copy-desk', 'administrator')).toEqual(['Copy desk', 'Embeds', 'People', 'History']);
+    expect(labels('copy-desk', 'administrator')).toEqual([
+      'Copy desk',
+      'Embeds',
+      'House style',
+      'People',
+      'History',
+    ]);
     expect(labels()).toEqual([]);
   });
 
