@@ -1,5 +1,4 @@
 import {
-  LINE_KINDS,
   REQUESTED_LINE_KINDS,
   type ClaimKind,
   type LineKind,

@@ -2,7 +2,7 @@ import { valueOf } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { Policy } from '@/lib/findings/check-types';
 import type { ReleaseUntestedReason } from '@/lib/findings/judge-types';
-import { namesOf, type DraftFinding } from './draft-finding';
+import { namesOf } from './draft-finding';
 import { figureOf, isOfTwoReleases, type DraftInput } from './draft-input';
 import type { Slots } from './say';
 

@@ -1,11 +1,11 @@
 import 'server-only';
 import type { Conn } from '@/db/client';
 import { findPerson } from '@/db/queries/person';
-import type { SheetRow } from '@/db/queries/sheet';
+import { listNewestLines, type SheetRow } from '@/db/queries/sheet';
 import { ENGLISH_CHART_WORDS } from '@/lib/charts/chart-words';
 import { soundingScene } from '@/lib/charts/sounding-scene';
 import { soundingSpecOf } from '@/lib/charts/sounding-spec-of';
-import type { Claim, LineText } from '@/lib/domain/sheet';
+import { inScreenOrder, type Claim, type LineText, type RequestedLineKind } from '@/lib/domain/sheet';
 import type { Language } from '@/lib/domain/vocabulary';
 import { AppError } from '@/lib/errors';
 import type { TestableFinding } from '@/lib/findings/check-types';
@@ -13,19 +13,26 @@ import { findClaim } from '@/lib/findings/claim-key';
 import { canonicalJson, hashOf } from '@/lib/security/canonical';
 import { sha256 } from '@/lib/security/ids';
 import { comparisonNote } from '@/lib/wording/comparison-words';
-import { draftSheet } from '@/lib/wording/draft-sheet';
+import { requestable } from '@/lib/wording/carries';
+import { draftLine, draftSheet } from '@/lib/wording/draft-sheet';
 import { type Computed, computeFindings } from '../release/compute-findings';
 import type { EvidenceBody } from './evidence-body';
 
 const SCENE_PX = 640;
 
-export type Subject = Pick<SheetRow, 'publicId' | 'claim' | 'claimKey' | 'language' | 'releaseVersionId'>;
+export type Subject = Pick<SheetRow, 'publicId' | 'claim' | 'claimKey' | 'language' | 'releaseVersionId'> & {
+  /** Absent of a sheet that is being made. */
+  id?: number;
+};
 
 export type Assembled = {
   finding: TestableFinding;
   findingIndex: number;
   computed: Computed;
   draft: LineText[];
+  /** Kinds of line that this claim can carry beside the standing ones, on the sheet or not yet. */
+  requestable: RequestedLineKind[];
+  draftRequested: (kind: RequestedLineKind) => string;
   /** The evidence that these texts would be cleared on. */
   withTexts: (texts: LineText[]) => { body: EvidenceBody; bytes: Buffer; hash: string };
   /** Hash of everything but the texts: what a writer has in front of them. */
@@ -45,7 +52,7 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
   const finding = found.finding;
   const claim = JSON.parse(sheet.claim) as Claim;
   const language = sheet.language as Language;
-  const draft = draftSheet({
+  const input = {
     claim,
     finding,
     answer,
@@ -55,7 +62,14 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
     houseStyle: settings.houseStyle.body,
     policy: settings.policy.body,
     language,
-  });
+  };
+  const offered = requestable(input);
+  const asked = sheet.id === undefined ? [] : listNewestLines(conn, sheet.id).map(({ line }) => line.kind);
+  const requested = offered.filter((kind) => asked.includes(kind));
+  const draft = inScreenOrder<LineText>(
+    [...draftSheet(input), ...requested.map((kind) => ({ kind, text: draftLine(input, kind) }))],
+    ({ kind }) => kind,
+  );
   const spec = soundingSpecOf(finding, document, ENGLISH_CHART_WORDS);
   if (!spec) throw new AppError('conflict', 'There is no figure to write about: a share is not disclosed.');
   const overridePerson = comparison.override && findPerson(conn, comparison.override.personId);
@@ -103,6 +117,8 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
     findingIndex: found.index,
     computed,
     draft,
+    requestable: offered,
+    draftRequested: (kind) => draftLine(input, kind),
     basisHash: hashOf(basis),
     withTexts: (texts) => {
       const body: EvidenceBody = { ...basis, texts };

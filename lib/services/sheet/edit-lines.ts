@@ -87,7 +87,7 @@ export function renewLines(tx: Tx, actor: Actor, opened: Opened, now: number): N
       publicId: newId(),
       lineId: line.id,
       number: version.number + 1,
-      draftText: draft.find(({ kind }) => kind === line.kind)!.text,
+      draftText: draft.find(({ kind }) => kind === line.kind)?.text ?? version.draftText,
       text: version.text,
       state: 'draft',
       templateVersion,

@@ -7,7 +7,7 @@ import { findWholeVersionByPublicId, listShares } from '@/db/queries/release';
 import { listClearedLines, listEarlierAgreed, listEarlierTexts } from '@/db/queries/sheet';
 import { type Actor, canReadUnpublished, type Role } from '@/lib/domain/roles';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
-import type { LineKind, LineState } from '@/lib/domain/sheet';
+import type { LineKind, LineState, RequestedLineKind } from '@/lib/domain/sheet';
 import { AppError } from '@/lib/errors';
 import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
@@ -47,6 +47,8 @@ export type SheetView = SheetPermissions & {
   author: string;
   isAuthor: boolean;
   lines: LineView[];
+  /** Kinds of line that can still be asked for. */
+  addable: RequestedLineKind[];
   acts: ActView[];
   filer: { name: string; at: number } | null;
   /** Hash of the evidence that a filed or cleared sheet stands on. */
@@ -90,6 +92,7 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
     author: opened.author,
     isAuthor: sheet.authorId === actor.personId,
     lines: linesOf(ctx, opened, shown.body, finding),
+    addable: shown.requestable.filter((kind) => !opened.lines.some(({ line }) => line.kind === kind)),
     acts: acts.map(({ act, person }) => ({ act: act.act, person, at: act.at, comment: act.comment })),
     filer: stands && { name: acts.find(({ act }) => act.id === stands.id)!.person, at: stands.at },
     hash: frozen?.hash ?? null,
@@ -115,18 +118,26 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
   };
 }
 
-type Shown = { body: EvidenceBody; basisHash: string; hasMoved: boolean };
+type Shown = {
+  body: EvidenceBody;
+  basisHash: string;
+  hasMoved: boolean;
+  requestable: RequestedLineKind[];
+};
+
+const NOTHING_TO_ADD = { basisHash: '', requestable: [] };
 
 /** Cleared words are shown on the evidence they were cleared on, everything else on the figures of now. */
 function evidenceShown(ctx: Ctx, opened: Opened, frozen: EvidenceRow | null): Shown {
-  if (frozen && opened.state !== 'filed') return { body: bodyOf(frozen), basisHash: '', hasMoved: false };
+  if (frozen && opened.state !== 'filed') return { ...NOTHING_TO_ADD, body: bodyOf(frozen), hasMoved: false };
   try {
     const assembled = assemble(ctx.db, opened.sheet, ctx.now);
     const { body, hash } = assembled.withTexts(opened.texts);
-    return { body, basisHash: assembled.basisHash, hasMoved: frozen !== null && frozen.hash !== hash };
+    const { basisHash, requestable } = assembled;
+    return { body, basisHash, hasMoved: frozen !== null && frozen.hash !== hash, requestable };
   } catch (error) {
     if (!frozen || !(error instanceof AppError)) throw error;
-    return { body: bodyOf(frozen), basisHash: '', hasMoved: true };
+    return { ...NOTHING_TO_ADD, body: bodyOf(frozen), hasMoved: true };
   }
 }
 

@@ -11,6 +11,7 @@ import { getSheet } from '@/lib/services/sheet/get-sheet';
 import { SheetScreen } from '../_components/sheet-screen';
 import { SheetTitle, tabOf } from '../_components/sheet-title';
 import {
+  addLineAction,
   changeFiledSheetAction,
   clearSheetAction,
   createEmbedAction,
@@ -22,6 +23,7 @@ import {
 } from '../actions';
 
 const ACTIONS = {
+  add: addLineAction,
   file: fileSheetAction,
   change: changeFiledSheetAction,
   clear: clearSheetAction,

@@ -7,6 +7,7 @@ type Reading = { id: string; hash: string };
 
 /** What the screen of a sheet can do; the page hands the actions in. */
 export type SheetActions = {
+  add: Action<{ id: string; version: number; kind: string }, { version: number }>;
   file: Action<Filing, { hash: string; version: number }>;
   change: Action<Filing, { hash: string; version: number }>;
   clear: Action<Reading, { outcome: 'cleared' | 'returned' }>;

@@ -8,6 +8,7 @@ import { sameLines, useLines } from '@/components/forms/sheet/use-lines';
 import { Button } from '@/components/ui/button';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
+import { AddLine } from './add-line';
 import { DiscardDraft } from './discard-draft';
 import { LastComment } from './last-comment';
 import { RefusedNote } from './refused-note';
@@ -76,6 +77,7 @@ export function Writing({ view, actions, person, now, zone, onDone }: Props) {
           attempt={attempt}
           onChange={change}
         />
+        <AddLine view={view} add={actions.add} save={save} version={version} onDone={onDone} />
       </SheetColumns>
       <RefusedNote failure={lines.some(({ kind }) => failure?.fields[kind]) ? null : failure} />
       <ActBar
