@@ -1,6 +1,7 @@
 import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
 import type { DisclosureStatus } from '@/lib/domain/disclosed';
 import type { CaveatSentence, Terms } from './language-pack';
+import { rebasedSentence } from './context';
 import { sayAll, type Draft } from './draft';
 import { namesOf } from './draft-finding';
 import { figureOf, isOfTwoReleases } from './draft-input';
@@ -23,6 +24,7 @@ export function draftCaveat(draft: Draft): string {
   ];
   return [
     sayAll(sentences.map(messageOf(pack.caveat)), draft),
+    rebasedSentence(draft),
     missing('not-disclosed', draft),
     missing('not-entered', draft),
     sayAll(closing.map(messageOf(pack.caveat)), draft),

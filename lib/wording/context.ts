@@ -25,8 +25,17 @@ export function blocSlots({ name, options, source }: BlocTold, draft: Draft): Sl
   return { bloc: isolated(name), members: listOf(members, draft), source };
 }
 
+/** Whom re-based shares are shares of; an empty text where they are of everyone asked. */
+export function rebasedSentence(draft: Draft): string {
+  const rebasedN = draft.input.beside?.rebasedN;
+  if (typeof rebasedN !== 'number') return '';
+  return sayAll([draft.pack.methodNote.rebased], draft, { rebasedN: printCount(rebasedN, draft.voice) });
+}
+
+/** Whether some waves, though not all, stand in both averages. */
 export function sharesWaves({ input }: Draft): boolean {
-  return isOfTwoReleases(input.finding.kind) && Boolean(input.beside?.overlap);
+  const overlap = input.beside?.overlap;
+  return isOfTwoReleases(input.finding.kind) && overlap != null && overlap.shared < overlap.window;
 }
 
 export function waveSlots({ input, voice }: Draft): Slots {
@@ -52,6 +61,7 @@ function figuresOf(names: readonly string[], draft: Draft): string {
   return listOf(figures, draft);
 }
 
-function listOf(items: readonly string[], { voice }: Draft): string {
+/** Items in a row, joined as the language joins them. */
+export function listOf(items: readonly string[], { voice }: Draft): string {
   return new Intl.ListFormat(voice.locale, { type: 'conjunction' }).format(items);
 }

@@ -1,6 +1,7 @@
 import { isOfTwoReleases } from './draft-input';
 import { hasRange, sayAll, type Draft } from './draft';
 import { missing } from './caveat';
+import { rebasedSentence } from './context';
 import type { MarginCase } from './language-pack';
 import { say } from './say';
 import { claimMessage, fragileReasons } from './wording-state';
@@ -54,6 +55,7 @@ export function draftShortCaveat(draft: Draft): string {
   const isOfTwo = isOfTwoReleases(input.finding.kind);
   return join([
     sayAll([pack.caveat.fieldwork, isOfTwo ? pack.caveat.earlier : null], draft),
+    rebasedSentence(draft),
     missing('not-disclosed', draft),
     missing('not-entered', draft),
     sayAll([pack.caveatShort[marginCase(draft)]], draft),

@@ -3,12 +3,15 @@ import { draftSheet } from '@/lib/wording/draft-sheet';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
 import { claimsAbove } from '@/lib/wording/never-says-more';
 import { claimMessage, VERDICT_OF_STATE, wordingState, type WordingState } from '@/lib/wording/wording-state';
+import type { DraftInput } from '@/lib/wording/draft-input';
 import { GOLDEN_CASES } from './golden-cases';
+import { JUDGED_CASES } from './judged-cases';
 
 const { ladder, messages } = DEFAULT_HOUSE_STYLE;
-const KINDS = ['lead', 'change', 'lead-change', 'threshold'] as const;
+const KINDS = ['lead', 'change', 'lead-change', 'threshold', 'net-score', 'net-score-change', 'gap'] as const;
+const CASES = Object.entries<DraftInput>({ ...GOLDEN_CASES, ...JUDGED_CASES });
 const STATES = Object.keys(VERDICT_OF_STATE) as WordingState[];
-const LINES = ['headline', 'body', 'chartTitle'] as const;
+const LINES = ['headline', 'body', 'chartTitle', 'told'] as const;
 
 describe('the ladder of verbs', () => {
   const cases = LINES.flatMap((line) =>
@@ -24,7 +27,7 @@ describe('the ladder of verbs', () => {
     expect(claimsAbove(VERDICT_OF_STATE[state], message)).toEqual([]);
   });
 
-  it.each(Object.entries(GOLDEN_CASES))('carries the headline and the chart title of %s', (_, input) => {
+  it.each(CASES)('carries the headline and the chart title of %s', (_, input) => {
     const titles = draftSheet(input).filter(({ kind }) => kind === 'headline' || kind === 'chart-title');
     for (const { text } of titles) {
       const own = ladder[input.finding.verdict].filter((verb) => text.toLowerCase().includes(verb));
@@ -33,9 +36,7 @@ describe('the ladder of verbs', () => {
   });
 
   it('has a case for every state of every kind of claim among the golden sheets', () => {
-    const seen = Object.values(GOLDEN_CASES).map(
-      ({ finding }) => `${finding.kind} ${VERDICT_OF_STATE[wordingState(finding)]}`,
-    );
+    const seen = CASES.map(([, { finding }]) => `${finding.kind} ${VERDICT_OF_STATE[wordingState(finding)]}`);
     const wanted = KINDS.flatMap((kind) =>
       Object.values(VERDICT_OF_STATE).map((verdict) => `${kind} ${verdict}`),
     );

@@ -52,7 +52,7 @@ export const EN_LIMITS: Pick<LanguagePack, 'range' | 'detectable' | 'fragile' | 
       'The two polls share interviews that cannot be told apart, so the change between them cannot be worked out.',
     'same-people':
       'The same people were asked both times, and how many of them changed their answer is not disclosed.',
-    'independent-margin': `Two separate samples of these sizes would have a margin of ±{independent} ${points('independent')} here; people asked twice need not.`,
+    'independent-margin': `Two separate samples of these sizes would have a margin of ±{independent} ${points('independent')} here; that of people asked twice is not known.`,
     'rebased-size':
       'The shares leave out people who made no choice, and how many were left is not disclosed.',
     'other-base': 'The rule behind {line} counts other people than these shares do.',

@@ -7,6 +7,7 @@ const filed = { ok: true as const, value: { hash: 'a'.repeat(64), version: 9 } }
 /** What the page hands to the screen, each answering as the services do when all goes well. */
 export function sheetActs() {
   return {
+    add: vi.fn<SheetActions['add']>().mockResolvedValue({ ok: true, value: { version: 9 } }),
     file: vi.fn<SheetActions['file']>().mockResolvedValue(filed),
     change: vi.fn<SheetActions['change']>().mockResolvedValue(filed),
     clear: vi.fn<SheetActions['clear']>().mockResolvedValue({ ok: true, value: { outcome: 'cleared' } }),
