@@ -70,7 +70,7 @@ export const EN_NET_SCORE_CHANGE: Messages<'net-score-change'> = {
     holds: upOrDown((word) => `Net {name} score ${word} since {prevDates} in polls by {pollsters}`),
     fragile: higherOrLower(
       (word) =>
-        `Net {name} score ${word} than on {prevDates}, {netNow} against {netThen}, but polls by {pollsters} cannot settle it`,
+        `Net {name} score ${word} than on {prevDates}, {netNow} to {netThen}, but polls by {pollsters} cannot settle it`,
     ),
     level: 'Net {name} score at {netNow} in poll by {pollster}, the same figure as on {prevDates}',
     'not-shown':
