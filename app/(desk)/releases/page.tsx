@@ -40,7 +40,14 @@ export default async function ReleasesPage() {
   return (
     <>
       <PageTitle title="Releases" sub="What polls measured, newest first." />
-      <NextBar actions={logNew}>
+      <NextBar
+        actions={
+          <>
+            <LinkButton href="/releases/bans">Publication bans</LinkButton>
+            {logNew}
+          </>
+        }
+      >
         <strong>
           {releases.length} {releases.length === 1 ? 'release' : 'releases'} on file.
         </strong>{' '}

@@ -6,6 +6,7 @@ import { findPerson } from '@/db/queries/person';
 import { findWholeVersionByPublicId, listShares } from '@/db/queries/release';
 import { listClearedLines } from '@/db/queries/sheet';
 import { type Actor, canActAsEditor, canReadUnpublished, type Role } from '@/lib/domain/roles';
+import { isAsPrinted } from '@/lib/domain/as-printed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { LineState, LineText } from '@/lib/domain/sheet';
 import type { MissingDisclosure } from '@/lib/findings/disclosure';
@@ -46,6 +47,12 @@ export type AsPrintedView = SheetPermissions & {
   maySecond: boolean;
   desk: DeskView;
 };
+
+/** Whether a sheet gives figures as printed and claims nothing. */
+export function isAsPrintedSheet(actor: Actor, id: string, ctx: Ctx): boolean {
+  authorize(canReadUnpublished(actor), 'Sheets are written and read by reporters and editors.');
+  return isAsPrinted(openSheet(ctx.db, actor, id, ctx.now).sheet);
+}
 
 /** A sheet of figures as printed with what this person may do with it now. */
 export function getAsPrinted(actor: Actor, id: string, ctx: Ctx): AsPrintedView {

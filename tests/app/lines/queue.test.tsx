@@ -27,10 +27,16 @@ const sheet = (change: Partial<OpenSheetItem> = {}): OpenSheetItem => ({
   returned: null,
   waitsFor: 'me',
   isUnderEmbargo: false,
+  wanted: null,
+  look: { kind: 'waiting', escalatesAt: NOW + 600_000 },
+  isHeld: false,
+  needsReview: false,
+  isAsPrinted: false,
   ...change,
 });
 const draft = sheet({ id: 'b', state: 'draft', filedBy: null, filedAt: null, waitsFor: 'nobody' });
 
+let onCall: string[] = [];
 let answer: () => Response;
 let asked = 0;
 const server = setupServer(
@@ -48,13 +54,13 @@ beforeEach(() => {
 afterEach(cleanup);
 
 const answers = (sheets: OpenSheetItem[], readAt = NOW) => {
-  answer = () => HttpResponse.json({ sheets, readAt } satisfies QueueData);
+  answer = () => HttpResponse.json({ sheets, onCall, readAt } satisfies QueueData);
 };
 const open = (initial?: OpenSheetItem[], everyMs = 0) =>
   render(
     <SWRConfig value={{ provider: () => new Map(), dedupingInterval: 0 }}>
       <Queue
-        initial={initial && { sheets: initial, readAt: NOW }}
+        initial={initial && { sheets: initial, onCall, readAt: NOW }}
         person="rhea"
         zone="Etc/UTC"
         everyMs={everyMs}
@@ -95,6 +101,28 @@ describe('the queue', () => {
       'Filed by you, 08:00. Somebody else reads it.',
     );
     await waitFor(() => expect(asked).toBeGreaterThan(0));
+  });
+
+  it('puts a time and what presses under a sheet, and says whom to fetch for one that nobody opened', async () => {
+    onCall = ['Isolde Varn', 'Marten Reed'];
+    const late = sheet({
+      look: { kind: 'escalated', since: NOW - 60_000 },
+      wanted: { at: NOW - 5 * 60_000, local: '2026-09-17T09:55', zone: 'Europe/Vienna' },
+      isHeld: true,
+      needsReview: true,
+    });
+    answers([late]);
+    open([late]);
+    expect(screen.getByText('On call now: Isolde Varn and Marten Reed.')).toBeTruthy();
+    for (const mark of [
+      'Overdue: wanted by 09:55 (Europe/Vienna), 5 minutes ago',
+      'Not opened by a second person for 10 minutes',
+      'Held: publication is barred now',
+      'Needs review: changed in another language',
+    ])
+      expect(screen.getByText(mark)).toBeTruthy();
+    await waitFor(() => expect(asked).toBeGreaterThan(0));
+    onCall = [];
   });
 
   it('says while it is loading, and what would stand there when nothing does', async () => {

@@ -113,7 +113,7 @@ describe('a filed sheet before its second reader', () => {
     fireEvent.change(within(dialog).getByLabelText('What should change?'), { target: { value: comment } });
     await userEvent.click(within(dialog).getByRole('button', { name: 'Send back' }));
     await waitFor(() => expect(refresh).toHaveBeenCalled());
-    expect(acts.sendBack).toHaveBeenLastCalledWith({ id, hash: views.filed.hash, comment });
+    expect(acts.sendBack).toHaveBeenLastCalledWith({ id, hash: views.filed.hash, comment, lines: [] });
   });
 
   it('stays as it is when the dialog is left by its plain button', async () => {

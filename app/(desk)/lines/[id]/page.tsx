@@ -7,19 +7,28 @@ import { PageTitle } from '@/components/ui/page-title';
 import { deskPage } from '@/lib/auth/desk-page';
 import { readEnv } from '@/lib/env';
 import { AppError } from '@/lib/errors';
+import { getAsPrinted, isAsPrintedSheet } from '@/lib/services/sheet/get-as-printed';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
+import { AsPrintedScreen } from '../_components/as-printed-screen';
+import { PresenceNote } from '../_components/presence-note';
 import { SheetScreen } from '../_components/sheet-screen';
 import { SheetTitle, tabOf } from '../_components/sheet-title';
 import {
+  addCommentAction,
   addLineAction,
   changeFiledSheetAction,
   clearSheetAction,
   createEmbedAction,
   discardSheetAction,
   fileSheetAction,
+  markReviewedAction,
   pullSheetAction,
+  readSecondAction,
+  releaseAloneAction,
+  resolveCommentAction,
   reviseSheetAction,
   sendBackAction,
+  setTermsAction,
 } from '../actions';
 
 const ACTIONS = {
@@ -32,6 +41,12 @@ const ACTIONS = {
   revise: reviseSheetAction,
   discard: discardSheetAction,
   embed: createEmbedAction,
+  comment: addCommentAction,
+  settle: resolveCommentAction,
+  terms: setTermsAction,
+  review: markReviewedAction,
+  alone: releaseAloneAction,
+  second: readSecondAction,
 };
 
 type Props = { params: Promise<{ id: string }> };
@@ -39,7 +54,9 @@ type Props = { params: Promise<{ id: string }> };
 /** Read once for the page and its name. */
 const readPage = cache((id: string) =>
   deskPage((actor, ctx) => ({
-    ...viewOrProblem(() => getSheet(actor, id, ctx)),
+    ...(isAsPrintedSheet(actor, id, ctx)
+      ? { view: null, printed: getAsPrinted(actor, id, ctx), problem: null }
+      : { ...viewOrProblem(() => getSheet(actor, id, ctx)), printed: null }),
     person: actor.publicId,
     now: ctx.now,
   })),
@@ -49,18 +66,28 @@ const readPage = cache((id: string) =>
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
   const { id } = await params;
   const page = await readPage(id).catch(() => null);
-  return { title: page?.view ? tabOf(page.view) : 'Sheet' };
+  const printed = page?.printed && `${page.printed.release.race.name}: figures as printed`;
+  return { title: page?.view ? tabOf(page.view) : (printed ?? 'Sheet') };
 }
 
 export default async function SheetPage({ params }: Props) {
   const { id } = await params;
-  const { view, problem, person, now } = await readPage(id);
+  const { view, printed, problem, person, now } = await readPage(id);
+  if (printed)
+    return (
+      <>
+        <EmbargoBand embargo={printed.embargo} isOnList={printed.isOnList} />
+        <PresenceNote id={printed.id} person={person} doing="reading" />
+        <AsPrintedScreen view={printed} actions={ACTIONS} now={now} zone={readEnv().LEADLINE_ZONE} />
+      </>
+    );
   if (!view) return <NoClaim problem={problem} />;
   const zone = readEnv().LEADLINE_ZONE;
   return (
     <>
       <EmbargoBand embargo={view.embargo} isOnList={view.isOnList} />
       <SheetTitle view={view} now={now} zone={zone} />
+      <PresenceNote id={view.id} person={person} doing={view.may.write ? 'writing' : 'reading'} />
       <SheetScreen view={view} actions={ACTIONS} person={person} now={now} zone={zone} />
     </>
   );

@@ -43,7 +43,12 @@ export function FiledBar({
               </Button>
             ) : null}
             {view.may.sendBack && !isFiler && !clear.isPending ? (
-              <SendBackDialog author={view.author} back={back} seen={seen} />
+              <SendBackDialog
+                author={view.author}
+                back={back}
+                seen={seen}
+                kinds={view.lines.filter(({ knockedOut }) => !knockedOut).map(({ kind }) => kind)}
+              />
             ) : null}
             {view.may.clear && !back.isPending ? (
               <Button

@@ -1,6 +1,5 @@
 'use client';
 
-import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ReasonDialog } from '../../../_components/reason-dialog';
 import { RefusedNote } from './refused-note';
 import type { SheetActions } from './sheet-actions';
@@ -11,7 +10,7 @@ export function PullDialog({
   pull,
   onDone,
 }: {
-  view: SheetView;
+  view: { id: string };
   pull: SheetActions['pull'];
   onDone: (words: string) => void;
 }) {

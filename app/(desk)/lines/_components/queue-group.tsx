@@ -3,6 +3,7 @@ import { when } from '@/components/lines/when';
 import { SectionHeading } from '@/components/ui/section-heading';
 import { LINE_STATE_NAMES } from '@/lib/domain/sheet';
 import { formatDayRange } from '@/lib/format/date';
+import { WorkMarks } from './work-marks';
 import type { OpenSheetItem } from '@/lib/services/sheet/list-open-sheets';
 
 const LOCALE = 'en-GB';
@@ -46,6 +47,7 @@ export function QueueGroup({
               {sheet.race}, {sheet.pollster}, {formatDayRange(sheet.fieldStartOn, sheet.fieldEndOn, LOCALE)}.{' '}
               {standing(sheet, now, zone)}
             </p>
+            <WorkMarks sheet={sheet} now={now} />
             {sheet.returned ? (
               <p className="mt-1 max-w-prose border-l-[3px] border-caution pl-3">
                 {sheet.returned.by}, {when(sheet.returned.at, now, zone)}: “{sheet.returned.comment}”

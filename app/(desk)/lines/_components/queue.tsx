@@ -9,10 +9,11 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { Loading } from '@/components/ui/loading';
 import { formatTime } from '@/lib/format/date';
 import type { OpenSheetItem } from '@/lib/services/sheet/list-open-sheets';
+import { Escalated } from './escalated';
 import { QueueGroup } from './queue-group';
 import { useNews } from './use-news';
 
-export type QueueData = { sheets: OpenSheetItem[]; readAt: number };
+export type QueueData = { sheets: OpenSheetItem[]; onCall: string[]; readAt: number };
 
 const EVERY_MS = 10_000;
 
@@ -84,13 +85,18 @@ function Groups({ data, zone }: { data: QueueData; zone: string }) {
         </p>
       </EmptyState>
     );
-  return GROUPS.map(({ waitsFor, title }) => (
-    <QueueGroup
-      key={waitsFor}
-      title={title}
-      sheets={data.sheets.filter((sheet) => sheet.waitsFor === waitsFor)}
-      now={data.readAt}
-      zone={zone}
-    />
-  ));
+  return (
+    <>
+      <Escalated data={data} />
+      {GROUPS.map(({ waitsFor, title }) => (
+        <QueueGroup
+          key={waitsFor}
+          title={title}
+          sheets={data.sheets.filter((sheet) => sheet.waitsFor === waitsFor)}
+          now={data.readAt}
+          zone={zone}
+        />
+      ))}
+    </>
+  );
 }

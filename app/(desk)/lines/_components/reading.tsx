@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { PrintableLine } from '@/components/lines/printable-line';
 import { SectionHeading } from '@/components/ui/section-heading';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
+import { AGAINST, type Against, AgainstChoice } from './against-choice';
 import { Changing } from './changing';
 import { FiledBar } from './filed-bar';
 import { MovedNote } from './moved-note';
@@ -15,24 +16,27 @@ type Props = { view: SheetView; actions: SheetActions; onDone: (words: string) =
 /** A filed sheet as its second reader sees it: printable words beside all they rest on. */
 export function Reading({ view, actions, onDone }: Props) {
   const [isChanging, setChanging] = useState(false);
+  const isAgain = view.isAuthor && view.notYours !== 'filer';
+  const [against, setAgainst] = useState<Against>(isAgain ? 'filed' : 'draft');
   if (isChanging)
     return <Changing view={view} actions={actions} onDone={onDone} onLeave={() => setChanging(false)} />;
-  const isAgain = view.isAuthor && view.notYours !== 'filer';
+  const isThere = (one: Against) => one === 'draft' || view.lines.some((line) => line[one] !== null);
   return (
     <>
       <MovedNote view={view} />
       <SheetColumns view={view}>
         <div className="mb-2">
           <SectionHeading>
-            {isAgain ? 'Marked against what you filed' : 'Marked against the draft'}
+            {isAgain && against === 'filed' ? 'Marked against what you filed' : AGAINST[against]}
           </SectionHeading>
+          <AgainstChoice value={against} isThere={isThere} onChange={setAgainst} />
         </div>
-        {view.lines.map(({ kind, text, draft, earlier, knockedOut, above }) => (
+        {view.lines.map(({ kind, text, draft, filed, cleared, knockedOut, above }) => (
           <PrintableLine
             key={kind}
             kind={kind}
             text={text}
-            before={isAgain ? (earlier ?? draft) : draft}
+            before={{ draft, filed: filed ?? draft, cleared: cleared ?? '' }[against]}
             knockedOut={knockedOut}
             above={above}
             verdict={view.finding.verdict}

@@ -1,4 +1,5 @@
 import type { ActionResult } from '@/lib/errors';
+import type { SetTerms } from './terms-form';
 
 type Action<Input, Value> = (input: Input) => Promise<ActionResult<Value>>;
 type Line = { kind: string; text: string; knockedOut: boolean };
@@ -11,9 +12,13 @@ export type SheetActions = {
   file: Action<Filing, { hash: string; version: number }>;
   change: Action<Filing, { hash: string; version: number }>;
   clear: Action<Reading, { outcome: 'cleared' | 'returned' }>;
-  sendBack: Action<Reading & { comment: string }, void>;
+  sendBack: Action<Reading & { comment: string; lines?: { kind: string; reason: string }[] }, void>;
   pull: Action<{ id: string; reason: string }, void>;
   revise: Action<{ id: string; version: number }, { version: number }>;
   discard: Action<{ id: string }, void>;
   embed: Action<{ sheetId: string }, { id: string }>;
+  comment: Action<unknown, { id: string }>;
+  settle: Action<{ id: string }, void>;
+  terms: SetTerms;
+  review: Action<{ id: string }, void>;
 };

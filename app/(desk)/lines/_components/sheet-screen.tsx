@@ -4,9 +4,13 @@ import { useEffect, useRef, useState } from 'react';
 import { ActsList } from '@/components/lines/acts-list';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { Cleared } from './cleared';
+import { Comments } from './comments';
+import { KeyList } from './key-list';
 import { PullDialog } from './pull-dialog';
 import { Reading } from './reading';
 import type { SheetActions } from './sheet-actions';
+import { StandingNotes } from './standing-notes';
+import { TermsForm } from './terms-form';
 import { Waiting } from './waiting';
 import { Writing } from './writing';
 
@@ -33,6 +37,7 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
       <p ref={said} tabIndex={-1} role="status" className="mt-2 font-semibold">
         {done}
       </p>
+      <StandingNotes id={view.id} desk={view.desk} review={actions.review} />
       {isBeingRewritten ? (
         <div className="mt-2 flex flex-wrap items-center gap-3">
           <p>An earlier version of these words is cleared and served until this one is cleared.</p>
@@ -56,7 +61,18 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
       ) : (
         <Waiting view={view} now={now} zone={zone} />
       )}
+      <Comments
+        id={view.id}
+        lines={view.lines.filter(({ knockedOut }) => !knockedOut)}
+        comments={view.desk.comments}
+        actions={actions}
+        isOpen={view.state !== 'cleared' && view.state !== 'pulled'}
+        now={now}
+        zone={zone}
+      />
+      <TermsForm id={view.id} desk={view.desk} zone={zone} now={now} set={actions.terms} />
       <ActsList acts={view.acts} now={now} zone={zone} />
+      <KeyList />
     </>
   );
 }

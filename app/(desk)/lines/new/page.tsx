@@ -7,7 +7,8 @@ import { deskPage } from '@/lib/auth/desk-page';
 import { formatDayRange } from '@/lib/format/date';
 import { getRelease } from '@/lib/services/release/get-release';
 import { ChooseClaim } from '../_components/choose-claim';
-import { createSheetAction } from '../actions';
+import { StartAsPrinted } from '../_components/start-as-printed';
+import { createAsPrintedAction, createSheetAction } from '../actions';
 
 export const metadata: Metadata = { title: 'Draft a sheet' };
 
@@ -39,6 +40,7 @@ export default async function NewSheetPage({ searchParams }: { searchParams: Pro
         answer={answer}
         create={createSheetAction}
       />
+      <StartAsPrinted releaseId={release.id} create={createAsPrintedAction} />
       <p className="mt-6">
         <Link href={`/releases/${release.id}`}>Back to the release</Link>
       </p>
