@@ -7,6 +7,7 @@ import { type Actor, canReadCopyDesk } from '@/lib/domain/roles';
 import { inScreenOrder, LINE_KINDS } from '@/lib/domain/sheet';
 import { AppError } from '@/lib/errors';
 import { asHtml, asMarkdown, asPlain } from '@/lib/wording/copy-forms';
+import { refuseUnderBan } from '../bans/hold';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 
@@ -30,6 +31,7 @@ export function copyLines(actor: Actor, input: unknown, ctx: Ctx): Copied {
       isPublic || isListed(tx, found.release.id, actor),
       'This release is under embargo. Only people on its list copy from it before the hour.',
     );
+    refuseUnderBan(tx, found.release.raceId, ctx.now);
     const lines = inScreenOrder(listClearedLines(tx, found.sheet.id), ({ line }) => line.kind).filter(
       ({ line }) => kinds.includes(line.kind),
     );
