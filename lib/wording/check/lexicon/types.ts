@@ -1,0 +1,161 @@
+import type { Cue } from '../phrases';
+
+/** Groups of phrases; what each claims is said where a rule uses it. */
+export const CUE_GROUPS = [
+  'leadStrong',
+  'leadWeak',
+  'leadStyle',
+  'leadNoun',
+  'trailStrong',
+  'trailWeak',
+  'second',
+  'notional',
+  'tied',
+  'level',
+  'up',
+  'down',
+  'dramatic',
+  'momentum',
+  'leadUp',
+  'leadDown',
+  'gap',
+  'steady',
+  'littleChanged',
+  'raceWords',
+  'majority',
+  'most',
+  'overHalf',
+  'underHalf',
+  'minority',
+  'plurality',
+  'aboveThreshold',
+  'belowThreshold',
+  'thresholdNoun',
+  'intoAssembly',
+  'outOfAssembly',
+  'forecast',
+  'proof',
+  'shows',
+  'recordWords',
+  'recordHigh',
+  'recordLow',
+  'marginNoun',
+  'plusMinus',
+  'withinMargin',
+  'outsideMargin',
+  'noMargin',
+  'subgroup',
+  'amongst',
+  'wholeSample',
+  'everybody',
+  'people',
+  'voters',
+  'likelyVoters',
+  'registeredVoters',
+  'adults',
+  'statSignificant',
+  'significant',
+  'clear',
+  'poll',
+  'compare',
+  'fieldworkWords',
+  'publishedWords',
+  'eventWords',
+  'relativeDates',
+  'earlierWords',
+  'periodWords',
+  'openers',
+  'relatives',
+  'withinWords',
+  'outsideWords',
+  'comparatives',
+  'conditionals',
+  'negators',
+  'clauseBreaks',
+  'pronouns',
+  'objectMarkers',
+  'backs',
+  'sampleMarkers',
+  'interviewed',
+  'approximately',
+  'almost',
+  'decided',
+  'percentWords',
+  'pointWords',
+  'sizeMarkers',
+  'notShare',
+  'ofWords',
+  'rivals',
+  'pollAsSubject',
+  'everWords',
+  'dateLinks',
+  'heldWords',
+  'beforeNoShare',
+  'rangeWords',
+  'shareLeads',
+  'afterBareShare',
+  'fromWords',
+  'withWords',
+  'ownsMargin',
+  'orWords',
+  'leadOrGap',
+  'shareWords',
+  'roundingWords',
+  'beforeNoFraction',
+  'afterNoFraction',
+  'changeNouns',
+  'countedPeople',
+  'auxiliaries',
+] as const;
+export type CueGroup = (typeof CUE_GROUPS)[number];
+
+export type Replacement =
+  | 'isAheadUnsettled'
+  | 'chanceGap'
+  | 'untestedGap'
+  | 'level'
+  | 'higherUnsettled'
+  | 'lowerUnsettled'
+  | 'chanceChange'
+  | 'untestedChange'
+  | 'isUp'
+  | 'isDown'
+  | 'leads'
+  | 'isAhead'
+  | 'trails'
+  | 'points'
+  | 'suggests'
+  | 'largerThanChance'
+  | 'couldBeChance'
+  | 'sameFigure'
+  | 'atShare'
+  | 'higherFigure'
+  | 'aheadNow';
+
+/** All that one language brings to the check: plain data, so that a language is added without touching a rule. */
+export type Lexicon = {
+  decimalMark: '.' | ',';
+  /** Words before a full stop that end no sentence. */
+  abbreviations: readonly string[];
+  numbers: Readonly<Record<string, number>>;
+  /** Fractions as phrases, with their value in percent. */
+  fractions: Readonly<Record<string, number>>;
+  /** "one IN three". */
+  inEvery: readonly string[];
+  /** Between the ends of a range, or two shares: "52 TO 38". */
+  to: readonly string[];
+  months: readonly (readonly string[])[];
+  weekdays: readonly (readonly string[])[];
+  /** Nouns that stand for an option: "approval" for "Approve". */
+  nameNouns: Readonly<Record<string, readonly string[]>>;
+  /** Names of options that are common words, and count only in capitals and before one of `afterCommonName`. */
+  commonNames: readonly string[];
+  afterCommonName: readonly string[];
+  /** Words of an option's name that people leave out. */
+  genericNameWords: readonly string[];
+  /** Capital letters at the start of a sentence that are no names. */
+  notNames: readonly string[];
+  cues: Readonly<Record<CueGroup, readonly Cue[]>>;
+  /** Supported words, with `{a}` `{b}` `{share}` for names and figures; null where the language has none yet. */
+  replacements: Readonly<Record<Replacement, string | null>>;
+};
