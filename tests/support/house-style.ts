@@ -9,7 +9,7 @@ import { NOW } from './database';
 
 export const FRAGILE_LEAD = 'style.messages.en.headline.lead.fragile';
 export const OWN_FRAGILE =
-  '{a} has the higher figure than {b} in poll by {pollster}, {aShare} to {bShare}, but the poll cannot settle it';
+  '{among, select, several {Of the two, {a} has} other {{a} has}} the higher figure, {aShare} to {bShare} for {b}, in poll by {pollster}, but the poll cannot settle it';
 
 /** What editors do with versions, each act as it would come from the screen they have open. */
 export function styleDesk(db: Db) {

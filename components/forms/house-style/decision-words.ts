@@ -86,7 +86,7 @@ const SETTINGS: Record<string, string> = {
 };
 
 export const CHOICES: Record<string, Record<string, string>> = {
-  'style.percent': { sign: 'Sign (47%)', word: 'Word (47 percent)', words: 'Two words (47 per cent)' },
+  'style.percent': { sign: 'Sign (47%)', word: 'Word (47 percent)', 'per-cent': 'Two words (47 per cent)' },
   'style.numbers': { figures: 'Figures', 'words-to-nine': 'Words up to nine' },
   'style.margins': { whole: 'Whole points', half: 'Half points', tenth: 'Tenths of a point' },
   'style.onePollHeadlines': { allow: 'Allow', warn: 'Warn', refuse: 'Refuse' },

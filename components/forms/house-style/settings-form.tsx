@@ -25,7 +25,7 @@ export function SettingsForm({ propsOf, languages }: { propsOf: PropsOf; languag
       <section aria-labelledby="style-prints">
         <SectionHeading id="style-prints">How the desk prints</SectionHeading>
         <TextSetting {...propsOf('style.newsroom')} hint="As it stands within a sentence." />
-        <ChoiceSetting {...propsOf('style.percent')} offered={['sign', 'word']} />
+        <ChoiceSetting {...propsOf('style.percent')} offered={['sign', 'word', 'per-cent']} />
         <ChoiceSetting {...propsOf('style.numbers')} offered={['figures', 'words-to-nine']} />
         <ChoiceSetting {...propsOf('style.margins')} offered={['whole', 'half', 'tenth']} />
         {languages.map((language) => (

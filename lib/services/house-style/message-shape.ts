@@ -23,8 +23,21 @@ const PLURAL = 6;
 const POUND = 7;
 const MAX_VARIANTS = 2000;
 
-/** Reads a sentence with slots. @throws SyntaxError with a `place` where it is not well formed */
+const read = new Map<string, Shape>();
+const MAX_READ = 2000;
+
+/** Reads a sentence with slots, once. @throws SyntaxError where it is not well formed */
 export function shapeOf(message: string, locale: string): Shape {
+  const key = `${locale}\n${message}`;
+  const known = read.get(key);
+  if (known) return known;
+  const shape = readShape(message, locale);
+  if (read.size >= MAX_READ) read.clear();
+  read.set(key, shape);
+  return shape;
+}
+
+function readShape(message: string, locale: string): Shape {
   const ast = new IntlMessageFormat(message, locale, undefined, { ignoreTag: true }).getAst();
   const slots = new Map<string, string[]>();
   const order: string[] = [];

@@ -5,7 +5,7 @@ import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { AppError, type FieldErrors } from '@/lib/errors';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
-import { faultsAsWritten, faultsOfSentence } from './check-sentences';
+import { faultsOfSentence, faultsOfShipped } from './check-sentences';
 import { changesBetween, leafAt, leavesOf } from './leaves';
 import {
   agreedHash,
@@ -87,7 +87,7 @@ export function faultsOfBody({ style }: StyleBody): FieldErrors {
   for (const [path, message] of leavesOf({ style: { messages: style.messages } })) {
     if (typeof message !== 'string') continue;
     const isOwn = leafAt(shipped, path) !== message;
-    const [first] = (isOwn ? faultsOfSentence : faultsAsWritten)(path, message, style);
+    const [first] = (isOwn ? faultsOfSentence : faultsOfShipped)(path, message, style);
     if (first) fields[path] = first.message;
   }
   return fields;

@@ -28,6 +28,7 @@ export function placeOfSentence(path: string): SentencePlace | null {
 /** Slots for style alone: a sentence may do without them. Everything else that the shipped one tells has to stay. */
 const OPTIONAL = new Set([
   'setting',
+  'habit',
   'populated',
   'population',
   'gap',
@@ -87,7 +88,7 @@ function isKin(path: string, place: SentencePlace): boolean {
 
 const UP = /\b(?:up|higher|rise[sn]?|rising|rose|more|increase[sd]?|grown|gain(?:s|ed)?)\b/i;
 const DOWN = /\b(?:down|lower|fall(?:s|en|ing)?|fell|less|decrease[sd]?|shrunk|lost|loses)\b/i;
-const ABOVE = /\b(?:above|over|more than|past)\b/i;
+const ABOVE = /\b(?:above|over|(?<!by )more than|past)\b/i;
 const BELOW = /\b(?:below|under|less than|short of)\b/i;
 
 /** A sentence that says the opposite of the direction that it is chosen for. English alone. */

@@ -55,7 +55,7 @@ export const STYLE_FIELDS: Record<string, z.ZodType> = {
       z.string().trim().max(200, 'At most 200 characters.'),
     ]),
   ),
-  'style.percent': z.enum(['sign', 'word']),
+  'style.percent': z.enum(['sign', 'word', 'per-cent']),
   'style.numbers': z.enum(['figures', 'words-to-nine']),
   'style.margins': z.enum(['whole', 'half', 'tenth']),
   ...Object.fromEntries(
