@@ -72,5 +72,12 @@ export const DEFF_SOURCE_NAMES: Record<(typeof DEFF_SOURCES)[number], string> = 
   stated: 'Stated by the pollster',
 };
 
-export const LANGUAGES = ['en'] as const;
+export const LANGUAGES = ['en', 'es', 'fr', 'de'] as const;
 export type Language = (typeof LANGUAGES)[number];
+/** Each in itself, as those who read it look for it. */
+export const LANGUAGE_NAMES: Record<Language, string> = {
+  en: 'English',
+  es: 'Español',
+  fr: 'Français',
+  de: 'Deutsch',
+};

@@ -3,8 +3,8 @@ import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
 import { shareBaseOf } from '@/lib/findings/threshold-base';
 import { namesOf, type DraftFinding, type GapDraft } from './draft-finding';
 import { figureOf, type DraftInput, type Figure } from './draft-input';
-import { isolated } from './names';
-import { printCount, printGap, printPercent, printShare, printSigned } from './print';
+import { isolated, plain } from './names';
+import { printCount, printGap, printNumber, printPercent, printShare, printSigned } from './print';
 import { say, type Slots } from './say';
 import type { Voice } from './voice';
 
@@ -40,8 +40,7 @@ function ofLead({ pair, estimatePp }: OfPair, input: DraftInput, voice: Voice): 
     setting: settingOf(release, pair, input),
     among: othersAbove(input).length > 0 ? 'several' : 'two',
     known: estimatePp === null ? 'no' : 'yes',
-    a: nameOf(higher, input, voice),
-    b: nameOf(lower, input, voice),
+    ...pairSlots(higher, lower, input, voice),
     aShare: printFigure(figures[0] ?? null, voice),
     bShare: printFigure(figures[1] ?? null, voice),
     ...sizeSlots('gap', estimatePp, decimalsOf(figures), voice),
@@ -78,8 +77,7 @@ function ofLeadChange({ pair, estimatePp }: OfPair, input: DraftInput, voice: Vo
   const print = (name: string, which: 'now' | 'then') => printFigure(figureOf(name, input, which), voice);
   return {
     known: knownOf(pair, input),
-    a: nameOf(higher, input, voice),
-    b: nameOf(lower, input, voice),
+    ...pairSlots(higher, lower, input, voice),
     toward: nameOf(toward, input, voice),
     away: nameOf(away, input, voice),
     aNow: print(higher, 'now'),
@@ -115,13 +113,18 @@ function ofThreshold(
   const { terms } = voice.style.messages[voice.language];
   const decimals = [0, 1, 2, 3].find((places) => Number(thresholdPct.toFixed(places)) === thresholdPct) ?? 4;
   const pct = printPercent(thresholdPct, decimals, voice);
+  const line = {
+    pct,
+    pctCount: thresholdPct,
+    number: printNumber(thresholdPct, decimals, voice),
+    spoken: voice.isSpoken ? 'yes' : 'no',
+  };
   const asksEveryone = shareBaseOf(input.release).hasNonAnswers;
   return {
     option: nameOf(option, input, voice),
     known: estimatePp === null ? 'no' : 'yes',
     share: printFigure(figureOf(option, input, 'now'), voice),
-    line:
-      thresholdPct === 50 ? terms.half : say(terms.threshold, { pct, pctCount: thresholdPct }, voice.locale),
+    line: say(thresholdPct === 50 ? terms.half : terms.threshold, line, voice.locale),
     side: (estimatePp ?? 0) < 0 ? 'below' : 'above',
     asked: asksEveryone ? 'everyone' : 'unknown',
   };
@@ -186,6 +189,17 @@ export function nameOf(option: string, input: DraftInput, voice: Voice): string 
   if (isBloc || isProperName) return isolated(option);
   const { quoted } = voice.style.messages[voice.language].terms;
   return say(quoted, { name: isolated(option) }, voice.locale);
+}
+
+/** Two names, and both in one phrase: "and" follows the next sound in Spanish, "Alder e Ilvane". */
+function pairSlots(higher: string, lower: string, input: DraftInput, voice: Voice): Slots {
+  const [a = '', b = ''] = [higher, lower].map((name) => nameOf(name, input, voice));
+  const spelt = new Intl.ListFormat(voice.locale, { type: 'conjunction' }).formatToParts(
+    [higher, lower].map(plain),
+  );
+  const shown = [a, b];
+  const both = spelt.map(({ type, value }) => (type === 'element' ? shown.shift() : value)).join('');
+  return { a, b, both };
 }
 
 export function printFigure(figure: Figure | null, voice: Voice): string {

@@ -2,7 +2,10 @@ import type { NotRandom } from '@/lib/domain/house-style';
 import type { Language } from '@/lib/domain/vocabulary';
 import type { Verdict } from '@/lib/findings/check-types';
 import type { LanguagePack } from './language-pack';
+import { DE } from './messages/de';
 import { EN } from './messages/en';
+import { ES } from './messages/es';
+import { FR } from './messages/fr';
 
 /**
  * What a desk decides about its words. Plain JSON: it is hashed into evidence and kept version by version, so a
@@ -53,7 +56,7 @@ export const DEFAULT_HOUSE_STYLE: HouseStyle = {
   percent: 'sign',
   numbers: 'figures',
   margins: 'half',
-  locales: { en: 'en-GB' },
+  locales: { en: 'en-GB', es: 'es-ES', fr: 'fr-FR', de: 'de-DE' },
   ladder: {
     holds: ['leads', 'more say', 'up', 'down', 'has moved', 'above', 'below'],
     fragile: [
@@ -77,7 +80,7 @@ export const DEFAULT_HOUSE_STYLE: HouseStyle = {
       'leave',
     ],
   },
-  messages: { en: EN },
+  messages: { en: EN, es: ES, fr: FR, de: DE },
   banned: [],
   preferred: [],
   twiceTheMargin: false,

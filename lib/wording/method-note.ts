@@ -3,7 +3,7 @@ import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
 import { formatPoints } from '@/lib/format/number';
 import { untestedSentences } from './body';
 import { blocsOf } from './claim-slots';
-import { blocSlots, sharesWaves, waveSlots } from './context';
+import { blocSlots, listOf, sharesWaves, waveSlots } from './context';
 import { sayAll, type Draft } from './draft';
 import { isOfTwoReleases } from './draft-input';
 import { basesOf } from './margin-slots';
@@ -58,7 +58,7 @@ function choiceSentence(draft: Draft): string {
     .filter((share) => !share.isAnswer)
     .map(({ option, units }) => `${isolated(option)} ${printShare(units, release.decimals, draft.voice)}`);
   return shares.length > 0
-    ? sayAll([draft.pack.methodNote['no-choice']], draft, { shares: shares.join('; ') })
+    ? sayAll([draft.pack.methodNote['no-choice']], draft, { shares: listOf(shares, draft) })
     : '';
 }
 
@@ -108,7 +108,7 @@ function deffSentences(
     stated: base.basis === 'modelled' ? 'modelled' : 'margin',
     poll: group !== undefined ? 'group' : index === 0 ? 'this' : 'earlier',
     group: group ? isolated(group) : pack.terms.everyoneElse,
-    pollster: inSentence(facts.pollster.name),
+    pollster: inSentence(facts.pollster.name, voice.language),
     deff: shown(base.deff),
     deffLow: shown(low),
     deffHigh: shown(high),

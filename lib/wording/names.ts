@@ -1,12 +1,23 @@
+import type { Language } from '@/lib/domain/vocabulary';
+
 /** Names as they stand in a sentence: single spaces, and an article of their own follows the place. */
 
-export function inSentence(name: string): string {
-  return isolated(plain(name).replace(/^The (?=\S)/, 'the '));
+/** An English article is English to no other language: there "The" stays part of the name, whatever the place. */
+export function inSentence(name: string, language: Language): string {
+  const plainName = plain(name);
+  return isolated(language === 'en' ? plainName.replace(/^The (?=\S)/, 'the ') : plainName);
 }
 
-export function atStart(name: string): string {
+const OPENINGS: Record<Language, RegExp> = {
+  en: /^(?:the|our|a|an) /,
+  es: /^(?:el|la|los|las|nuestr[oa]) /,
+  fr: /^(?:le|la|les|notre) |^l’/,
+  de: /^(?:der|die|das|unsere?) /,
+};
+
+export function atStart(name: string, language: Language): string {
   const plainName = isolated(name);
-  return /^(the|our|a|an) /.test(plainName) ? plainName[0]!.toUpperCase() + plainName.slice(1) : plainName;
+  return OPENINGS[language].test(plainName) ? plainName[0]!.toUpperCase() + plainName.slice(1) : plainName;
 }
 
 export function plain(text: string): string {

@@ -1,7 +1,7 @@
 import { valueOf } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { baseOf } from '@/lib/findings/check-document-of';
-import { formatDay, formatDayRange } from '@/lib/format/date';
+import { formatDay, formatDayEnds, formatDayRange } from '@/lib/format/date';
 import { atStart, inSentence, isolated, plain } from './names';
 import { printCount } from './print';
 import { say, type Slots } from './say';
@@ -27,10 +27,10 @@ function aboutSelf(release: ReleaseFacts, voice: Voice): Slots {
   const sponsor = valueOf(release.sponsor);
   return {
     race: isolated(release.race.name),
-    pollster: inSentence(release.pollster.name),
-    pollsterStart: atStart(release.pollster.name),
-    newsroom: inSentence(terms.newsroom ?? voice.style.newsroom),
-    newsroomStart: atStart(terms.newsroom ?? voice.style.newsroom),
+    pollster: inSentence(release.pollster.name, voice.language),
+    pollsterStart: atStart(release.pollster.name, voice.language),
+    newsroom: inSentence(terms.newsroom ?? voice.style.newsroom, voice.language),
+    newsroomStart: atStart(terms.newsroom ?? voice.style.newsroom, voice.language),
     comparisonRule: plain(terms.comparisonRule ?? voice.style.comparisonRule),
     populated: valueOf(release.population) ? 'yes' : 'no',
     population: terms.population[valueOf(release.population) ?? 'unknown'],
@@ -40,7 +40,7 @@ function aboutSelf(release: ReleaseFacts, voice: Voice): Slots {
     modeKnown: mode ? 'yes' : 'no',
     mode: mode ? terms.mode[mode] : '',
     sponsored: release.sponsor.status === 'not-applicable' ? 'own' : sponsor ? 'given' : 'unknown',
-    sponsor: sponsor ? inSentence(sponsor.name) : '',
+    sponsor: sponsor ? inSentence(sponsor.name, voice.language) : '',
     design: baseOf(release).design === 'clustered' ? 'clustered' : release.design,
     drawn: release.sampleSource === 'unknown' ? 'unknown' : 'known',
     sample: terms.sample[release.sampleSource],
@@ -66,10 +66,10 @@ function fieldDates(release: ReleaseFacts, withYear: boolean, voice: Voice): Slo
 function aboutEarlier(release: ReleaseFacts, previous: ReleaseFacts, withYear: boolean, voice: Voice): Slots {
   const own = aboutSelf(previous, voice);
   const dates = fieldDates(previous, withYear, voice);
-  const pollsters = [...new Set([release, previous].map(({ pollster }) => inSentence(pollster.name)))];
+  const names = [release, previous].map(({ pollster }) => inSentence(pollster.name, voice.language));
   const slots: Slots = {
     samePollster: release.pollster.id === previous.pollster.id ? 'yes' : 'no',
-    pollsters: new Intl.ListFormat(voice.locale, { type: 'conjunction' }).format(pollsters),
+    pollsters: new Intl.ListFormat(voice.locale, { type: 'conjunction' }).format(new Set(names)),
     prevPollster: own.pollster ?? '',
     prevPopulated: own.populated ?? 'no',
     prevPopulation: own.population ?? '',
@@ -98,39 +98,13 @@ export function printDays(start: string, end: string, withYear: boolean, voice: 
   if (voice.isSpoken) return speakDays(start, end, withYear, voice);
   const { days } = voice.style.messages[voice.language].terms;
   if (!days) return formatDayRange(start, end, voice.locale, { withYear });
-  const slots = {
-    start: startOf(start, end, voice),
-    end: formatDay(end, voice.locale, { withYear: withYear || yearOf(start) !== yearOf(end) }),
-  };
-  return say(start === end ? days.one : days.several, slots, voice.locale);
-}
-
-/** The first of several days: its number alone where the month is that of the last. */
-function startOf(start: string, end: string, { locale }: Voice): string {
-  if (spanOf(start, end) === 'month') return formatDayOfMonth(start, locale);
-  return formatDay(start, locale, { withYear: yearOf(start) !== yearOf(end) });
+  const ends = formatDayEnds(start, end, voice.locale, { withYear });
+  return say(start === end ? days.one : days.several, ends, voice.locale);
 }
 
 function spanOf(start: string, end: string): 'day' | 'month' | 'wider' {
   if (start === end) return 'day';
   return start.slice(0, 7) === end.slice(0, 7) ? 'month' : 'wider';
-}
-
-/** The day of the month as the language writes it before a month: 14, 14. */
-function formatDayOfMonth(day: string, locale: string): string {
-  const written = new Intl.DateTimeFormat(locale, { day: 'numeric', month: 'long', timeZone: 'UTC' });
-  const parts = written.formatToParts(Date.UTC(...dayParts(day)));
-  const month = parts.findIndex(({ type }) => type === 'month');
-  return parts
-    .slice(0, month)
-    .map(({ value }) => value)
-    .join('')
-    .replace(/\s+(de)?\s*$/u, '');
-}
-
-function dayParts(day: string): [number, number, number] {
-  const [year = 0, month = 1, date = 1] = day.split('-').map(Number);
-  return [year, month - 1, date];
 }
 
 const yearOf = (day: string) => day.slice(0, 4);

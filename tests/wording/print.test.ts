@@ -40,10 +40,10 @@ describe('roundUp', () => {
 
 describe('names in sentences', () => {
   it('carry their own article as the place asks', () => {
-    expect(inSentence('The  Quillon Panel ')).toBe('the Quillon Panel');
-    expect(atStart('the Quillon Panel')).toBe('The Quillon Panel');
-    expect(atStart('our desk')).toBe('Our desk');
-    expect(atStart('ePoll')).toBe('ePoll');
+    expect(inSentence('The  Quillon Panel ', 'en')).toBe('the Quillon Panel');
+    expect(atStart('the Quillon Panel', 'en')).toBe('The Quillon Panel');
+    expect(atStart('our desk', 'en')).toBe('Our desk');
+    expect(atStart('ePoll', 'en')).toBe('ePoll');
   });
 });
 

@@ -1,0 +1,78 @@
+import type { Terms } from '../language-pack';
+import { ES_SPOKEN_WORDS } from './es-spoken-words';
+
+/** Words for closed lists in Spanish, chosen so that none has a gender to agree with a person. */
+export const ES_TERMS: Terms = {
+  percent: '{n} por ciento',
+  perCent: '{n} por ciento',
+  quoted: '«{name}»',
+  everyoneElse: 'el resto de personas encuestadas',
+  figure: '{name}, {share}',
+  earlierPoll:
+    '{spoken, select, yes {el sondeo{samePollster, select, yes {} other { de {prevPollster}}} que terminó el {prevEnd}} other {el sondeo{samePollster, select, yes {} other { de {prevPollster}}} {prevDates}}}',
+  notDisclosed: 'no difundido',
+  half: 'barrera del {pct}',
+  threshold: 'barrera del {pct}',
+  newsroom: 'nuestra redacción',
+  comparisonRule: 'una norma de esta redacción',
+  numbers: ['cero', 'un', 'dos', 'tres', 'cuatro', 'cinco', 'seis', 'siete', 'ocho', 'nueve'],
+  days: { one: 'del {end}', several: 'del {start} al {end}' },
+  population: {
+    adults: 'personas adultas',
+    'registered-voters': 'personas inscritas para votar',
+    'likely-voters': 'votantes probables',
+    unknown: 'personas',
+  },
+  ofWhom: {
+    adults: 'entre personas adultas',
+    'registered-voters': 'entre personas inscritas para votar',
+    'likely-voters': 'entre votantes probables',
+    unknown: '',
+  },
+  mode: {
+    'live-telephone': 'en entrevistas telefónicas',
+    'recorded-telephone': 'mediante llamadas automáticas',
+    'face-to-face': 'en persona',
+    online: 'por internet',
+    post: 'por correo postal',
+    mixed: 'por varios medios',
+  },
+  sample: {
+    probability: 'muestra probabilística',
+    quota: 'muestra por cuotas',
+    'opt-in': 'panel de participación voluntaria',
+    blended: 'en parte aleatoria y en parte de participación voluntaria',
+    unknown: 'no se indica',
+  },
+  secondTest: {
+    score: 'prueba de puntuación',
+    'exact-sign': 'prueba exacta de los signos',
+    pooled: 'prueba con varianza combinada',
+    newcombe: 'intervalo híbrido de puntuación',
+    fisher: 'prueba exacta de Fisher',
+    'exact-binomial': 'prueba binomial exacta',
+  },
+  comparable: {
+    pollster: 'la empresa encuestadora',
+    race: 'la contienda',
+    'question-wording': 'la formulación de la pregunta',
+    'answer-options': 'las respuestas ofrecidas',
+    population: 'a quién se preguntó',
+    'likely-voter-method': 'el modo de determinar los votantes probables',
+    mode: 'el medio de las entrevistas',
+    'sample-source': 'el modo de elegir la muestra',
+    'sample-supplier': 'el proveedor de la muestra',
+    'weighting-scheme': 'la ponderación',
+    'sponsor-kind': 'el tipo de cliente',
+    're-basing': 'si se excluye a quienes no eligen',
+    'question-order': 'el orden de las preguntas',
+    'field-dates': 'las fechas de las entrevistas',
+  },
+  particular: {
+    sponsor: 'quién lo encargó',
+    population: 'a quién se preguntó',
+    n: 'a cuántas personas se preguntó',
+    mode: 'cómo se preguntó',
+  },
+  spoken: ES_SPOKEN_WORDS,
+};

@@ -1,0 +1,78 @@
+import type { Terms } from '../language-pack';
+import { FR_SPOKEN_WORDS } from './fr-spoken-words';
+
+/** Words for closed lists in French, chosen so that none has a gender to agree with a person. */
+export const FR_TERMS: Terms = {
+  percent: '{n} pour cent',
+  perCent: '{n} pour cent',
+  quoted: '« {name} »',
+  everyoneElse: 'le reste des personnes interrogées',
+  figure: '{name}, {share}',
+  earlierPoll:
+    '{spoken, select, yes {le sondage{samePollster, select, yes {} other { {prevPollster}}} achevé le {prevEnd}} other {le sondage{samePollster, select, yes {} other { {prevPollster}}} {prevDates}}}',
+  notDisclosed: 'non communiqué',
+  half: 'barre des {pct}',
+  threshold: '{pctCount, plural, one {barre de {pct}} other {barre des {pct}}}',
+  newsroom: 'notre rédaction',
+  comparisonRule: 'une règle de cette rédaction',
+  numbers: ['zéro', 'un', 'deux', 'trois', 'quatre', 'cinq', 'six', 'sept', 'huit', 'neuf'],
+  days: { one: 'du {end}', several: 'du {start} au {end}' },
+  population: {
+    adults: 'personnes adultes',
+    'registered-voters': 'personnes inscrites sur les listes électorales',
+    'likely-voters': 'personnes susceptibles de voter',
+    unknown: 'personnes',
+  },
+  ofWhom: {
+    adults: 'auprès de personnes adultes',
+    'registered-voters': 'auprès de personnes inscrites sur les listes électorales',
+    'likely-voters': 'auprès de personnes susceptibles de voter',
+    unknown: '',
+  },
+  mode: {
+    'live-telephone': 'par entretien téléphonique',
+    'recorded-telephone': 'par appels téléphoniques automatisés',
+    'face-to-face': 'en face à face',
+    online: 'en ligne',
+    post: 'par courrier',
+    mixed: 'par plusieurs modes de recueil',
+  },
+  sample: {
+    probability: 'échantillon aléatoire',
+    quota: 'échantillon par quotas',
+    'opt-in': 'panel de volontaires',
+    blended: 'pour partie aléatoire, pour partie volontaire',
+    unknown: 'non indiqué',
+  },
+  secondTest: {
+    score: 'test du score',
+    'exact-sign': 'test exact des signes',
+    pooled: 'test à variance commune',
+    newcombe: 'intervalle hybride du score',
+    fisher: 'test exact de Fisher',
+    'exact-binomial': 'test binomial exact',
+  },
+  comparable: {
+    pollster: 'l’institut',
+    race: 'le scrutin',
+    'question-wording': 'la formulation de la question',
+    'answer-options': 'les réponses proposées',
+    population: 'les personnes interrogées',
+    'likely-voter-method': 'la façon de repérer qui ira voter',
+    mode: 'le mode de recueil',
+    'sample-source': 'la constitution de l’échantillon',
+    'sample-supplier': 'le fournisseur de l’échantillon',
+    'weighting-scheme': 'la pondération',
+    'sponsor-kind': 'le type de commanditaire',
+    're-basing': 'l’exclusion des personnes sans choix exprimé',
+    'question-order': 'l’ordre des questions',
+    'field-dates': 'les dates des entretiens',
+  },
+  particular: {
+    sponsor: 'le commanditaire',
+    population: 'les personnes interrogées',
+    n: 'leur nombre',
+    mode: 'le mode de recueil',
+  },
+  spoken: FR_SPOKEN_WORDS,
+};
