@@ -63,17 +63,31 @@ export function neededSlots(shipped: Shape): string[][] {
     .map((name) => TWINS.find((twins) => twins.includes(name)) ?? [name]);
 }
 
-/** Slots that an editor may insert: those of the shipped sentences of the same part about the same claim. */
-export function slotsFor(path: string, shipped: unknown, locale: string): Map<string, string[]> {
+const offered = new WeakMap<object, Map<string, Map<string, string[]>>>();
+
+/** Slots that an editor may insert: those of the shipped sentences about the same claim, worked out once. */
+export function slotsFor(path: string, shipped: object, locale: string): Map<string, string[]> {
   const place = placeOfSentence(path);
+  if (!place) return new Map();
+  const kept = offered.get(shipped) ?? new Map<string, Map<string, string[]>>();
+  offered.set(shipped, kept);
+  const key = `${locale} ${place.claim ? `${place.language}.${place.claim}` : path}`;
+  const slots = kept.get(key) ?? gathered(path, place, shipped, locale);
+  kept.set(key, slots);
+  return slots;
+}
+
+function gathered(
+  path: string,
+  place: SentencePlace,
+  shipped: object,
+  locale: string,
+): Map<string, string[]> {
   const slots = new Map<string, string[]>();
-  if (!place) return slots;
-  const root = `style.messages.${place.language}.${place.part}`;
-  const within = place.claim ? `${root}.${place.claim}` : root;
   const family = place.claim
-    ? [...leavesOf(shipped)].filter(([one]) => one.startsWith(`${within}.`) || isKin(one, place))
-    : [[path, leafAt(shipped, path)] as const];
-  for (const [, message] of family) {
+    ? [...leavesOf(shipped)].filter(([one]) => isKin(one, place)).map(([, message]) => message)
+    : [leafAt(shipped, path)];
+  for (const message of family) {
     if (typeof message !== 'string') continue;
     for (const [name, choices] of shapeOf(message, locale).slots)
       slots.set(name, [...new Set([...(slots.get(name) ?? []), ...choices])]);
