@@ -1,13 +1,11 @@
 import 'server-only';
 import { LANGUAGES } from '@/lib/domain/vocabulary';
-import type { Verdict } from '@/lib/findings/check-types';
-import type { DraftInput } from '@/lib/wording/draft-input';
-import { draftSheet } from '@/lib/wording/draft-sheet';
 import { DEFAULT_HOUSE_STYLE, type HouseStyle } from '@/lib/wording/house-style';
 import { claimsAbove } from '@/lib/wording/never-says-more';
-import { exampleInputs, HOSTILE_NAMES, PLAIN_NAMES } from './example-inputs';
-import { leafAt, withLeaf } from './leaves';
-import { type Place, type Shape, shapeOf, syntaxFault } from './message-shape';
+import { draftFaults } from './draft-sentences';
+import { leafAt } from './leaves';
+import { type Shape, shapeOf, syntaxFault } from './message-shape';
+import { fault, placeIn, type SentenceFault, tooMuch, VERDICT_WORDS } from './sentence-fault';
 import {
   neededSlots,
   placeOfSentence,
@@ -17,20 +15,6 @@ import {
   wrongDirection,
   wrongOrder,
 } from './sentence-rules';
-
-export type SentenceFault = {
-  message: string;
-  place: Place | null;
-  /** The words that say too much, where that is what is wrong. */
-  phrase: string | null;
-};
-
-const VERDICT_WORDS: Record<Verdict, string> = {
-  holds: 'Holds',
-  fragile: 'Fragile',
-  'does-not-hold': 'Not shown',
-  'cannot-be-tested': 'Cannot be tested',
-};
 
 const SHIPPED = { style: DEFAULT_HOUSE_STYLE };
 
@@ -81,10 +65,6 @@ export function faultsOfShipped(path: string, message: string, style: HouseStyle
 function localeOf(place: SentencePlace | null, style: HouseStyle): string | null {
   const language = LANGUAGES.find((one) => one === place?.language);
   return language ? style.locales[language] : null;
-}
-
-function fault(message: string, phrase: string | null = null, place: Place | null = null): SentenceFault {
-  return { message, place, phrase };
 }
 
 function slotFaults(path: string, message: string, shape: Shape, locale: string): SentenceFault[] {
@@ -138,12 +118,6 @@ function claimFaults(
   return [...faults, ...rungFaults(shape, place, style, shipped)];
 }
 
-function tooMuch(phrase: string, verdict: Verdict | null): string {
-  return verdict === null
-    ? `“${phrase}” claims something that this sentence cannot know.`
-    : `“${phrase}” says more than the verdict ${VERDICT_WORDS[verdict]} supports.`;
-}
-
 /** Headline and title stand on a verb of their rung; a fragile finding is left open wherever it is told. */
 function rungFaults(
   { variants }: Shape,
@@ -183,78 +157,6 @@ function phraseFaults(message: string, { variants }: Shape, { banned }: HouseSty
     .map((phrase) => fault(`“${phrase}” is banned by this house style.`, phrase, placeIn(message, phrase)));
 }
 
-const OPEN = '\uE000';
-const CLOSE = '\uE001';
-
-const table = new Map<string, DraftInput[]>();
-
-function inputsFor(language: string): DraftInput[] {
-  const kept = table.get(language);
-  if (kept) return kept;
-  const inputs = [PLAIN_NAMES, ...HOSTILE_NAMES].flatMap(exampleInputs);
-  const made = inputs.map((input) => ({ ...input, language: language as DraftInput['language'] }));
-  table.set(language, made);
-  return made;
-}
-
-/** The sentence as drafting prints it, marked so that it can be told from its neighbours. */
-export function filledSentences(
-  path: string,
-  message: string,
-  style: HouseStyle,
-  inputs: readonly DraftInput[],
-): { input: DraftInput; text: string }[] {
-  const marked = withLeaf({ style }, path, `${OPEN}${message}${CLOSE}`).style;
-  return inputs.flatMap((input) => {
-    const own = { ...marked, comparisonRule: input.houseStyle.comparisonRule };
-    const lines = draftSheet({ ...input, houseStyle: own });
-    const text = lines.map((line) => between(line.text)).find((one) => one !== null);
-    return text ? [{ input, text }] : [];
-  });
-}
-
-function between(text: string): string | null {
-  const [start, end] = [text.indexOf(OPEN), text.indexOf(CLOSE)];
-  return start >= 0 && end > start ? text.slice(start + 1, end) : null;
-}
-
-function draftFaults(
-  path: string,
-  message: string,
-  style: HouseStyle,
-  shipped: string,
-  place: SentencePlace,
-): SentenceFault[] {
-  const inputs = inputsFor(place.language);
-  const isHeard = new Set(DEFAULT_NAMES.flatMap((name) => claimsAbove('cannot-be-tested', name)));
-  try {
-    return filledSentences(path, message, style, inputs).flatMap(({ input, text }) => {
-      const { verdict } = input.finding;
-      if (!place.verdict) return [];
-      return claimsAbove(verdict, text)
-        .filter((phrase) => !isHeard.has(phrase))
-        .map((phrase) => fault(tooMuch(phrase, verdict), phrase, placeIn(message, phrase)));
-    });
-  } catch (cause) {
-    const name = /variable "([A-Za-z]+)"/.exec(cause instanceof Error ? cause.message : '')?.[1];
-    const isShippedToo = name !== undefined && shipped.includes(`{${name}`);
-    return [
-      fault(
-        name && !isShippedToo
-          ? `{${name}} is not filled for every finding that this sentence is for.`
-          : 'This sentence cannot be drafted for every finding that it is for.',
-      ),
-    ];
-  }
-}
-
-const DEFAULT_NAMES = [PLAIN_NAMES, ...HOSTILE_NAMES].flatMap((names) => Object.values(names));
-
 const bare = (text: string) => text.replace(/\{[^}]*\}/g, 'Name');
-
-function placeIn(message: string, words: string): Place | null {
-  const start = message.toLowerCase().indexOf(words.toLowerCase());
-  return start < 0 ? null : { start, end: start + words.length };
-}
 
 const escaped = (text: string) => text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');

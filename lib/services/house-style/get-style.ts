@@ -4,7 +4,7 @@ import { findStyleVersionById, listStyleActs, type StyleVersionRow } from '@/db/
 import type { StyleAct, StyleOrigin, StyleState } from '@/lib/domain/house-style';
 import { type Actor, canActAsEditor, canReadCopyDesk } from '@/lib/domain/roles';
 import { authorize, type Ctx } from '../context';
-import type { SentenceFault } from './check-sentences';
+import type { SentenceFault } from './sentence-fault';
 import { type Change, changesBetween } from './leaves';
 import { bodyOf, currentStyle, openStyle } from './open-version';
 import { decide, type Typed, typedOf } from './save-draft';

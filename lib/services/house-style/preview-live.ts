@@ -9,8 +9,9 @@ import { check } from '@/lib/findings/check';
 import type { Verdict } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
 import { parseCheckDocument } from '@/lib/findings/parse-check';
+import { carries } from '@/lib/wording/carries';
 import { comparisonNote } from '@/lib/wording/comparison-words';
-import { draftSheet } from '@/lib/wording/draft-sheet';
+import { draftLine } from '@/lib/wording/draft-sheet';
 import { authorize, type Ctx, parse } from '../context';
 import { styleFor } from '../setup/desk-settings';
 import type { EvidenceBody } from '../sheet/evidence-body';
@@ -82,7 +83,7 @@ export function redrafted(
   if (!now || now.kind === 'share') return { verdict: { before: old.verdict, after: null }, lines: [] };
   const told = { ...comparison, override: comparison.override && { ...comparison.override, by: '' } };
   const note = comparisonNote(told, houseStyle, language);
-  const draft = draftSheet({
+  const drafting = {
     claim,
     finding: now,
     answer,
@@ -92,10 +93,12 @@ export function redrafted(
     houseStyle,
     policy,
     language,
-  });
-  const lines = evidence.texts.flatMap(({ kind }) => {
+  };
+  // A correction notice tells of what stood in print; no house style drafts it anew.
+  const kinds = evidence.texts.map(({ kind }) => kind).filter((kind) => kind !== 'correction-notice');
+  const lines = kinds.flatMap((kind) => {
     const before = evidence.draft.find((line) => line.kind === kind)?.text;
-    const after = draft.find((line) => line.kind === kind)?.text;
+    const after = carries(kind, now.kind) ? draftLine(drafting, kind) : undefined;
     return before && after && before !== after ? [{ kind, before, after }] : [];
   });
   if (lines.length === 0 && old.verdict === now.verdict) return null;
