@@ -5,7 +5,10 @@ import { listEmbedsOf } from '@/db/queries/embed';
 import { isReleasePublic, listClearedLinesOf, listClearedSheets } from '@/db/queries/sheet';
 import { type Actor, canReadCopyDesk } from '@/lib/domain/roles';
 import { inScreenOrder, type LineText } from '@/lib/domain/sheet';
+import type { Stale } from '@/lib/domain/currency';
+import type { Hold } from '../bans/hold';
 import { authorize, type Ctx, transact } from '../context';
+import { marksOf } from './copy-marks';
 import { type EmbargoView, embargoView } from '../release/get-release';
 
 export type ClearedSheetItem = {
@@ -21,6 +24,13 @@ export type ClearedSheetItem = {
   mayCopy: boolean;
   embedId: string | null;
   hash: string;
+  /** The editor who released it alone, until a second person has read it. */
+  oneReader: string | null;
+  /** Why these words are no longer the newest. */
+  stale: Stale[];
+  needsReview: boolean;
+  /** A place bars its figures now. */
+  holds: Hold[];
 };
 
 const LIMIT = 100;
@@ -41,6 +51,7 @@ export function listCopyDesk(
   const allLines = listClearedLinesOf(ctx.db, sheetIds);
   const clearings = listActsOf(ctx.db, sheetIds).filter(({ act }) => act.act === 'cleared');
   const embedIds = listEmbedsOf(ctx.db, sheetIds);
+  const marks = marksOf(ctx, rows, clearings);
   const items = rows.map((row) => {
     const isPublic = isReleasePublic(ctx.db, row.release.id, ctx.now);
     const clearing = clearings.find(({ act }) => act.sheetId === row.sheet.id);
@@ -60,6 +71,7 @@ export function listCopyDesk(
       mayCopy: isPublic || isOnList,
       embedId: embedIds.get(row.sheet.id) ?? null,
       hash: clearing?.hash ?? '',
+      ...marks(row, clearing?.act.evidenceId ?? null),
     };
     return { item, releaseId: row.release.id, isWatched: isOnList };
   });

@@ -5,7 +5,7 @@ import { findWholeVersion, findWholeVersionByPublicId, listVersionsOfSeries } fr
 import type { SheetRow } from '@/db/queries/sheet';
 import { type Currency, shelfEnd, type Stale, takenOffRung } from '@/lib/domain/currency';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
-import type { LineText } from '@/lib/domain/sheet';
+import type { LineKind, LineText } from '@/lib/domain/sheet';
 import { dayInZone } from '@/lib/domain/wall-clock';
 import { readEnv } from '@/lib/env';
 import type { Verdict } from '@/lib/findings/check-types';
@@ -24,6 +24,9 @@ export type Standing = {
   /** Days that were set for this sheet; null: as house style says. */
   shelfDays: number | null;
 };
+
+/** Lines that say how and of whom, not what was found. */
+const AROUND_THE_CLAIM: readonly LineKind[] = ['caveat', 'caveat-short', 'caveat-one-breath', 'method-note'];
 
 /** Whether cleared words are still the newest that could be said, and every reason why not. */
 export function currencyOf(conn: Conn, sheet: SheetRow, standing: Standing, now: number): Currency {
@@ -72,7 +75,7 @@ function takenOff(
   const before = findHouseStyle(conn, houseStyleVersion);
   if (!before) return null;
   const words = takenOffRung(
-    texts.map(({ text }) => text),
+    texts.filter(({ kind }) => !AROUND_THE_CLAIM.includes(kind)).map(({ text }) => text),
     (JSON.parse(before.body) as HouseStyle).ladder[verdict],
     inForce.body.ladder[verdict],
   );

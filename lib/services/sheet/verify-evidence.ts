@@ -7,6 +7,7 @@ import {
   listClearedByNobody,
   listEvidenceIds,
 } from '@/db/queries/clearing';
+import { findOneReader } from '@/db/queries/one-reader';
 import { isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
 import { inScreenOrder, type LineText } from '@/lib/domain/sheet';
 import { canonicalJson } from '@/lib/security/canonical';
@@ -67,6 +68,8 @@ async function numbersDiffer(
   }
 }
 
+type Agreement = ReturnType<typeof listAgreements>[number];
+
 function agreementProblems(db: Db, evidenceId: number, texts: LineText[]): string[] {
   const acts = listAgreements(db, evidenceId);
   const [filed, cleared] = (['filed', 'cleared'] as const).map((kind) =>
@@ -76,11 +79,24 @@ function agreementProblems(db: Db, evidenceId: number, texts: LineText[]): strin
     personId: act.personId,
     roles: JSON.parse(act.roles) as Role[],
   });
-  const isAgreed = !cleared || (filed && isTwoPersonAgreement(who(filed), who(cleared)));
+  const isAlone =
+    cleared !== undefined && filed !== undefined && isReleasedAlone(db, evidenceId, filed, cleared);
+  const isAgreed = !cleared || isAlone || (filed && isTwoPersonAgreement(who(filed), who(cleared)));
   return [
     ...(isAgreed ? [] : ['was not agreed to by two people of whom one was an editor']),
     ...acts
       .filter((act) => canonicalJson(inScreenOrder(act.texts, ({ kind }) => kind)) !== canonicalJson(texts))
       .map(({ act }) => `holds other words than those that were ${act}`),
   ];
+}
+
+/** The desk's night rule: one editor released figures as printed, and the database keeps who and when. */
+function isReleasedAlone(db: Db, evidenceId: number, filed: Agreement, cleared: Agreement): boolean {
+  const released = findOneReader(db, evidenceId);
+  const roles = JSON.parse(cleared.roles) as Role[];
+  return (
+    released !== null &&
+    [filed.personId, cleared.personId].every((personId) => personId === released.personId) &&
+    roles.includes('editor')
+  );
 }

@@ -15,7 +15,6 @@ export function sheetActs() {
     pull: vi.fn<SheetActions['pull']>().mockResolvedValue({ ok: true, value: undefined }),
     revise: vi.fn<SheetActions['revise']>().mockResolvedValue({ ok: true, value: { version: 9 } }),
     discard: vi.fn<SheetActions['discard']>().mockResolvedValue({ ok: true, value: undefined }),
-    add: vi.fn<SheetActions['add']>().mockResolvedValue({ ok: true, value: { version: 9 } }),
     comment: vi.fn<SheetActions['comment']>().mockResolvedValue({ ok: true, value: { id: 'comment' } }),
     settle: vi.fn<SheetActions['settle']>().mockResolvedValue({ ok: true, value: undefined }),
     terms: vi.fn<SheetActions['terms']>().mockResolvedValue({ ok: true, value: undefined }),
