@@ -54,7 +54,10 @@ export type DeskPolicy = z.output<typeof deskPolicySchema>;
  * @param sources of the release and, where there is one, of the release it is compared with
  * @returns the same with one comparison basis: on where the desk has one for every sample that is not random
  */
-export function policyFor(policy: DeskPolicy, sources: readonly ('probability' | NotRandom)[]) {
+export function policyFor<P extends { comparisonBasis: Record<NotRandom, boolean> }>(
+  policy: P,
+  sources: readonly ('probability' | NotRandom)[],
+): Omit<P, 'comparisonBasis'> & { comparisonBasis: boolean } {
   const odd = sources.filter((source): source is NotRandom => source !== 'probability');
   const comparisonBasis = odd.length > 0 && odd.every((source) => policy.comparisonBasis[source]);
   return { ...policy, comparisonBasis };

@@ -1,3 +1,4 @@
+import type { DeskPolicy } from '@/lib/domain/house-style';
 import type { FactThreshold } from '@/lib/domain/release-facts';
 import type { RaceKind } from '@/lib/domain/vocabulary';
 import type { Policy } from '@/lib/findings/check-types';
@@ -18,4 +19,6 @@ export type FormChoices = {
   /** The desk's own time zone. */
   zone: string;
   policy: Policy;
+  /** Kinds of sample that the desk computes as if random; none where it is not said. */
+  comparisonBasis?: DeskPolicy['comparisonBasis'];
 };

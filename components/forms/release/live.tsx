@@ -2,6 +2,9 @@
 
 import { createContext, type ReactNode, useContext, useDeferredValue, useMemo } from 'react';
 import { type Control, get, useFormState, useWatch } from 'react-hook-form';
+import { policyFor } from '@/lib/domain/house-style';
+import type { ReleaseFacts } from '@/lib/domain/release-facts';
+import type { Policy } from '@/lib/findings/check-types';
 import { comparisonQuery } from './comparison-query';
 import { messageOf } from './field-path';
 import type { FormChoices } from './form-choices';
@@ -36,7 +39,8 @@ export function LiveProvider({
   const values = useDeferredValue(useWatch({ control }) as ReleaseForm);
   const comparison = useComparison(comparisonQuery(values, releaseId), personId);
   const previous = comparison.kind === 'answered' ? comparison.compared.previous : null;
-  const { policy, races } = choices;
+  const { races } = choices;
+  const policy = policyUnder(choices, values, previous);
   const chosen = values.race.kind === 'existing' ? values.race.id : null;
   const thresholds = races.find((race) => race.id === chosen)?.thresholds ?? [];
   // As text, so that typing what no figure rests on computes and draws nothing anew.
@@ -51,6 +55,18 @@ export function LiveProvider({
       <LiveContext value={live}>{children}</LiveContext>
     </RefusalContext>
   );
+}
+
+/** The desk's policy for the kinds of sample at hand, as the service applies it to what is logged. */
+function policyUnder(
+  { policy, comparisonBasis }: FormChoices,
+  values: ReleaseForm,
+  previous: ReleaseFacts | null,
+): Policy {
+  if (!comparisonBasis) return policy;
+  const own = values.sampleSource || 'unknown';
+  const sources = previous ? [own, previous.sampleSource] : [own];
+  return policyFor({ ...policy, comparisonBasis }, sources);
 }
 
 export function useLive(): Live {

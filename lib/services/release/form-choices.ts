@@ -1,12 +1,13 @@
 import 'server-only';
 import { listNames, listRaceOptions, listRaces, listRaceThresholds } from '@/db/queries/race';
 import { type Actor, canLogReleases } from '@/lib/domain/roles';
+import type { DeskPolicy } from '@/lib/domain/house-style';
 import type { FactThreshold } from '@/lib/domain/release-facts';
 import type { RaceKind } from '@/lib/domain/vocabulary';
 import type { Policy } from '@/lib/findings/check-types';
 import { readEnv } from '@/lib/env';
 import { authorize, type Ctx } from '../context';
-import { readDeskSettings } from '../setup/desk-settings';
+import { readComparisonBasis, readDeskSettings } from '../setup/desk-settings';
 
 export type RaceChoice = {
   id: string;
@@ -21,6 +22,8 @@ export type FormChoices = {
   sponsors: string[];
   zone: string;
   policy: Policy;
+  /** Kinds of sample that the desk computes as if random. */
+  comparisonBasis: DeskPolicy['comparisonBasis'];
 };
 
 /** What the release form offers to choose from. */
@@ -38,5 +41,6 @@ export function getFormChoices(actor: Actor, ctx: Pick<Ctx, 'db'>): FormChoices 
     sponsors: listNames(ctx.db, 'sponsors'),
     zone: readEnv().LEADLINE_ZONE,
     policy: readDeskSettings(ctx.db).policy.body,
+    comparisonBasis: readComparisonBasis(ctx.db),
   };
 }

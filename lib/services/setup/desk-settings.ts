@@ -7,7 +7,7 @@ import {
   insertStyleVersion,
   nextStyleNumber,
 } from '@/db/queries/house-style';
-import { type NotRandom, policyFor } from '@/lib/domain/house-style';
+import { type DeskPolicy, type NotRandom, policyFor } from '@/lib/domain/house-style';
 import type { Policy } from '@/lib/findings/check-types';
 import { canonicalJson, hashOf } from '@/lib/security/canonical';
 import { newId } from '@/lib/security/ids';
@@ -111,6 +111,12 @@ export function readDeskSettings(conn: Conn, sources: readonly SampleSource[] = 
     policy: { version: policy.id, body: policyFor(readPolicy(policy.body), sources) },
     houseStyle: { version: houseStyle.id, body: styleFor(readStyle(houseStyle.body), sources) },
   };
+}
+
+/** Which kinds of sample the desk computes as if random. */
+export function readComparisonBasis(conn: Conn): DeskPolicy['comparisonBasis'] {
+  const stored = findLatestPolicy(conn);
+  return (stored ? readPolicy(stored.body) : DEFAULT_DESK_POLICY).comparisonBasis;
 }
 
 type SampleSource = 'probability' | NotRandom;
