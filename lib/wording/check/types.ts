@@ -83,7 +83,8 @@ export type WordingCheckInput = {
   text: string;
   language: WordingLanguage;
   releases: readonly CheckedRelease[];
-  houseStyle: HouseStyle;
+  /** Without its sentences, so that a browser can be handed the rest. */
+  houseStyle: Omit<HouseStyle, 'messages'>;
   policy: Policy;
   /** A line of a sheet need not carry what the sheet's caveat carries. Default: the text stands alone. */
   part?: 'whole' | 'line';

@@ -1,0 +1,78 @@
+import type { ReleaseFacts } from '@/lib/domain/release-facts';
+import type { CheckAnswer, Policy } from '@/lib/findings/check-types';
+import type { Comparability } from '@/lib/findings/comparability';
+import { checkedReleaseOf } from './check/checked-release';
+import { checkWording } from './check/check-wording';
+import type { CheckedRelease, WordingGrade, WordingLanguage, WordingMark } from './check/types';
+import type { HouseStyle } from './house-style';
+
+/** What the words of one sheet are checked against; plain data, the same in the server and the browser. */
+export type LineBasis = {
+  release: ReleaseFacts;
+  previous: ReleaseFacts | null;
+  /** Findings that the sheet's evidence holds. */
+  answer: CheckAnswer;
+  comparison: Pick<Comparability, 'differences' | 'unknowns'> & { isOverridden: boolean };
+  policy: Policy;
+  houseStyle: Omit<HouseStyle, 'messages'>;
+  language: WordingLanguage;
+};
+
+export type CheckedLine = { text: string; draft: string };
+
+const KEPT = 200;
+
+/**
+ * The wording check for the lines of one sheet.
+ *
+ * Make it once per sheet and keep it: the release is read at the first line that needs it, and a text that was
+ * checked before is answered from memory. Words that are still those of the draft are the house style's own, which
+ * was checked when it was put in force; they carry no mark.
+ *
+ * @param basis what the sheet rests on
+ * @returns for the text of a line and its draft, the marks in the order of the text
+ * @throws RangeError `checkWording requires a text of at most 20000 characters`, when a line is checked
+ */
+export function lineChecker(basis: LineBasis): (line: CheckedLine) => readonly WordingMark[] {
+  const known = new Map<string, readonly WordingMark[]>();
+  let checked: CheckedRelease | null = null;
+  return ({ text, draft }) => {
+    if (text === draft || text.trim() === '') return NONE;
+    const before = known.get(text);
+    if (before) return before;
+    checked ??= releaseOf(basis);
+    const { language, houseStyle, policy } = basis;
+    const { marks } = checkWording({
+      text,
+      language,
+      releases: [checked],
+      houseStyle,
+      policy,
+      part: 'line',
+    });
+    if (known.size >= KEPT) known.clear();
+    known.set(text, marks);
+    return marks;
+  };
+}
+
+const NONE: readonly WordingMark[] = [];
+
+function releaseOf({ release, previous, answer, comparison, policy }: LineBasis): CheckedRelease {
+  const { differences, unknowns, isOverridden } = comparison;
+  const comparability = previous && {
+    comparable: differences.length === 0,
+    differences,
+    unknowns,
+    isOverridden,
+  };
+  return checkedReleaseOf(release, previous, policy, { answer, comparability });
+}
+
+/** The marks of a grade; `wrong` and `not-supported` are what filing refuses. */
+export function ofGrade<Mark extends Pick<WordingMark, 'grade'>>(
+  marks: readonly Mark[],
+  grade: WordingGrade,
+): Mark[] {
+  return marks.filter((mark) => mark.grade === grade);
+}
