@@ -12,18 +12,34 @@ describe('the rail', () => {
       'Lines',
       'Copy desk',
       'Embeds',
+      'Wording check',
       'House style',
       'History',
     ]);
-    expect(labels('editor')).toEqual(['Releases', 'Lines', 'Copy desk', 'Embeds', 'House style', 'History']);
-    expect(labels('copy-desk')).toEqual(['Copy desk', 'Embeds', 'House style']);
-    expect(labels('administrator')).toEqual(['Copy desk', 'House style', 'People', 'History']);
+    expect(labels('editor')).toEqual([
+      'Releases',
+      'Lines',
+      'Copy desk',
+      'Embeds',
+      'Wording check',
+      'House style',
+      'History',
+    ]);
+    expect(labels('copy-desk')).toEqual(['Copy desk', 'Embeds', 'Wording check', 'House style']);
+    expect(labels('administrator')).toEqual([
+      'Copy desk',
+      'Wording check',
+      'House style',
+      'People',
+      'History',
+    ]);
   });
 
   it('adds up the sections of several roles', () => {
     expect(labels('copy-desk', 'administrator')).toEqual([
       'Copy desk',
       'Embeds',
+      'Wording check',
       'House style',
       'People',
       'History',

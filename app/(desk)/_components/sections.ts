@@ -15,6 +15,7 @@ const SECTIONS: { href: string; label: string; isOpenTo: (who: Who) => boolean }
   { href: '/lines', label: 'Lines', isOpenTo: canReadUnpublished },
   { href: '/copy-desk', label: 'Copy desk', isOpenTo: canReadCopyDesk },
   { href: '/embeds', label: 'Embeds', isOpenTo: canMakeEmbeds },
+  { href: '/wording-check', label: 'Wording check', isOpenTo: canReadCopyDesk },
   { href: '/house-style', label: 'House style', isOpenTo: canReadCopyDesk },
   { href: '/people', label: 'People', isOpenTo: canManagePeople },
   { href: '/history', label: 'History', isOpenTo: canReadHistory },
