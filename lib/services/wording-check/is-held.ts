@@ -1,3 +1,4 @@
+import 'server-only';
 import type { ReleaseRow } from '@/db/queries/release';
 
 /** The embargo is over, or there was none. */
