@@ -27,7 +27,9 @@ const compiled = new WeakMap<Barred, Record<Verdict, RegExp>>();
  * @returns each phrase once, in order of appearance
  */
 export function phrasesAbove(barred: Barred, verdict: Verdict, text: string): string[] {
-  return [...new Set([...text.matchAll(patternsOf(barred)[verdict])].map(([phrase]) => phrase))];
+  const set = text.replaceAll("'", '’');
+  const found = [...set.matchAll(patternsOf(barred)[verdict])];
+  return [...new Set(found.map(({ 0: phrase, index }) => text.slice(index, index + phrase.length)))];
 }
 
 function patternsOf(barred: Barred): Record<Verdict, RegExp> {

@@ -1,4 +1,9 @@
+import type { Language } from '@/lib/domain/vocabulary';
 import type { Verdict } from '@/lib/findings/check-types';
+import { type Barred, phrasesAbove } from './ladder';
+import { DE_BARRED } from './messages/de-ladder';
+import { ES_BARRED } from './messages/es-ladder';
+import { FR_BARRED } from './messages/fr-ladder';
 
 /**
  * Phrases that no sentence about a poll should use, whatever the verdict. Ties and dead heats: AP Stylebook polls
@@ -48,21 +53,26 @@ const BARRED: Record<Verdict, readonly RegExp[]> = {
   'cannot-be-tested': [...NEVER, ...NEEDS_HOLDS, ...NEEDS_FRAGILE, ...NEEDS_A_TEST_PASSED],
 };
 
+const LISTED: Partial<Record<Language, Barred>> = { es: ES_BARRED, fr: FR_BARRED, de: DE_BARRED };
+
 /**
  * The phrases of a text that say more than its verdict, as they stand in the text.
  *
- * A caution for whoever files, never a proof that a text is sound: it knows a short list of English phrases, does
- * not read negations ("cannot say who leads" is listed) and does not see names. An empty list means only that none
- * of these phrases is there.
+ * A caution for whoever files, never a proof that a text is sound: it knows a short list of phrases per language,
+ * does not read negations ("cannot say who leads" is listed) and does not see names. An empty list means only that
+ * none of these phrases is there.
  *
  * @param verdict the verdict of the finding that the text is about
  * @param text any text of a line
+ * @param language the language of the text
  * @returns each phrase once, in order of appearance
  * @example
  * claimsAbove('fragile', 'Alder leads Brook'); // => ['leads']
  * claimsAbove('holds', 'Alder leads Brook'); // => []
  */
-export function claimsAbove(verdict: Verdict, text: string): string[] {
+export function claimsAbove(verdict: Verdict, text: string, language: Language = 'en'): string[] {
+  const listed = LISTED[language];
+  if (listed) return phrasesAbove(listed, verdict, text);
   const found = BARRED[verdict].flatMap((pattern) =>
     [...text.matchAll(pattern)].map((match) => ({ at: match.index, phrase: match[0] })),
   );

@@ -3,7 +3,8 @@ import { ofPoints, points, QUANTITY, WEIGHTING } from './de-parts';
 
 const DRAWN =
   '{drawn, select, unknown {Wie die Stichprobe gezogen wurde, ist nicht angegeben.} other {Die Stichprobe wurde nicht zufällig gezogen ({sample}).}}';
-const STATED = points('stated').replace('{stated} ', '{statedPp} ');
+const STATED =
+  '{statedPp, select, einem {ein} other {{statedPp}}} {statedCount, plural, one {Prozentpunkt} other {Prozentpunkte}}';
 
 /** The caveat in German; the sources of its contents stand beside the English one. */
 export const DE_CAVEAT: LanguagePack['caveat'] = {

@@ -23,7 +23,7 @@ export const DE_LIMITS: Pick<LanguagePack, 'range' | 'detectable' | 'fragile' | 
       'Mit den veröffentlichten Werten geht {claim, select, lead {der Abstand} change {die Veränderung} leadChange {die Veränderung des Abstands} netScore {der Abstand} netScoreChange {die Veränderung des Saldos} gap {der Abstand} other {der Abstand zur {line}}} über das hinaus, was {basis, select, sampling {der Stichprobenfehler allein üblicherweise erzeugt} modelled {nach dem Modell des Instituts selbst der Zufall allein üblicherweise erzeugt} other {in einer Zufallsstichprobe der Zufall allein üblicherweise erzeugt}}.',
     rounding: 'Die Rundung der veröffentlichten Werte könnte das hinfällig machen.',
     'design-effect': `{deffSource, select, assumed {Kostet ${WEIGHTING} mehr Genauigkeit, als {newsroom} annimmt, könnte das hinfällig sein.} kish {Kostet die Gewichtung mehr Genauigkeit, als die Gewichte allein anzeigen, könnte das hinfällig sein.} other {Kostet ${WEIGHTING} so viel Genauigkeit, wie es die Fehlerspanne des Instituts höchstens zulässt, könnte das hinfällig sein.}}`,
-    'second-test': 'Ein zweiter anerkannter Test derselben Werte bestätigt das nicht.',
+    'second-test': 'Ein zweiter anerkannter Test bestätigt das mit denselben Werten nicht.',
     together: `Die Rundung und ein höherer Verlust an Genauigkeit durch ${WEIGHTING} könnten das zusammen hinfällig machen, einzeln aber nicht.`,
     modelled:
       'Die Stichprobe wurde nicht zufällig gezogen; das Ergebnis beruht auf dem Modell, mit dem das Institut selbst seinen Fehler schätzt.',
@@ -47,7 +47,7 @@ export const DE_LIMITS: Pick<LanguagePack, 'range' | 'detectable' | 'fragile' | 
       'Die beiden Umfragen haben Interviews gemeinsam, die sich nicht trennen lassen; die Veränderung zwischen ihnen lässt sich nicht berechnen.',
     'same-people':
       'Beide Male wurden dieselben Personen befragt, und wie viele von ihnen ihre Antwort geändert haben, ist nicht veröffentlicht.',
-    'independent-margin': `Zwei getrennte Stichproben dieser Größe hätten hier eine Fehlerspanne von ±${ofPoints('independent')}; bei zweimal befragten Personen muss das nicht gelten.`,
+    'independent-margin': `Zwei getrennte Stichproben dieser Größe hätten hier eine Fehlerspanne von ±${ofPoints('independent')}; die von zweimal Befragten ist nicht bekannt.`,
     'rebased-size':
       'Die Anteile lassen Personen ohne Festlegung außer Acht, und wie viele übrig blieben, ist nicht veröffentlicht.',
     'other-base': 'Die Regel hinter der {line} zählt andere Personen als diese Anteile.',

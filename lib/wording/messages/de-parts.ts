@@ -14,12 +14,12 @@ export const IN_EARLIER =
 
 export const ASKED = '{asked, select, everyone { aller Befragten} other {}}';
 
-const unit = (slot: string, one: string, other: string) =>
-  `{${slot}} {${slot}Count, plural, one {${one}} other {${other}}}`;
 /** After "von": the dative. */
-export const ofPoints = (slot: string) => unit(slot, 'Prozentpunkt', 'Prozentpunkten');
-/** After "±" and beside "mehr": the nominative or accusative. */
-export const points = (slot: string) => unit(slot, 'Prozentpunkt', 'Prozentpunkte');
+export const ofPoints = (slot: string) =>
+  `{${slot}} {${slot}Count, plural, one {Prozentpunkt} other {Prozentpunkten}}`;
+/** After "±" and beside "mehr": the nominative or accusative. One in words comes in the dative. */
+export const points = (slot: string) =>
+  `{${slot}, select, einem {ein} other {{${slot}}}} {${slot}Count, plural, one {Prozentpunkt} other {Prozentpunkte}}`;
 
 export const WEIGHTING = '{design, select, clustered {die Klumpung} other {die Gewichtung}}';
 

@@ -1,7 +1,10 @@
 import type { LanguagePack } from '../language-pack';
 import { points, QUANTITY, SHORT_QUANTITY, WEIGHTING } from './de-parts';
 
-const STATED = points('stated').replace('{stated} ', '{statedPp} ');
+const STATED =
+  '{statedPp, select, einem {ein} other {{statedPp}}} {statedCount, plural, one {Prozentpunkt} other {Prozentpunkte}}';
+const MARGIN = `±${points('margin')}{wider, select, yes { (bis zu ±{widerMargin})} other {}}`;
+const MARGIN_ALOUD = `${points('margin')}{wider, select, yes { oder {widerMargin}, {basis, select, modelled {wenn man die Rundung einrechnet} other {falls ${WEIGHTING} mehr Genauigkeit kostet}}} other {}}`;
 const STATES = `{pollsterStart} gibt ±${STATED} für einen Anteil an`;
 const NOT_DRAWN =
   '{drawn, select, unknown {Wie die Stichprobe gezogen wurde, ist nicht angegeben} other {Die Stichprobe wurde nicht zufällig gezogen ({sample})}}';
@@ -13,22 +16,22 @@ const ASKED = `{pollsterStart} befragte {dateSpan, select, day {am {end}} other 
 
 /** The last sentence of the short caveat, in German. */
 export const DE_CAVEAT_SHORT: LanguagePack['caveatShort'] = {
-  margin: `{stated, select, given {${STATES}{sameLevel, select, yes {} other { (bei {statedLevel} Sicherheit)}}; {newsroom} schätzt} none {{pollsterStart} gibt keine Fehlerspanne an; {newsroom} schätzt} other {{newsroomStart} schätzt}} für ${QUANTITY} ±${points('margin')} (bei {level} Sicherheit), nur für den Stichprobenfehler.`,
+  margin: `{stated, select, given {${STATES}{sameLevel, select, yes {} other { (bei {statedLevel} Sicherheit)}}; {newsroom} schätzt} none {{pollsterStart} gibt keine Fehlerspanne an; {newsroom} schätzt} other {{newsroomStart} schätzt}} für ${QUANTITY} ${MARGIN} (bei {level} Sicherheit), nur für den Stichprobenfehler.`,
   'stated-only': `${STATES} (bei {statedLevel} Sicherheit); hier wird keine Fehlerspanne für ${QUANTITY} genannt.`,
   none: `Hier wird keine Fehlerspanne für ${QUANTITY} genannt.`,
   'not-random': `${NOT_DRAWN}; deshalb wird keine Fehlerspanne für den Stichprobenfehler genannt.`,
-  modelled: `${NOT_DRAWN}; nach dem Modell des Instituts selbst schätzt {newsroom} für ${QUANTITY} ±${points('margin')} (bei {level} Sicherheit).`,
-  comparison: `${NOT_DRAWN}; so berechnet, als wäre sie es, nach {comparisonRule}, beträgt die Fehlerspanne für ${QUANTITY} ±${points('margin')} (bei {level} Sicherheit).`,
+  modelled: `${NOT_DRAWN}; nach dem Modell des Instituts selbst schätzt {newsroom} für ${QUANTITY} ${MARGIN} (bei {level} Sicherheit).`,
+  comparison: `${NOT_DRAWN}; so berechnet, als wäre sie es, nach {comparisonRule}, beträgt die Fehlerspanne für ${QUANTITY} ${MARGIN} (bei {level} Sicherheit).`,
 };
 
 /** One sentence for a caption or an aside, in German. */
 export const DE_ONE_BREATH: LanguagePack['oneBreath'] = {
-  margin: `${ASKED}; {newsroom} schätzt für ${SHORT_QUANTITY} ±${points('margin')}.`,
+  margin: `${ASKED}; {newsroom} schätzt für ${SHORT_QUANTITY} ${MARGIN}.`,
   'stated-only': `${ASKED}; angegeben sind ±${STATED} für einen Anteil, keine Fehlerspanne für ${SHORT_QUANTITY}.`,
   none: `${ASKED}; eine Fehlerspanne für ${SHORT_QUANTITY} wird nicht genannt.`,
   'not-random': `${ASKED}; ${NOT_DRAWN_ASIDE}, deshalb wird keine Fehlerspanne genannt.`,
-  modelled: `${ASKED}; {newsroom} schätzt für ${SHORT_QUANTITY} ±${points('margin')}, nach dem Modell des Instituts selbst.`,
-  comparison: `${ASKED}; für ${SHORT_QUANTITY} gilt ±${points('margin')}, als wäre die Stichprobe zufällig gezogen, nach {comparisonRule}.`,
+  modelled: `${ASKED}; {newsroom} schätzt für ${SHORT_QUANTITY} ${MARGIN}, nach dem Modell des Instituts selbst.`,
+  comparison: `${ASKED}; für ${SHORT_QUANTITY} gilt ${MARGIN}, als wäre die Stichprobe zufällig gezogen, nach {comparisonRule}.`,
 };
 
 const SPOKEN_NOT_DRAWN =
@@ -38,12 +41,12 @@ const SPOKEN_NOT_DRAWN =
 export const DE_SPOKEN: LanguagePack['spoken'] = {
   fieldwork:
     '{pollsterStart} befragte {dates} {sized, select, yes {{n} {population}} other {{population}, ohne zu sagen, wie viele}}.',
-  margin: `{newsroomStart} schätzt für ${SHORT_QUANTITY} plus oder minus ${points('margin')}.`,
+  margin: `{newsroomStart} schätzt für ${SHORT_QUANTITY} plus oder minus ${MARGIN_ALOUD}.`,
   'stated-only': `{pollsterStart} gibt plus oder minus ${STATED} für einen Anteil an, und für ${SHORT_QUANTITY} wird hier keine Fehlerspanne genannt.`,
   none: `Für ${SHORT_QUANTITY} wird keine Fehlerspanne genannt.`,
   'not-random': `${SPOKEN_NOT_DRAWN}; deshalb wird keine Fehlerspanne für den Stichprobenfehler genannt.`,
-  modelled: `${SPOKEN_NOT_DRAWN}; nach dem Modell des Instituts selbst beträgt die Fehlerspanne für ${SHORT_QUANTITY} plus oder minus ${points('margin')}.`,
-  comparison: `${SPOKEN_NOT_DRAWN}; so berechnet, als wäre sie es, nach {comparisonRule}, beträgt die Fehlerspanne für ${SHORT_QUANTITY} plus oder minus ${points('margin')}.`,
+  modelled: `${SPOKEN_NOT_DRAWN}; nach dem Modell des Instituts selbst beträgt die Fehlerspanne für ${SHORT_QUANTITY} plus oder minus ${MARGIN_ALOUD}.`,
+  comparison: `${SPOKEN_NOT_DRAWN}; so berechnet, als wäre sie es, nach {comparisonRule}, beträgt die Fehlerspanne für ${SHORT_QUANTITY} plus oder minus ${MARGIN_ALOUD}.`,
 };
 
 /** Short reasons of a fragile finding, in German. */

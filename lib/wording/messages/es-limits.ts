@@ -47,7 +47,7 @@ export const ES_LIMITS: Pick<LanguagePack, 'range' | 'detectable' | 'fragile' | 
       'Los dos sondeos comparten entrevistas que no se pueden separar, así que el cambio entre ambos no se puede calcular.',
     'same-people':
       'Se preguntó las dos veces a las mismas personas, y no se ha difundido cuántas cambiaron de respuesta.',
-    'independent-margin': `Dos muestras separadas de este tamaño tendrían aquí un margen de ±${points('independent')}; no tiene por qué ser así cuando se pregunta dos veces a las mismas personas.`,
+    'independent-margin': `Dos muestras separadas de este tamaño tendrían aquí un margen de ±${points('independent')}; el de personas a las que se pregunta dos veces no se conoce.`,
     'rebased-size':
       'Los porcentajes excluyen a quienes no eligieron, y no se ha difundido cuántas personas quedaron.',
     'other-base': 'La regla de la {line} cuenta a otras personas que estos porcentajes.',

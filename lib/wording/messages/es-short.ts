@@ -2,6 +2,8 @@ import type { LanguagePack } from '../language-pack';
 import { points, QUANTITY, SHORT_QUANTITY, WEIGHTING } from './es-parts';
 
 const STATED = points('stated').replace('{stated} ', '{statedPp} ');
+const MARGIN = `±${points('margin')}{wider, select, yes { (hasta ±{widerMargin})} other {}}`;
+const MARGIN_ALOUD = `${points('margin')}{wider, select, yes {, o bien {widerMargin} si {basis, select, modelled {se cuenta el redondeo} other {${WEIGHTING} cuesta más precisión}}} other {}}`;
 const STATES = `{pollsterStart} declara ±${STATED} para un porcentaje`;
 const NOT_DRAWN =
   '{drawn, select, unknown {No se indica cómo se eligió la muestra} other {La muestra no se eligió al azar ({sample})}}';
@@ -13,22 +15,22 @@ const ASKED = `{pollsterStart} preguntó a {sized, select, yes {{n} {population}
 
 /** The last sentence of the short caveat, in Spanish. */
 export const ES_CAVEAT_SHORT: LanguagePack['caveatShort'] = {
-  margin: `{stated, select, given {${STATES}{sameLevel, select, yes {} other { con una confianza del {statedLevel}}}; {newsroom} estima} none {{pollsterStart} no declara ningún margen; {newsroom} estima} other {{newsroomStart} estima}} para ${QUANTITY} un margen de ±${points('margin')} (confianza del {level}), solo por error de muestreo.`,
+  margin: `{stated, select, given {${STATES}{sameLevel, select, yes {} other { con una confianza del {statedLevel}}}; {newsroom} estima} none {{pollsterStart} no declara ningún margen; {newsroom} estima} other {{newsroomStart} estima}} para ${QUANTITY} un margen de ${MARGIN} (confianza del {level}), solo por error de muestreo.`,
   'stated-only': `${STATES} con una confianza del {statedLevel}; aquí no se da ninguno para ${QUANTITY}.`,
   none: `Aquí no se da ningún margen para ${QUANTITY}.`,
   'not-random': `${NOT_DRAWN}, así que no se le atribuye ningún margen de error de muestreo.`,
-  modelled: `${NOT_DRAWN}; según el modelo del propio instituto, {newsroom} estima para ${QUANTITY} un margen de ±${points('margin')} (confianza del {level}).`,
-  comparison: `${NOT_DRAWN}; calculado como si así hubiera sido, conforme a {comparisonRule}, el margen para ${QUANTITY} es de ±${points('margin')} (confianza del {level}).`,
+  modelled: `${NOT_DRAWN}; según el modelo del propio instituto, {newsroom} estima para ${QUANTITY} un margen de ${MARGIN} (confianza del {level}).`,
+  comparison: `${NOT_DRAWN}; calculado como si así hubiera sido, conforme a {comparisonRule}, el margen para ${QUANTITY} es de ${MARGIN} (confianza del {level}).`,
 };
 
 /** One sentence for a caption or an aside, in Spanish. */
 export const ES_ONE_BREATH: LanguagePack['oneBreath'] = {
-  margin: `${ASKED}; {newsroom} estima para ${SHORT_QUANTITY} un margen de ±${points('margin')}.`,
+  margin: `${ASKED}; {newsroom} estima para ${SHORT_QUANTITY} un margen de ${MARGIN}.`,
   'stated-only': `${ASKED}; declara ±${STATED} para un porcentaje, y no hay margen para ${SHORT_QUANTITY}.`,
   none: `${ASKED}; no se da margen para ${SHORT_QUANTITY}.`,
   'not-random': `${ASKED}; ${NOT_DRAWN_ASIDE}, así que no se da ningún margen.`,
-  modelled: `${ASKED}; {newsroom} estima para ${SHORT_QUANTITY} un margen de ±${points('margin')}, según el modelo del propio instituto.`,
-  comparison: `${ASKED}; para ${SHORT_QUANTITY} el margen es de ±${points('margin')} como si la muestra fuera aleatoria, conforme a {comparisonRule}.`,
+  modelled: `${ASKED}; {newsroom} estima para ${SHORT_QUANTITY} un margen de ${MARGIN}, según el modelo del propio instituto.`,
+  comparison: `${ASKED}; para ${SHORT_QUANTITY} el margen es de ${MARGIN} como si la muestra fuera aleatoria, conforme a {comparisonRule}.`,
 };
 
 const SPOKEN_NOT_DRAWN =
@@ -38,12 +40,12 @@ const SPOKEN_NOT_DRAWN =
 export const ES_SPOKEN: LanguagePack['spoken'] = {
   fieldwork:
     '{pollsterStart} preguntó a {sized, select, yes {{n} {population}} other {{population}, sin decir a cuántas,}} {dates}.',
-  margin: `{newsroomStart} estima para ${SHORT_QUANTITY} un margen de más o menos ${points('margin')}.`,
+  margin: `{newsroomStart} estima para ${SHORT_QUANTITY} un margen de más o menos ${MARGIN_ALOUD}.`,
   'stated-only': `{pollsterStart} declara más o menos ${STATED} para un porcentaje, y aquí no hay margen para ${SHORT_QUANTITY}.`,
   none: `No se da ningún margen para ${SHORT_QUANTITY}.`,
   'not-random': `${SPOKEN_NOT_DRAWN}, así que no se le atribuye ningún margen de error de muestreo.`,
-  modelled: `${SPOKEN_NOT_DRAWN}; según el modelo del propio instituto, el margen para ${SHORT_QUANTITY} es de más o menos ${points('margin')}.`,
-  comparison: `${SPOKEN_NOT_DRAWN}; calculado como si así hubiera sido, conforme a {comparisonRule}, el margen para ${SHORT_QUANTITY} es de más o menos ${points('margin')}.`,
+  modelled: `${SPOKEN_NOT_DRAWN}; según el modelo del propio instituto, el margen para ${SHORT_QUANTITY} es de más o menos ${MARGIN_ALOUD}.`,
+  comparison: `${SPOKEN_NOT_DRAWN}; calculado como si así hubiera sido, conforme a {comparisonRule}, el margen para ${SHORT_QUANTITY} es de más o menos ${MARGIN_ALOUD}.`,
 };
 
 /** Short reasons of a fragile finding, in Spanish. */

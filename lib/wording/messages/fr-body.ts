@@ -11,6 +11,7 @@ import {
   LARGER,
   LARGER_OF_ONE,
   LARGER_OF_TWO,
+  ofPercentagePoints,
   percentagePoints,
   POLL,
   UNSETTLED_BY_TWO,
@@ -18,7 +19,8 @@ import {
 } from './fr-parts';
 
 const GAP = percentagePoints('gap');
-const MOVE = percentagePoints('move');
+const OF_GAP = ofPercentagePoints('gap');
+const OF_MOVE = ofPercentagePoints('move');
 const NO_FIGURES = `Ce ${POLL} ne communique pas les chiffres nécessaires pour comparer {a} et {b}.`;
 const NO_FIGURE = `Ce ${POLL} ne communique pas le chiffre pour {option}.`;
 const CREDITS = `Ce ${POLL} crédite {a} de {aShare} et {b} de {bShare}`;
@@ -34,12 +36,12 @@ const ONE_OF_TWO_POLLS =
 /** First sentences of a body in French. */
 export const FR_BODY: ClaimMessages = {
   lead: {
-    'holds-twice': `{setting, select, contest {Un ${POLL} suggère une avance de ${GAP} pour {a} sur {b} : {aShare} contre {bShare}.} other {La réponse {a} est plus fréquente que la réponse {b}, {aShare} contre {bShare}, suggère un ${POLL}.}} L’écart ${LARGER_OF_ONE}.`,
+    'holds-twice': `{setting, select, contest {Un ${POLL} suggère une avance ${OF_GAP} pour {a} sur {b} : {aShare} contre {bShare}.} other {La réponse {a} est plus fréquente que la réponse {b}, {aShare} contre {bShare}, suggère un ${POLL}.}} L’écart ${LARGER_OF_ONE}.`,
     holds: `{setting, select, contest {Ce ${POLL} donne {a} devant {b}, avec ${GAP} d’écart : {aShare} contre {bShare}.} other {Dans ce ${POLL}, la réponse {a} est plus fréquente que la réponse {b}, {aShare} contre {bShare}.}} Cet écart ${LARGER}.`,
     fragile: `Ce ${POLL} donne un chiffre plus élevé pour {a} que pour {b}, {aShare} contre {bShare}, mais il ne permet pas de trancher.`,
     level: `Ce ${POLL} donne le même chiffre pour {a} et {b} : {aShare}. Des chiffres égaux ne signifient pas que l’opinion se partage en deux moitiés.`,
-    'not-shown': `${CREDITS}, soit un écart de ${GAP}. ${chanceAlone('produire un écart de cette taille', 'avec un échantillon aléatoire')}.`,
-    family: `${CREDITS}, soit un écart de ${GAP}. C’est l’une des comparaisons faites avec le même sondage et, parmi elles, le hasard pourrait à lui seul produire un écart de cette taille.`,
+    'not-shown': `${CREDITS}, soit un écart ${OF_GAP}. ${chanceAlone('produire un écart de cette taille', 'avec un échantillon aléatoire')}.`,
+    family: `${CREDITS}, soit un écart ${OF_GAP}. C’est l’une des comparaisons faites avec le même sondage et, parmi elles, le hasard pourrait à lui seul produire un écart de cette taille.`,
     untested: `{known, select, yes {${CREDITS}.} other {${NO_FIGURES}}}`,
   },
   change: {
@@ -56,9 +58,9 @@ export const FR_BODY: ClaimMessages = {
         `Ce ${POLL} donne un chiffre plus ${word} pour {option}, {now} contre {then} ${IN_EARLIER}, ${UNSETTLED_BY_TWO}.`,
     ),
     level: `${AT}, le même chiffre que ${IN_EARLIER}. ${STOOD_STILL}`,
-    'not-shown': `${AT_BOTH}. ${chanceAlone(`produire une différence de ${MOVE} entre deux sondages de ce type`, 'entre deux échantillons aléatoires')}.`,
-    family: `${AT_BOTH}. ${ONE_OF_TWO_POLLS} produire une différence de ${MOVE}.`,
-    'little-changed': `Le chiffre pour {option} change peu : {now} dans ce ${POLL}, contre {then} ${IN_EARLIER}. Même compte tenu de l’erreur d’échantillonnage et de l’arrondi, la différence est inférieure au minimum de ${percentagePoints('indifference')} fixé au préalable pour qu’elle compte.`,
+    'not-shown': `${AT_BOTH}. ${chanceAlone(`produire une différence ${OF_MOVE} entre deux sondages de ce type`, 'entre deux échantillons aléatoires')}.`,
+    family: `${AT_BOTH}. ${ONE_OF_TWO_POLLS} produire une différence ${OF_MOVE}.`,
+    'little-changed': `Le chiffre pour {option} change peu : {now} dans ce ${POLL}, contre {then} ${IN_EARLIER}. Même compte tenu de l’erreur d’échantillonnage et de l’arrondi, la différence est inférieure au minimum ${ofPercentagePoints('indifference')} fixé au préalable pour qu’elle compte.`,
     untested: `{known, select, both {${AT_BOTH}.} now {${AT}.} other {${NO_FIGURE}}}`,
   },
   'lead-change': {
@@ -66,8 +68,8 @@ export const FR_BODY: ClaimMessages = {
     holds: `Dans ce ${POLL}, l’écart entre {a} et {b} s’est déplacé vers {toward} : {aNow} contre {bNow}, après {aThen} contre {bThen} ${IN_EARLIER}. Ce déplacement ${LARGER}.`,
     fragile: `Dans ce ${POLL}, l’écart entre {a} et {b} penche davantage vers {toward}, {aNow} contre {bNow} après {aThen} contre {bThen} ${IN_EARLIER}, ${UNSETTLED_BY_TWO}.`,
     level: `Dans ce ${POLL}, l’écart entre {a} et {b}, {aNow} contre {bNow}, a le même chiffre que ${IN_EARLIER}, {aThen} contre {bThen}. ${STOOD_STILL}`,
-    'not-shown': `${CREDITS_BOTH}. ${chanceAlone(`faire varier l’écart de ${MOVE} entre deux sondages de ce type`, 'entre deux échantillons aléatoires')}.`,
-    family: `${CREDITS_BOTH}. ${ONE_OF_TWO_POLLS} faire varier l’écart de ${MOVE}.`,
+    'not-shown': `${CREDITS_BOTH}. ${chanceAlone(`faire varier l’écart ${OF_MOVE} entre deux sondages de ce type`, 'entre deux échantillons aléatoires')}.`,
+    family: `${CREDITS_BOTH}. ${ONE_OF_TWO_POLLS} faire varier l’écart ${OF_MOVE}.`,
     untested: `{known, select, both {${CREDITS_BOTH}.} now {${CREDITS_NOW}.} other {${NO_FIGURES}}}`,
   },
   threshold: {

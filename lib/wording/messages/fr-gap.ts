@@ -1,5 +1,5 @@
 import type { ClaimMessages } from '../language-pack';
-import { chanceAlone, LARGER, LARGER_OF_ONE, percentagePoints, POLL } from './fr-parts';
+import { chanceAlone, LARGER, LARGER_OF_ONE, ofPercentagePoints, POLL } from './fr-parts';
 
 const BOTH = '{option} : {gShare} parmi {g} et {hShare} parmi {h}';
 const MORE =
@@ -31,8 +31,8 @@ export const FR_GAP: Record<'headline' | 'body' | 'chartTitle' | 'told', ClaimMe
     holds: `Ce ${POLL} relève ${MORE} : {gShare} contre {hShare}. Cet écart ${LARGER}.`,
     fragile: `Ce ${POLL} donne un c${HIGHER}, {gShare} contre {hShare}, mais il ne permet pas de trancher.`,
     level: `Ce ${POLL} donne le même chiffre pour {option} parmi {g} et parmi {h} : {gShare}. Des chiffres égaux ne signifient pas que les groupes pensent la même chose.`,
-    'not-shown': `${CREDITS}, soit un écart de ${percentagePoints('gap')}. ${chanceAlone('produire un écart de cette taille', 'avec des échantillons aléatoires')}.`,
-    family: `${CREDITS}, soit un écart de ${percentagePoints('gap')}. C’est l’une des comparaisons faites entre groupes du même sondage et, parmi elles, le hasard pourrait à lui seul produire un écart de cette taille.`,
+    'not-shown': `${CREDITS}, soit un écart ${ofPercentagePoints('gap')}. ${chanceAlone('produire un écart de cette taille', 'avec des échantillons aléatoires')}.`,
+    family: `${CREDITS}, soit un écart ${ofPercentagePoints('gap')}. C’est l’une des comparaisons faites entre groupes du même sondage et, parmi elles, le hasard pourrait à lui seul produire un écart de cette taille.`,
     untested: `{known, select, yes {${CREDITS}.} hidden {Ce ${POLL} ${TOO_FEW}.} other {Ce ${POLL} ne communique pas les chiffres nécessaires pour comparer {g} et {h}.}}`,
   },
   chartTitle: {

@@ -1,23 +1,32 @@
 import type { LanguagePack } from '../language-pack';
-import { percentagePoints, points, RANGE_OF_TWO_RUNS, RANGE_RUNS, WEIGHTING } from './fr-parts';
+import {
+  of,
+  ofPercentagePoints,
+  ofPoints,
+  points,
+  RANGE_OF_TWO_RUNS,
+  RANGE_RUNS,
+  WEIGHTING,
+} from './fr-parts';
 
-const LOW = points('low');
 const HIGH = points('high');
-const LEAD_RANGE = `${RANGE_RUNS} de {span, select, across {${LOW} de plus pour {b} à ${HIGH} de plus pour {a}.} other {{low} à ${HIGH} de plus pour {a}.}}`;
-const CHANGE_RANGE = `${RANGE_OF_TWO_RUNS} {span, select, across {d’une baisse de ${LOW} à une hausse de ${HIGH}.} above {d’une hausse de ${LOW} à une hausse de {high}.} other {d’une baisse de ${HIGH} à une baisse de {low}.}}`;
+const OF_LOW = ofPoints('low');
+const OF_HIGH = ofPoints('high');
+const LEAD_RANGE = `${RANGE_RUNS} {span, select, across {${OF_LOW} de plus pour {b} à ${HIGH} de plus pour {a}.} other {${of('low')} à ${HIGH} de plus pour {a}.}}`;
+const CHANGE_RANGE = `${RANGE_OF_TWO_RUNS} {span, select, across {d’une baisse ${OF_LOW} à une hausse ${OF_HIGH}.} above {d’une hausse ${OF_LOW} à une hausse ${of('high')}.} other {d’une baisse ${OF_HIGH} à une baisse ${of('low')}.}}`;
 
 /** Range, detectable difference, and the reasons why a finding is fragile or was not tested, in French. */
 export const FR_LIMITS: Pick<LanguagePack, 'range' | 'detectable' | 'fragile' | 'untested'> = {
   range: {
     lead: LEAD_RANGE,
     change: CHANGE_RANGE,
-    'lead-change': `${RANGE_OF_TWO_RUNS} de {span, select, across {${LOW} vers {away} à ${HIGH} vers {toward}.} other {{low} à ${HIGH} vers {toward}.}}`,
+    'lead-change': `${RANGE_OF_TWO_RUNS} {span, select, across {${OF_LOW} vers {away} à ${HIGH} vers {toward}.} other {${of('low')} à ${HIGH} vers {toward}.}}`,
     threshold: `${RANGE_RUNS} de {low} à {high}.`,
     'net-score': LEAD_RANGE,
     'net-score-change': CHANGE_RANGE,
-    gap: `${RANGE_OF_TWO_RUNS} de {span, select, across {${LOW} de plus parmi {h} à ${HIGH} de plus parmi {g}.} other {{low} à ${HIGH} de plus parmi {g}.}}`,
+    gap: `${RANGE_OF_TWO_RUNS} {span, select, across {${OF_LOW} de plus parmi {h} à ${HIGH} de plus parmi {g}.} other {${of('low')} à ${HIGH} de plus parmi {g}.}}`,
   },
-  detectable: `{claim, select, gap {Un écart réel} other {Un changement réel}} de ${percentagePoints('detectable')} aurait été décelé quatre fois sur cinq ; les plus petits passent souvent inaperçus.`,
+  detectable: `{claim, select, gap {Un écart réel} other {Un changement réel}} ${ofPercentagePoints('detectable')} aurait été décelé quatre fois sur cinq ; les plus petits passent souvent inaperçus.`,
   fragile: {
     'as-printed':
       'Avec les chiffres publiés, {claim, select, lead {l’écart} change {l’évolution} leadChange {l’évolution de l’écart} netScore {l’écart} netScoreChange {l’évolution du solde net} gap {l’écart} other {la distance à la {line}}} dépasse ce que {basis, select, sampling {l’erreur d’échantillonnage produit d’ordinaire à elle seule} modelled {le hasard produit d’ordinaire à lui seul selon le modèle de l’institut} other {le hasard produit d’ordinaire à lui seul dans un échantillon aléatoire}}.',
@@ -47,7 +56,7 @@ export const FR_LIMITS: Pick<LanguagePack, 'range' | 'detectable' | 'fragile' | 
       'Les deux sondages partagent des entretiens impossibles à distinguer : l’évolution entre eux ne peut pas être calculée.',
     'same-people':
       'Les mêmes personnes ont été interrogées les deux fois, et le nombre de celles qui ont changé de réponse n’est pas communiqué.',
-    'independent-margin': `Deux échantillons distincts de cette taille auraient ici une marge de ±${points('independent')} ; ce n’est pas forcément le cas quand les mêmes personnes répondent deux fois.`,
+    'independent-margin': `Deux échantillons distincts de cette taille auraient ici une marge de ±${points('independent')} ; celle de personnes interrogées deux fois n’est pas connue.`,
     'rebased-size':
       'Les pourcentages excluent les personnes sans choix exprimé, et le nombre de celles qui restent n’est pas communiqué.',
     'other-base': 'La règle de la {line} ne compte pas les mêmes personnes que ces pourcentages.',

@@ -1,5 +1,5 @@
 import type { LanguagePack } from '../language-pack';
-import { points } from './fr-parts';
+import { ofPoints, points } from './fr-parts';
 
 const DEFF =
   '{poll, select, earlier {Effet de plan du sondage précédent} group {Effet de plan parmi {group}} other {Effet de plan}} : {deff}';
@@ -36,8 +36,8 @@ export const FR_METHOD_NOTE: LanguagePack['methodNote'] = {
   'breaking-factor':
     '{settled, select, yes {Avec les chiffres publiés, le résultat ne passerait plus le test si les deux effets de plan étaient multipliés par {breaking} ou plus.} other {Avec les chiffres publiés, le résultat ne passerait le test que si les deux effets de plan étaient multipliés par moins de {breaking}.}}',
   'lower-deff': 'Au bas de la fourchette de l’effet de plan, il passerait le test.',
-  detectable: `{claim, select, lead {Un écart réel} change {Un changement réel} leadChange {Un changement réel de l’écart} netScore {Un solde net réel} netScoreChange {Un changement réel du solde net} gap {Un écart réel} other {Un éloignement réel de la barre}} de ${points('detectable')} aurait été décelé quatre fois sur cinq.`,
-  'little-changed': `Peu de changement : les deux tests unilatéraux par rapport à un changement de ${points('indifference')}, fixé au préalable, sont concluants.`,
+  detectable: `{claim, select, lead {Un écart réel} change {Un changement réel} leadChange {Un changement réel de l’écart} netScore {Un solde net réel} netScoreChange {Un changement réel du solde net} gap {Un écart réel} other {Un éloignement réel de la barre}} ${ofPoints('detectable')} aurait été décelé quatre fois sur cinq.`,
+  'little-changed': `Peu de changement : les deux tests unilatéraux par rapport à un changement ${ofPoints('indifference')}, fixé au préalable, sont concluants.`,
   exaggerated: 'Les changements qui passent un tel test sont en moyenne un peu exagérés.',
   untested: 'Aucun test n’a été fait.',
   source: 'Source : {url}',

@@ -7,7 +7,7 @@ import {
   LARGER,
   LARGER_OF_ONE,
   LARGER_OF_TWO,
-  percentagePoints,
+  ofPercentagePoints,
   POLL,
   UNSETTLED_BY_TWO,
   UNSETTLED_POLLS,
@@ -73,7 +73,7 @@ export const FR_NET_SCORE: Messages<'net-score'> = {
 const NET = 'solde net pour la réponse {name}';
 const NET_NOW = `Dans ce ${POLL}, le ${NET} est de {netNow}`;
 const TOLD_NOW = `Le ${NET} est de {netNow}`;
-const MOVE = percentagePoints('move');
+const OF_MOVE = ofPercentagePoints('move');
 const capital = (noun: string) => noun.charAt(0).toUpperCase() + noun.slice(1);
 const SHARED =
   'ce sondage partage des entretiens avec {prevPoll}, si bien que l’évolution ne peut pas être testée';
@@ -113,8 +113,8 @@ export const FR_NET_SCORE_CHANGE: Messages<'net-score-change'> = {
         `Dans ce ${POLL}, le ${NET} est plus ${word}, {netNow} contre {netThen} ${IN_EARLIER}, ${UNSETTLED_BY_TWO}.`,
     ),
     level: `${NET_NOW}, le même chiffre que ${IN_EARLIER}. Des chiffres égaux ne signifient pas que l’opinion n’a pas bougé.`,
-    'not-shown': `${NET_NOW}, contre {netThen} ${IN_EARLIER}. ${chanceAlone(`produire une différence de ${MOVE}`, 'entre deux échantillons aléatoires')}.`,
-    family: `${NET_NOW}, contre {netThen} ${IN_EARLIER}. C’est l’une des comparaisons faites entre les deux sondages et, parmi elles, le hasard pourrait à lui seul produire une différence de ${MOVE}.`,
+    'not-shown': `${NET_NOW}, contre {netThen} ${IN_EARLIER}. ${chanceAlone(`produire une différence ${OF_MOVE}`, 'entre deux échantillons aléatoires')}.`,
+    family: `${NET_NOW}, contre {netThen} ${IN_EARLIER}. C’est l’une des comparaisons faites entre les deux sondages et, parmi elles, le hasard pourrait à lui seul produire une différence ${OF_MOVE}.`,
     untested: `{known, select, both {${NET_NOW}, contre {netThen} ${IN_EARLIER}.} now {${NET_NOW}.} other {Ce ${POLL} ne communique pas ${NO_FIGURES}.}}`,
   },
   chartTitle: {

@@ -20,6 +20,11 @@ export const percentagePoints = (slot: string) => `{${slot}} ${unit(slot)} de po
 /** A difference once it is clear of what. */
 export const points = (slot: string) => `{${slot}} ${unit(slot)}`;
 
+/** "de", or "d’" before a number in words that begins with a vowel. */
+export const of = (slot: string) => `{${slot}, select, un {d’un} other {de {${slot}}}}`;
+export const ofPercentagePoints = (slot: string) => `${of(slot)} ${unit(slot)} de pourcentage`;
+export const ofPoints = (slot: string) => `${of(slot)} ${unit(slot)}`;
+
 export const WEIGHTING = '{design, select, clustered {le tirage en grappes} other {la pondération}}';
 
 const ALLOWED_FOR =
