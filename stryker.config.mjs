@@ -4,9 +4,8 @@ import { join } from 'node:path';
 
 /** @type {import('@stryker-mutator/api/core').PartialStrykerOptions} */
 const config = {
-  testRunner: 'vitest',
-  vitest: { configFile: 'tests/bench/mutation.config.ts', related: true },
-  plugins: ['@stryker-mutator/vitest-runner'],
+  testRunner: 'in-process',
+  plugins: ['./tests/bench/mutation-runner.mjs'],
   mutate: [
     'lib/stats/**/*.ts',
     'lib/findings/**/*.ts',
