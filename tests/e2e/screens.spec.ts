@@ -15,7 +15,7 @@ for (const [role, paths] of Object.entries(SCREENS))
   test(`what a ${role} opens has no fault that axe finds, and fits 320 px by day and night`, async ({
     page,
   }) => {
-    test.setTimeout(150_000);
+    test.setTimeout(300_000);
     await signIn(page, accountWith(role));
     for (const path of paths) await look(page, path);
     if (role !== 'reporter') return;

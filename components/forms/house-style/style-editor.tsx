@@ -1,7 +1,6 @@
 'use client';
 
 import { useState } from 'react';
-import type { ActionResult } from '@/lib/errors';
 import { Button } from '../../ui/button';
 import { CautionNote } from '../../ui/caution-note';
 import { ErrorSummary, type FieldFault } from '../../ui/error-summary';
@@ -13,6 +12,9 @@ import { type Sentence, SentencesForm } from './sentences-form';
 import { type PropsOf, SettingsForm } from './settings-form';
 import type { Slot } from './sentence-field';
 import { type Faults, type SaveStatus, useStyleDraft } from './use-style-draft';
+
+/** What proposing is answered with; `fields` by path. */
+type Answer = { ok: true } | { ok: false; message: string; fields: Readonly<Record<string, string>> };
 
 export type EditorDraft = {
   id: string;
@@ -35,7 +37,7 @@ export function StyleEditor({
   onProposed,
 }: {
   draft: EditorDraft;
-  propose: (input: unknown) => Promise<ActionResult<unknown>>;
+  propose: (input: unknown) => Promise<Answer>;
   onProposed: () => void;
 }) {
   const { faults, status, savedAt, decide, settle } = useStyleDraft(draft.id, draft);
@@ -107,7 +109,7 @@ export function StyleEditor({
   );
 }
 
-function faultList(failure: ActionResult<unknown>): FieldFault[] {
+function faultList(failure: Answer): FieldFault[] {
   if (failure.ok) return [];
   const entries = Object.entries(failure.fields);
   if (entries.length === 0) return [{ message: failure.message }];
