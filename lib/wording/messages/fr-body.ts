@@ -23,12 +23,12 @@ const OF_GAP = ofPercentagePoints('gap');
 const OF_MOVE = ofPercentagePoints('move');
 const NO_FIGURES = `Ce ${POLL} ne communique pas les chiffres nécessaires pour comparer {a} et {b}.`;
 const NO_FIGURE = `Ce ${POLL} ne communique pas le chiffre pour {option}.`;
-const CREDITS = `Ce ${POLL} crédite {a} de {aShare} et {b} de {bShare}`;
-const CREDITS_NOW = `Ce ${POLL} crédite {a} de {aNow} et {b} de {bNow}`;
+const CREDITS = `Ce ${POLL} donne {a} à {aShare} et {b} à {bShare}`;
+const CREDITS_NOW = `Ce ${POLL} donne {a} à {aNow} et {b} à {bNow}`;
 const CREDITS_BOTH = `${CREDITS_NOW}, contre {aThen} et {bThen} ${IN_EARLIER}`;
-const AT = `Ce ${POLL} crédite {option} de {now}`;
+const AT = `Ce ${POLL} donne {option} à {now}`;
 const AT_BOTH = `${AT}, contre {then} ${IN_EARLIER}`;
-const SHARE = `Ce ${POLL} crédite {option} de {share}${ASKED}`;
+const SHARE = `Ce ${POLL} donne {option} à {share}${ASKED}`;
 const STOOD_STILL = 'Des chiffres égaux ne signifient pas que l’opinion n’a pas bougé.';
 const ONE_OF_TWO_POLLS =
   'C’est l’une des comparaisons faites entre les deux sondages et, parmi elles, le hasard pourrait à lui seul';
@@ -47,11 +47,11 @@ export const FR_BODY: ClaimMessages = {
   change: {
     'holds-twice': upOrDown(
       (noun) =>
-        `Deux sondages {pollsters}${AMONG} suggèrent une ${noun} pour {option} depuis le sondage {prevDates}, de {then} à {now}. Cette ${noun} ${LARGER_OF_TWO}.`,
+        `Deux sondages {pollsters}${AMONG} suggèrent une ${noun} pour {option} depuis le sondage {prevDates} : {now} contre {then}. Cette ${noun} ${LARGER_OF_TWO}.`,
     ),
     holds: upOrDown(
       (noun) =>
-        `Ce ${POLL} fait état d’une ${noun} pour {option}, de {then} ${IN_EARLIER} à {now}. Cette ${noun} ${LARGER}.`,
+        `Ce ${POLL} fait état d’une ${noun} pour {option} : {now} contre {then} ${IN_EARLIER}. Cette ${noun} ${LARGER}.`,
     ),
     fragile: higherOrLower(
       (word) =>

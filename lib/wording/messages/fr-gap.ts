@@ -13,7 +13,7 @@ const LEFT_OUT = 'omet des chiffres nécessaires pour comparer {g} et {h}';
 const CHANCE = 'un écart que le hasard seul pourrait produire';
 const CHANCE_AMONG = 'un écart que le hasard pourrait produire parmi plusieurs comparaisons';
 const UNUSUAL = 'un écart qui dépasse ce que le hasard produit d’ordinaire';
-const CREDITS = `Ce ${POLL} crédite {option} de {gShare} parmi {g} et de {hShare} parmi {h}`;
+const CREDITS = `Ce ${POLL} donne {option} à {gShare} parmi {g} et à {hShare} parmi {h}`;
 
 /** A gap between two groups of one sample, in French. */
 export const FR_GAP: Record<'headline' | 'body' | 'chartTitle' | 'told', ClaimMessages['gap']> = {

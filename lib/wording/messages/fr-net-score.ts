@@ -26,8 +26,8 @@ const HIGHER = 'hiffre plus élevé pour {a} que pour {b}, {aShare} contre {bSha
 const UNSETTLED = 'mais il ne permet pas de trancher';
 const CHANCE = 'que le hasard seul pourrait produire';
 const CHANCE_AMONG = 'que le hasard pourrait produire parmi plusieurs comparaisons';
-const CREDITS = `Ce ${POLL} crédite {a} de {aShare} et {b} de {bShare}`;
-const PUTS = 'Le sondage crédite {a} de {aShare} et {b} de {bShare}';
+const CREDITS = `Ce ${POLL} donne {a} à {aShare} et {b} à {bShare}`;
+const PUTS = 'Le sondage donne {a} à {aShare} et {b} à {bShare}';
 const NO_FIGURES = 'les chiffres nécessaires au calcul du solde net';
 
 /** A net score in French: which of the two answers is given more often, with the balance beside it. */
@@ -66,7 +66,7 @@ export const FR_NET_SCORE: Messages<'net-score'> = {
     level: 'Ce sondage donne le même chiffre pour {a} et {b} : {aShare}.',
     'not-shown': `${PUTS}, soit un solde net de {net} ${CHANCE}.`,
     family: `${PUTS}, soit un solde net de {net} ${CHANCE_AMONG}.`,
-    untested: `{reason, select, notDisclosed {Le sondage ne communique pas ${NO_FIGURES}.} noSamplingBasis {Un sondage sans marge d’erreur reconnue crédite {a} de {aShare} et {b} de {bShare}.} noSampleSize {Un sondage qui ne dit pas combien de personnes ont répondu crédite {a} de {aShare} et {b} de {bShare}.} other {${PUTS}, soit un solde net que ce sondage ne permet pas de tester.}}`,
+    untested: `{reason, select, notDisclosed {Le sondage ne communique pas ${NO_FIGURES}.} noSamplingBasis {Un sondage sans marge d’erreur reconnue donne {a} à {aShare} et {b} à {bShare}.} noSampleSize {Un sondage qui ne dit pas combien de personnes ont répondu donne {a} à {aShare} et {b} à {bShare}.} other {${PUTS}, soit un solde net que ce sondage ne permet pas de tester.}}`,
   },
 };
 

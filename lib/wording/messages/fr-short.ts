@@ -67,9 +67,9 @@ export const FR_NEWSLETTER: LanguagePack['newsletter'] = { line: '{race}. {line}
 export const FR_CORRECTION: LanguagePack['correction'] = {
   intro:
     'Rectificatif, {on} : une version antérieure de cet article donnait {count, plural, one {une indication erronée} other {des indications erronées}} sur le sondage {pollster}.',
-  share: 'Elle créditait {option} de {was} ; le chiffre exact est {is}.',
-  'earlier-share': 'Elle créditait {option} de {was} dans {prevPoll} ; le chiffre exact est {is}.',
-  'group-share': 'Elle créditait {option} de {was} parmi {group} ; le chiffre exact est {is}.',
+  share: 'Elle donnait {option} à {was} ; le chiffre exact est {is}.',
+  'earlier-share': 'Elle donnait {option} à {was} dans {prevPoll} ; le chiffre exact est {is}.',
+  'group-share': 'Elle donnait {option} à {was} parmi {group} ; le chiffre exact est {is}.',
   'sample-size':
     '{wasSized, select, yes {Elle indiquait {was} personnes interrogées} other {Elle n’indiquait pas le nombre de personnes interrogées}} ; {isSized, select, yes {le nombre exact est {is}} other {le nombre exact n’est pas communiqué}}.',
   dates: 'Elle datait les entretiens {was} ; les dates exactes sont : {is}.',

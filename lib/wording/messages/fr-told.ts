@@ -4,12 +4,12 @@ import { FR_NET_SCORE, FR_NET_SCORE_CHANGE } from './fr-net-score';
 import { aboveOrBelow, ASKED, higherOrLower, UNSETTLED_BY_TWO, upOrDown } from './fr-parts';
 
 const UNSETTLED = 'mais il ne permet pas de trancher';
-const BOTH = 'Le sondage crédite {a} de {aShare} et {b} de {bShare}';
-const BOTH_NOW = 'Le sondage crédite {a} de {aNow} et {b} de {bNow}';
+const BOTH = 'Le sondage donne {a} à {aShare} et {b} à {bShare}';
+const BOTH_NOW = 'Le sondage donne {a} à {aNow} et {b} à {bNow}';
 const GAP_NOW = `${BOTH_NOW}, contre {aThen} et {bThen} dans {prevPoll}`;
-const AT = 'Le sondage crédite {option} de {now}';
+const AT = 'Le sondage donne {option} à {now}';
 const AT_BOTH = `${AT}, contre {then} dans {prevPoll}`;
-const SHARE = `Le sondage crédite {option} de {share}${ASKED}`;
+const SHARE = `Le sondage donne {option} à {share}${ASKED}`;
 const AHEAD = (poll: string, answer: string) =>
   `{setting, select, contest {${poll} donne {a} devant {b}, {aShare} contre {bShare}, un écart qui dépasse ce que le hasard produit d’ordinaire.} other {${answer} {a} est plus fréquente que la réponse {b}, {aShare} contre {bShare}, un écart qui dépasse ce que le hasard produit d’ordinaire.}}`;
 const MOVED = `s’est déplacé vers {toward} depuis {prevPoll} : {aNow} contre {bNow}, après {aThen} contre {bThen}.`;
@@ -17,8 +17,8 @@ const SHARED =
   'ce sondage partage des entretiens avec {prevPoll}, si bien que l’évolution ne peut pas être testée';
 const TWICE =
   'les mêmes personnes ont été interrogées les deux fois, si bien que l’évolution ne peut pas être testée';
-const NO_MARGIN = 'Un sondage sans marge d’erreur reconnue crédite';
-const NO_SIZE = 'Un sondage qui ne dit pas combien de personnes ont répondu crédite';
+const NO_MARGIN = 'Un sondage sans marge d’erreur reconnue donne';
+const NO_SIZE = 'Un sondage qui ne dit pas combien de personnes ont répondu donne';
 
 /** One sentence per finding that can stand in any line, in French. */
 export const FR_TOLD: ClaimMessages = {
@@ -29,15 +29,15 @@ export const FR_TOLD: ClaimMessages = {
     level: 'Ce sondage donne le même chiffre pour {a} et {b} : {aShare}.',
     'not-shown': `${BOTH}, un écart que le hasard seul pourrait produire.`,
     family: `${BOTH}, un écart que le hasard pourrait produire parmi plusieurs comparaisons.`,
-    untested: `{reason, select, notDisclosed {Le sondage ne communique pas les chiffres nécessaires pour comparer {a} et {b}.} noSamplingBasis {${NO_MARGIN} {a} de {aShare} et {b} de {bShare}.} noSampleSize {${NO_SIZE} {a} de {aShare} et {b} de {bShare}.} tooSmall {Un sondage aux entretiens trop peu nombreux pour comparer crédite {a} de {aShare} et {b} de {bShare}.} other {${BOTH}, un écart que ce sondage ne permet pas de tester.}}`,
+    untested: `{reason, select, notDisclosed {Le sondage ne communique pas les chiffres nécessaires pour comparer {a} et {b}.} noSamplingBasis {${NO_MARGIN} {a} à {aShare} et {b} à {bShare}.} noSampleSize {${NO_SIZE} {a} à {aShare} et {b} à {bShare}.} tooSmall {Un sondage aux entretiens trop peu nombreux pour comparer donne {a} à {aShare} et {b} à {bShare}.} other {${BOTH}, un écart que ce sondage ne permet pas de tester.}}`,
   },
   change: {
     'holds-twice': upOrDown(
-      (noun) => `Le chiffre pour {option} est en ${noun} depuis {prevPoll}, de {then} à {now}.`,
+      (noun) => `Le chiffre pour {option} est en ${noun} depuis {prevPoll} : {now} contre {then}.`,
     ),
     holds: upOrDown(
       (noun) =>
-        `Dans ce sondage, le chiffre pour {option} est en ${noun} depuis {prevPoll}, de {then} à {now}.`,
+        `Dans ce sondage, le chiffre pour {option} est en ${noun} depuis {prevPoll} : {now} contre {then}.`,
     ),
     fragile: higherOrLower(
       (word) =>
@@ -74,7 +74,7 @@ export const FR_TOLD: ClaimMessages = {
     level: 'Ce sondage place {option} exactement sur la {line}.',
     'not-shown': `${SHARE}, trop près de la {line} pour dire de quel côté.`,
     family: `${SHARE} ; parmi plusieurs tests, c’est trop près de la {line} pour dire de quel côté.`,
-    untested: `{reason, select, notDisclosed {Le sondage ne communique pas le chiffre pour {option}.} noSamplingBasis {${NO_MARGIN} {option} de {share}${ASKED}.} noSampleSize {${NO_SIZE} {option} de {share}${ASKED}.} other {${SHARE}, ce que ce sondage ne permet pas de tester par rapport à la {line}.}}`,
+    untested: `{reason, select, notDisclosed {Le sondage ne communique pas le chiffre pour {option}.} noSamplingBasis {${NO_MARGIN} {option} à {share}${ASKED}.} noSampleSize {${NO_SIZE} {option} à {share}${ASKED}.} other {${SHARE}, ce que ce sondage ne permet pas de tester par rapport à la {line}.}}`,
   },
   'net-score': FR_NET_SCORE.told,
   'net-score-change': FR_NET_SCORE_CHANGE.told,

@@ -97,7 +97,7 @@ describe('numbers in a sentence', () => {
       'da a Alder el 42 por ciento y a Brook el 41 por ciento, una diferencia de un punto porcentual.',
     );
     expect(bodies[1]).toContain(
-      'crédite Alder de 42 pour cent et Brook de 41 pour cent, soit un écart d’un point de pourcentage.',
+      'donne Alder à 42 pour cent et Brook à 41 pour cent, soit un écart d’un point de pourcentage.',
     );
     expect(bodies[2]).toContain(
       'sieht Alder bei 42 Prozent und Brook bei 41 Prozent, ein Abstand von einem Prozentpunkt.',
