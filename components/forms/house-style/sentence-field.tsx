@@ -137,12 +137,14 @@ function useFilled(draftId: string, path: string, text: string, savedAt: number)
   }, [text]);
   useEffect(() => {
     let isGone = false;
-    if (shown.current === latest.current) return;
-    shown.current = latest.current;
-    const body = { path, text: latest.current };
+    const asked = latest.current;
+    if (shown.current === asked) return;
+    const body = { path, text: asked };
     fetchJson(`/api/desk/house-style/${draftId}/filled`, { method: 'POST', body })
       .then((answer) => {
-        if (!isGone && Array.isArray(answer)) setFilled(answer as Filled[]);
+        if (isGone || !Array.isArray(answer)) return;
+        shown.current = asked;
+        setFilled(answer as Filled[]);
       })
       .catch(() => {
         if (!isGone) setFilled(null);
