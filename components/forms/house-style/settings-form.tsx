@@ -22,7 +22,7 @@ const VERDICTS = ['holds', 'fragile', 'does-not-hold', 'cannot-be-tested'];
 export function SettingsForm({ propsOf, languages }: { propsOf: PropsOf; languages: readonly string[] }) {
   return (
     <>
-      <section aria-labelledby="style-prints">
+      <section className="mt-8" aria-labelledby="style-prints">
         <SectionHeading id="style-prints">How the desk prints</SectionHeading>
         <TextSetting {...propsOf('style.newsroom')} hint="As it stands within a sentence." />
         <ChoiceSetting {...propsOf('style.percent')} offered={['sign', 'word', 'per-cent']} />
@@ -36,7 +36,7 @@ export function SettingsForm({ propsOf, languages }: { propsOf: PropsOf; languag
           />
         ))}
       </section>
-      <section aria-labelledby="style-words">
+      <section className="mt-8" aria-labelledby="style-words">
         <SectionHeading id="style-words">Words</SectionHeading>
         {VERDICTS.map((verdict) => (
           <Lines
@@ -48,7 +48,7 @@ export function SettingsForm({ propsOf, languages }: { propsOf: PropsOf; languag
         <Lines {...propsOf('style.banned')} hint="One a line. No sentence of this desk uses them." />
         <Preferred {...propsOf('style.preferred')} />
       </section>
-      <section aria-labelledby="style-rules">
+      <section className="mt-8" aria-labelledby="style-rules">
         <SectionHeading id="style-rules">Readings and rules</SectionHeading>
         <ChoiceSetting {...propsOf('style.onePollHeadlines')} offered={['allow', 'warn', 'refuse']} />
         <YesNoSetting
@@ -66,7 +66,7 @@ export function SettingsForm({ propsOf, languages }: { propsOf: PropsOf; languag
           hint="Unedited text of printed figures, no comparison and no verdict word, marked “one reader” until a second person has read it."
         />
       </section>
-      <section aria-labelledby="style-tests">
+      <section className="mt-8" aria-labelledby="style-tests">
         <SectionHeading id="style-tests">What the desk tests by</SectionHeading>
         <NumberSetting {...propsOf('policy.level')} factor={100} suffix="%" />
         {DESIGNS.map((design) => (
@@ -79,7 +79,7 @@ export function SettingsForm({ propsOf, languages }: { propsOf: PropsOf; languag
         <NumberSetting {...propsOf('policy.indifferencePp')} suffix="points" />
         <NumberSetting {...propsOf('policy.minimumNEff')} suffix="interviews" />
       </section>
-      <section aria-labelledby="style-basis">
+      <section className="mt-8" aria-labelledby="style-basis">
         <SectionHeading id="style-basis">Samples that are not random</SectionHeading>
         <p className="mb-3 max-w-prose text-soft">
           They have no margin of sampling error. Where a rule of law or of the house asks for a comparison all

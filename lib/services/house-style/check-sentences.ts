@@ -1,5 +1,5 @@
 import 'server-only';
-import { LANGUAGES } from '@/lib/domain/vocabulary';
+import { type Language, LANGUAGES } from '@/lib/domain/vocabulary';
 import { DEFAULT_HOUSE_STYLE, type HouseStyle } from '@/lib/wording/house-style';
 import { claimsAbove } from '@/lib/wording/never-says-more';
 import { draftFaults } from './draft-sentences';
@@ -62,6 +62,10 @@ export function faultsOfShipped(path: string, message: string, style: HouseStyle
   return [...rungFaults(shape, place, style, shape), ...phraseFaults(message, shape, style)];
 }
 
+function languageOf(place: SentencePlace | null): Language {
+  return LANGUAGES.find((one) => one === place?.language) ?? 'en';
+}
+
 function localeOf(place: SentencePlace | null, style: HouseStyle): string | null {
   const language = LANGUAGES.find((one) => one === place?.language);
   return language ? style.locales[language] : null;
@@ -100,9 +104,11 @@ function claimFaults(
   style: HouseStyle,
 ): SentenceFault[] {
   const verdict = place.verdict ?? 'cannot-be-tested';
-  const usual = new Set(shipped.variants.flatMap(({ text }) => claimsAbove(verdict, bare(text))));
+  const usual = new Set(
+    shipped.variants.flatMap(({ text }) => claimsAbove(verdict, bare(text), languageOf(place))),
+  );
   const faults = shape.variants.flatMap(({ text, chosen }): SentenceFault[] => {
-    const above = claimsAbove(verdict, bare(text)).filter(
+    const above = claimsAbove(verdict, bare(text), languageOf(place)).filter(
       (phrase) => place.verdict !== null || !usual.has(phrase),
     );
     const turned = place.verdict && place.language === 'en' ? wrongDirection(text, chosen) : null;

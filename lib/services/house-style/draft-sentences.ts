@@ -120,8 +120,8 @@ const NAMES = [PLAIN_NAMES, ...HOSTILE_NAMES].flatMap((names) => Object.values(n
 /** Phrases above the verdict, and what the wording check calls wrong or not supported by the release. */
 function objections({ input, text }: Filled, style: HouseStyle): Objection[] {
   const { verdict } = input.finding;
-  const above = claimsAbove(verdict, text).filter(
-    (phrase) => !NAMES.some((name) => claimsAbove('cannot-be-tested', name).includes(phrase)),
+  const above = claimsAbove(verdict, text, input.language).filter(
+    (phrase) => !NAMES.some((name) => claimsAbove('cannot-be-tested', name, input.language).includes(phrase)),
   );
   return [
     ...above.map((phrase) => ({ phrase, message: null, verdict })),

@@ -7,7 +7,12 @@ import { getStyle } from '@/lib/services/house-style/get-style';
 import { listStyles } from '@/lib/services/house-style/list-styles';
 import { previewLive } from '@/lib/services/house-style/preview-live';
 import { takeUpStyle } from '@/lib/services/house-style/start-draft';
-import { listLanguages, refuseUnsigned, signLanguage } from '@/lib/services/house-style/sign-language';
+import {
+  listLanguages,
+  refuseUnsigned,
+  signLanguage,
+  withdrawSignature,
+} from '@/lib/services/house-style/sign-language';
 import { draftNewerWording, ensureDeskSettings, readDeskSettings } from '@/lib/services/setup/desk-settings';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
@@ -219,10 +224,45 @@ describe('a language', () => {
     expect(refusal(() => signLanguage(first, { ...input, isNative: false }, desk.ctx()))[0]).toBe('invalid');
   });
 
-  it('that nobody signed is not cleared', () => {
-    expect(() => refuseUnsigned(desk.db, 'en')).not.toThrow();
-    expect(refusal(() => refuseUnsigned(desk.db, 'xx'))[1]).toMatch(
-      /No native editor of this desk has signed/,
+  it('that nobody signed is drafted and filed, and cleared only once a native editor has signed it', () => {
+    const sheets = sheetDesk(desk.db);
+    const id = sheets.draft(reporter, fragile());
+    desk.db.$client.prepare(`UPDATE sheets SET language = 'es' WHERE public_id = ?`).run(id);
+    sheets.file(reporter, id);
+    const [code, message] = refusal(() => sheets.clear(first, id));
+    expect([code, message]).toEqual([
+      'conflict',
+      expect.stringMatching(/^No native editor of this desk has signed/),
+    ]);
+    signLanguage(second, { language: 'es', packHash: spanish().packHash, isNative: true }, desk.ctx());
+    expect(spanish()).toMatchObject({
+      isReviewed: false,
+      isClearable: true,
+      signature: { by: 'Tobin Vale' },
+    });
+    expect(sheets.clear(first, id)).toMatchObject({ outcome: 'cleared' });
+  });
+
+  it('is signed as it is: a changed sentence needs a new signature, and a signature can be taken back', () => {
+    const sign = (packHash: string) => ({ language: 'es', packHash, isNative: true });
+    signLanguage(second, sign(spanish().packHash), desk.ctx());
+    expect(refusal(() => signLanguage(first, sign(spanish().packHash), desk.ctx()))[1]).toBe(
+      'It is signed already.',
     );
+    const old = spanish().packHash;
+    const detectable = `${DEFAULT_HOUSE_STYLE.messages.es.detectable} `.replace(
+      /\. $/,
+      ', con las mismas muestras.',
+    );
+    styleDesk(desk.db).inForce(first, second, { 'style.messages.es.detectable': detectable });
+    expect(spanish().isClearable).toBe(false);
+    expect(refusal(() => signLanguage(second, sign(old), desk.ctx()))[0]).toBe('conflict');
+    signLanguage(second, sign(spanish().packHash), desk.ctx());
+    withdrawSignature(first, { language: 'es', packHash: spanish().packHash }, desk.ctx());
+    expect(spanish().isClearable).toBe(false);
+    expect(refusal(() => refuseUnsigned(desk.db, 'es'))[0]).toBe('conflict');
+    expect(() => refuseUnsigned(desk.db, 'en')).not.toThrow();
   });
 });
+
+const spanish = () => listLanguages(first, desk.ctx()).find(({ language }) => language === 'es')!;

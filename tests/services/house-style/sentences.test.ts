@@ -105,6 +105,14 @@ describe('a sentence of house style', () => {
     expect(faultsAsWritten(FRAGILE, text, style).map(({ phrase }) => phrase)).toEqual(['settle']);
   });
 
+  it.each([
+    ['es', 'Ventaja de {a} sobre {b} en el sondeo de {pollster}, {aShare} frente a {bShare}', 'Ventaja'],
+    ['en', '{a} leads {b} in poll by {pollster}, {aShare} to {bShare}', 'leads'],
+  ])('in %s is held to what that language may not say', (language, text, phrase) => {
+    const path = `style.messages.${language}.headline.lead.fragile`;
+    expect(faultsOfSentence(path, text, DEFAULT_HOUSE_STYLE).map((fault) => fault.phrase)).toContain(phrase);
+  });
+
   it('that keeps to its verdict passes with other words', () => {
     expect(messages(FRAGILE, `${A} has the higher figure, {b} the lower one,${TAIL}`)).toEqual([]);
   });

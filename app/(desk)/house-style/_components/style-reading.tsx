@@ -41,16 +41,17 @@ export function StyleReading({
 }) {
   return (
     <>
-      <SectionHeading>How the desk prints</SectionHeading>
+      <Heading>How the desk prints</Heading>
       <Decisions body={body} paths={PRINTS} />
-      <SectionHeading>Words</SectionHeading>
+      <Heading>Words</Heading>
       <Decisions body={body} paths={WORDS} stacked />
-      <SectionHeading>Readings and rules</SectionHeading>
+      <Heading>Readings and rules</Heading>
       <Decisions body={body} paths={RULES} />
-      <SectionHeading>What the desk tests by</SectionHeading>
+      <Heading>What the desk tests by</Heading>
       <Decisions body={body} paths={TESTS} />
-      <SectionHeading>Samples that are not random</SectionHeading>
+      <Heading>Samples that are not random</Heading>
       <DefinitionList
+        className="max-w-prose"
         items={NOT_RANDOM.map((kind) => ({
           key: kind,
           term: sampleName(kind),
@@ -59,15 +60,24 @@ export function StyleReading({
             : 'No margin, no test',
         }))}
       />
-      <SectionHeading>Sentences</SectionHeading>
+      <Heading>Sentences</Heading>
       <Sentences sentences={sentences} />
     </>
+  );
+}
+
+function Heading({ children }: { children: string }) {
+  return (
+    <div className="mt-8">
+      <SectionHeading>{children}</SectionHeading>
+    </div>
   );
 }
 
 function Decisions({ body, paths, stacked }: { body: unknown; paths: string[]; stacked?: boolean }) {
   return (
     <DefinitionList
+      className="max-w-prose"
       stacked={stacked}
       items={paths.map((path) => ({
         key: path,
