@@ -1,9 +1,9 @@
 import { LINE_KIND_NAMES, type LineKind } from '@/lib/domain/sheet';
-import type { Verdict } from '@/lib/findings/check-types';
+import type { WordingMark } from '@/lib/wording/check/types';
 import { CopyBlock } from '../ui/copy-block';
 import { SectionHeading } from '../ui/section-heading';
 import { WordDiff } from '../ui/word-diff';
-import { AboveNote } from './above-note';
+import { LineMarks } from '../wording-check/line-marks';
 import { diffParts } from './diff-parts';
 
 /** Set smaller, so that claim, sentence and evidence fit one screen. */
@@ -22,16 +22,16 @@ export function PrintableLine({
   text,
   before,
   knockedOut,
-  above,
-  verdict,
+  marks,
+  lang,
 }: {
   kind: LineKind;
   text: string;
   /** The wording that the marks compare with; null where nothing is to be marked. */
   before: string | null;
   knockedOut: boolean;
-  above: readonly string[];
-  verdict: Verdict;
+  marks: readonly WordingMark[];
+  lang: string;
 }) {
   const id = `line-${kind}`;
   return (
@@ -42,12 +42,12 @@ export function PrintableLine({
       </SectionHeading>
       {knockedOut ? null : (
         <div className={SMALL.includes(kind) ? '[&_.copy-block]:py-2 [&_.copy-block]:text-15' : undefined}>
-          <CopyBlock isDisplay={kind === 'headline'}>
+          <CopyBlock lang={lang} isDisplay={kind === 'headline'}>
             <div className="whitespace-pre-line">
               {before === null || before === text ? text : <WordDiff parts={diffParts(before, text)} />}
             </div>
           </CopyBlock>
-          <AboveNote phrases={above} verdict={verdict} />
+          <LineMarks marks={marks} lang={lang} />
         </div>
       )}
     </section>

@@ -1,24 +1,25 @@
 import { LINE_KIND_NAMES, REQUIRED_LINE_KINDS } from '@/lib/domain/sheet';
-import type { Verdict } from '@/lib/findings/check-types';
-import { claimsAbove } from '@/lib/wording/never-says-more';
-import { AboveNote } from '../../lines/above-note';
+import type { WordingMark } from '@/lib/wording/check/types';
 import { diffParts } from '../../lines/diff-parts';
 import { Button } from '../../ui/button';
 import { TextArea } from '../../ui/text-area';
 import { WordDiff } from '../../ui/word-diff';
+import { LineMarks } from '../../wording-check/line-marks';
 import type { ChangeLine, WrittenLine } from './use-lines';
 
-/** One line being written: its words, what they changed of the draft, and a caution where they go too far. */
+/** One line being written: its words, what they changed of the draft, and what the wording check says of them. */
 export function LineField({
   line,
   draft,
-  verdict,
+  lang,
+  marks,
   error,
   onChange,
 }: {
   line: WrittenLine;
   draft: string;
-  verdict: Verdict;
+  lang: string;
+  marks: readonly WordingMark[];
   error?: string;
   onChange: ChangeLine;
 }) {
@@ -42,6 +43,7 @@ export function LineField({
             rows={kind === 'headline' || kind === 'chart-title' ? 2 : 4}
             maxLength={5000}
             spellCheck
+            lang={lang}
             value={text}
             error={error}
             aria-describedby={isChanged ? `${id}-draft` : undefined}
@@ -49,7 +51,7 @@ export function LineField({
             onChange={(event) => onChange(kind, { text: event.target.value })}
           />
           <div aria-live="polite">
-            <AboveNote phrases={claimsAbove(verdict, text)} verdict={verdict} />
+            <LineMarks marks={marks} lang={lang} />
           </div>
           {isChanged ? (
             <div id={`${id}-draft`} className="mt-1 max-w-prose font-serif whitespace-pre-line">

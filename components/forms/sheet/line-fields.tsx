@@ -1,6 +1,6 @@
 import { LINE_KIND_NAMES } from '@/lib/domain/sheet';
-import type { Verdict } from '@/lib/findings/check-types';
 import { ErrorSummary } from '../../ui/error-summary';
+import type { LineMarksOf } from '../../wording-check/use-line-marks';
 import { fieldIdOf, LineField } from './line-field';
 import type { ChangeLine, WrittenLine } from './use-lines';
 
@@ -8,14 +8,17 @@ import type { ChangeLine, WrittenLine } from './use-lines';
 export function LineFields({
   lines,
   drafts,
-  verdict,
+  lang,
+  marks,
   errors,
   attempt,
   onChange,
 }: {
   lines: readonly WrittenLine[];
   drafts: Readonly<Record<string, string>>;
-  verdict: Verdict;
+  lang: string;
+  /** By line. */
+  marks: LineMarksOf;
   /** By line. */
   errors: Readonly<Record<string, string>>;
   attempt: number;
@@ -33,7 +36,8 @@ export function LineFields({
           key={line.kind}
           line={line}
           draft={drafts[line.kind] ?? ''}
-          verdict={verdict}
+          lang={lang}
+          marks={marks[line.kind] ?? []}
           error={errors[line.kind]}
           onChange={onChange}
         />

@@ -7,6 +7,7 @@ import { soundingScene } from '@/lib/charts/sounding-scene';
 import { soundingSpecOf } from '@/lib/charts/sounding-spec-of';
 import { inScreenOrder, type Claim, type LineText, type RequestedLineKind } from '@/lib/domain/sheet';
 import type { Language } from '@/lib/domain/vocabulary';
+import type { WordingOverride } from '@/lib/domain/wording-override';
 import { AppError } from '@/lib/errors';
 import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
@@ -15,6 +16,7 @@ import { sha256 } from '@/lib/security/ids';
 import { comparisonNote } from '@/lib/wording/comparison-words';
 import { requestable } from '@/lib/wording/carries';
 import { draftLine, draftSheet } from '@/lib/wording/draft-sheet';
+import type { LineBasis } from '@/lib/wording/line-check';
 import { type Computed, computeFindings } from '../release/compute-findings';
 import type { EvidenceBody } from './evidence-body';
 
@@ -34,7 +36,12 @@ export type Assembled = {
   requestable: RequestedLineKind[];
   draftRequested: (kind: RequestedLineKind) => string;
   /** The evidence that these texts would be cleared on. */
-  withTexts: (texts: LineText[]) => { body: EvidenceBody; bytes: Buffer; hash: string };
+  withTexts: (
+    texts: LineText[],
+    override?: WordingOverride | null,
+  ) => { body: EvidenceBody; bytes: Buffer; hash: string };
+  /** What the wording check holds the lines against. */
+  lineBasis: LineBasis;
   /** Hash of everything but the texts: what a writer has in front of them. */
   basisHash: string;
 };
@@ -120,11 +127,31 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
     requestable: offered,
     draftRequested: (kind) => draftLine(input, kind),
     basisHash: hashOf(basis),
-    withTexts: (texts) => {
-      const body: EvidenceBody = { ...basis, texts };
+    lineBasis: lineBasisOf(computed, language),
+    withTexts: (texts, override) => {
+      const body: EvidenceBody = {
+        ...basis,
+        texts,
+        ...(override ? { wordingOverride: override } : {}),
+      };
       const bytes = Buffer.from(canonicalJson(body), 'utf8');
       return { body, bytes, hash: sha256(bytes) };
     },
+  };
+}
+
+function lineBasisOf(computed: Computed, language: Language): LineBasis {
+  const { facts, previous, answer, comparison, settings } = computed;
+  const { messages: _, ...houseStyle } = settings.houseStyle.body;
+  const { differences, unknowns, override } = comparison;
+  return {
+    release: facts,
+    previous,
+    answer,
+    comparison: { differences, unknowns, isOverridden: override !== null },
+    policy: settings.policy.body,
+    houseStyle,
+    language,
   };
 }
 

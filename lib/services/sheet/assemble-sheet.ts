@@ -2,6 +2,8 @@ import 'server-only';
 import type { Conn } from '@/db/client';
 import { isAsPrinted } from '@/lib/domain/as-printed';
 import type { LineText } from '@/lib/domain/sheet';
+import type { WordingOverride } from '@/lib/domain/wording-override';
+import type { LineBasis } from '@/lib/wording/line-check';
 import { assembleAsPrinted } from './assemble-as-printed';
 import { assemble, type Subject } from './assemble-evidence';
 
@@ -12,7 +14,12 @@ export type SheetBasis = {
   templateVersion: string;
   /** Internal id of the version compared with. */
   comparisonVersionId: number | null;
-  withTexts: (texts: LineText[]) => { bytes: Buffer; hash: string; engine: string };
+  /** What edited lines are held against; null where no line can be edited. */
+  lineBasis: LineBasis | null;
+  withTexts: (
+    texts: LineText[],
+    override?: WordingOverride | null,
+  ) => { bytes: Buffer; hash: string; engine: string };
 };
 
 /** Everything a sheet rests on, computed anew from what is stored now. */
@@ -24,8 +31,9 @@ export function assembleSheet(conn: Conn, sheet: Subject, now: number): SheetBas
     basisHash,
     templateVersion: computed.settings.houseStyle.body.templateVersion,
     comparisonVersionId: isAsPrinted(sheet) ? null : computed.comparison.versionId,
-    withTexts: (texts) => {
-      const { bytes, hash, body } = withTexts(texts);
+    lineBasis: 'lineBasis' in assembled ? assembled.lineBasis : null,
+    withTexts: (texts, override) => {
+      const { bytes, hash, body } = withTexts(texts, override);
       return { bytes, hash, engine: body.engine };
     },
   };

@@ -4,6 +4,7 @@ import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { touchSheet } from '@/db/queries/sheet';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { overrideInput } from '../wording-check/refuse-wording';
 import { endFiling, filingOf } from './clear-sheet';
 import { applyEdits, lineEdits, renewLines } from './edit-lines';
 import { type Filed, fileIn } from './file-sheet';
@@ -14,6 +15,7 @@ const schema = z.strictObject({
   version: z.number().int().min(1),
   basisHash: z.string().regex(/^[0-9a-f]{64}$/),
   lines: lineEdits,
+  override: overrideInput,
 });
 
 /**
@@ -22,7 +24,7 @@ const schema = z.strictObject({
  */
 export function changeFiledSheet(actor: Actor, input: unknown, ctx: Ctx): Filed {
   authorize(canActAsEditor(actor), 'Only an editor changes filed words.');
-  const { id, version, basisHash, lines } = parse(schema, input);
+  const { id, version, basisHash, lines, override } = parse(schema, input);
   return transact(ctx, (tx) => {
     authorize(canActAsEditor(actingNow(tx, actor)), 'Only an editor changes filed words.');
     const opened = openSheet(tx, actor, id, ctx.now);
@@ -32,7 +34,13 @@ export function changeFiledSheet(actor: Actor, input: unknown, ctx: Ctx): Filed 
     endFiling(tx, actor, opened, filing, ctx.now, { act: 'sent-back', comment });
     const reopened = openSheet(tx, actor, id, ctx.now);
     applyEdits(tx, actor, reopened, lines, ctx.now);
-    return fileIn(tx, actor, { id, version: version + 1, basisHash }, ctx.now, 'changed filed sheet');
+    return fileIn(
+      tx,
+      actor,
+      { id, version: version + 1, basisHash, override },
+      ctx.now,
+      'changed filed sheet',
+    );
   });
 }
 

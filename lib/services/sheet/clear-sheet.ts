@@ -13,6 +13,7 @@ import { refuseUnderBan } from '../bans/hold';
 import { assembleSheet } from './assemble-sheet';
 import { markSiblings } from './languages';
 import { type LineReasons, lineReasons, storeLineReasons } from './line-reasons';
+import { overrideIn } from './override-in';
 import { MOVED_ON, openSheet, type Opened, refuseUnless } from './sheet-state';
 
 export const readerInput = z.strictObject({
@@ -55,7 +56,8 @@ export function clearSheetIn(
     'One of the two who agree has to be an editor. Leave this one to an editor.',
   );
   refuseUnsigned(tx, opened.sheet.language);
-  if (assembleSheet(tx, opened.sheet, now).withTexts(opened.texts).hash !== evidence.hash) {
+  const assembled = assembleSheet(tx, opened.sheet, now);
+  if (assembled.withTexts(opened.texts, overrideIn(evidence)).hash !== evidence.hash) {
     endFiling(tx, actor, opened, filing, now, {
       act: 'returned',
       comment: 'Figures, policy or house style changed since filing. Agree to the sheet as it is now.',

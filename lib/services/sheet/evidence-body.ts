@@ -1,6 +1,7 @@
 import 'server-only';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { Claim, LineText } from '@/lib/domain/sheet';
+import type { WordingOverride } from '@/lib/domain/wording-override';
 import type { Language } from '@/lib/domain/vocabulary';
 import type { EmbedRow } from '@/lib/charts/embed-input';
 import type { Scene } from '@/lib/charts/scene';
@@ -35,4 +36,6 @@ export type EvidenceBody = {
   texts: LineText[];
   chart: { spec: SoundingSpec; rows: EmbedRow[]; scene: Scene };
   missing: MissingDisclosure[];
+  /** Only where an editor filed words that the wording check does not support. */
+  wordingOverride?: WordingOverride;
 };

@@ -9,6 +9,7 @@ import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { type OverrideInput, overrideInput, refuseWording } from '../wording-check/refuse-wording';
 import { redraftAsPrinted } from './as-printed-words';
 import { assembleSheet } from './assemble-sheet';
 import { applyEdits, filingProblems, lineEdits, openForWriting } from './edit-lines';
@@ -21,6 +22,7 @@ const schema = z.strictObject({
   /** Hash of the figures and draft that were on the screen. */
   basisHash: z.string().regex(/^[0-9a-f]{64}$/),
   lines: lineEdits,
+  override: overrideInput,
 });
 
 export type Filed = { hash: string; version: number };
@@ -28,11 +30,11 @@ export type Filed = { hash: string; version: number };
 /** Files a sheet: whoever files agrees to these words on this evidence, and can never be the second reader. */
 export function fileSheet(actor: Actor, input: unknown, ctx: Ctx): Filed {
   authorize(canDraftSheets(actor), 'Only reporters and editors file sheets.');
-  const { id, version, basisHash, lines } = parse(schema, input);
+  const { id, version, basisHash, lines, override } = parse(schema, input);
   return transact(ctx, (tx) => {
     const opened = openForWriting(tx, actor, id, version, ctx.now);
     applyEdits(tx, actor, opened, lines, ctx.now);
-    return fileIn(tx, actor, { id, version, basisHash }, ctx.now, 'filed sheet');
+    return fileIn(tx, actor, { id, version, basisHash, override }, ctx.now, 'filed sheet');
   });
 }
 
@@ -40,7 +42,7 @@ export function fileSheet(actor: Actor, input: unknown, ctx: Ctx): Filed {
 export function fileIn(
   tx: Tx,
   asker: Actor,
-  seen: { id: string; version: number; basisHash: string },
+  seen: { id: string; version: number; basisHash: string; override?: OverrideInput },
   now: number,
   action: string,
 ): Filed {
@@ -56,7 +58,9 @@ export function fileIn(
     assembled.basisHash === seen.basisHash,
     'The figures or the house style changed since you opened this page. Reload it and read it once more.',
   );
-  const { bytes, hash, engine } = assembled.withTexts(opened.texts);
+  const { lineBasis, draft } = assembled;
+  const override = lineBasis && refuseWording(actor, lineBasis, opened.texts, draft, seen.override ?? null);
+  const { bytes, hash, engine } = assembled.withTexts(opened.texts, override);
   const { comparisonVersionId } = assembled;
   const isFiledAnew = findLastAct(tx, opened.sheet.id, 'filed') !== null;
   const evidence = insertEvidence(
@@ -96,8 +100,10 @@ export function fileIn(
   refuseUnless(touchSheet(tx, opened.sheet.id, seen.version), MOVED_ON);
   settleByFiling(tx, opened.sheet, actor, now);
   if (isFiledAnew) markSiblings(tx, opened.sheet, 'changed', now);
-  const entry = { action, entity: 'sheet', entityId: opened.sheet.publicId };
-  const after = { state: 'filed', evidence: hash, texts: opened.texts };
+  const reason = override ? { reason: override.reason } : {};
+  const entry = { action, entity: 'sheet', entityId: opened.sheet.publicId, ...reason };
+  const against = override ? { againstWordingCheck: override.marks } : {};
+  const after = { state: 'filed', evidence: hash, texts: opened.texts, ...against };
   appendRecord(tx, { personId: actor.personId, ...entry, after, releaseId: opened.release.id }, now);
   return { hash, version: seen.version + 1 };
 }

@@ -5,19 +5,22 @@ import { isListed } from '@/db/queries/embargo';
 import { findPersonByPublicId } from '@/db/queries/person';
 import { findWholeVersionByPublicId, listShares } from '@/db/queries/release';
 import { listClearedLines, listEarlierAgreed, listEarlierTexts } from '@/db/queries/sheet';
-import { type Actor, canReadUnpublished, type Role } from '@/lib/domain/roles';
+import { type Actor, canActAsEditor, canReadUnpublished, type Role } from '@/lib/domain/roles';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { LineKind, LineState, RequestedLineKind } from '@/lib/domain/sheet';
+import type { Language } from '@/lib/domain/vocabulary';
 import { AppError } from '@/lib/errors';
 import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
 import type { ComparisonTold } from '@/lib/wording/comparison-words';
-import { claimsAbove } from '@/lib/wording/never-says-more';
+import type { WordingMark } from '@/lib/wording/check/types';
+import { type LineBasis, lineChecker } from '@/lib/wording/line-check';
 import { authorize, type Ctx } from '../context';
 import { type EmbargoView, embargoView } from '../release/get-release';
 import { assemble } from './assemble-evidence';
 import { type DeskView, deskViewOf } from './desk-view';
 import type { EvidenceBody } from './evidence-body';
+import { overrideIn } from './override-in';
 import { permissionsOf, type SheetPermissions } from './sheet-permissions';
 import { type Opened, openSheet } from './sheet-state';
 
@@ -33,8 +36,8 @@ export type LineView = {
   cleared: string | null;
   knockedOut: boolean;
   changedBy: string;
-  /** Phrases that say more than the verdict, as a caution. */
-  above: string[];
+  /** What the wording check says of words that are not those of the draft. */
+  marks: readonly WordingMark[];
 };
 
 export type ActView = { act: string; person: string; at: number; comment: string | null };
@@ -66,6 +69,13 @@ export type SheetView = SheetPermissions & {
   enteredBy: Record<string, string>;
   embargo: EmbargoView | null;
   isOnList: boolean;
+  language: Language;
+  /** What the wording check holds the lines against; null of words that stand on frozen evidence alone. */
+  lineBasis: LineBasis | null;
+  /** Whether this person may file words that are not supported, with a reason. */
+  mayOverride: boolean;
+  /** Why the words shown were filed against the wording check. */
+  override: { reason: string; by: string; marks: { kind: LineKind; phrase: string }[] } | null;
   embedId: string | null;
   desk: DeskView;
 };
@@ -91,7 +101,7 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
     claimKey: sheet.claimKey,
     author: opened.author,
     isAuthor: sheet.authorId === actor.personId,
-    lines: linesOf(ctx, opened, shown.body, finding),
+    lines: linesOf(ctx, opened, shown),
     addable: shown.requestable.filter((kind) => !opened.lines.some(({ line }) => line.kind === kind)),
     acts: acts.map(({ act, person }) => ({ act: act.act, person, at: act.at, comment: act.comment })),
     filer: stands && { name: acts.find(({ act }) => act.id === stands.id)!.person, at: stands.at },
@@ -113,6 +123,10 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
     enteredBy: enteredBy(ctx, facts.versionId),
     embargo: embargoView(release, Boolean(opened.isPublic)),
     isOnList: isListed(ctx.db, release.id, actor),
+    language: shown.body.language,
+    lineBasis: shown.lineBasis,
+    mayOverride: canActAsEditor(actor),
+    override: overrideOf(ctx, shown.body),
     embedId: findEmbedOfSheet(ctx.db, sheet.id)?.publicId ?? null,
     desk: deskViewOf(ctx, actor, opened, frozen && { body: shown.body, verdict: finding.verdict }),
   };
@@ -123,18 +137,19 @@ type Shown = {
   basisHash: string;
   hasMoved: boolean;
   requestable: RequestedLineKind[];
+  lineBasis: LineBasis | null;
 };
 
-const NOTHING_TO_ADD = { basisHash: '', requestable: [] };
+const NOTHING_TO_ADD = { basisHash: '', requestable: [], lineBasis: null };
 
 /** Cleared words are shown on the evidence they were cleared on, everything else on the figures of now. */
 function evidenceShown(ctx: Ctx, opened: Opened, frozen: EvidenceRow | null): Shown {
   if (frozen && opened.state !== 'filed') return { ...NOTHING_TO_ADD, body: bodyOf(frozen), hasMoved: false };
   try {
     const assembled = assemble(ctx.db, opened.sheet, ctx.now);
-    const { body, hash } = assembled.withTexts(opened.texts);
-    const { basisHash, requestable } = assembled;
-    return { body, basisHash, hasMoved: frozen !== null && frozen.hash !== hash, requestable };
+    const { body, hash } = assembled.withTexts(opened.texts, overrideIn(frozen));
+    const { basisHash, requestable, lineBasis } = assembled;
+    return { body, basisHash, hasMoved: frozen !== null && frozen.hash !== hash, requestable, lineBasis };
   } catch (error) {
     if (!frozen || !(error instanceof AppError)) throw error;
     return { ...NOTHING_TO_ADD, body: bodyOf(frozen), hasMoved: true };
@@ -151,19 +166,32 @@ function findingOf({ answer, claimKey }: EvidenceBody): TestableFinding {
   return found;
 }
 
-function linesOf(ctx: Ctx, opened: Opened, body: EvidenceBody, finding: TestableFinding): LineView[] {
+function overrideOf(ctx: Ctx, { wordingOverride: override }: EvidenceBody): SheetView['override'] {
+  if (!override) return null;
+  const by = findPersonByPublicId(ctx.db, override.person)?.name ?? 'An editor';
+  return {
+    reason: override.reason,
+    by,
+    marks: override.marks.map(({ kind, phrase }) => ({ kind, phrase })),
+  };
+}
+
+function linesOf(ctx: Ctx, opened: Opened, { body, lineBasis }: Shown): LineView[] {
+  const check = lineBasis ? lineChecker(lineBasis) : () => [];
+  const draftOf = (kind: LineKind, before: string) =>
+    body.draft.find((line) => line.kind === kind)?.text ?? before;
   const earlier = listEarlierTexts(ctx.db, opened.sheet.id);
   const agreed = listEarlierAgreed(ctx.db, opened.sheet.id);
   return opened.lines.map(({ line, version, changedBy }) => ({
     kind: line.kind,
-    draft: body.draft.find(({ kind }) => kind === line.kind)?.text ?? version.draftText,
+    draft: draftOf(line.kind, version.draftText),
     text: version.text,
     earlier: earlier.get(line.id) ?? null,
     filed: agreed.filed.get(line.id) ?? null,
     cleared: agreed.cleared.get(line.id) ?? null,
     knockedOut: line.knockedOut,
     changedBy,
-    above: claimsAbove(finding.verdict, version.text),
+    marks: check({ text: version.text, draft: draftOf(line.kind, version.draftText) }),
   }));
 }
 

@@ -51,15 +51,42 @@ const conflict = () =>
   HttpResponse.json({ title: 'conflict', detail: 'Somebody changed this sheet meanwhile.' }, { status: 409 });
 
 describe('a line being written', () => {
-  it('cautions, as it is typed, about words that say more than the verdict', () => {
+  it('is marked, as it is typed, where it says more than the figures, until it is mended', async () => {
     open();
-    expect(screen.queryByText(/says more than/)).toBeNull();
+    expect(screen.queryByText(/Not supported:/)).toBeNull();
     type('Alder leads Brook in this poll.');
-    expect(screen.getByText('“leads” says more than Not shown allows.')).toBeTruthy();
-    type('Alder leads by a landslide.');
-    expect(screen.getByText('“leads” and “landslide” say more than Not shown allows.')).toBeTruthy();
-    type('Alder has 47%.');
-    expect(screen.queryByText(/more than Not shown allows/)).toBeNull();
+    const mark = await screen.findByText(/^Not supported:/);
+    expect(mark.closest('li')?.textContent).toContain('“leads”');
+    expect(screen.getByText('The figures do not support some words')).toBeTruthy();
+    expect(screen.getByText(/ask an editor/)).toBeTruthy();
+    expect(screen.queryByLabelText(/Reason for filing/)).toBeNull();
+    type('Alder has 47% in this poll.');
+    await waitFor(() => expect(screen.queryByText(/Not supported:/)).toBeNull());
+    expect(screen.queryByText('The figures do not support some words')).toBeNull();
+  });
+
+  it('that contradicts the figures cannot be filed whatever an editor writes', async () => {
+    open(see(editor));
+    type('Brook leads Alder in this poll.');
+    expect(await screen.findByText('Some words contradict the figures')).toBeTruthy();
+    expect(screen.queryByLabelText(/Reason for filing/)).toBeNull();
+  });
+
+  it('is filed by an editor against the check with the reason and the phrases that were on the screen', async () => {
+    open(see(editor));
+    type('Alder leads Brook in this poll.');
+    const reason = await screen.findByLabelText('Reason for filing them all the same');
+    fireEvent.change(reason, { target: { value: 'The quoted rival says so herself.' } });
+    await userEvent.click(screen.getByRole('button', { name: 'File' }));
+    await waitFor(() => expect(acts.file).toHaveBeenCalledTimes(1));
+    expect(acts.file).toHaveBeenCalledWith(
+      expect.objectContaining({
+        override: {
+          reason: 'The quoted rival says so herself.',
+          marks: [{ kind: 'body', rule: 'lead', phrase: 'leads' }],
+        },
+      }),
+    );
   });
 
   it('shows what it changed of the draft, and goes back to it', async () => {

@@ -60,7 +60,7 @@ describe('a new sheet', () => {
       'chart-title',
       'alt-text',
     ]);
-    expect(lines.flatMap(({ above }) => above)).toEqual([]);
+    expect(lines.flatMap(({ marks }) => marks)).toEqual([]);
   });
 });
 
@@ -68,16 +68,16 @@ describe('saving', () => {
   const save = (actor: typeof editor, version: number, text: string) =>
     saveLines(actor, { id, version, lines: [{ kind: 'body', text, knockedOut: false }] }, desk.ctx());
 
-  it('keeps words by author or editor, beside the draft, and cautions about what goes too far', () => {
+  it('keeps words by author or editor, beside the draft, and marks what goes too far until it is mended', () => {
     expect(save(reporter, 1, 'Alder leads Brook.')).toEqual({ version: 2 });
     expect(line('body')).toMatchObject({
       text: 'Alder leads Brook.',
-      above: ['leads'],
+      marks: [{ phrase: 'leads', rule: 'lead', grade: 'not-supported' }],
       changedBy: 'Rhea Quill',
     });
     expect(line('body').draft).not.toContain('leads');
     save(editor, 2, 'Alder has 47%, Brook 41%.');
-    expect(line('body').changedBy).toBe('Marten Reed');
+    expect(line('body')).toMatchObject({ changedBy: 'Marten Reed', marks: [] });
   });
 
   it('is refused to others, and from a page that is out of date', () => {

@@ -52,8 +52,8 @@ const changes: [string, string, () => void][] = [
   ],
 ];
 
-describe.each(changes)('when %s changes between filing and clearing', (_, claim, change) => {
-  it('clearing returns the sheet to its filer, who agrees anew with one key', () => {
+describe.each(changes)('when %s changes between filing and clearing', (what, claim, change) => {
+  it('clearing returns the sheet to its filer, who agrees anew, to new words where the old contradict the figures', () => {
     const { reporter, editor } = people;
     const id = on.draft(reporter, releaseId, claim);
     on.file(reporter, id);
@@ -74,7 +74,15 @@ describe.each(changes)('when %s changes between filing and clearing', (_, claim,
     });
 
     const { version, basisHash } = back;
-    const filed = fileSheet(reporter, { id, version, basisHash, lines: [] }, desk.ctx());
+    const contradicted = back.lines.filter(({ marks }) => marks.some(({ grade }) => grade === 'wrong'));
+    // Another level is another margin, which the caveat printed.
+    expect(contradicted.map(({ kind }) => kind)).toEqual(what === 'the policy' ? ['caveat'] : []);
+    if (contradicted.length > 0) {
+      const asFiled = { id, version, basisHash, lines: [] };
+      expect(refusal(() => fileSheet(reporter, asFiled, desk.ctx()))[0]).toBe('invalid');
+    }
+    const lines = contradicted.map(({ kind, draft }) => ({ kind, text: draft, knockedOut: false }));
+    const filed = fileSheet(reporter, { id, version, basisHash, lines }, desk.ctx());
     expect(filed.hash).not.toBe(before);
     expect(getSheet(editor, id, desk.ctx())).toMatchObject({ state: 'filed', hasMoved: false });
     expect(on.clear(editor, id).outcome).toBe('cleared');

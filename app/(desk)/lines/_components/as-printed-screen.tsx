@@ -57,8 +57,8 @@ export function AsPrintedScreen({
               {...{ kind, text }}
               before={null}
               knockedOut={false}
-              above={[]}
-              verdict="cannot-be-tested"
+              marks={[]}
+              lang="en"
             />
           ))}
           {view.hash ? <HashLine hash={view.hash} /> : null}

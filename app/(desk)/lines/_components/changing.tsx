@@ -2,6 +2,7 @@
 
 import { LineFields } from '@/components/forms/sheet/line-fields';
 import { sameLines, useLines } from '@/components/forms/sheet/use-lines';
+import { OverrideField } from '@/components/wording-check/override-field';
 import { Button } from '@/components/ui/button';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
@@ -10,7 +11,8 @@ import { RefusedNote } from './refused-note';
 import type { SheetActions } from './sheet-actions';
 import { SheetColumns } from './sheet-columns';
 import { useAct } from './use-act';
-import { draftsOf, writtenLines } from './written-lines';
+import { useOverride } from './use-override';
+import { draftsOf, isAtField, writtenLines } from './written-lines';
 
 /** An editor changes filed words; saving them is filing them as the editor's own. */
 export function Changing({
@@ -28,8 +30,9 @@ export function Changing({
   const { act, isPending, failure, attempt } = useAct(actions.change, () =>
     onDone(`Filed as yours. ${view.author} agrees to it, or another reader.`),
   );
+  const { marks, override, field } = useOverride(view, lines);
   const isSame = sameLines(lines, writtenLines(view.lines));
-  const file = () => act({ id: view.id, version: view.version, basisHash: view.basisHash, lines });
+  const file = () => act({ id: view.id, version: view.version, basisHash: view.basisHash, lines, override });
   return (
     <>
       <MovedNote view={view} />
@@ -37,13 +40,15 @@ export function Changing({
         <LineFields
           lines={lines}
           drafts={draftsOf(view.lines)}
-          verdict={view.finding.verdict}
+          lang={view.language}
+          marks={marks}
           errors={failure?.fields ?? {}}
           attempt={attempt}
           onChange={change}
         />
       </SheetColumns>
-      <RefusedNote failure={lines.some(({ kind }) => failure?.fields[kind]) ? null : failure} />
+      <OverrideField {...field} error={failure?.fields['override.reason']} />
+      <RefusedNote failure={isAtField(failure, lines) ? null : failure} />
       <ActBar
         actions={
           <>

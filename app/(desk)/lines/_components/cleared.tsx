@@ -5,6 +5,7 @@ import { PrintableLine } from '@/components/lines/printable-line';
 import { whenSaid } from '@/components/lines/when';
 import { Button } from '@/components/ui/button';
 import { SectionHeading } from '@/components/ui/section-heading';
+import { OverrideNote } from '@/components/wording-check/override-note';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
 import { HashLine } from './hash-line';
@@ -29,17 +30,18 @@ export function Cleared({ view, actions, now, zone, onDone }: Props) {
   const isCleared = view.state === 'cleared';
   return (
     <>
+      <OverrideNote override={view.override} />
       <SheetColumns view={view}>
         <SectionHeading>{isCleared ? 'Cleared words' : 'Pulled words, not to be printed'}</SectionHeading>
         {view.lines
           .filter(({ knockedOut }) => !knockedOut)
-          .map(({ kind, text, above }) => (
+          .map(({ kind, text, marks }) => (
             <PrintableLine
               key={kind}
-              {...{ kind, text, above }}
+              {...{ kind, text, marks }}
               before={null}
               knockedOut={false}
-              verdict={view.finding.verdict}
+              lang={view.language}
             />
           ))}
         {view.hash ? <HashLine hash={view.hash} /> : null}

@@ -3,6 +3,7 @@
 import { useState } from 'react';
 import { PrintableLine } from '@/components/lines/printable-line';
 import { SectionHeading } from '@/components/ui/section-heading';
+import { OverrideNote } from '@/components/wording-check/override-note';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { AGAINST, type Against, AgainstChoice } from './against-choice';
 import { Changing } from './changing';
@@ -24,6 +25,7 @@ export function Reading({ view, actions, onDone }: Props) {
   return (
     <>
       <MovedNote view={view} />
+      <OverrideNote override={view.override} />
       <SheetColumns view={view}>
         <div className="mb-2">
           <SectionHeading>
@@ -31,15 +33,15 @@ export function Reading({ view, actions, onDone }: Props) {
           </SectionHeading>
           <AgainstChoice value={against} isThere={isThere} onChange={setAgainst} />
         </div>
-        {view.lines.map(({ kind, text, draft, filed, cleared, knockedOut, above }) => (
+        {view.lines.map(({ kind, text, draft, filed, cleared, knockedOut, marks }) => (
           <PrintableLine
             key={kind}
             kind={kind}
             text={text}
             before={{ draft, filed: filed ?? draft, cleared: cleared ?? '' }[against]}
             knockedOut={knockedOut}
-            above={above}
-            verdict={view.finding.verdict}
+            marks={marks}
+            lang={view.language}
           />
         ))}
       </SheetColumns>

@@ -3,7 +3,15 @@ import type { SetTerms } from './terms-form';
 
 type Action<Input, Value> = (input: Input) => Promise<ActionResult<Value>>;
 type Line = { kind: string; text: string; knockedOut: boolean };
-type Filing = { id: string; version: number; basisHash: string; lines: Line[] };
+type Override = { reason: string; marks: { kind: string; rule: string; phrase: string }[] };
+type Filing = {
+  id: string;
+  version: number;
+  basisHash: string;
+  lines: Line[];
+  /** An editor's reason to file what the wording check does not support. */
+  override?: Override | null;
+};
 type Reading = { id: string; hash: string };
 
 /** What the screen of a sheet can do; the page hands the actions in. */

@@ -12,12 +12,12 @@ export function Waiting({ view, now, zone }: { view: SheetView; now: number; zon
       <p className="mt-4">{view.author} is writing this. Nobody has agreed to these words yet.</p>
       <SheetColumns view={view}>
         <SectionHeading>Words so far, marked against the draft</SectionHeading>
-        {view.lines.map(({ kind, text, draft, knockedOut, above }) => (
+        {view.lines.map(({ kind, text, draft, knockedOut, marks }) => (
           <PrintableLine
             key={kind}
-            {...{ kind, text, knockedOut, above }}
+            {...{ kind, text, knockedOut, marks }}
             before={draft}
-            verdict={view.finding.verdict}
+            lang={view.language}
           />
         ))}
       </SheetColumns>

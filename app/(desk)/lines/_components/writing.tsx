@@ -5,6 +5,7 @@ import { LineFields } from '@/components/forms/sheet/line-fields';
 import { findUnsaved, forgetUnsaved } from '@/components/forms/sheet/unsaved-words';
 import { useAutosave } from '@/components/forms/sheet/use-autosave';
 import { sameLines, useLines } from '@/components/forms/sheet/use-lines';
+import { OverrideField } from '@/components/wording-check/override-field';
 import { Button } from '@/components/ui/button';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
@@ -17,7 +18,8 @@ import type { SheetActions } from './sheet-actions';
 import { SheetColumns } from './sheet-columns';
 import { UnsavedNote } from './unsaved-note';
 import { useAct } from './use-act';
-import { draftsOf, writtenLines } from './written-lines';
+import { useOverride } from './use-override';
+import { draftsOf, isAtField, writtenLines } from './written-lines';
 
 type Props = {
   view: SheetView;
@@ -43,11 +45,13 @@ export function Writing({ view, actions, person, now, zone, onDone }: Props) {
   const [unsaved] = useState(() => (typeof localStorage === 'undefined' ? null : findUnsaved(keptAs)));
   const { saving, save, version } = useAutosave({ id: view.id, version: view.version, keptAs }, lines);
   const { act, isPending, failure, attempt } = useAct(actions.file, () => onDone('Filed.'));
+  const { marks, override, field } = useOverride(view, lines);
   const [isFiling, setFiling] = useState(false);
 
   const file = async () => {
     setFiling(true);
-    if (await save()) await act({ id: view.id, version: version.current, basisHash: view.basisHash, lines });
+    if (await save())
+      await act({ id: view.id, version: version.current, basisHash: view.basisHash, lines, override });
     setFiling(false);
   };
   const isOffer =
@@ -72,14 +76,16 @@ export function Writing({ view, actions, person, now, zone, onDone }: Props) {
         <LineFields
           lines={lines}
           drafts={draftsOf(view.lines)}
-          verdict={view.finding.verdict}
+          lang={view.language}
+          marks={marks}
           errors={failure?.fields ?? {}}
           attempt={attempt}
           onChange={change}
         />
         <AddLine view={view} add={actions.add} save={save} version={version} onDone={onDone} />
       </SheetColumns>
-      <RefusedNote failure={lines.some(({ kind }) => failure?.fields[kind]) ? null : failure} />
+      <OverrideField {...field} error={failure?.fields['override.reason']} />
+      <RefusedNote failure={isAtField(failure, lines) ? null : failure} />
       <ActBar
         actions={
           <>
