@@ -10,15 +10,15 @@ import { Dialog } from '@/components/ui/dialog';
  * with a letter are free of the keys that screen readers take for themselves.
  */
 const KEYS = [
-  { letter: 'W', place: 'The words', find: '[id^="line-"]' },
-  { letter: 'E', place: 'The evidence', find: '#evidence' },
+  { letter: 'W', place: 'The words', find: ['[id^="line-"]'] },
+  { letter: 'E', place: 'The evidence', find: ['#evidence'] },
   {
     letter: 'N',
     place: 'The next step: clear, send back, file',
-    find: '.next-bar-actions .button-primary, .next-bar-actions button',
+    find: ['.next-bar-actions .button-primary', '.next-bar-actions button'],
   },
-  { letter: 'M', place: 'Comments', find: '#comments' },
-  { letter: 'D', place: 'What was done', find: '#acts' },
+  { letter: 'M', place: 'Comments', find: ['#comments'] },
+  { letter: 'D', place: 'What was done', find: ['#acts'] },
 ] as const;
 const OFF = 'leadline-question-mark-off';
 
@@ -75,8 +75,10 @@ export function KeyList() {
   );
 }
 
-function goTo(find: string): void {
-  const place = document.querySelector<HTMLElement>(find);
+/** To the first of these that is on the page. */
+function goTo(find: readonly string[]): void {
+  const places = find.map((selector) => document.querySelector<HTMLElement>(selector));
+  const place = places.find((one) => one !== null);
   if (!place) return;
   if (place.tabIndex < 0) place.tabIndex = -1;
   place.focus();
