@@ -53,7 +53,7 @@ export function askThreshold(base: BaseFigures, threshold: Threshold, policy: Po
 }
 
 /** The printed shares of a lead; with the sign −1 those of a lead taken away. */
-export function leadTerms(base: BaseFigures, [first, second]: Pair, sign: 1 | -1): Term[] {
+function leadTerms(base: BaseFigures, [first, second]: Pair, sign: 1 | -1): Term[] {
   return [
     { base, option: first, sign },
     { base, option: second, sign: sign === 1 ? -1 : 1 },

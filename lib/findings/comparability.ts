@@ -110,7 +110,7 @@ function isConcerned(item: ComparableItem, current: ComparableFacts, earlier: Co
 }
 
 /** Whether two releases have a day of interviewing in common; false where dates are not known. */
-export function fieldDatesOverlap(a: ComparableFacts, b: ComparableFacts): boolean {
+function fieldDatesOverlap(a: ComparableFacts, b: ComparableFacts): boolean {
   if (!a.fieldStartOn || !a.fieldEndOn || !b.fieldStartOn || !b.fieldEndOn) return false;
   return a.fieldStartOn <= b.fieldEndOn && b.fieldStartOn <= a.fieldEndOn;
 }

@@ -2,7 +2,7 @@ import { impliedDesignEffect, isBelow } from '@/lib/stats';
 import type { Base, BaseNote, Basis, DeffSource, Policy, Range, StatedInterval } from './check-types';
 
 /** What a printed 1/√n implies at 95 percent: such a margin may ignore the weighting altogether. */
-export const LIKE_UNWEIGHTED = (2 / 1.959963984540054) ** 2;
+const LIKE_UNWEIGHTED = (2 / 1.959963984540054) ** 2;
 export const LARGEST_IMPLIED_DEFF = 10;
 
 export type ChosenDeff = {

@@ -1,7 +1,6 @@
 import type { BaseFigures } from './base-figures';
 import { blocNote, type BlocOnBase } from './blocs';
 import type { Policy } from './check-types';
-import type { Named } from './measure-overlap';
 import type { Term } from './measured';
 import type { BaseSource, TestedEntry, UntestedEntry } from './release-entry';
 import { baseSteps, ROLE_SUFFIX, type BaseRole } from './working-base';
@@ -112,10 +111,4 @@ export function blocSteps(
 /** Names in an estimate, once each. */
 export function namesIn(terms: readonly Term[]): string[] {
   return [...new Set(terms.map(({ option }) => option))];
-}
-
-/** One or two names as measureOverlap takes them. */
-export function asNamed(names: readonly string[]): Named {
-  const [first = '', second] = names;
-  return second === undefined ? [first] : [first, second];
 }

@@ -49,7 +49,7 @@ export function subgroupsOf(document: ReleaseDocument, question: string): Subgro
 }
 
 /** The variable that a group's figures stand in. */
-export function groupVariable({ groups }: SubgroupQuestion, name: string): string {
+function groupVariable({ groups }: SubgroupQuestion, name: string): string {
   return `group_${groups.findIndex((group) => group.name === name) + 1}`;
 }
 
