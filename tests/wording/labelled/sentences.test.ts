@@ -3,6 +3,7 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { CONTEXTS } from './contexts';
 import {
+  ES_FR,
   GRADES,
   fileOf,
   FIRST,
@@ -13,7 +14,7 @@ import {
   type LabelledSentence,
 } from './sentences';
 
-const LISTS = [FIRST, MORE].map((name) => ({ name, sentences: sentencesOf(name) }));
+const LISTS = [FIRST, MORE, ES_FR].map((name) => ({ name, sentences: sentencesOf(name) }));
 const all = LISTS.flatMap(({ sentences }) => sentences);
 const idsOf = (sentences: LabelledSentence[]) => sentences.map(({ id }) => id);
 const timesIn = (text: string, phrase: string) => text.split(phrase).length - 1;
@@ -80,10 +81,11 @@ describe('the labelled sentences', () => {
     expect(sentencesOf(FIRST).length).toBeGreaterThanOrEqual(170);
   });
 
-  it('were frozen before the rules were tuned', () => {
+  it.each([FIRST, ES_FR])('were frozen before the rules were tuned: %s', (name) => {
     const hash = createHash('sha256')
-      .update(readFileSync(fileOf(FIRST)))
+      .update(readFileSync(fileOf(name)))
       .digest('hex');
-    expect(readFileSync(fileOf('sentences-first.sha256'), 'utf8')).toBe(`${hash}  ${FIRST}\n`);
+    const stored = readFileSync(fileOf(name.replace('.json', '.sha256')), 'utf8');
+    expect(stored).toBe(`${hash}  ${name}\n`);
   });
 });

@@ -55,6 +55,8 @@ export type LabelledSentence = z.infer<typeof sentence>;
 
 export const FIRST = 'sentences-first.json';
 export const MORE = 'sentences-more.json';
+/** Spanish and French, frozen before the rules of those languages were written. */
+export const ES_FR = 'sentences-es-fr.json';
 
 export const fileOf = (name: string) => new URL(`./${name}`, import.meta.url);
 
