@@ -9,6 +9,7 @@ import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
 import { canonicalJson } from '@/lib/security/canonical';
 import { newId } from '@/lib/security/ids';
+import { isOfTwoReleases } from '@/lib/wording/draft-input';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { computeFindings } from '../release/compute-findings';
@@ -53,8 +54,12 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
       createdAt: ctx.now,
       submissionKey: key,
     });
+    const style = computed.settings.houseStyle.body;
+    const isAlone = style.onePollHeadlines === 'refuse' && !isOfTwoReleases(found.finding.kind);
     for (const { kind, text } of draft) {
-      const line = insertLine(tx, { publicId: newId(), sheetId: sheet.id, kind });
+      // House style files no headline on one poll: the words stay there to be read, knocked out.
+      const knockedOut = isAlone && kind === 'headline';
+      const line = insertLine(tx, { publicId: newId(), sheetId: sheet.id, kind, knockedOut });
       insertLineVersion(tx, {
         publicId: newId(),
         lineId: line.id,
@@ -62,7 +67,7 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
         draftText: text,
         text,
         state: 'draft',
-        templateVersion: computed.settings.houseStyle.body.templateVersion,
+        templateVersion: style.templateVersion,
         changedBy: actor.personId,
         changedAt: ctx.now,
       });
