@@ -8,7 +8,7 @@ import { clauseOf } from '../scope';
 import { sizeOf } from '../sizes';
 import type { WordingMark } from '../types';
 import { isRounded, leadOf, rankedOptions, shareOf } from '../verdicts';
-import { releasesFor } from '../which-release';
+import { releasesFor, releasesNamed } from '../which-release';
 import { isAboutSubgroup } from './about';
 import { linkedOption } from './linked-option';
 
@@ -35,7 +35,7 @@ function judgeShare(
   { option, mayBeEarlier }: { option: string; mayBeEarlier: boolean },
 ): Judged | null {
   const { releases } = reading.input;
-  const candidates = releasesNear(reading, quantity, option);
+  const candidates = releasesNamed(reading, quantity, [option]);
   const facts = candidates.flatMap((release) => {
     const { facts: now, previous } = releases[release]!;
     return [now, ...(mayBeEarlier && previous ? [previous] : [])].map((one) => ({ release, one }));
@@ -61,14 +61,6 @@ function judgeShare(
         message: `The release prints ${share}%: no more decimals than it has.`,
       }
     : null;
-}
-
-/** Where a sentence names several pollsters, a share may be any of theirs. */
-function releasesNear(reading: Reading, quantity: Quantity, option: string): number[] {
-  const { from, to } = reading.sentenceAt(quantity.from);
-  const named = reading.mentions.filter((one) => one.kind === 'pollster' && one.from >= from && one.to <= to);
-  if (new Set(named.map(({ name }) => name)).size < 2) return releasesFor(reading, quantity, [option]);
-  return reading.input.releases.map((_, index) => index);
 }
 
 const printedShare = (pct: number, decimals: number) => roundHalfUp(pct, decimals).toFixed(decimals);
