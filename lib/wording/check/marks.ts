@@ -1,3 +1,4 @@
+import { formatPercent, roundHalfUp } from '@/lib/format/number';
 import type { Lexicon, Replacement } from './lexicon/types';
 import type { Hit } from './phrases';
 import type { Reading } from './reading';
@@ -42,6 +43,12 @@ export function replacementOf(
   if (text === null) return null;
   const filled = text.replace(/\{(\w+)\}/g, (hole, name: string) => slots[name] ?? hole);
   return filled.includes('{') ? null : filled;
+}
+
+/** A percentage as the language prints it, with no more decimals than it has. */
+export function percentText({ locale }: Lexicon, pct: number, decimals?: number): string {
+  const own = String(roundHalfUp(pct, 2)).split('.')[1]?.length ?? 0;
+  return formatPercent(pct, decimals ?? own, locale);
 }
 
 const WEIGHT: readonly WordingGrade[] = ['wrong', 'not-supported', 'house-style', 'cannot-judge'];

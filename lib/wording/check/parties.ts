@@ -10,6 +10,8 @@ export type Party = { option: string; mention: Mention } | 'unknown' | null;
 export function subjectOf(reading: Reading, hit: Hit): Party {
   const beside = reading.mentionAt(hit.from - 1);
   if (beside?.kind === 'option') return { option: beside.name, mention: beside };
+  const owner = ownerOf(reading, hit);
+  if (owner) return { option: owner.name, mention: owner };
   if (isUnknownName(reading, hit)) return 'unknown';
   const clause = clauseOf(reading, hit);
   const sentence = reading.sentenceAt(hit.from);
@@ -22,6 +24,14 @@ export function subjectOf(reading: Reading, hit: Hit): Party {
     firstAfter(reading, clause.to, sentence.to) ??
     fromSentenceBefore(reading, hit, sentence.from)
   );
+}
+
+/** "la ventaja de Alder", "l'avance d'Alder": whose a noun is stands after it, past an article. */
+function ownerOf(reading: Reading, { from, to }: Hit): Mention | null {
+  if (!reading.has('ownedNouns', { from, to })) return null;
+  const of = reading.cueAt('ofWords', to);
+  const owner = of && reading.mentionAt(of.to);
+  return owner?.kind === 'option' ? owner : null;
 }
 
 /** The other option of a comparison: the first named after the phrase, or else the other one named before it. */

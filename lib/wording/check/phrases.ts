@@ -20,7 +20,7 @@ type Beside = { [K in 'notBefore' | 'notAfter' | 'before' | 'after']: ReadonlySe
 /** Token places: `from` is in the phrase, `to` is past it. */
 export type Hit = { from: number; to: number };
 
-export function compilePhrases(cues: readonly Cue[]): Phrases {
+export function compilePhrases(cues: readonly Cue[], elisions: readonly string[] = []): Phrases {
   const byFirst = new Map<string, Phrase[]>();
   for (const cue of cues) {
     const beside: Beside = {
@@ -30,7 +30,7 @@ export function compilePhrases(cues: readonly Cue[]): Phrases {
       after: setOf(cue.after),
     };
     for (const text of cue.say) {
-      const words = tokenise(text).map((token) => token.text);
+      const words = tokenise(text, elisions).map((token) => token.text);
       const [first = ''] = words;
       const list = byFirst.get(first) ?? [];
       list.push({ words, cue: beside });

@@ -34,7 +34,7 @@ export type Reading = {
 
 export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Reading {
   const folded = fold(input.text);
-  const tokens = tokenise(folded.text);
+  const tokens = tokenise(folded.text, lexicon.words.elisions);
   const isCapital = (at: number) => isUpper(input.text, folded.starts[tokens[at]?.from ?? -1]);
   const mentions = mentionsOf(tokens, isCapital, input.releases, lexicon);
   const mentionAt = placesOf(mentions, tokens.length);

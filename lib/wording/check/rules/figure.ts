@@ -1,6 +1,6 @@
 import { valueOf } from '@/lib/domain/disclosed';
-import { roundHalfUp } from '@/lib/format/number';
-import { markAt, replacementOf, type Judged } from '../marks';
+import { formatTrimmed, roundHalfUp } from '@/lib/format/number';
+import { markAt, percentText, replacementOf, type Judged } from '../marks';
 import { objectOf, subjectOf } from '../parties';
 import type { Quantity } from '../quantities';
 import type { Reading } from '../reading';
@@ -47,11 +47,14 @@ function judgeShare(
     isRounded(quantity.value, quantity.decimals, shareOf(one, option) ?? -1),
   );
   const { release, one } = fitting ?? first;
-  const share = printedShare(shareOf(one, option) ?? 0, one.decimals);
+  const pct = shareOf(one, option) ?? 0;
+  const share = printedShare(pct, one.decimals);
   const base = {
     rule: 'figure' as const,
     release,
-    replacement: replacementOf(reading.lexicon.words, 'atShare', { share: `${share}%` }),
+    replacement: replacementOf(reading.lexicon.words, 'atShare', {
+      share: percentText(reading.lexicon.words, pct, one.decimals),
+    }),
   };
   if (!fitting) return { ...base, grade: 'wrong', message: `The release gives ${option} ${share}%.` };
   return quantity.decimals > one.decimals
@@ -98,7 +101,9 @@ function markSizes(reading: Reading): WordingMark[] {
             release,
             claim,
             message: `The printed figures differ by ${roundHalfUp(pp, releases[release]!.facts.decimals)} points.`,
-            replacement: replacementOf(reading.lexicon.words, 'points', { n: String(roundHalfUp(pp, 1)) }),
+            replacement: replacementOf(reading.lexicon.words, 'points', {
+              n: formatTrimmed(pp, 1, reading.lexicon.words.locale),
+            }),
           },
         ),
       ];

@@ -116,11 +116,13 @@ function judgeStated(reading: Reading, quantity: Quantity): Judged | null {
   );
   if (fits || isWider(reading, quantity, known)) return null;
   const stated = shareMargins(all[0]!)[0];
-  const shown = formatTrimmed((isOfLead ? leadMargins(all[0]!)[0] : stated) ?? 0, 1, 'en-GB');
+  const size = (isOfLead ? leadMargins(all[0]!)[0] : stated) ?? 0;
+  const shown = formatTrimmed(size, 1, 'en-GB');
+  const replacement = `±${formatTrimmed(size, 1, reading.lexicon.words.locale)}`;
   const message = isOfLead
     ? `That is not the margin of this lead, which is about ±${shown} points.`
     : `The margin stated, or worked out here, is ±${shown} points.`;
-  return { rule: 'margin', grade: 'wrong', release, message, replacement: `±${shown}` };
+  return { rule: 'margin', grade: 'wrong', release, message, replacement };
 }
 
 /** "or ±10 if weighting cost more": beside a margin its wider end, up to what a doubled design effect would make it. */

@@ -1,4 +1,4 @@
-import { markAt, replacementOf, type Judged } from '../marks';
+import { markAt, percentText, replacementOf, type Judged } from '../marks';
 import { subjectOf } from '../parties';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
@@ -89,7 +89,9 @@ function judge(reading: Reading, said: Said, option: string, release: number): J
   const isPlain = reading.has('aboveThreshold', said) || reading.has('belowThreshold', said);
   if (found.verdict === 'holds' || (found.verdict === 'fragile' && isPlain)) return null;
   const replacement =
-    share === null ? null : replacementOf(reading.lexicon.words, 'atShare', { share: `${share}%` });
+    share === null
+      ? null
+      : replacementOf(reading.lexicon.words, 'atShare', { share: percentText(reading.lexicon.words, share) });
   return {
     ...base,
     grade: 'not-supported',
