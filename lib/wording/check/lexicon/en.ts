@@ -90,6 +90,7 @@ export const EN_LEXICON: Lexicon = {
     ),
     yes: ['the ayes', 'yes side', 'yes vote', 'yes camp'],
     no: ['noes', 'no side', 'no vote', 'no camp'],
+    "don't know": listed(`did not know | do not know | does not know | had not decided | have not decided`),
   },
   commonNames: listed(`
       yes | no | other | others | none | someone else | remain | leave | undecided | unsure |
