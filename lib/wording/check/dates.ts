@@ -34,7 +34,7 @@ function dateAround(
   const text = (place: number) => tokens[place]?.text ?? '';
   const days: number[] = [];
   let from = at;
-  for (let place = at - 1; place >= at - 5 && (DAY.test(text(place)) || isLink(place)); place -= 1) {
+  for (let place = at - 1; place >= at - 8 && (DAY.test(text(place)) || isLink(place)); place -= 1) {
     if (DAY.test(text(place))) {
       days.unshift(Number(text(place)));
       from = place;

@@ -14,7 +14,8 @@ export type Judged = {
 };
 
 /** A mark on token places. Words inside quotation marks are somebody else's: said, not graded. */
-export function markAt(reading: Reading, { from, to }: Hit, judged: Judged): WordingMark {
+export function markAt(reading: Reading, { from, to: own, tail }: Hit, judged: Judged): WordingMark {
+  const to = tail ?? own;
   const { folded, tokens, input } = reading;
   const start = folded.starts[tokens[from]?.from ?? 0] ?? 0;
   const end = folded.ends[(tokens[to - 1]?.to ?? 1) - 1] ?? start;
@@ -29,7 +30,8 @@ export function markAt(reading: Reading, { from, to }: Hit, judged: Judged): Wor
     release: judged.release ?? null,
     claim: judged.claim ?? null,
     message: quoted ? `Quoted words, not judged. In our own words: ${judged.message}` : judged.message,
-    replacement: quoted ? null : (judged.replacement ?? null),
+    // Between the two parts of a verb stand words that a replacement would lose.
+    replacement: quoted || tail !== undefined ? null : (judged.replacement ?? null),
   };
 }
 

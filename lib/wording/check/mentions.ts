@@ -82,6 +82,12 @@ function entriesOf(releases: readonly CheckedRelease[], { words }: CompiledLexic
     const initials = wordsOf(one.name).map((word) => word.charAt(0));
     if (initials.length > 1) add({ ...one, words: [initials.join('')], isCommon: false, isAcronym: true });
   }
+  for (const entry of [...named.values()].filter(({ isAcronym }) => !isAcronym)) {
+    for (const ending of words.nameEndings ?? []) {
+      const last = entry.words.at(-1) ?? '';
+      if (!last.endsWith(ending)) add({ ...entry, words: [...entry.words.slice(0, -1), last + ending] });
+    }
+  }
   return byFirstWord([...named.values()]);
 }
 

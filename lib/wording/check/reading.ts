@@ -39,6 +39,7 @@ export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Re
   const mentions = mentionsOf(tokens, isCapital, input.releases, lexicon);
   const mentionAt = placesOf(mentions, tokens.length);
   const isNamed = (at: number) => mentionAt(at) !== null;
+  const isOption = (at: number) => mentionAt(at)?.kind === 'option';
   const dates = datesIn(tokens, isCapital, isNamed, lexicon);
   const dateAt = placesOf(dates, tokens.length);
   const quantities = quantitiesOf(tokens, lexicon, (at) => isNamed(at) || dateAt(at) !== null);
@@ -48,7 +49,7 @@ export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Re
   const cueMap = (group: CueGroup) => {
     let entry = known.get(group);
     if (!entry) {
-      const hits = findPhrases(lexicon.cues[group], tokens, isNamed);
+      const hits = findPhrases(lexicon.cues[group], tokens, isNamed, isOption);
       entry = { hits, at: placesOf(hits, tokens.length) };
       known.set(group, entry);
     }

@@ -159,6 +159,16 @@ export type Lexicon = {
   datesAreNames: boolean;
   months: readonly (readonly string[])[];
   weekdays: readonly (readonly string[])[];
+  /** A full stop after a day makes it an ordinal: "14. September". */
+  ordinalDots?: true;
+  /** A capital letter makes no name: every noun has one. */
+  nounsHaveCapitals?: true;
+  /** In subordinate clauses the verb comes last. */
+  verbsComeLast?: true;
+  /** What a name ends in where somebody has something: "Alders". */
+  nameEndings?: readonly string[];
+  /** Words after a verb that deny it: "führt NICHT". */
+  negatorsAfter?: readonly string[];
   /** Nouns that stand for an option: "approval" for "Approve". */
   nameNouns: Readonly<Record<string, readonly string[]>>;
   /** Names of options that are common words, and count only in capitals and before one of `afterCommonName`. */

@@ -40,7 +40,9 @@ function saidFractions(reading: Reading): Said[] {
     .filter(
       ({ unit, from, to }) =>
         unit === 'fraction' &&
-        (!reading.isCapital(from) || reading.sentenceAt(from).from === from) &&
+        (reading.lexicon.words.nounsHaveCapitals ||
+          !reading.isCapital(from) ||
+          reading.sentenceAt(from).from === from) &&
         !reading.cueAt('beforeNoFraction', from - 1) &&
         !reading.cueAt('afterNoFraction', to),
     )
