@@ -1,0 +1,37 @@
+import type { KeyboardEvent, ReactNode } from 'react';
+import { Details } from '../ui/details';
+import { SectionHeading } from '../ui/section-heading';
+
+/** A part of a sheet that stands behind its heading until it is wanted. */
+export function Fold({
+  id,
+  title,
+  isOpen = false,
+  children,
+}: {
+  /** Of the heading. */
+  id: string;
+  title: string;
+  /** Open from the start. */
+  isOpen?: boolean;
+  children: ReactNode;
+}) {
+  const close = (event: KeyboardEvent<HTMLDetailsElement>) => {
+    const fold = event.currentTarget;
+    if (event.key !== 'Escape' || !fold.open) return;
+    fold.open = false;
+    fold.querySelector('summary')?.focus();
+  };
+  return (
+    <section aria-labelledby={id} className="fold">
+      <Details
+        name="sheet-folds"
+        open={isOpen}
+        onKeyDown={close}
+        summary={<SectionHeading id={id}>{title}</SectionHeading>}
+      >
+        {children}
+      </Details>
+    </section>
+  );
+}
