@@ -1,7 +1,8 @@
 import Link from 'next/link';
 import { embargoEnd } from '@/components/lines/embargo-band';
 import { DefinitionList } from '@/components/ui/definition-list';
-import { formatInstant } from '@/lib/format/date';
+import { dayInZone } from '@/lib/domain/wall-clock';
+import { formatDay } from '@/lib/format/date';
 import { LANGUAGE_NAMES } from '@/lib/domain/vocabulary';
 import type { HeldEmbed } from '@/lib/services/embed/embed-hold';
 import type { DeskView } from '@/lib/services/sheet/desk-view';
@@ -12,7 +13,7 @@ export function StandingPlaces({ desk }: { desk: DeskView }) {
     <DefinitionList
       className="particulars"
       items={[
-        { term: 'Publication bans', value: <Bans desk={desk} /> },
+        { term: 'Bans', value: <Bans desk={desk} /> },
         { term: 'Embeds held', value: <Embeds held={desk.heldEmbeds} /> },
       ]}
     />
@@ -30,7 +31,7 @@ function Bans({ desk: { holds, bansAhead } }: { desk: DeskView }) {
       ))}
       {bansAhead.map(({ jurisdiction, fromAt, zone }) => (
         <li key={`${jurisdiction} ${fromAt}`}>
-          {jurisdiction}, from {formatInstant(fromAt, zone, 'en-GB')}
+          {jurisdiction}, from {formatDay(dayInZone(fromAt, zone), 'en-GB')}
         </li>
       ))}
     </ul>
