@@ -2,7 +2,7 @@ import type { KeyboardEvent, ReactNode } from 'react';
 import { Details } from '../ui/details';
 import { SectionHeading } from '../ui/section-heading';
 
-/** A part of a sheet that stands behind its heading until it is wanted. */
+/** A part of a sheet that stands behind its heading until it is wanted; opening one closes another. */
 export function Fold({
   id,
   title,
@@ -25,7 +25,7 @@ export function Fold({
   return (
     <section aria-labelledby={id} className="fold">
       <Details
-        name="sheet-folds"
+        name={isOpen ? undefined : 'sheet-folds'}
         open={isOpen}
         onKeyDown={close}
         summary={<SectionHeading id={id}>{title}</SectionHeading>}
