@@ -1,4 +1,5 @@
 import Link from 'next/link';
+import { embargoEnd } from '@/components/lines/embargo-band';
 import { when } from '@/components/lines/when';
 import { CautionNote } from '@/components/ui/caution-note';
 import { Details } from '@/components/ui/details';
@@ -89,7 +90,7 @@ function standing({ state, embargoAt, pulledAt, hold }: EmbedItem, zone: string)
   if (state === 'live' && hold) return heldWords(hold, zone);
   if (state === 'live') return 'Public now. Articles show the newest cleared version.';
   if (state === 'waiting') {
-    const until = embargoAt === null ? '' : ` (${formatInstant(embargoAt, zone, 'en-GB')})`;
+    const until = embargoAt === null ? '' : ` (${embargoEnd({ at: embargoAt, zone })})`;
     return `The address exists; it answers 404 until the embargo ends${until}.`;
   }
   const at = pulledAt === null ? '' : ` on ${formatInstant(pulledAt, zone, 'en-GB')}`;
