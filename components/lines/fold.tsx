@@ -1,4 +1,4 @@
-import type { KeyboardEvent, ReactNode } from 'react';
+import { type KeyboardEvent, type ReactNode, useState } from 'react';
 import { Details } from '../ui/details';
 import { SectionHeading } from '../ui/section-heading';
 
@@ -16,6 +16,8 @@ export function Fold({
   isOpen?: boolean;
   children: ReactNode;
 }) {
+  // How it began: a later drawing of the page leaves it as whoever reads it left it.
+  const [isFirstOpen] = useState(isOpen);
   const close = (event: KeyboardEvent<HTMLDetailsElement>) => {
     const fold = event.currentTarget;
     if (event.key !== 'Escape' || !fold.open) return;
@@ -25,8 +27,8 @@ export function Fold({
   return (
     <section aria-labelledby={id} className="fold">
       <Details
-        name={isOpen ? undefined : 'sheet-folds'}
-        open={isOpen}
+        name={isFirstOpen ? undefined : 'sheet-folds'}
+        open={isFirstOpen}
         onKeyDown={close}
         summary={<SectionHeading id={id}>{title}</SectionHeading>}
       >
