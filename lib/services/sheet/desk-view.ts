@@ -54,7 +54,7 @@ export function deskViewOf(ctx: Ctx, actor: Actor, opened: Opened, frozen: Froze
   const back = state === 'sent-back' ? findLastAct(ctx.db, sheet.id, 'sent-back') : null;
   const standing = frozen && state === 'cleared' ? standingOf(frozen, terms?.shelfDays ?? null) : null;
   return {
-    ...languagesOf(ctx.db, sheet),
+    ...languagesOf(ctx.db, sheet, release.publicId),
     language: sheet.language,
     comments: commentsOf(ctx.db, actor, opened),
     lineReasons: back ? listLineReasons(ctx.db, back.id) : [],
