@@ -49,7 +49,7 @@ test('two people work on one sheet: a time, a comment, who is there, a reason fo
   await dialog.getByText('Reasons for single lines').click();
   await dialog.getByLabel('Body sentence').fill('The base is missing.');
   await dialog.getByRole('button', { name: 'Send back' }).click();
-  await expect(editor.getByText(/^Sent back to Rhea Quill/)).toBeVisible();
+  await expect(editor.getByRole('heading', { name: 'Sent back to Rhea Quill' })).toBeVisible();
 
   await reporter.goto(sheet);
   await expect(reporter.getByText('The base is missing.')).toBeVisible();
@@ -121,7 +121,7 @@ test('the keys of a sheet go to their places and press nothing; ? opens their li
   }).toPass({ timeout: 20_000 });
   await reporter.keyboard.press('Alt+Shift+N');
   await expect(reporter.getByRole('button', { name: 'File', exact: true })).toBeFocused();
-  await expect(reporter.getByText(/^Draft by Rhea Quill/)).toBeVisible();
+  await expect(reporter.getByRole('heading', { name: 'Draft by Rhea Quill' })).toBeVisible();
   await reporter.keyboard.press('?');
   await expect(reporter.getByRole('dialog', { name: 'Keys of this page' })).toBeVisible();
 });
