@@ -22,7 +22,10 @@ export function mentionsOf(
     if (entry.isAcronym) return isCapital(at);
     if (!entry.isCommon) return true;
     const next = tokens[at + entry.words.length];
-    return isCapital(at) && (!next || next.kind !== 'word' || lexicon.names.afterCommon.has(next.text));
+    const isInside = lexicon.words.capitalsAreNames && tokens[at - 1]?.kind === 'word' && !isCapital(at - 1);
+    return (
+      isCapital(at) && (isInside || !next || next.kind !== 'word' || lexicon.names.afterCommon.has(next.text))
+    );
   };
   const mentions: Mention[] = [];
   for (let at = 0; at < tokens.length; at += 1) {

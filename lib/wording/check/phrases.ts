@@ -1,7 +1,7 @@
 import { fold } from './fold';
 import { tokenise, type Token } from './tokens';
 
-/** Words that carry a claim, with what must not stand beside them. All in lower case; accents do not count. */
+/** Words that carry a claim, with what must not stand beside them. Neither case nor accents count. */
 export type Cue = {
   say: readonly string[];
   /** Not where one of these words follows, or goes before. */
@@ -61,6 +61,9 @@ export function compilePhrases(cues: readonly Cue[], elisions: readonly string[]
   for (const list of byFirst.values()) list.sort((a, b) => b.words.length - a.words.length);
   return byFirst;
 }
+
+/** Stands for any number in digits in the words beside a cue. */
+const ANY_DIGITS = '#';
 
 const setOf = (words: readonly string[] | undefined) =>
   words ? new Set(words.map((word) => fold(word).text)) : null;
@@ -132,8 +135,10 @@ function firstOf(
 }
 
 function fits({ notBefore, notAfter, before, after }: Beside, previous: string, next: string): boolean {
-  if (notBefore?.has(next) || notAfter?.has(previous)) return false;
-  return (!before || before.has(next)) && (!after || after.has(previous));
+  const isIn = (words: ReadonlySet<string>, word: string) =>
+    words.has(word) || (/^\d/.test(word) && words.has(ANY_DIGITS));
+  if ((notBefore && isIn(notBefore, next)) || (notAfter && isIn(notAfter, previous))) return false;
+  return (!before || isIn(before, next)) && (!after || isIn(after, previous));
 }
 
 const REACH = 16;

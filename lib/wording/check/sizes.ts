@@ -1,4 +1,4 @@
-import type { Hit } from './phrases';
+import { phraseAt, type Hit } from './phrases';
 import type { Quantity } from './quantities';
 import type { Reading } from './reading';
 import { clauseOf } from './scope';
@@ -42,7 +42,8 @@ function isSize(reading: Reading, quantity: Quantity, last: string): boolean {
   const isBy = reading.cueAt('sizeMarkers', quantity.from - 1) !== null && !isTo(reading, quantity.from - 1);
   if (isPairOfShares(reading, quantity)) return false;
   if (quantity.unit === 'percent') return (last === '' && isOpen(reading, quantity)) || isBy;
-  return quantity.unit === 'none' && isBy && quantity.value <= 60;
+  const isTime = reading.cueAt('afterNoFraction', quantity.to) !== null;
+  return quantity.unit === 'none' && isBy && !isTime && quantity.value <= 60;
 }
 
 /** Right after the phrase itself, which does not end in a word that leads to a share ("up to 48%"). */
@@ -50,26 +51,35 @@ const isOpen = (reading: Reading, { from }: Quantity) =>
   reading.mentionAt(from - 1) === null && !isTo(reading, from - 1);
 
 function isTo(reading: Reading, at: number): boolean {
-  return (
-    reading.lexicon.words.to.includes(reading.tokens[at]?.text ?? '') ||
-    reading.cueAt('shareLeads', at) !== null
-  );
+  return linkBefore(reading, at + 1) !== null || reading.cueAt('shareLeads', at) !== null;
 }
 
-export function isPairOfShares(reading: Reading, own: Quantity): boolean {
-  const { from, to } = own;
-  const { to: links } = reading.lexicon.words;
-  const isLink = (at: number) => links.includes(reading.tokens[at]?.text ?? '');
-  const ofKind = (other: Quantity | null) => other !== null && !areUnlike(own, other);
-  const follows = ofKind(reading.quantityAt(to + 1)) && isLink(to);
-  const joined = reading.quantityAt(to) !== null && reading.tokens[to]?.joined === true;
-  const precedes = ofKind(reading.quantityAt(from - 2)) && isLink(from - 1);
-  return (
-    follows ||
-    joined ||
-    precedes ||
-    (reading.tokens[from]?.joined === true && reading.quantityAt(from - 1) !== null)
-  );
+export function isPairOfShares(reading: Reading, quantity: Quantity): boolean {
+  const isLike = (other: Quantity | null) => other !== null && !areUnlike(quantity, other);
+  return isLike(secondOfPair(reading, quantity)) || isLike(firstOfPair(reading, quantity));
+}
+
+/** The number that a link ("52% TO 38%", "52 % FRENTE A 38 %") or a hyphen ties to one before it. */
+export function secondOfPair({ lexicon, tokens, quantityAt }: Reading, { to }: Quantity): Quantity | null {
+  const link = phraseAt(lexicon.to, tokens, to);
+  if (link) return quantityAt(link.to);
+  return tokens[to]?.joined ? quantityAt(to) : null;
+}
+
+/** The number before a link or a hyphen that ties it to this one. */
+export function firstOfPair(reading: Reading, { from }: Quantity): Quantity | null {
+  const link = linkBefore(reading, from);
+  if (link) return reading.quantityAt(link.from - 1);
+  return reading.tokens[from]?.joined ? reading.quantityAt(from - 1) : null;
+}
+
+/** The link that ends right before a place. */
+function linkBefore({ lexicon, tokens }: Reading, to: number): Hit | null {
+  for (const length of [2, 1]) {
+    const link = phraseAt(lexicon.to, tokens, to - length);
+    if (link?.to === to) return link;
+  }
+  return null;
 }
 
 /** "Up 10 points to 51%": points and a percentage are no pair. */
@@ -79,8 +89,7 @@ const areUnlike = (a: Quantity, b: Quantity) =>
 /** "With 52% ahead", "auf 52 Prozent gestiegen"; but "with a 14% lead". */
 function isShareBefore(reading: Reading, { from }: Quantity, hit: number): boolean {
   if (reading.cueAt('leadNoun', hit)) return false;
-  const { to } = reading.lexicon.words;
-  return reading.cueAt('withWords', from - 1) !== null || to.includes(reading.tokens[from - 1]?.text ?? '');
+  return reading.cueAt('withWords', from - 1) !== null || linkBefore(reading, from) !== null;
 }
 
 const isMargin = (reading: Reading, { from }: Quantity) =>
@@ -102,5 +111,6 @@ function sizeBefore(reading: Reading, { from }: Hit): Quantity | null {
 function beforeSize(reading: Reading, quantity: Quantity, from: number): Quantity | null {
   if (isPairOfShares(reading, quantity) || isMargin(reading, quantity)) return null;
   if (quantity.unit === 'points') return quantity;
-  return quantity.to === from && !isShareBefore(reading, quantity, from) ? quantity : null;
+  const isOf = quantity.to + 1 === from && reading.cueAt('ofWords', quantity.to) !== null;
+  return (quantity.to === from || isOf) && !isShareBefore(reading, quantity, from) ? quantity : null;
 }

@@ -3,6 +3,8 @@ import { wordsIn } from '../tokens';
 import type { WordingLanguage } from '../types';
 import { DE_LEXICON } from './de';
 import { EN_LEXICON } from './en';
+import { ES_LEXICON } from './es';
+import { FR_LEXICON } from './fr';
 import { CUE_GROUPS, type CueGroup, type Lexicon } from './types';
 
 /** A lexicon with its phrases ready to be found. */
@@ -14,12 +16,13 @@ export type CompiledLexicon = {
   numbers: Phrases;
   inEvery: Phrases;
   names: Readonly<Record<'common' | 'afterCommon' | 'generic', ReadonlySet<string>>>;
+  to: Phrases;
 };
 
 const LEXICONS: Readonly<Record<WordingLanguage, Lexicon | null>> = {
   en: EN_LEXICON,
-  es: null,
-  fr: null,
+  es: ES_LEXICON,
+  fr: FR_LEXICON,
   de: DE_LEXICON,
 };
 
@@ -48,6 +51,7 @@ export function lexiconOf(language: WordingLanguage): CompiledLexicon | null {
       afterCommon: new Set(words.afterCommonName),
       generic: new Set(words.genericNameWords),
     },
+    to: compile([{ say: words.to }]),
   };
   compiled.set(language, lexicon);
   return lexicon;

@@ -25,7 +25,8 @@ type Groups =
   | 'changeNouns'
   | 'countedPeople'
   | 'auxiliaries'
-  | 'ownedNouns';
+  | 'ownedNouns'
+  | 'otherMatters';
 
 /** German: small words around a claim, by what they do there. */
 export const DE_SMALL_WORDS: Readonly<Record<Extract<CueGroup, Groups>, readonly Cue[]>> = {
@@ -84,5 +85,6 @@ export const DE_SMALL_WORDS: Readonly<Record<Extract<CueGroup, Groups>, readonly
     },
   ],
   auxiliaries: [],
+  otherMatters: [],
   ownedNouns: [],
 };

@@ -25,7 +25,8 @@ type Groups =
   | 'changeNouns'
   | 'countedPeople'
   | 'auxiliaries'
-  | 'ownedNouns';
+  | 'ownedNouns'
+  | 'otherMatters';
 
 /** English: small words around a claim, by what they do there. */
 export const EN_SMALL_WORDS: Readonly<Record<Extract<CueGroup, Groups>, readonly Cue[]>> = {
@@ -73,6 +74,7 @@ export const EN_SMALL_WORDS: Readonly<Record<Extract<CueGroup, Groups>, readonly
   changeNouns: [{ say: listed(`change | shift | move | difference since | swing`) }],
   countedPeople: [{ say: listed(`people | respondents | interviews | residents | electors | asked`) }],
   ownedNouns: [],
+  otherMatters: [],
   auxiliaries: [
     {
       say: listed(

@@ -108,6 +108,7 @@ export const CUE_GROUPS = [
   'countedPeople',
   'auxiliaries',
   'ownedNouns',
+  'otherMatters',
 ] as const;
 export type CueGroup = (typeof CUE_GROUPS)[number];
 
@@ -161,6 +162,8 @@ export type Lexicon = {
   weekdays: readonly (readonly string[])[];
   /** A full stop after a day makes it an ordinal: "14. September". */
   ordinalDots?: true;
+  /** Inside a sentence a capital letter is a name's: no headline writes its words with capitals. */
+  capitalsAreNames?: true;
   /** A capital letter makes no name: every noun has one. */
   nounsHaveCapitals?: true;
   /** In subordinate clauses the verb comes last. */

@@ -9,7 +9,7 @@ import { changeOf, isRounded, leadChangeOf, leadOf, rankedOptions, shareOf, type
 import { releasesFor } from '../which-release';
 import { isAboutPoll, isAboutSubgroup, isOfTrade } from './about';
 import { agreed } from './agreed';
-import { comparisonFault, namesPeriodOutside } from './comparison';
+import { comparisonFault, namesPeriodOutside, otherPollsFigure } from './comparison';
 
 type Said = Hit & { direction: 1 | -1; ofLead: boolean };
 
@@ -21,12 +21,25 @@ type Said = Hit & { direction: 1 | -1; ofLead: boolean };
 export function markChanges(reading: Reading): WordingMark[] {
   const always = [...reading.cues('dramatic'), ...reading.cues('momentum')]
     .filter((hit) => scopeOf(reading, hit) === 'claimed' && isAboutPoll(reading, hit))
-    .map((hit) => markAt(reading, hit, DRAMATIC));
+    .map((hit) => markAt(reading, hit, faultOfAll(reading, hit) ?? DRAMATIC));
   const said = saidChanges(reading).filter(
     (hit) =>
-      scopeOf(reading, hit) === 'claimed' && !isAboutSubgroup(reading, hit) && isAboutPoll(reading, hit),
+      scopeOf(reading, hit) === 'claimed' &&
+      !isAboutSubgroup(reading, hit) &&
+      isAboutPoll(reading, hit) &&
+      !isOfOther(reading, hit),
   );
   return [...always, ...said.flatMap((hit) => judgeSaid(reading, hit))];
+}
+
+/** "El precio del combustible subió": what moves is no figure of a poll. */
+const isOfOther = (reading: Reading, { from }: Hit) =>
+  reading.has('otherMatters', { from: Math.max(reading.sentenceAt(from).from, from - NEAR), to: from });
+
+/** What stands against comparing, where it stands against it in every release that may be meant. */
+function faultOfAll(reading: Reading, hit: Hit): Judged | null {
+  const faults = releasesFor(reading, hit).map((release) => comparisonFault(reading, hit, release));
+  return faults.every((fault) => fault !== null) ? (faults[0] ?? null) : null;
 }
 
 const DRAMATIC: Judged = {
@@ -113,6 +126,9 @@ function judgeIn(reading: Reading, said: Said, subject: Party, release: number):
   const checked = reading.input.releases[release]!;
   const fault = comparisonFault(reading, said, release);
   if (fault) return fault;
+  const from =
+    subject && subject !== 'unknown' ? otherPollsFigure(reading, said, release, subject.option) : null;
+  if (from) return from;
   if (!checked.previous) {
     if (!isOfTrade(reading, said)) return null;
     return {

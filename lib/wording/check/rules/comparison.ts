@@ -1,6 +1,9 @@
+import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { Judged } from '../marks';
 import type { Hit } from '../phrases';
+import type { Quantity } from '../quantities';
 import type { Reading } from '../reading';
+import { isRounded, shareOf } from '../verdicts';
 
 /**
  * What stands against comparing: another pollster's poll named beside a change, or releases that differ in who was
@@ -16,12 +19,7 @@ export function comparisonFault(reading: Reading, hit: Hit, release: number): Ju
   );
   const own = [checked?.facts.pollster.name, checked?.previous?.pollster.name];
   if ([...pollsters].some((name) => !own.includes(name)) && pollsters.size > 1) {
-    return {
-      rule: 'not-comparable',
-      grade: 'not-supported',
-      release,
-      message: 'Polls of different pollsters are set against each other: that is no change.',
-    };
+    return { ...OTHERS, release };
   }
   const comparability = checked?.comparability;
   if (!comparability || comparability.comparable || comparability.isOverridden) return null;
@@ -32,6 +30,32 @@ export function comparisonFault(reading: Reading, hit: Hit, release: number): Ju
     release,
     message: `The two releases are not comparable: they differ in ${items}.`,
   };
+}
+
+const OTHERS: Omit<Judged, 'release'> = {
+  rule: 'not-comparable',
+  grade: 'not-supported',
+  message: 'Polls of different pollsters are set against each other: that is no change.',
+};
+
+/** "Down from 52% to 46% in the Norwater poll", where 52% is what another pollster given has. */
+export function otherPollsFigure(reading: Reading, hit: Hit, release: number, option: string): Judged | null {
+  const { releases } = reading.input;
+  const own = releases[release];
+  if (!own || own.previous) return null;
+  const others = releases.filter(({ facts }) => facts.pollster.id !== own.facts.pollster.id);
+  const { from, to } = reading.sentenceAt(hit.from);
+  const isOf = (facts: ReleaseFacts, { value, decimals }: Quantity) =>
+    isRounded(value, decimals, shareOf(facts, option) ?? -1);
+  const isTheirs = reading.quantities.some(
+    (quantity) =>
+      quantity.from >= from &&
+      quantity.to <= to &&
+      quantity.unit === 'percent' &&
+      !isOf(own.facts, quantity) &&
+      others.some(({ facts }) => isOf(facts, quantity)),
+  );
+  return isTheirs ? { ...OTHERS, release } : null;
 }
 
 /** Whether the sentence says since when, and neither release was then: another month, "a year ago". */

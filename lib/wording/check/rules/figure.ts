@@ -36,7 +36,9 @@ function judgeShare(
   { option, mayBeEarlier }: { option: string; mayBeEarlier: boolean },
 ): Judged | null {
   const { releases } = reading.input;
-  const candidates = releasesNamed(reading, quantity, [option]);
+  const candidates = mayBeEarlier
+    ? releases.map((_, index) => index)
+    : releasesNamed(reading, quantity, [option]);
   const facts = candidates.flatMap((release) => {
     const { facts: now, previous } = releases[release]!;
     return [now, ...(mayBeEarlier && previous ? [previous] : [])].map((one) => ({ release, one }));

@@ -43,7 +43,8 @@ function saidLeads(reading: Reading): Said[] {
     if (!kept.some((other) => other.from < one.to && one.from < other.to)) kept.push(one);
   }
   kept.sort((a, b) => a.from - b.from);
-  return kept.filter((one, index) => !kept.slice(0, index).some((other) => isPartOf(reading, one, other)));
+  const whole = joined(reading, kept);
+  return whole.filter((one, index) => !whole.slice(0, index).some((other) => isPartOf(reading, one, other)));
 }
 
 /** "Führt mit 8 Punkten Vorsprung vor Brook" is one claim: what follows in its clause tells its size and its object. */
@@ -52,6 +53,28 @@ function isPartOf(reading: Reading, one: Said, other: Said): boolean {
   if (one.from >= to) return false;
   const size = one.isNoun ? sizeOf(reading, one) : null;
   return one.objectAt !== undefined || (size !== null && size.from === sizeOf(reading, other)?.from);
+}
+
+const NEAR = 5;
+
+/** "Saca tres puntos de ventaja": a verb and the noun right after it are one claim. */
+function joined(reading: Reading, said: readonly Said[]): Said[] {
+  const isTail = (noun: Said, verb: Said | undefined) =>
+    verb !== undefined &&
+    noun.isNoun &&
+    !verb.isNoun &&
+    !verb.isTrailing &&
+    noun.from - verb.to <= NEAR &&
+    !reading.tokens
+      .slice(verb.to, noun.from)
+      .some(
+        ({ kind, text }, index) => reading.mentionAt(verb.to + index) || (kind === 'sign' && text !== '%'),
+      );
+  return said.flatMap((one, index) => {
+    if (isTail(one, said[index - 1])) return [];
+    const noun = said[index + 1];
+    return [noun && isTail(noun, one) ? { ...one, to: noun.to } : one];
+  });
 }
 
 /** "Ahead of Thursday's vote", "behind closed doors", a lead that nobody is said to have. */

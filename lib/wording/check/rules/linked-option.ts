@@ -2,7 +2,7 @@ import { optionsIn, subjectOf } from '../parties';
 import type { Quantity } from '../quantities';
 import type { Reading } from '../reading';
 import { clauseOf, scopeOf } from '../scope';
-import { isPairOfShares, sizeOf } from '../sizes';
+import { firstOfPair, isPairOfShares, secondOfPair, sizeOf } from '../sizes';
 
 export type Link = { option: string; mayBeEarlier: boolean };
 
@@ -67,7 +67,7 @@ function isSizeOfSomething(reading: Reading, quantity: Quantity): boolean {
 /** Two shares in a row go to the names in their order; after "from" they are one name's, earlier and now. */
 function inPair(reading: Reading, quantity: Quantity): Link | null {
   if (!isPairOfShares(reading, quantity)) return null;
-  const first = firstOfPair(reading, quantity);
+  const first = startOfPair(reading, quantity);
   const second = secondOfPair(reading, first);
   if (!second) return null;
   const isFirst = first.from === quantity.from;
@@ -89,17 +89,12 @@ function inPair(reading: Reading, quantity: Quantity): Link | null {
     : null;
 }
 
-function firstOfPair(reading: Reading, quantity: Quantity): Quantity {
-  const before =
-    reading.quantityAt(quantity.from - 2) ??
-    (reading.tokens[quantity.from]?.joined ? reading.quantityAt(quantity.from - 1) : null);
-  return before && secondOfPair(reading, before)?.from === quantity.from ? before : quantity;
-}
-
-function secondOfPair(reading: Reading, { to }: Quantity): Quantity | null {
-  const isLink = reading.lexicon.words.to.includes(reading.tokens[to]?.text ?? '');
-  if (isLink) return reading.quantityAt(to + 1);
-  return reading.tokens[to]?.joined ? reading.quantityAt(to) : null;
+/** In a chain ("47 a 41 frente a 44 a 42") every second number ends a pair. */
+function startOfPair(reading: Reading, quantity: Quantity): Quantity {
+  const before = firstOfPair(reading, quantity);
+  let isSecond = false;
+  for (let one: Quantity | null = before; one; one = firstOfPair(reading, one)) isSecond = !isSecond;
+  return before && isSecond ? before : quantity;
 }
 
 function after(reading: Reading, quantity: Quantity): Link | null {

@@ -43,7 +43,11 @@ function lineAfter(reading: Reading, { from, to }: Hit): Omit<Said, 'isAbove'> |
   let pct: number | null = null;
   for (let at = to; at < to + NEAR; at += 1) {
     const noun = reading.cueAt('thresholdNoun', at);
-    if (noun) return { from, to: noun.to, pct };
+    if (noun) {
+      const own = pct ?? lineOf(reading, noun);
+      const isOther = pct === null && own !== null && !isRaceThreshold(reading, own);
+      return isOther ? null : { from, to: noun.to, pct: own };
+    }
     const quantity = reading.quantityAt(at);
     if (quantity && reading.cueAt('withWords', at - 1)) at = quantity.to - 1;
     else if (quantity) {
@@ -63,6 +67,12 @@ function lineBefore(reading: Reading, { from, to }: Hit): Omit<Said, 'isAbove'> 
     if (reading.cueAt('thresholdNoun', at)) return { from, to, pct: null };
   }
   return null;
+}
+
+/** "the threshold OF 5%": the number that follows its noun within its phrase. */
+function lineOf(reading: Reading, { to }: Hit): number | null {
+  const of = reading.cueAt('ofWords', to);
+  return of ? (reading.quantityAt(of.to)?.value ?? null) : null;
 }
 
 function isRaceThreshold(reading: Reading, pct: number): boolean {
