@@ -49,13 +49,7 @@ export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Re
   const sentenceAt = placesOf(sentences, tokens.length);
   const found = findAll(lexicon.index, tokens, isNamed, isOption);
   const cues = (group: CueGroup) => found.get(group) ?? NONE;
-  const cueAt = (group: CueGroup, token: number) => {
-    for (const hit of cues(group)) {
-      if (hit.from > token) return null;
-      if (token < hit.to) return hit;
-    }
-    return null;
-  };
+  const covered = coverOf(cues, tokens.length);
   return {
     input,
     lexicon,
@@ -71,8 +65,33 @@ export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Re
     quotations: quotationsOf(input.text),
     isCapital,
     cues,
-    cueAt,
-    has: (group, { from, to }) => from < to && cues(group).some((hit) => hit.from < to && from < hit.to),
+    cueAt: (group, token) => covered(group).first[token] ?? null,
+    has: (group, { from, to }) => {
+      const { before } = covered(group);
+      const end = Math.min(to, tokens.length);
+      return from < end && (before[end] ?? 0) > (before[Math.max(0, from)] ?? 0);
+    },
+  };
+}
+
+type Cover = { first: (Hit | null)[]; before: Uint32Array };
+
+/** Which hit of a group stands at each place, and how many places before it are covered: asked for at every word. */
+function coverOf(cues: (group: CueGroup) => readonly Hit[], length: number): (group: CueGroup) => Cover {
+  const kept = new Map<CueGroup, Cover>();
+  return (group) => {
+    const known = kept.get(group);
+    if (known) return known;
+    const first = new Array<Hit | null>(length).fill(null);
+    for (const hit of cues(group))
+      for (let at = hit.from; at < Math.min(hit.to, length); at += 1) first[at] ??= hit;
+    const before = new Uint32Array(length + 1);
+    first.forEach((hit, at) => {
+      before[at + 1] = (before[at] ?? 0) + (hit === null ? 0 : 1);
+    });
+    const cover = { first, before };
+    kept.set(group, cover);
+    return cover;
   };
 }
 

@@ -88,7 +88,7 @@ describe('checkWording', () => {
   });
 
   it('says that a change cannot be judged without an earlier release', () => {
-    expect(told('Alder is up five points')).toEqual(['change cannot-judge: up']);
+    expect(told('Alder is up 5 points')).toEqual(['change cannot-judge: up']);
   });
 
   it('refuses a comparison of releases that differ in who was asked', () => {
@@ -99,7 +99,7 @@ describe('checkWording', () => {
 
   it('knows what needs no figures where no release is given', () => {
     const { marks, cannotJudge } = checkWording(
-      inputOf('A dead heat, the poll proves; Brook will win by 6 percent', []),
+      inputOf('A dead heat, the poll proves; Brook will win by 6 points', []),
     );
     expect(marks.map(({ rule }) => rule)).toEqual(['level', 'proof', 'forecast']);
     expect(cannotJudge).toHaveLength(1);

@@ -38,14 +38,23 @@ function saidLeads(reading: Reading): Said[] {
     ...reading.cues('trailWeak').map((hit) => ({ ...hit, isStrong: false, isTrailing: true, isNoun: false })),
     ...reading.cues('leadNoun').map((hit) => ({ ...hit, isStrong: true, isTrailing: false, isNoun: true })),
   ].sort((a, b) => b.to - b.from - (a.to - a.from));
-  const kept: Said[] = [];
-  for (const one of all) {
-    if (!kept.some((other) => other.from < one.to && one.from < other.to)) kept.push(one);
-  }
+  const taken = new Set<number>();
+  const kept = all.filter(({ from, to }) => {
+    const places = Array.from({ length: to - from }, (_, index) => from + index);
+    if (places.some((place) => taken.has(place))) return false;
+    for (const place of places) taken.add(place);
+    return true;
+  });
   kept.sort((a, b) => a.from - b.from);
   const whole = joined(reading, kept);
-  return whole.filter((one, index) => !whole.slice(0, index).some((other) => isPartOf(reading, one, other)));
+  return whole.filter(
+    (one, index) =>
+      !whole.slice(Math.max(0, index - BACK), index).some((other) => isPartOf(reading, one, other)),
+  );
 }
+
+/** So many words of leading back may one be part of. */
+const BACK = 3;
 
 /** "Führt mit 8 Punkten Vorsprung vor Brook" is one claim: what follows in its clause tells its size and its object. */
 function isPartOf(reading: Reading, one: Said, other: Said): boolean {
