@@ -4,7 +4,7 @@ test('the health of the desk is open to anyone and kept by no cache', async ({ r
   const answer = await request.get('/api/health');
   expect(answer.status()).toBe(200);
   expect(answer.headers()['cache-control']).toContain('no-store');
-  expect(await answer.json()).toMatchObject({ database: 'ok' });
+  expect(await answer.json()).toMatchObject({ database: 'ok', jobs: 'answering' });
 });
 
 test('no page may be framed, and each page has a nonce of its own', async ({ request }) => {
