@@ -40,10 +40,9 @@ export async function checkDesk(db: Db, folder: string, told: readonly Told[], n
 function checkHistory(db: Db, told: readonly Told[]): void {
   const head = readHead(headFile(db)!);
   expect(verifyHistory(db, head ? [{ name: 'the head', head }] : [])).toMatchObject({ ok: true });
-  expect(
-    findLastRecord(db)!.seq - (head?.seq ?? 0),
-    'the head is at most one act behind',
-  ).toBeLessThanOrEqual(1);
+  // Two processes write, and each may die between an act and keeping its head.
+  const behind = findLastRecord(db)!.seq - (head?.seq ?? 0);
+  expect(behind, 'acts by which the head is behind').toBeLessThanOrEqual(3);
   const entries = new Map<string, number>();
   for (const { action, entityId } of listAllRecords(db))
     entries.set(`${action} ${entityId}`, (entries.get(`${action} ${entityId}`) ?? 0) + 1);
