@@ -16,8 +16,9 @@ import { type Told, toldIn } from './told';
 const SEED = Number(process.env.CRASH_SEED ?? 20_260_917);
 const POINTS = Number(process.env.CRASH_POINTS ?? 20);
 const ENTRY = ['--conditions=react-server', '--import', 'tsx'];
-/** Killed so many milliseconds, at most, after both processes were seen at work. */
-const LONGEST_MS = 1500;
+/** Killed after so many accepted acts at most, and so many milliseconds on. */
+const MOST_ACTS = 20;
+const LONGEST_MS = 300;
 /** Two processes that compile themselves, on a machine with other work. */
 const START_MS = 240_000;
 
@@ -69,6 +70,7 @@ describe('a desk that is killed in the middle of its work', () => {
       const accepted: Told[] = [];
       for (let round = 0; round < POINTS; round += 1) {
         const before = beatAt() ?? 0;
+        const nActs = 1 + Math.floor(random() * MOST_ACTS);
         write(desk.db, (tx) => {
           insertPolicy(tx, findLatestPolicy(tx)!.body, Date.now());
           enqueueRecomputeIn(tx, Date.now());
@@ -76,7 +78,10 @@ describe('a desk that is killed in the middle of its work', () => {
         const writer = startWriter(round);
         const jobs = startJobs();
         await expect
-          .poll(() => writer.printed().includes('\n') && beatAt() > before, { timeout: START_MS })
+          .poll(() => toldIn(writer.printed()).length >= nActs && beatAt() > before, {
+            timeout: START_MS,
+            interval: 20,
+          })
           .toBe(true);
         await sleep(random() * LONGEST_MS);
         const order = random() < 0.5 ? [writer.child, jobs] : [jobs, writer.child];
@@ -89,7 +94,7 @@ describe('a desk that is killed in the middle of its work', () => {
         await checkDesk(desk.db, desk.folder, accepted, Date.now());
       }
       expect(accepted.length).toBeGreaterThan(POINTS);
-      expect(new Set(accepted.map(({ act }) => act)).size).toBe(7);
+      if (POINTS >= 5) expect(new Set(accepted.map(({ act }) => act)).size).toBe(7);
     },
     POINTS * 2 * START_MS,
   );
