@@ -1,5 +1,5 @@
 import type { WordingMark } from '@/lib/wording/check/types';
-import { GRADE_NAMES } from './mark-words';
+import { GRADE_NAMES, isOfWhole } from './mark-words';
 
 /** The marks of one line of a sheet, close below its words. */
 export function LineMarks({ marks, lang }: { marks: readonly WordingMark[]; lang: string }) {
@@ -9,7 +9,13 @@ export function LineMarks({ marks, lang }: { marks: readonly WordingMark[]; lang
       {marks.map((mark, index) => (
         <li key={index} className="py-0.5">
           <strong className={isHeld(mark) ? 'font-semibold text-caution' : 'font-semibold'}>
-            {GRADE_NAMES[mark.grade]}: <span lang={lang}>“{mark.phrase}”</span>
+            {GRADE_NAMES[mark.grade]}:
+            {isOfWhole(mark) ? null : (
+              <>
+                {' '}
+                <span lang={lang}>“{mark.phrase}”</span>
+              </>
+            )}
           </strong>{' '}
           {mark.message}
           {mark.replacement === null ? null : (

@@ -29,6 +29,9 @@ export const RULE_NAMES: Record<WordingRule, string> = {
   missing: 'What is missing',
   'by-eye': 'Compared by eye',
   significance: 'Significance',
+  'house-phrase': 'Phrases of this desk',
+  'house-print': 'How this desk prints',
+  'one-poll': 'Headlines on one poll',
 };
 
 /** "2 wrong, 1 not supported": in the order of gravity, grades without a mark left out. */

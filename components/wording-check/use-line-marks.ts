@@ -20,7 +20,7 @@ export function useLineMarks(
     return Object.fromEntries(
       typed
         .filter(({ knockedOut }) => !knockedOut)
-        .map(({ kind, text }) => [kind, check({ text, draft: draftOf[kind] ?? '' })]),
+        .map(({ kind, text }) => [kind, check({ kind, text, draft: draftOf[kind] ?? '' })]),
     );
   }, [check, typed, draftsAsText]);
 }

@@ -1,12 +1,12 @@
 import { useEffect, useRef, useState } from 'react';
 import useSWRMutation from 'swr/mutation';
-import type { WordingCheck, WordingLanguage } from '@/lib/wording/check/types';
+import type { TextPart, WordingCheck, WordingLanguage } from '@/lib/wording/check/types';
 import { fetchJson, Refused } from '../forms/release/fetch-json';
 
 export const WORDING_CHECK_URL = '/api/v1/wording-check';
 const WAIT_MS = 350;
 
-export type Asked = { text: string; language: WordingLanguage; releases: readonly string[] };
+export type Asked = { text: string; language: WordingLanguage; part: TextPart; releases: readonly string[] };
 export type Answered = WordingCheck & {
   /** What was asked: the text that the offsets of the marks are in. */
   asked: Asked;

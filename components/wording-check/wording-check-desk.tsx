@@ -2,7 +2,7 @@
 
 import { useState } from 'react';
 import { LANGUAGE_NAMES } from '@/lib/domain/vocabulary';
-import { type WordingLanguage, WORDING_LANGUAGES } from '@/lib/wording/check/types';
+import { type TextPart, type WordingLanguage, WORDING_LANGUAGES } from '@/lib/wording/check/types';
 import { Button } from '../ui/button';
 import { CautionNote } from '../ui/caution-note';
 import { CopyBlock } from '../ui/copy-block';
@@ -16,6 +16,12 @@ import { nameOf, type OfferedRelease, ReleaseChoice } from './release-choice';
 import { type Answered, type CheckState, useWordingCheck } from './use-wording-check';
 
 const ID = 'wording';
+const PARTS: { value: TextPart; label: string }[] = [
+  { value: 'whole', label: 'A text that stands alone' },
+  { value: 'headline', label: 'A headline' },
+  { value: 'line', label: 'A sentence beside its caveat' },
+  { value: 'spoken', label: 'Words that are said aloud' },
+];
 const CHOICES = WORDING_LANGUAGES.map((value) => ({ value, label: LANGUAGE_NAMES[value] }));
 
 /** A text and what it is about at the left, what it says beyond its figures at the right. */
@@ -32,8 +38,9 @@ export function WordingCheckDesk({
 }) {
   const [text, setText] = useState('');
   const [language, setLanguage] = useState<WordingLanguage>('en');
+  const [part, setPart] = useState<TextPart>('whole');
   const [chosen, setChosen] = useState<string[]>([]);
-  const check = useWordingCheck({ text, language, releases: chosen }, personId);
+  const check = useWordingCheck({ text, language, part, releases: chosen }, personId);
   const left = maxText - text.length;
   return (
     <div className="mt-5 grid gap-x-10 gap-y-6 lg:grid-cols-2">
@@ -62,6 +69,15 @@ export function WordingCheckDesk({
             choices={CHOICES}
             value={language}
             onChange={(event) => setLanguage(languageOf(event.target.value))}
+          />
+          <Select
+            id="wording-part"
+            label="What it is"
+            choices={PARTS}
+            value={part}
+            onChange={(event) =>
+              setPart(PARTS.find(({ value }) => value === event.target.value)?.value ?? 'whole')
+            }
           />
         </div>
         <ReleaseChoice releases={releases} chosen={chosen} max={maxReleases} onChange={setChosen} />

@@ -8,21 +8,39 @@ import { refusalOf } from '@/lib/findings/refusal-of';
 import { readGivenRelease } from '@/lib/services/wording-check/given-release';
 import { checkedReleaseOf } from '@/lib/wording/check/checked-release';
 import { checkWording, MAX_TEXT } from '@/lib/wording/check/check-wording';
-import { WORDING_LANGUAGES } from '@/lib/wording/check/types';
+import { TEXT_PARTS, WORDING_LANGUAGES } from '@/lib/wording/check/types';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
 
 const STANDARD_INPUT = 0;
 const REFUSED = 2;
 const USAGE = 'Usage: npm run check:wording -- FILE (or - for standard input)\n';
 
+const phrase = z.string().trim().min(1).max(80);
+const perLanguage = <T extends z.ZodType>(list: T) =>
+  z.partialRecord(z.enum(WORDING_LANGUAGES), z.array(list).max(200));
+
+/** What of a house style the check reads; the rest is as the product ships it. */
+const houseStyle = z
+  .strictObject({
+    percent: z.enum(['sign', 'word', 'per-cent']),
+    numbers: z.enum(['figures', 'words-to-nine']),
+    margins: z.enum(['whole', 'half', 'tenth']),
+    onePollHeadlines: z.enum(['allow', 'warn', 'refuse']),
+    banned: perLanguage(phrase),
+    preferred: perLanguage(z.strictObject({ say: phrase, insteadOf: phrase })),
+  })
+  .partial();
+
 const schema = z.strictObject(
   {
     text: z.string({ error: 'Give the text.' }).max(MAX_TEXT, 'At most 20,000 characters.'),
     language: z.enum(WORDING_LANGUAGES, 'The language is en, es, fr or de.').default('en'),
+    part: z.enum(TEXT_PARTS, 'The part is whole, line, headline or spoken.').default('whole'),
+    houseStyle: houseStyle.optional(),
     releases: z.array(z.unknown()).default([]),
     policy: z.unknown().optional(),
   },
-  'The document is an object with text, language and releases.',
+  'The document is an object with text, language, part, houseStyle and releases.',
 );
 
 function main([file]: string[]): void {
@@ -45,18 +63,24 @@ function main([file]: string[]): void {
 function marksOf(input: unknown) {
   const result = schema.safeParse(input);
   if (!result.success) throw refusalOf(result.error);
-  const { text, language, releases, policy: given } = result.data;
+  const { text, language, part, releases, policy: given, houseStyle: own } = result.data;
   const policy = resolvePolicy(readPolicy(given));
   return checkWording({
     text,
     language,
+    part,
     releases: releases.map((release, index) =>
       at(`releases[${index}]`, () => {
         const { facts, previous } = readGivenRelease(release, index);
         return checkedReleaseOf(facts, previous, policy);
       }),
     ),
-    houseStyle: DEFAULT_HOUSE_STYLE,
+    houseStyle: {
+      ...DEFAULT_HOUSE_STYLE,
+      ...own,
+      banned: { ...DEFAULT_HOUSE_STYLE.banned, ...own?.banned },
+      preferred: { ...DEFAULT_HOUSE_STYLE.preferred, ...own?.preferred },
+    },
     policy,
   });
 }

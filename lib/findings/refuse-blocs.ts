@@ -23,7 +23,7 @@ export function refuseFaultyBlocs({ release, comparison, blocs = [] }: ReleaseDo
     bloc.options.forEach((option, place) => {
       const at = `${path}.options[${place}]`;
       if (!options.has(option)) throw new CheckRefused(at, UNKNOWN_OPTION);
-      refuseRepeated(summed, option, at);
+      refuseRepeated(summed, option, at, 'This bloc counts the option already.');
     });
     refuseFaultySum(release, bloc, bloc.printed, bloc.printed ? `${path}.printed.pct` : path);
   });
@@ -37,7 +37,7 @@ function refuseFaultyEarlier(comparison: ReleaseDocument['comparison'], blocs: r
     const path = `comparison.blocs[${index}]`;
     const bloc = blocs.find((one) => one.name === name);
     if (!bloc) throw new CheckRefused(`${path}.name`, 'No bloc has this name.');
-    refuseRepeated(given, name, path);
+    refuseRepeated(given, name, path, 'This bloc has an earlier figure already.');
     refuseFaultySum(comparison.base, bloc, printed, `${path}.pct`);
   });
   blocs.forEach((bloc, index) => {

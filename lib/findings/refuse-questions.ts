@@ -43,7 +43,7 @@ export function refuseFaultyPairs(pairs: readonly Pair[], options: ReadonlySet<s
 }
 
 /** Refuses what was asked before, and keeps note of it. */
-export function refuseRepeated(asked: Set<string>, key: string, path: string): void {
-  if (asked.has(key)) throw new CheckRefused(path, REPEATED);
+export function refuseRepeated(asked: Set<string>, key: string, path: string, words = REPEATED): void {
+  if (asked.has(key)) throw new CheckRefused(path, words);
   asked.add(key);
 }

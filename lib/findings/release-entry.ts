@@ -98,6 +98,7 @@ const TRACE_ROLES: Record<BaseRole, TraceBase['role']> = {
   earlier: 'comparison',
   group: 'group',
   against: 'against',
+  whole: 'against',
 };
 
 function traceOf(

@@ -101,7 +101,7 @@ function sidesOf(one: SubgroupQuestion, gap: AskedGap, policy: Policy): Sides {
     sources: [
       source(gap.group, 'group'),
       {
-        role: 'against',
+        role: 'whole',
         name: null,
         base,
         answer: baseAnswer(total, policy),

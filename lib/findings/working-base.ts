@@ -3,7 +3,7 @@ import type { Base, BaseAnswer, DeffSource, Policy } from './check-types';
 import { figure, figures, type WorkingStep } from './working-step';
 
 /** Which base a step is about, where there are two. */
-export type BaseRole = 'only' | 'this' | 'earlier' | 'group' | 'against';
+export type BaseRole = 'only' | 'this' | 'earlier' | 'group' | 'against' | 'whole';
 
 export const ROLE_SUFFIX: Record<BaseRole, string> = {
   only: '',
@@ -11,6 +11,7 @@ export const ROLE_SUFFIX: Record<BaseRole, string> = {
   earlier: ', earlier release',
   group: ', first group',
   against: ', second group',
+  whole: ', whole sample',
 };
 
 const SOURCE_WORDS: Record<Exclude<DeffSource, 'implied'>, [formula: string, given: string]> = {

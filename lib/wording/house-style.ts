@@ -29,10 +29,10 @@ export type HouseStyle = {
   /** Per verdict, the verbs its sentences stand on, strongest first; every draft uses one of its own rung. */
   ladder: Record<Verdict, string[]>;
   messages: Record<Language, LanguagePack>;
-  /** Phrases that no line of this desk uses. */
-  banned: string[];
-  /** What this desk says, and what it is said instead of. */
-  preferred: { say: string; insteadOf: string }[];
+  /** Phrases that no line of this desk uses, per language. */
+  banned: Record<Language, string[]>;
+  /** What this desk says, and what it is said instead of, per language. */
+  preferred: Record<Language, { say: string; insteadOf: string }[]>;
   /** The house reading "more than twice the margin" beside the verdict, which it never exceeds. */
   twiceTheMargin: boolean;
   /** Headlines that rest on one poll. */
@@ -81,8 +81,8 @@ export const DEFAULT_HOUSE_STYLE: HouseStyle = {
     ],
   },
   messages: { en: EN, es: ES, fr: FR, de: DE },
-  banned: [],
-  preferred: [],
+  banned: { en: [], es: [], fr: [], de: [] },
+  preferred: { en: [], es: [], fr: [], de: [] },
   twiceTheMargin: false,
   onePollHeadlines: 'allow',
   asPrintedNight: false,

@@ -3,7 +3,9 @@ import type { CheckAnswer, Policy } from '@/lib/findings/check-types';
 import type { Comparability } from '@/lib/findings/comparability';
 import { checkedReleaseOf } from './check/checked-release';
 import { checkWording } from './check/check-wording';
-import type { CheckedRelease, WordingGrade, WordingLanguage, WordingMark } from './check/types';
+import { onePollMarks } from './check/one-poll';
+import type { CheckedRelease, TextPart, WordingGrade, WordingLanguage, WordingMark } from './check/types';
+import type { LineKind } from '@/lib/domain/sheet';
 import type { HouseStyle } from './house-style';
 
 /** What the words of one sheet are checked against; plain data, the same in the server and the browser. */
@@ -16,9 +18,11 @@ export type LineBasis = {
   policy: Policy;
   houseStyle: Omit<HouseStyle, 'messages'>;
   language: WordingLanguage;
+  /** How many polls the claim rests on. */
+  polls: number;
 };
 
-export type CheckedLine = { text: string; draft: string };
+export type CheckedLine = { kind: LineKind; text: string; draft: string };
 
 const KEPT = 200;
 
@@ -27,7 +31,7 @@ const KEPT = 200;
  *
  * Make it once per sheet and keep it: the release is read at the first line that needs it, and a text that was
  * checked before is answered from memory. Words that are still those of the draft are the house style's own, which
- * was checked when it was put in force; they carry no mark.
+ * was checked when it was put in force; they carry no mark but the one of a headline that rests on one poll.
  *
  * @param basis what the sheet rests on
  * @returns for the text of a line and its draft, the marks in the order of the text
@@ -36,25 +40,24 @@ const KEPT = 200;
 export function lineChecker(basis: LineBasis): (line: CheckedLine) => readonly WordingMark[] {
   const known = new Map<string, readonly WordingMark[]>();
   let checked: CheckedRelease | null = null;
-  return ({ text, draft }) => {
-    if (text === draft || text.trim() === '') return NONE;
-    const before = known.get(text);
+  const { language, houseStyle, policy, polls } = basis;
+  return ({ kind, text, draft }) => {
+    if (text.trim() === '') return NONE;
+    const part = PARTS[kind] ?? 'line';
+    const common = { text, language, houseStyle, policy, part, polls };
+    if (text === draft) return onePollMarks({ ...common, releases: [] });
+    const key = `${part} ${text}`;
+    const before = known.get(key);
     if (before) return before;
     checked ??= releaseOf(basis);
-    const { language, houseStyle, policy } = basis;
-    const { marks } = checkWording({
-      text,
-      language,
-      releases: [checked],
-      houseStyle,
-      policy,
-      part: 'line',
-    });
+    const { marks } = checkWording({ ...common, releases: [checked] });
     if (known.size >= KEPT) known.clear();
-    known.set(text, marks);
+    known.set(key, marks);
     return marks;
   };
 }
+
+const PARTS: Partial<Record<LineKind, TextPart>> = { headline: 'headline', 'spoken-line': 'spoken' };
 
 const NONE: readonly WordingMark[] = [];
 

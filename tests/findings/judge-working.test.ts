@@ -1,52 +1,10 @@
 import { describe, expect, test } from 'vitest';
-import type { ReleaseDocument } from '@/lib/findings/judge-types';
-import { findingOf, judge, sample, testedOf } from './release-documents';
+import { findingOf, judge, testedOf } from './release-documents';
 import { recomputed } from './recompute';
+import { JUDGED_DOCUMENTS } from './working-cases';
 
-const weighted = { design: 'weighted' as const };
-const parties = { A: 31, B: 27, C: 14, D: 9, Undecided: 19 };
-const groups = [
-  { name: 'Coast', by: 'region', base: sample(480, { A: 36 }, weighted) },
-  { name: 'Hills', by: 'region', base: sample(520, { A: 26 }, weighted) },
-];
-const asked: ReleaseDocument = {
-  release: { ...sample(1000, parties, weighted), rebased: { n: 870 } },
-  comparison: {
-    base: sample(1200, { ...parties, A: 38, Undecided: 12 }, weighted),
-    overlap: { window: 3, shared: 2 },
-  },
-  blocs: [
-    { name: 'Left', options: ['A', 'C'], printed: { pct: 44.6, decimals: 1 } },
-    { name: 'Right', options: ['B', 'D'] },
-  ],
-  pairs: [
-    ['A', 'B'],
-    ['Left', 'Right'],
-  ],
-  netScores: [{ approve: 'A', disapprove: 'D' }],
-  thresholds: [{ option: 'Right', pct: 33 }],
-  subgroups: [
-    {
-      question: 'Toll',
-      total: { name: 'Everyone', base: sample(1000, { A: 31 }, weighted) },
-      groups,
-      gaps: [
-        { option: 'A', group: 'Coast', against: 'Hills' },
-        { option: 'A', group: 'Coast', against: { restOfWeightPct: 49 } },
-      ],
-    },
-  ],
-};
-const interviews = { ...asked, release: sample(1200, parties, weighted) };
-const byInterviews: ReleaseDocument = {
-  ...interviews,
-  comparison: {
-    base: sample(1200, parties),
-    overlap: { window: 3, shared: 2, interviews: [300, 400, 500, 300] },
-  },
-};
-const twice: ReleaseDocument = { ...asked, comparison: { base: sample(1200, parties), samePeople: true } };
-const steps = [asked, byInterviews, twice].flatMap((document) =>
+const asked = JUDGED_DOCUMENTS['every-kind'];
+const steps = Object.values(JUDGED_DOCUMENTS).flatMap((document) =>
   judge(document).findings.flatMap((finding) => finding.working.map((step) => ({ key: finding.key, step }))),
 );
 

@@ -67,8 +67,6 @@ const SETTINGS: Record<string, string> = {
   'style.percent': 'Percent',
   'style.numbers': 'Whole points in text',
   'style.margins': 'Margins are rounded to',
-  'style.banned': 'Banned phrases',
-  'style.preferred': 'Preferred phrases',
   'style.twiceTheMargin': 'Reading “twice the margin” beside ours',
   'style.onePollHeadlines': 'Headlines resting on one poll',
   'style.asPrintedNight': 'As-printed sheets at night, by one editor',
@@ -98,6 +96,8 @@ export function decisionName(path: string): string {
   if (setting) return setting;
   const [root = '', group = '', ...rest] = path.split('.');
   if (group === 'locales') return `Country of ${LANGUAGE_NAMES[rest[0] ?? ''] ?? rest[0]}`;
+  if (group === 'banned') return `Banned phrases, ${LANGUAGE_NAMES[rest[0] ?? ''] ?? rest[0]}`;
+  if (group === 'preferred') return `Preferred phrases, ${LANGUAGE_NAMES[rest[0] ?? ''] ?? rest[0]}`;
   if (group === 'ladder') return `Verbs of ${VERDICT_NAMES[rest[0] as Verdict] ?? rest[0]}`;
   if (group === 'comparisonBasis') return `Computed as if random: ${sampleName(rest[0])}`;
   if (group === 'comparisonRules') return `Rule named for: ${sampleName(rest[0])}`;

@@ -45,12 +45,23 @@ export function SettingsForm({ propsOf, languages }: { propsOf: PropsOf; languag
             hint="One a line, strongest first. Headlines and titles of this verdict use one of them."
           />
         ))}
-        <Lines {...propsOf('style.banned')} hint="One a line. No sentence of this desk uses them." />
-        <Preferred {...propsOf('style.preferred')} />
+        {languages.map((language) => (
+          <div key={language}>
+            <Lines
+              {...propsOf(`style.banned.${language}`)}
+              hint="One a line. No sentence of this desk uses them, and the wording check marks them."
+            />
+            <Preferred {...propsOf(`style.preferred.${language}`)} />
+          </div>
+        ))}
       </section>
       <section className="mt-8" aria-labelledby="style-rules">
         <SectionHeading id="style-rules">Readings and rules</SectionHeading>
-        <ChoiceSetting {...propsOf('style.onePollHeadlines')} offered={['allow', 'warn', 'refuse']} />
+        <ChoiceSetting
+          {...propsOf('style.onePollHeadlines')}
+          offered={['allow', 'warn', 'refuse']}
+          hint="Of claims that compare no two polls. Warn marks the headline while it is written; refuse drafts the sheet without one and files none."
+        />
         <YesNoSetting
           {...propsOf('style.twiceTheMargin')}
           hint="Whether a lead is more than twice the margin, shown beside the verdict. It never exceeds it."

@@ -1,6 +1,8 @@
 import 'server-only';
 import { type Language, LANGUAGES } from '@/lib/domain/vocabulary';
 import { DEFAULT_HOUSE_STYLE, type HouseStyle } from '@/lib/wording/house-style';
+import { fold } from '@/lib/wording/check/fold';
+import { placesOf } from '@/lib/wording/check/house-text';
 import { claimsAbove } from '@/lib/wording/never-says-more';
 import { draftFaults } from './draft-sentences';
 import { leafAt } from './leaves';
@@ -49,7 +51,7 @@ export function faultsAsWritten(path: string, message: string, style: HouseStyle
   return [
     ...claimFaults(message, shape, place, shapeOf(shipped, locale), style),
     ...missingSlots(shape, shapeOf(shipped, locale)),
-    ...phraseFaults(message, shape, style),
+    ...phraseFaults(message, shape, style, languageOf(place)),
   ].filter((one, at, all) => all.findIndex((other) => other.message === one.message) === at);
 }
 
@@ -59,7 +61,10 @@ export function faultsOfShipped(path: string, message: string, style: HouseStyle
   const locale = localeOf(place, style);
   if (!place || !locale) return [];
   const shape = shapeOf(message, locale);
-  return [...rungFaults(shape, place, style, shape), ...phraseFaults(message, shape, style)];
+  return [
+    ...rungFaults(shape, place, style, shape),
+    ...phraseFaults(message, shape, style, languageOf(place)),
+  ];
 }
 
 function languageOf(place: SentencePlace | null): Language {
@@ -153,16 +158,26 @@ function isBare({ variants }: Pick<Shape, 'variants'>, verbs: readonly string[])
   return variants.some(({ text }) => !verbs.some((verb) => text.toLowerCase().includes(verb.toLowerCase())));
 }
 
-function phraseFaults(message: string, { variants }: Shape, { banned }: HouseStyle): SentenceFault[] {
-  const text = variants
-    .map((variant) => bare(variant.text))
-    .join('\n')
-    .toLowerCase();
-  return banned
-    .filter((phrase) => new RegExp(`(?<!\\p{L})${escaped(phrase.toLowerCase())}(?!\\p{L})`, 'u').test(text))
-    .map((phrase) => fault(`“${phrase}” is banned by this house style.`, phrase, placeIn(message, phrase)));
+/** Phrases that the wording check would mark in every line drafted with this sentence. */
+function phraseFaults(
+  message: string,
+  { variants }: Shape,
+  { banned, preferred }: HouseStyle,
+  language: Language,
+): SentenceFault[] {
+  if (banned[language].length === 0 && preferred[language].length === 0) return [];
+  const { text } = fold(variants.map((variant) => bare(variant.text)).join('\n'));
+  const isThere = (phrase: string) => placesOf(phrase, text).length > 0;
+  return [
+    ...banned[language]
+      .filter(isThere)
+      .map((phrase) => fault(`“${phrase}” is banned by this house style.`, phrase, placeIn(message, phrase))),
+    ...preferred[language]
+      .filter(({ insteadOf }) => isThere(insteadOf))
+      .map(({ say, insteadOf }) =>
+        fault(`This house style says “${say}”, not “${insteadOf}”.`, insteadOf, placeIn(message, insteadOf)),
+      ),
+  ];
 }
 
 const bare = (text: string) => text.replace(/\{[^}]*\}/g, 'Name');
-
-const escaped = (text: string) => text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');

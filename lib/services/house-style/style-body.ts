@@ -16,7 +16,15 @@ export const DEFAULT_DESK_POLICY: DeskPolicy = deskPolicySchema.parse({
 
 /** A stored house style; what later versions of the product added is filled in as they ship it. */
 export function readStyle(stored: string): HouseStyle {
-  return completed(DEFAULT_HOUSE_STYLE, JSON.parse(stored));
+  const body = JSON.parse(stored) as Record<string, unknown>;
+  const [banned, preferred] = [body.banned, body.preferred].map(perLanguage);
+  return completed(DEFAULT_HOUSE_STYLE, { ...body, banned, preferred });
+}
+
+/** Older styles have one list of phrases, held against every language. */
+function perLanguage(phrases: unknown): unknown {
+  if (!Array.isArray(phrases)) return phrases;
+  return Object.fromEntries(LANGUAGES.map((language) => [language, phrases]));
 }
 
 /** A stored policy; older ones have one comparison basis for every kind of sample. */
@@ -34,6 +42,9 @@ function basisFor(isOn: boolean): DeskPolicy['comparisonBasis'] {
 const LOCALES = /^[a-z]{2}(?:-[A-Z]{2})?$/;
 const phrase = z.string().trim().min(1, 'Say which phrase.').max(80, 'At most 80 characters.');
 const phrases = z.array(phrase).max(200, 'At most 200 phrases.');
+const preferred = z
+  .array(z.strictObject({ say: phrase, insteadOf: phrase }))
+  .max(200, 'At most 200 phrases.');
 const rung = z.array(phrase).min(1, 'Every verdict needs a verb.').max(40, 'At most 40 verbs.');
 const sentence = z
   .string()
@@ -73,10 +84,12 @@ export const STYLE_FIELDS: Record<string, z.ZodType> = {
       rung,
     ]),
   ),
-  'style.banned': phrases,
-  'style.preferred': z
-    .array(z.strictObject({ say: phrase, insteadOf: phrase }))
-    .max(200, 'At most 200 phrases.'),
+  ...Object.fromEntries(
+    LANGUAGES.flatMap((language) => [
+      [`style.banned.${language}`, phrases],
+      [`style.preferred.${language}`, preferred],
+    ]),
+  ),
   'style.twiceTheMargin': z.boolean(),
   'style.onePollHeadlines': z.enum(['allow', 'warn', 'refuse']),
   'style.asPrintedNight': z.boolean(),

@@ -75,7 +75,7 @@ function ensureNumbered(tx: Tx, now: number): void {
 export function draftNewerWording(tx: Tx, now: number, shipped: HouseStyle): string | null {
   const inForce = findStyleInState(tx, 'in-force')!;
   const known = findLatestShipped(tx);
-  const before = known?.shipped ? (JSON.parse(known.shipped) as HouseStyle) : null;
+  const before = known?.shipped ? readStyle(known.shipped) : null;
   if (!before || before.templateVersion === shipped.templateVersion) return null;
   const merged = carriedOver(before, readStyle(inForce.houseStyle), shipped);
   const style = { ...merged.body, templateVersion: shipped.templateVersion };

@@ -15,6 +15,7 @@ import { canonicalJson, hashOf } from '@/lib/security/canonical';
 import { sha256 } from '@/lib/security/ids';
 import { comparisonNote } from '@/lib/wording/comparison-words';
 import { requestable } from '@/lib/wording/carries';
+import { isOfTwoReleases } from '@/lib/wording/draft-input';
 import { draftLine, draftSheet } from '@/lib/wording/draft-sheet';
 import type { LineBasis } from '@/lib/wording/line-check';
 import { type Computed, computeFindings } from '../release/compute-findings';
@@ -127,7 +128,7 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
     requestable: offered,
     draftRequested: (kind) => draftLine(input, kind),
     basisHash: hashOf(basis),
-    lineBasis: lineBasisOf(computed, language),
+    lineBasis: lineBasisOf(computed, claim, language),
     withTexts: (texts, override) => {
       const body: EvidenceBody = {
         ...basis,
@@ -140,7 +141,7 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
   };
 }
 
-function lineBasisOf(computed: Computed, language: Language): LineBasis {
+function lineBasisOf(computed: Computed, claim: Claim, language: Language): LineBasis {
   const { facts, previous, answer, comparison, settings } = computed;
   const { messages: _, ...houseStyle } = settings.houseStyle.body;
   const { differences, unknowns, override } = comparison;
@@ -152,6 +153,7 @@ function lineBasisOf(computed: Computed, language: Language): LineBasis {
     policy: settings.policy.body,
     houseStyle,
     language,
+    polls: isOfTwoReleases(claim.kind) ? 2 : 1,
   };
 }
 

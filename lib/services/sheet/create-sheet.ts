@@ -4,11 +4,13 @@ import { findRelease, findWholeVersion } from '@/db/queries/release';
 import { findSheetBySubmission, insertLine, insertLineVersion, insertSheet } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets } from '@/lib/domain/roles';
 import type { Claim } from '@/lib/domain/sheet';
+import { LANGUAGES } from '@/lib/domain/vocabulary';
 import { AppError } from '@/lib/errors';
 import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
 import { canonicalJson } from '@/lib/security/canonical';
 import { newId } from '@/lib/security/ids';
+import { isOfTwoReleases } from '@/lib/wording/draft-input';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { computeFindings } from '../release/compute-findings';
@@ -19,12 +21,16 @@ const schema = z.strictObject({
   submissionKey,
   releaseId: z.string().min(1).max(64),
   claimKey: z.string().min(1, 'Choose what the sheet claims.').max(600),
+  language: z.enum(LANGUAGES, 'Choose a language.').default('en'),
 });
 
-/** Drafts a sheet for one finding of a release, from the house style in force. */
+/**
+ * Drafts a sheet for one finding of a release, from the house style in force. Every language of a claim is a sheet of
+ * its own: written, filed and cleared by itself, never translated.
+ */
 export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: string } {
   authorize(canDraftSheets(actor), 'Only reporters and editors draft sheets.');
-  const { submissionKey: key, releaseId, claimKey } = parse(schema, input);
+  const { submissionKey: key, releaseId, claimKey, language } = parse(schema, input);
   return transact(ctx, (tx) => {
     const before = findSheetBySubmission(tx, key);
     if (before && before.authorId !== actor.personId) throw new AppError('conflict', 'Reload and try again.');
@@ -41,7 +47,7 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
       publicId: newId(),
       claim: canonicalJson(claimOf(found.finding)),
       claimKey,
-      language: 'en',
+      language,
       releaseVersionId: whole.version.id,
     };
     const { draft, computed } = assemble(tx, subject, ctx.now);
@@ -53,8 +59,12 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
       createdAt: ctx.now,
       submissionKey: key,
     });
+    const style = computed.settings.houseStyle.body;
+    const isAlone = style.onePollHeadlines === 'refuse' && !isOfTwoReleases(found.finding.kind);
     for (const { kind, text } of draft) {
-      const line = insertLine(tx, { publicId: newId(), sheetId: sheet.id, kind });
+      // House style files no headline on one poll: the words stay there to be read, knocked out.
+      const knockedOut = isAlone && kind === 'headline';
+      const line = insertLine(tx, { publicId: newId(), sheetId: sheet.id, kind, knockedOut });
       insertLineVersion(tx, {
         publicId: newId(),
         lineId: line.id,
@@ -62,13 +72,13 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
         draftText: text,
         text,
         state: 'draft',
-        templateVersion: computed.settings.houseStyle.body.templateVersion,
+        templateVersion: style.templateVersion,
         changedBy: actor.personId,
         changedAt: ctx.now,
       });
     }
     const entry = { action: 'drafted sheet', entity: 'sheet', entityId: sheet.publicId };
-    const after = { release: releaseId, claim: subject.claim, draft };
+    const after = { release: releaseId, claim: subject.claim, language, draft };
     appendRecord(tx, { personId: actor.personId, ...entry, after, releaseId: release.id }, ctx.now);
     return { id: sheet.publicId };
   });

@@ -191,7 +191,7 @@ function linesOf(ctx: Ctx, opened: Opened, { body, lineBasis }: Shown): LineView
     cleared: agreed.cleared.get(line.id) ?? null,
     knockedOut: line.knockedOut,
     changedBy,
-    marks: check({ text: version.text, draft: draftOf(line.kind, version.draftText) }),
+    marks: check({ kind: line.kind, text: version.text, draft: draftOf(line.kind, version.draftText) }),
   }));
 }
 

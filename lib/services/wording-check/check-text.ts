@@ -7,7 +7,12 @@ import { CheckRefused } from '@/lib/findings/check-refused';
 import type { CheckRefusal } from '@/lib/findings/check-types';
 import { refusalOf } from '@/lib/findings/refusal-of';
 import { checkWording, MAX_TEXT } from '@/lib/wording/check/check-wording';
-import { type CheckedRelease, type WordingCheck, WORDING_LANGUAGES } from '@/lib/wording/check/types';
+import {
+  type CheckedRelease,
+  TEXT_PARTS,
+  type WordingCheck,
+  WORDING_LANGUAGES,
+} from '@/lib/wording/check/types';
 import { tokenBuckets } from '../check/token-bucket';
 import { authorize, type Ctx } from '../context';
 import { computeFindings } from '../release/compute-findings';
@@ -23,6 +28,7 @@ const schema = z.strictObject(
   {
     text: z.string({ error: 'Give the text.' }).max(MAX_TEXT, 'At most 20,000 characters.'),
     language: z.enum(WORDING_LANGUAGES, 'The language is en, es, fr or de.').default('en'),
+    part: z.enum(TEXT_PARTS, 'The part is whole, line, headline or spoken.').default('whole'),
     releases: z
       .array(
         z.union([z.string().min(1).max(64), z.record(z.string(), z.unknown())], 'Give an id or a release.'),
@@ -30,7 +36,7 @@ const schema = z.strictObject(
       .max(MAX_RELEASES, `At most ${MAX_RELEASES} releases at once.`)
       .default([]),
   },
-  'Send one object with text, language and releases.',
+  'Send one object with text, language, part and releases.',
 );
 
 export type UsedRelease = {
@@ -93,6 +99,7 @@ function answerTo(actor: Actor, asked: z.output<typeof schema>, ctx: Ctx): TextC
   const { marks, cannotJudge } = checkWording({
     text: asked.text,
     language: asked.language,
+    part: asked.part,
     releases: checked.map((one) => one.checked),
     houseStyle: settings.houseStyle.body,
     policy: settings.policy.body,

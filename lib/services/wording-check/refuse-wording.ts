@@ -29,7 +29,8 @@ export type OverrideInput = z.output<typeof overrideInput>;
 type Held = { kind: LineKind; mark: WordingMark };
 
 /**
- * Refuses words that the figures contradict, and words that they do not support unless an editor gives a reason.
+ * Refuses words that the figures contradict, headlines that the desk does not file, and words that the figures do not
+ * support unless an editor gives a reason.
  * The marks are computed here, whatever the screen showed.
  *
  * @param actor with the roles of this moment
@@ -49,8 +50,13 @@ export function refuseWording(
   const check = lineChecker(basis);
   const held = texts.flatMap(({ kind, text }): Held[] => {
     const drafted = draft.find((line) => line.kind === kind)?.text ?? '';
-    return check({ text, draft: drafted }).map((mark) => ({ kind, mark }));
+    return check({ kind, text, draft: drafted }).map((mark) => ({ kind, mark }));
   });
+  const alone = held.find(({ mark }) => mark.rule === 'one-poll');
+  if (alone && basis.houseStyle.onePollHeadlines === 'refuse')
+    throw new AppError('invalid', 'House style files no headline that rests on one poll.', {
+      fields: { [alone.kind]: `${alone.mark.message} Knock it out to file the rest.` },
+    });
   const wrong = held.filter(({ mark }) => mark.grade === 'wrong');
   const unsupported = held.filter(({ mark }) => mark.grade === 'not-supported');
   if (wrong.length > 0)

@@ -1,5 +1,6 @@
-import { lexiconOf } from './lexicon/compiled';
 import { fold } from './fold';
+import { houseMarks } from './house-marks';
+import { lexiconOf } from './lexicon/compiled';
 import { settleMarks } from './marks';
 import { readText, type Reading } from './reading';
 import { markByEye } from './rules/by-eye';
@@ -65,12 +66,20 @@ export function checkWording(input: WordingCheckInput): WordingCheck {
   if (input.text.length > MAX_TEXT) {
     throw new RangeError(`checkWording requires a text of at most ${MAX_TEXT} characters`);
   }
+  const house = houseMarks(input);
   const lexicon = lexiconOf(input.language);
-  if (!lexicon)
-    return { marks: [], cannotJudge: ['There are no rules for this language yet: nothing was judged.'] };
+  if (!lexicon) return { marks: settleMarks(house), cannotJudge: [NO_RULES] };
   const reading = readText(input, lexicon);
   const marks = RULES.flatMap((rule) => rule(reading)).filter((mark) => !isQuestion(input, mark));
-  return { marks: settleMarks(marks), cannotJudge: unjudged(input) };
+  const taste = house.filter((mark) => !marks.some((graver) => isFactOf(graver, mark)));
+  return { marks: settleMarks([...marks, ...taste]), cannotJudge: unjudged(input) };
+}
+
+const NO_RULES = 'There are no rules for this language yet: only house style was looked at.';
+
+/** Percent that should be points is a fault; how it is printed is then beside the matter. */
+function isFactOf({ rule, start, end }: WordingMark, taste: WordingMark): boolean {
+  return rule === 'percent-points' && taste.rule === 'house-print' && start < taste.end && taste.start < end;
 }
 
 /** Words of the question that a release asked, in quotation marks, are quoted for what they are. */

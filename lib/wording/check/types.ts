@@ -3,7 +3,7 @@ import type { CheckAnswer, Policy } from '@/lib/findings/check-types';
 import type { Comparability } from '@/lib/findings/comparability';
 import type { HouseStyle } from '../house-style';
 
-/** What a mark is about; one file of rules each. */
+/** What a mark is about that figures are held against; one file of rules each. */
 export const WORDING_RULES = [
   'lead',
   'level',
@@ -27,7 +27,9 @@ export const WORDING_RULES = [
   'by-eye',
   'significance',
 ] as const;
-export type WordingRule = (typeof WORDING_RULES)[number];
+/** What the desk decided about its own words; no figures are needed to judge by them. */
+export const HOUSE_RULES = ['house-phrase', 'house-print', 'one-poll'] as const;
+export type WordingRule = (typeof WORDING_RULES)[number] | (typeof HOUSE_RULES)[number];
 
 /**
  * `wrong` contradicts the figures or the trade's facts, `not-supported` is more than the numbers carry, `house-style`
@@ -38,6 +40,10 @@ export type WordingGrade = (typeof WORDING_GRADES)[number];
 
 export const WORDING_LANGUAGES = ['en', 'es', 'fr', 'de'] as const;
 export type WordingLanguage = (typeof WORDING_LANGUAGES)[number];
+
+/** Lines of a sheet need not carry what the sheet's caveat carries; a headline may rest on one poll, speech prints nothing. */
+export const TEXT_PARTS = ['whole', 'line', 'headline', 'spoken'] as const;
+export type TextPart = (typeof TEXT_PARTS)[number];
 
 export type WordingMark = {
   /** UTF-16 offsets in the text. */
@@ -86,6 +92,8 @@ export type WordingCheckInput = {
   /** Without its sentences, so that a browser can be handed the rest. */
   houseStyle: Omit<HouseStyle, 'messages'>;
   policy: Policy;
-  /** A line of a sheet need not carry what the sheet's caveat carries. Default: the text stands alone. */
-  part?: 'whole' | 'line';
+  /** What the text is. Default: it stands alone. */
+  part?: TextPart;
+  /** How many polls a headline rests on. Default: as many as releases are given. */
+  polls?: number;
 };

@@ -94,7 +94,7 @@ describe('what was typed and refused', () => {
   it('cannot be got round by a ladder or a ban that comes later', () => {
     const acts = styleDesk(desk.db);
     const id = acts.start(first);
-    acts.save(first, id, { 'style.banned': ['higher figure'] });
+    acts.save(first, id, { 'style.banned.en': ['higher figure'] });
     expect(refusal(() => acts.propose(first, id))).toEqual(['invalid', 'Some sentences need another look.']);
   });
 });

@@ -100,7 +100,10 @@ describe('a sentence of house style', () => {
   });
 
   it('with a phrase that the desk bans is refused, as a whole word', () => {
-    const style = { ...DEFAULT_HOUSE_STYLE, banned: ['settle', 'head'] };
+    const style = {
+      ...DEFAULT_HOUSE_STYLE,
+      banned: { ...DEFAULT_HOUSE_STYLE.banned, en: ['settle', 'head'] },
+    };
     const text = DEFAULT_HOUSE_STYLE.messages.en.headline.lead.fragile;
     expect(faultsAsWritten(FRAGILE, text, style).map(({ phrase }) => phrase)).toEqual(['settle']);
   });

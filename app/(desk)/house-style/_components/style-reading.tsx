@@ -11,6 +11,7 @@ import { DefinitionList } from '@/components/ui/definition-list';
 import { Details } from '@/components/ui/details';
 import { SectionHeading } from '@/components/ui/section-heading';
 import { NOT_RANDOM } from '@/lib/domain/house-style';
+import { LANGUAGES } from '@/lib/domain/vocabulary';
 import type { SentenceView } from '@/lib/services/house-style/describe-sentences';
 import type { StyleView } from '@/lib/services/house-style/get-style';
 import { leafAt } from '@/lib/services/house-style/leaves';
@@ -18,7 +19,7 @@ import { leafAt } from '@/lib/services/house-style/leaves';
 const PRINTS = ['newsroom', 'percent', 'numbers', 'margins', 'shelfLifeDays'].map((key) => `style.${key}`);
 const WORDS = ['holds', 'fragile', 'does-not-hold', 'cannot-be-tested']
   .map((verdict) => `style.ladder.${verdict}`)
-  .concat('style.banned', 'style.preferred');
+  .concat(LANGUAGES.flatMap((language) => [`style.banned.${language}`, `style.preferred.${language}`]));
 const RULES = ['onePollHeadlines', 'twiceTheMargin', 'asPrintedNight'].map((key) => `style.${key}`);
 const TESTS = [
   'level',

@@ -11,7 +11,7 @@ const LEAST_SENTENCES = 3;
 export function markMissing(reading: Reading): WordingMark[] {
   const { releases, part = 'whole' } = reading.input;
   const givesFigures = reading.quantities.some(({ unit }) => unit === 'percent' || unit === 'points');
-  if (part === 'line' || releases.length === 0 || !givesFigures) return [];
+  if (part !== 'whole' || releases.length === 0 || !givesFigures) return [];
   if (reading.sentences.length < LEAST_SENTENCES) return [];
   const items = missingItems(reading);
   if (items.length === 0) return [];
@@ -29,9 +29,9 @@ function missingItems(reading: Reading): string[] {
   const { releases } = reading.input;
   const names = (kind: 'pollster' | 'sponsor') => reading.mentions.some((one) => one.kind === kind);
   const hasSponsor = releases.some(({ facts }) => facts.sponsor.status === 'given');
-  const { months } = reading.lexicon.words;
+  const { months, datesAreNames } = reading.lexicon.words;
   const hasDate = reading.tokens.some(
-    ({ text }, at) => reading.isCapital(at) && months.flat().includes(text),
+    ({ text }, at) => (!datesAreNames || reading.isCapital(at)) && months.flat().includes(text),
   );
   const hasSize = reading.quantities.some(
     ({ unit, value }) => unit === 'none' && value >= 50 && !(value >= 1900 && value < 2100),
