@@ -31,8 +31,7 @@ export function JobAct({
   return (
     <>
       <Button pending={isPending} pendingLabel={pendingLabel} onClick={press}>
-        {label}
-        <span className="sr-only">: {fullNameOf(job)}</span>
+        {label} <span className="sr-only">{fullNameOf(job)}</span>
       </Button>
       {failure ? (
         <p role="alert" className="mt-1 max-w-60 text-13 text-caution">
