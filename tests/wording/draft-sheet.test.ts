@@ -1,154 +1,20 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { given, NOT_DISCLOSED, type Disclosed } from '@/lib/domain/disclosed';
+import { given } from '@/lib/domain/disclosed';
 import { STANDING_LINE_KINDS } from '@/lib/domain/sheet';
-import {
-  DESIGNS,
-  MODES,
-  POPULATIONS,
-  RACE_KINDS,
-  SAMPLE_SOURCES,
-  type RaceKind,
-} from '@/lib/domain/vocabulary';
-import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { Claim } from '@/lib/domain/sheet';
-import type { TestableFinding } from '@/lib/findings/check-types';
-import { check } from '@/lib/findings/check';
-import { checkDocumentOf } from '@/lib/findings/check-document-of';
-import { DEFAULT_POLICY } from '@/lib/findings/policy';
-import { parseCheckDocument } from '@/lib/findings/parse-check';
 import type { DraftInput } from '@/lib/wording/draft-input';
 import { draftSheet } from '@/lib/wording/draft-sheet';
 import { DEFAULT_HOUSE_STYLE, type HouseStyle } from '@/lib/wording/house-style';
 import { claimsAbove } from '@/lib/wording/never-says-more';
+import { anyRaceOf, draftInputsOf, PLAIN_NAMES } from '@/tests/support/any-race';
 import { earlierOf, inputOf, releaseOf } from './examples';
-
-const NAMES = ['Alder', 'Brook', 'Harbour Union', 'Don’t know'];
-
-const disclosed = <T>(values: readonly T[]): fc.Arbitrary<Disclosed<T>> =>
-  fc.oneof(fc.constantFrom(...values).map(given), fc.constant(NOT_DISCLOSED));
-
-function anyRelease(
-  start: string,
-  end: string,
-  kind: RaceKind,
-  decimals: number,
-): fc.Arbitrary<ReleaseFacts> {
-  const scale = 10 ** decimals;
-  return fc
-    .record({
-      cuts: fc.array(fc.nat(97 * scale), { minLength: 3, maxLength: 3 }),
-      hidden: fc.option(fc.nat(3), { freq: 12 }),
-      n: disclosed([80, 150, 400, 1012, 3000, 12000]),
-      sampleSource: fc.constantFrom(...SAMPLE_SOURCES),
-      mode: disclosed(MODES),
-      population: disclosed(POPULATIONS),
-      design: fc.constantFrom(...DESIGNS),
-      deff: fc.option(
-        fc.constantFrom<NonNullable<ReleaseFacts['deff']>>(
-          { source: 'design', value: 1.3, df: 30 },
-          { source: 'design', value: 2.2, df: 6 },
-          { source: 'kish', value: 1.6, df: null },
-          { source: 'stated', value: 1.1, df: null },
-        ),
-      ),
-      modelledInterval: fc.option(fc.constant({ pp: 4, unit: 0.5, level: 0.9 })),
-    })
-    .map(({ cuts, hidden, ...facts }) => {
-      const [x = 0, y = 0, z = 0] = [...cuts].sort((a, b) => a - b);
-      const units = [x, y - x, z - y, 97 * scale - z];
-      return releaseOf(
-        {},
-        {
-          ...facts,
-          decimals,
-          fieldStartOn: start,
-          fieldEndOn: end,
-          race: {
-            id: 'race',
-            name: 'Averil Coast',
-            kind,
-            thresholds: [
-              { option: 'Alder', pct: 50, base: 'answers' },
-              { option: 'Harbour Union', pct: 4.5, base: 'answers' },
-            ],
-          },
-          statedMargin: NOT_DISCLOSED,
-          shares: NAMES.map((option, index) => ({
-            option,
-            units: index === hidden ? null : (units[index] ?? 0),
-            isAnswer: option !== 'Don’t know',
-          })),
-        },
-      );
-    });
-}
-
-const anyPair = fc
-  .record({
-    kind: fc.constantFrom(...RACE_KINDS),
-    decimals: fc.nat(1),
-    comparisonBasis: fc.boolean(),
-    style: fc.record({
-      percent: fc.constantFrom('sign' as const, 'word' as const),
-      numbers: fc.constantFrom('figures' as const, 'words-to-nine' as const),
-      margins: fc.constantFrom('whole' as const, 'half' as const, 'tenth' as const),
-    }),
-  })
-  .chain(({ kind, decimals, ...rest }) =>
-    fc.record({
-      release: anyRelease('2026-09-14', '2026-09-17', kind, decimals),
-      previous: anyRelease('2025-12-30', '2026-01-02', kind, decimals),
-      rest: fc.constant(rest),
-    }),
-  );
-
-function claimOf(finding: TestableFinding): Claim {
-  if (finding.kind === 'threshold') {
-    return { kind: 'threshold', option: finding.option, pct: finding.thresholdPct };
-  }
-  return finding.kind === 'change'
-    ? { kind: 'change', option: finding.option }
-    : { kind: finding.kind, pair: [finding.pair[0], finding.pair[1]] };
-}
-
-function allInputs(
-  release: ReleaseFacts,
-  previous: ReleaseFacts,
-  comparisonBasis: boolean,
-  style: Partial<HouseStyle>,
-): DraftInput[] {
-  const policy = { ...DEFAULT_POLICY, comparisonBasis };
-  const pairs: [string, string][] = [
-    ['Alder', 'Brook'],
-    ['Brook', 'Harbour Union'],
-  ];
-  const asked = { pairs, changes: ['Alder', 'Don’t know'] };
-  const answer = check(parseCheckDocument(checkDocumentOf(release, previous, policy, asked)));
-  return answer.findings.flatMap((finding) =>
-    finding.kind === 'share'
-      ? []
-      : [
-          {
-            claim: claimOf(finding),
-            finding,
-            answer,
-            release,
-            previous,
-            comparison: { note: [] },
-            houseStyle: { ...DEFAULT_HOUSE_STYLE, ...style },
-            policy,
-            language: 'en' as const,
-          },
-        ],
-  );
-}
 
 describe('draftSheet, of any release', () => {
   it('never says more than the verdict, leaves no hole, and says the same again', { timeout: 60_000 }, () => {
     fc.assert(
-      fc.property(anyPair, ({ release, previous, rest: { comparisonBasis, style } }) => {
-        for (const input of allInputs(release, previous, comparisonBasis, style)) {
+      fc.property(anyRaceOf([PLAIN_NAMES]), (race) => {
+        for (const input of draftInputsOf(race)) {
           const lines = draftSheet(input);
           expect(lines.map(({ kind }) => kind)).toEqual(STANDING_LINE_KINDS);
           for (const { text } of lines) {

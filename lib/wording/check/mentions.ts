@@ -1,7 +1,6 @@
 import type { CompiledLexicon } from './lexicon/compiled';
-import type { Lexicon } from './lexicon/types';
 import { fold } from './fold';
-import { tokenise, type Token } from './tokens';
+import { wordsIn, type Token } from './tokens';
 import type { CheckedRelease } from './types';
 
 export type Named = { kind: 'option' | 'pollster' | 'sponsor' | 'race'; name: string };
@@ -18,13 +17,12 @@ export function mentionsOf(
   lexicon: CompiledLexicon,
 ): Mention[] {
   const entries = knownEntries(releases, lexicon);
-  const afterCommon = new Set(lexicon.words.afterCommonName);
   const fits = (entry: Entry, at: number) => {
     if (entry.words.some((word, index) => tokens[at + index]?.text !== word)) return false;
     if (entry.isAcronym) return isCapital(at);
     if (!entry.isCommon) return true;
     const next = tokens[at + entry.words.length];
-    return isCapital(at) && (!next || next.kind !== 'word' || afterCommon.has(next.text));
+    return isCapital(at) && (!next || next.kind !== 'word' || lexicon.names.afterCommon.has(next.text));
   };
   const mentions: Mention[] = [];
   for (let at = 0; at < tokens.length; at += 1) {
@@ -50,9 +48,16 @@ function knownEntries(releases: readonly CheckedRelease[], lexicon: CompiledLexi
   return entries;
 }
 
-function entriesOf(releases: readonly CheckedRelease[], { words }: CompiledLexicon): Map<string, Entry[]> {
-  const wordsOf = (name: string) => wordsIn(name, words);
-  const common = new Set(words.commonNames.map((name) => wordsOf(name).join(' ')));
+function entriesOf(
+  releases: readonly CheckedRelease[],
+  { words, names: { common, generic } }: CompiledLexicon,
+): Map<string, Entry[]> {
+  const read = new Map<string, string[]>();
+  const wordsOf = (name: string) => {
+    const known = read.get(name) ?? wordsIn(name, words);
+    read.set(name, known);
+    return known;
+  };
   const named = new Map<string, Entry>();
   const add = (entry: Entry) => {
     const key = entry.words.join(' ');
@@ -74,7 +79,6 @@ function entriesOf(releases: readonly CheckedRelease[], { words }: CompiledLexic
       words: wordsOf(name),
     }),
   );
-  const generic = new Set(words.genericNameWords);
   for (const one of all) {
     for (const alias of aliasesOf(one, options, { generic, common, wordsOf })) {
       add({ ...one, words: alias, isCommon: common.has(alias.join(' ')), isAcronym: false });
@@ -133,8 +137,3 @@ function aliasesOf(
   const last = specific.slice(-1);
   return [specific, last].filter((alias) => alias.length < parts.length && isOwn(alias));
 }
-
-const wordsIn = (name: string, { elisions }: Lexicon) =>
-  tokenise(fold(name).text, elisions)
-    .filter(({ kind }) => kind !== 'break')
-    .map(({ text }) => text);

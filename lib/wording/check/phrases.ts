@@ -65,21 +65,40 @@ export function compilePhrases(cues: readonly Cue[], elisions: readonly string[]
 const setOf = (words: readonly string[] | undefined) =>
   words ? new Set(words.map((word) => fold(word).text)) : null;
 
-/** Where phrases stand: the longest at each place, none overlapping, none touching a token that `isTaken`. */
-export function findPhrases(
-  phrases: Phrases,
+/** The phrases of many groups by their first word, so that one walk over a text finds all of them. */
+export type PhraseIndex<G> = ReadonlyMap<string, readonly { group: G; list: readonly Phrase[] }[]>;
+
+export function indexOf<G extends string>(groups: Readonly<Record<G, Phrases>>): PhraseIndex<G> {
+  const index = new Map<string, { group: G; list: readonly Phrase[] }[]>();
+  for (const [group, phrases] of Object.entries(groups) as [G, Phrases][]) {
+    for (const [word, list] of phrases) {
+      const entries = index.get(word);
+      if (entries) entries.push({ group, list });
+      else index.set(word, [{ group, list }]);
+    }
+  }
+  return index;
+}
+
+/** Where the phrases of every group stand; within a group the longest at each place, none overlapping. */
+export function findAll<G>(
+  index: PhraseIndex<G>,
   tokens: readonly Token[],
   isTaken: (at: number) => boolean,
-  isName: (at: number) => boolean = () => false,
-): Hit[] {
-  const hits: Hit[] = [];
+  isName: (at: number) => boolean,
+): Map<G, Hit[]> {
+  const found = new Map<G, Hit[]>();
   for (let at = 0; at < tokens.length; at += 1) {
-    const found = phraseAt(phrases, tokens, at, isTaken, isName);
-    if (!found) continue;
-    hits.push(found);
-    at = found.to - 1;
+    for (const { group, list } of index.get(tokens[at]?.text ?? '') ?? []) {
+      const hits = found.get(group);
+      if (hits && at < (hits.at(-1)?.to ?? 0)) continue;
+      const hit = firstOf(list, tokens, at, isTaken, isName);
+      if (!hit) continue;
+      if (hits) hits.push(hit);
+      else found.set(group, [hit]);
+    }
   }
-  return hits;
+  return found;
 }
 
 /** The longest phrase that begins at a token. */
@@ -90,7 +109,17 @@ export function phraseAt(
   isTaken: (at: number) => boolean = () => false,
   isName: (at: number) => boolean = () => false,
 ): Hit | null {
-  for (const { words, cue } of phrases.get(tokens[at]?.text ?? '') ?? []) {
+  return firstOf(phrases.get(tokens[at]?.text ?? '') ?? [], tokens, at, isTaken, isName);
+}
+
+function firstOf(
+  list: readonly Phrase[],
+  tokens: readonly Token[],
+  at: number,
+  isTaken: (at: number) => boolean,
+  isName: (at: number) => boolean,
+): Hit | null {
+  for (const { words, cue } of list) {
     if (!words.every((word, index) => tokens[at + index]?.text === word && !isTaken(at + index))) continue;
     const to = at + words.length;
     if (!fits(cue, tokens[at - 1]?.text ?? '', tokens[to]?.text ?? '')) continue;

@@ -3,7 +3,7 @@ import { fold, type Folded } from './fold';
 import type { CompiledLexicon } from './lexicon/compiled';
 import type { CueGroup } from './lexicon/types';
 import { mentionsOf, type Mention } from './mentions';
-import { findPhrases, type Hit } from './phrases';
+import { findAll, type Hit } from './phrases';
 import { quantitiesOf, type Quantity } from './quantities';
 import { quotationsOf, type Span } from './quotation';
 import { sentencesOf, type Sentence } from './sentences';
@@ -32,6 +32,8 @@ export type Reading = {
   has: (group: CueGroup, range: Hit) => boolean;
 };
 
+const NONE: readonly Hit[] = [];
+
 export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Reading {
   const folded = fold(input.text);
   const tokens = tokenise(folded.text, lexicon.words.elisions);
@@ -45,15 +47,14 @@ export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Re
   const quantities = quantitiesOf(tokens, lexicon, (at) => isNamed(at) || dateAt(at) !== null);
   const sentences = sentencesOf(tokens, folded.text, isCapital, lexicon);
   const sentenceAt = placesOf(sentences, tokens.length);
-  const known = new Map<CueGroup, { hits: readonly Hit[]; at: (token: number) => Hit | null }>();
-  const cueMap = (group: CueGroup) => {
-    let entry = known.get(group);
-    if (!entry) {
-      const hits = findPhrases(lexicon.cues[group], tokens, isNamed, isOption);
-      entry = { hits, at: placesOf(hits, tokens.length) };
-      known.set(group, entry);
+  const found = findAll(lexicon.index, tokens, isNamed, isOption);
+  const cues = (group: CueGroup) => found.get(group) ?? NONE;
+  const cueAt = (group: CueGroup, token: number) => {
+    for (const hit of cues(group)) {
+      if (hit.from > token) return null;
+      if (token < hit.to) return hit;
     }
-    return entry;
+    return null;
   };
   return {
     input,
@@ -69,13 +70,9 @@ export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Re
     dates,
     quotations: quotationsOf(input.text),
     isCapital,
-    cues: (group) => cueMap(group).hits,
-    cueAt: (group, token) => cueMap(group).at(token),
-    has: (group, { from, to }) => {
-      const { at } = cueMap(group);
-      for (let token = from; token < to; token += 1) if (at(token)) return true;
-      return false;
-    },
+    cues,
+    cueAt,
+    has: (group, { from, to }) => from < to && cues(group).some((hit) => hit.from < to && from < hit.to),
   };
 }
 

@@ -1,3 +1,5 @@
+import { fold } from './fold';
+
 /** A piece of a folded text: a word, a number or one sign. Hyphens between words only join them. */
 export type Token = {
   text: string;
@@ -41,6 +43,13 @@ export function tokenise(text: string, elisions: readonly string[] = []): Token[
 
 const isTight = (text: string, at: number) =>
   /[\p{L}\d%]/u.test(text.charAt(at - 1)) && /[\p{L}\d]/u.test(text.charAt(at + 1));
+
+/** The words of a name, folded. */
+export function wordsIn(name: string, { elisions }: { elisions: readonly string[] }): string[] {
+  return tokenise(fold(name).text, elisions)
+    .filter(({ kind }) => kind !== 'break')
+    .map(({ text }) => text);
+}
 
 type Part = Pick<Token, 'text' | 'kind' | 'from' | 'to'>;
 

@@ -1,11 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import { lexiconOf } from '@/lib/wording/check/lexicon/compiled';
 import { WORDING_LANGUAGES, WORDING_RULES } from '@/lib/wording/check/types';
-import { FIRST, MORE } from '../labelled/sentences';
+import { FIRST, FRESH_DE, FRESH_EN, MORE } from '../labelled/sentences';
 import { measure, scoresOf, type Measured, type Score } from './measure';
 
 const UNSUPPORTED = ['wrong', 'not-supported'];
-const all = [...measure(FIRST), ...measure(MORE)];
+const all = [FIRST, MORE, FRESH_EN, FRESH_DE].flatMap(measure);
 const languages = WORDING_LANGUAGES.filter((language) => lexiconOf(language) !== null);
 const of = (language: string) => all.filter(({ sentence }) => sentence.language === language);
 

@@ -4,7 +4,7 @@ import { DEFAULT_POLICY } from '@/lib/findings/policy';
 import type { CheckedRelease, WordingMark, WordingRule } from '@/lib/wording/check/types';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
 import { CONTEXTS, type Context, type ContextName } from '../labelled/contexts';
-import { FIRST, MORE, sentencesOf, type LabelledSentence } from '../labelled/sentences';
+import { sentencesOf, type LabelledSentence } from '../labelled/sentences';
 
 type Expected = LabelledSentence['expect'][number];
 
@@ -30,7 +30,7 @@ function releasesOf(name: ContextName): CheckedRelease[] {
 const contextOf = (name: ContextName): Context => CONTEXTS[name];
 
 /** Every labelled sentence of a list, read by the check; a mark counts where rule and grade agree and words overlap. */
-export function measure(list: typeof FIRST | typeof MORE): Measured[] {
+export function measure(list: string): Measured[] {
   return sentencesOf(list).map((sentence) => {
     const { marks } = checkWording({
       text: sentence.text,

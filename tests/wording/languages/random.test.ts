@@ -4,7 +4,7 @@ import { LINE_KINDS } from '@/lib/domain/sheet';
 import { carries } from '@/lib/wording/carries';
 import { draftLine } from '@/lib/wording/draft-sheet';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
-import { anyRace, draftInputsOf } from '../check/any-release';
+import { anyRace, draftInputsOf } from '@/tests/support/any-race';
 import { type Other, OTHERS } from './messages';
 
 const BROKEN = /undefined|NaN|Infinity|[{}]| {2}|\.\.|\(\)|(?<!\p{L})-\d|\d\.\d(?!\d)|^\s|\s$/u;

@@ -1,5 +1,7 @@
-import { compilePhrases, type Cue, type Phrases } from '../phrases';
+import { compilePhrases, indexOf, type Cue, type PhraseIndex, type Phrases } from '../phrases';
+import { wordsIn } from '../tokens';
 import type { WordingLanguage } from '../types';
+import { DE_LEXICON } from './de';
 import { EN_LEXICON } from './en';
 import { CUE_GROUPS, type CueGroup, type Lexicon } from './types';
 
@@ -7,16 +9,18 @@ import { CUE_GROUPS, type CueGroup, type Lexicon } from './types';
 export type CompiledLexicon = {
   words: Lexicon;
   cues: Readonly<Record<CueGroup, Phrases>>;
+  index: PhraseIndex<CueGroup>;
   fractions: Phrases;
   numbers: Phrases;
   inEvery: Phrases;
+  names: Readonly<Record<'common' | 'afterCommon' | 'generic', ReadonlySet<string>>>;
 };
 
 const LEXICONS: Readonly<Record<WordingLanguage, Lexicon | null>> = {
   en: EN_LEXICON,
   es: null,
   fr: null,
-  de: null,
+  de: DE_LEXICON,
 };
 
 const compiled = new Map<WordingLanguage, CompiledLexicon>();
@@ -28,13 +32,22 @@ export function lexiconOf(language: WordingLanguage): CompiledLexicon | null {
   const known = compiled.get(language);
   if (known) return known;
   const compile = (list: readonly Cue[]) => compilePhrases(list, words.elisions);
-  const cues = Object.fromEntries(CUE_GROUPS.map((group) => [group, compile(words.cues[group])]));
+  const cues = Object.fromEntries(CUE_GROUPS.map((group) => [group, compile(words.cues[group])])) as Record<
+    CueGroup,
+    Phrases
+  >;
   const lexicon: CompiledLexicon = {
     words,
-    cues: cues as Record<CueGroup, Phrases>,
+    cues,
+    index: indexOf(cues),
     fractions: compile([{ say: Object.keys(words.fractions) }]),
     numbers: compile([{ say: Object.keys(words.numbers) }]),
     inEvery: compile([{ say: words.inEvery }]),
+    names: {
+      common: new Set(words.commonNames.map((name) => wordsIn(name, words).join(' '))),
+      afterCommon: new Set(words.afterCommonName),
+      generic: new Set(words.genericNameWords),
+    },
   };
   compiled.set(language, lexicon);
   return lexicon;

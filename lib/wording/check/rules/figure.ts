@@ -11,6 +11,7 @@ import { isRounded, leadOf, rankedOptions, shareOf } from '../verdicts';
 import { releasesFor, releasesNamed } from '../which-release';
 import { isAboutSubgroup } from './about';
 import { linkedOption } from './linked-option';
+import { isMarginSize } from './margin';
 
 /** Every number against the release: shares by name, sizes of leads, sample sizes. Common practice, no source. */
 export function markFigures(reading: Reading): WordingMark[] {
@@ -83,6 +84,7 @@ function markSizes(reading: Reading): WordingMark[] {
         reading.has('plusMinus', { from: size.from - 3, to: size.from })
       )
         return [];
+      if (isMarginSize(reading, size)) return [];
       const object = subject ? objectOf(reading, hit, subject.option) : null;
       if (object === 'unknown') return [];
       const gaps = releasesFor(reading, hit, subject ? [subject.option] : []).flatMap((release) =>

@@ -2,7 +2,7 @@ import { objectOf, subjectOf } from '../parties';
 import { markAt, replacementOf, type Judged } from '../marks';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
-import { scopeOf } from '../scope';
+import { clauseOf, scopeOf } from '../scope';
 import { sizeOf } from '../sizes';
 import type { WordingMark } from '../types';
 import { leadOf, rankedOptions, type Claimed } from '../verdicts';
@@ -42,7 +42,16 @@ function saidLeads(reading: Reading): Said[] {
   for (const one of all) {
     if (!kept.some((other) => other.from < one.to && one.from < other.to)) kept.push(one);
   }
-  return kept.sort((a, b) => a.from - b.from);
+  kept.sort((a, b) => a.from - b.from);
+  return kept.filter((one, index) => !kept.slice(0, index).some((other) => isPartOf(reading, one, other)));
+}
+
+/** "Führt mit 8 Punkten Vorsprung vor Brook" is one claim: what follows in its clause tells its size and its object. */
+function isPartOf(reading: Reading, one: Said, other: Said): boolean {
+  const { to } = clauseOf(reading, other);
+  if (one.from >= to) return false;
+  const size = one.isNoun ? sizeOf(reading, one) : null;
+  return one.objectAt !== undefined || (size !== null && size.from === sizeOf(reading, other)?.from);
 }
 
 /** "Ahead of Thursday's vote", "behind closed doors", a lead that nobody is said to have. */

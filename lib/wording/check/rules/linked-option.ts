@@ -123,7 +123,7 @@ function after(reading: Reading, quantity: Quantity): Link | null {
 
 function before(reading: Reading, quantity: Quantity): Link | null {
   const sentence = reading.sentenceAt(quantity.from);
-  if (reading.cueAt('withWords', quantity.from - 1)) {
+  if (reading.cueAt('withWords', quantity.from - 1) && !isSecondShare(reading, quantity)) {
     const subject = subjectOf(reading, quantity);
     return subject && subject !== 'unknown'
       ? { option: subject.option, mayBeEarlier: isEarlier(reading, quantity) }
@@ -136,6 +136,19 @@ function before(reading: Reading, quantity: Quantity): Link | null {
     if (mention || reading.quantityAt(at)) return null;
   }
   return null;
+}
+
+/** "Mit 52 Prozent vor Brook mit 38 Prozent": the second share is of the name beside it. */
+function isSecondShare(reading: Reading, quantity: Quantity): boolean {
+  const clause = clauseOf(reading, quantity);
+  const before = quantity.from - (reading.tokens[quantity.from - 2]?.text === '"' ? 3 : 2);
+  const isBeside = reading.mentionAt(before)?.kind === 'option';
+  return (
+    isBeside &&
+    reading.quantities.some(
+      ({ unit, from }) => unit === 'percent' && from >= clause.from && from < quantity.from,
+    )
+  );
 }
 
 /** Whether the words around it speak of an earlier poll. */

@@ -53,7 +53,7 @@ function markStated(reading: Reading): WordingMark[] {
 const REACH = 6;
 
 /** "±3.7 points", "margin of error of 3 points", "a 3-point margin of error". */
-function isMarginSize(reading: Reading, { from, to, unit }: Quantity): boolean {
+export function isMarginSize(reading: Reading, { from, to, unit }: Quantity): boolean {
   if (reading.has('plusMinus', { from: from - 3, to: from })) return true;
   if (unit === 'fraction') return false;
   if (reading.has('marginNoun', { from: to, to: to + 1 })) return true;

@@ -17,11 +17,13 @@ import { parseCheckDocument } from '@/lib/findings/parse-check';
 import { DEFAULT_POLICY } from '@/lib/findings/policy';
 import type { DraftInput } from '@/lib/wording/draft-input';
 import { DEFAULT_HOUSE_STYLE } from '@/lib/wording/house-style';
-import { releaseOf } from '../examples';
+import { releaseOf } from '../wording/examples';
 
+type Names = readonly string[];
+export const PLAIN_NAMES: Names = ['Alder', 'Brook', 'Harbour Union'];
 /** Names that contain words of leading, moving and counting, beside plain ones. */
-const NAMES = [
-  ['Alder', 'Brook', 'Harbour Union'],
+const NAMES: readonly Names[] = [
+  PLAIN_NAMES,
   ['Forward Lead', 'Rising Tide', 'Momentum List'],
   ['Yes', 'No', 'Someone else'],
   ['End the toll', 'Keep it up', 'Majority First'],
@@ -93,27 +95,30 @@ function anyRelease(
     });
 }
 
-/** Two releases of one race, a policy and a style: what a sheet is drafted from. */
-export const anyRace = fc
-  .record({
-    kind: fc.constantFrom(...RACE_KINDS),
-    decimals: fc.nat(1),
-    names: fc.constantFrom(...NAMES),
-    comparisonBasis: fc.boolean(),
-    style: fc.record({
-      percent: fc.constantFrom('sign' as const, 'word' as const),
-      numbers: fc.constantFrom('figures' as const, 'words-to-nine' as const),
-      margins: fc.constantFrom('whole' as const, 'half' as const, 'tenth' as const),
-    }),
-  })
-  .chain(({ kind, decimals, names, ...rest }) =>
-    fc.record({
-      release: anyRelease(['2026-09-14', '2026-09-17', '2026-09-18'], kind, decimals, names),
-      previous: anyRelease(['2025-12-30', '2026-01-02', '2026-01-03'], kind, decimals, names),
-      names: fc.constant(names),
-      rest: fc.constant(rest),
-    }),
-  );
+/** Two releases of one race, a policy and a style: what a sheet is drafted from; its answers have one list of the names. */
+export const anyRaceOf = (all: readonly Names[]) =>
+  fc
+    .record({
+      kind: fc.constantFrom(...RACE_KINDS),
+      decimals: fc.nat(1),
+      names: fc.constantFrom(...all),
+      comparisonBasis: fc.boolean(),
+      style: fc.record({
+        percent: fc.constantFrom('sign' as const, 'word' as const),
+        numbers: fc.constantFrom('figures' as const, 'words-to-nine' as const),
+        margins: fc.constantFrom('whole' as const, 'half' as const, 'tenth' as const),
+      }),
+    })
+    .chain(({ kind, decimals, names, ...rest }) =>
+      fc.record({
+        release: anyRelease(['2026-09-14', '2026-09-17', '2026-09-18'], kind, decimals, names),
+        previous: anyRelease(['2025-12-30', '2026-01-02', '2026-01-03'], kind, decimals, names),
+        names: fc.constant(names),
+        rest: fc.constant(rest),
+      }),
+    );
+
+export const anyRace = anyRaceOf(NAMES);
 
 export type AnyRace = typeof anyRace extends fc.Arbitrary<infer T> ? T : never;
 
