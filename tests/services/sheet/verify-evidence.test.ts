@@ -94,7 +94,7 @@ describe('verifying evidence', () => {
         const answer = check(document);
         const findings = answer.findings.map((finding) =>
           finding.kind === 'lead' && finding.verdict !== 'cannot-be-tested'
-            ? { ...finding, z: finding.z + by }
+            ? { ...finding, z: (finding.z ?? 0) + by }
             : finding,
         );
         return { ...answer, findings } as typeof answer;
