@@ -2,6 +2,7 @@ import { sampledBase } from './ask';
 import { criticalAt } from './critical-at';
 import { proportionOf, readBase, type Sampled } from './base-figures';
 import type { CheckDocument, Finding, Range } from './check-types';
+import type { ReleaseShare, ReleaseTestable } from './judge-types';
 import { measureChange, type SampledBase } from './measure-change';
 import { measureLead } from './measure-lead';
 import { measureLeadChange } from './measure-lead-change';
@@ -29,14 +30,19 @@ const INNER_LEVELS = [0.8, 0.5];
  *
  * @param finding a finding of `check(document)`
  * @param document the check document it came from
- * @returns null where the finding has no interval
+ * @returns null where the finding has no interval; only its own band where the document alone does not make it: net
+ *   scores, gaps, blocs and changes between waves
  * @example
  * uncertaintyOf({ kind: 'share', option: 'A', estimatePct: 50 }, { release: { sampleSource: 'probability',
  *   n: 1000, design: 'unweighted', decimals: 0, shares: [{ option: 'A', pct: 50 }] } }).bands.length; // => 3
  */
-export function uncertaintyOf(finding: Finding, document: CheckDocument): Uncertainty | null {
+export function uncertaintyOf(
+  finding: Finding | ReleaseShare | ReleaseTestable,
+  document: CheckDocument,
+): Uncertainty | null {
   if (finding.kind !== 'share' && finding.verdict === 'cannot-be-tested') return null;
   const policy = resolvePolicy(document.policy);
+  if (!isOfDocument(finding, document)) return ownBand(finding, policy.level);
   const interval = intervalsOf(finding, document);
   if (!interval) return null;
   const levels = [policy.level, ...INNER_LEVELS.filter((level) => level < policy.level)];
@@ -45,6 +51,30 @@ export function uncertaintyOf(finding: Finding, document: CheckDocument): Uncert
   const outer = bands[0];
   const isWider = outer !== undefined && (low < outer.low - 1e-9 || high > outer.high + 1e-9);
   return { bands, far: isWider ? { low, high } : null };
+}
+
+/** Whether its test can be measured anew from the bases of a check document. */
+function isOfDocument(
+  finding: Finding | ReleaseShare | ReleaseTestable,
+  { release, previous }: CheckDocument,
+): finding is Finding {
+  if (finding.kind === 'gap' || finding.kind === 'net-score' || finding.kind === 'net-score-change')
+    return false;
+  if ('trace' in finding) return false;
+  const names = 'pair' in finding ? finding.pair : [finding.option];
+  const bases = finding.kind === 'change' || finding.kind === 'lead-change' ? [release, previous] : [release];
+  return bases.every((base) => names.every((name) => base?.shares.some(({ option }) => option === name)));
+}
+
+function ownBand(finding: Finding | ReleaseShare | ReleaseTestable, level: number): Uncertainty | null {
+  if (finding.kind === 'share') {
+    const range = finding.intervalPct;
+    return range ? { bands: [{ level, low: range[0], high: range[1] }], far: null } : null;
+  }
+  if (finding.verdict === 'cannot-be-tested') return null;
+  const from = finding.kind === 'threshold' ? finding.thresholdPct : 0;
+  const [low, high] = finding.intervalPp;
+  return { bands: [{ level, low: from + low, high: from + high }], far: null };
 }
 
 /** The interval in percent or points at a level, with one end of the design effect. */

@@ -28,11 +28,9 @@ const NAMES: readonly Names[] = [
   ['Yes', 'No', 'Someone else'],
   ['End the toll', 'Keep it up', 'Majority First'],
 ];
-const QUESTIONS = [
-  'If the election for governor were held today, whom would you vote for?',
-  'Who leads, in your view?',
-  'Will the majority win?',
-];
+export const PLAIN_QUESTION = 'If the election for governor were held today, whom would you vote for?';
+/** Questions that ask in words of leading and counting. */
+const QUESTIONS: Names = [PLAIN_QUESTION, 'Who leads, in your view?', 'Will the majority win?'];
 
 const disclosed = <T>(values: readonly T[]): fc.Arbitrary<Disclosed<T>> =>
   fc.oneof({ weight: 4, arbitrary: fc.constantFrom(...values).map(given) }, fc.constant(NOT_DISCLOSED));
@@ -41,7 +39,8 @@ function anyRelease(
   [start, end, published]: [string, string, string],
   kind: RaceKind,
   decimals: number,
-  names: readonly string[],
+  names: Names,
+  questions: Names,
 ): fc.Arbitrary<ReleaseFacts> {
   const scale = 10 ** decimals;
   return fc
@@ -62,7 +61,7 @@ function anyRelease(
         ),
       ),
       modelledInterval: fc.option(fc.constant({ pp: 4, unit: 0.5, level: 0.9 })),
-      questionWording: fc.constantFrom(...QUESTIONS).map(given),
+      questionWording: fc.constantFrom(...questions).map(given),
     })
     .map(({ cuts, hidden, ...facts }) => {
       const [x = 0, y = 0, z = 0] = [...cuts].sort((a, b) => a - b);
@@ -96,7 +95,7 @@ function anyRelease(
 }
 
 /** Two releases of one race, a policy and a style: what a sheet is drafted from; its answers have one list of the names. */
-export const anyRaceOf = (all: readonly Names[]) =>
+export const anyRaceOf = (all: readonly Names[], questions: Names = QUESTIONS) =>
   fc
     .record({
       kind: fc.constantFrom(...RACE_KINDS),
@@ -111,8 +110,8 @@ export const anyRaceOf = (all: readonly Names[]) =>
     })
     .chain(({ kind, decimals, names, ...rest }) =>
       fc.record({
-        release: anyRelease(['2026-09-14', '2026-09-17', '2026-09-18'], kind, decimals, names),
-        previous: anyRelease(['2025-12-30', '2026-01-02', '2026-01-03'], kind, decimals, names),
+        release: anyRelease(['2026-09-14', '2026-09-17', '2026-09-18'], kind, decimals, names, questions),
+        previous: anyRelease(['2025-12-30', '2026-01-02', '2026-01-03'], kind, decimals, names, questions),
         names: fc.constant(names),
         rest: fc.constant(rest),
       }),

@@ -7,13 +7,13 @@ import type { DraftInput } from '@/lib/wording/draft-input';
 import { draftSheet } from '@/lib/wording/draft-sheet';
 import { DEFAULT_HOUSE_STYLE, type HouseStyle } from '@/lib/wording/house-style';
 import { claimsAbove } from '@/lib/wording/never-says-more';
-import { anyRaceOf, draftInputsOf, PLAIN_NAMES } from '@/tests/support/any-race';
+import { anyRaceOf, draftInputsOf, PLAIN_NAMES, PLAIN_QUESTION } from '@/tests/support/any-race';
 import { earlierOf, inputOf, releaseOf } from './examples';
 
 describe('draftSheet, of any release', () => {
   it('never says more than the verdict, leaves no hole, and says the same again', { timeout: 60_000 }, () => {
     fc.assert(
-      fc.property(anyRaceOf([PLAIN_NAMES]), (race) => {
+      fc.property(anyRaceOf([PLAIN_NAMES], [PLAIN_QUESTION]), (race) => {
         for (const input of draftInputsOf(race)) {
           const lines = draftSheet(input);
           expect(lines.map(({ kind }) => kind)).toEqual(STANDING_LINE_KINDS);

@@ -109,6 +109,11 @@ export default async function HouseStylePage() {
         rows={list.versions}
         rowKey={({ id }) => id}
       />
+      {list.versions.length > 1 ? (
+        <p className="mt-3">
+          <Link href="/house-style/compare">Compare two versions</Link>
+        </p>
+      ) : null}
     </>
   );
 }

@@ -9,7 +9,7 @@ import { draftLine, draftSheet } from '@/lib/wording/draft-sheet';
 import { DEFAULT_HOUSE_STYLE, type HouseStyle } from '@/lib/wording/house-style';
 import { GOLDEN_CASES } from '../golden-cases';
 
-const LEAD = GOLDEN_CASES['lead-not-shown']!;
+const LEAD = GOLDEN_CASES['lead-not-shown'];
 const RELEASE = checkedReleaseOf(LEAD.release, null, LEAD.policy);
 
 function marks(text: string, style: Partial<HouseStyle>, more: Partial<WordingCheckInput> = {}) {
