@@ -55,6 +55,7 @@ export default defineConfig({
       LEADLINE_ORIGIN: origin,
       LEADLINE_DATA: join(process.cwd(), dataFolder),
       DEMO_PASSWORD: password,
+      LEADLINE_FAKES: '1',
     },
   },
 });

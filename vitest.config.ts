@@ -10,7 +10,8 @@ export default defineConfig({
   test: {
     environment: 'node',
     include: ['tests/**/*.test.{ts,tsx}'],
-    exclude: ['tests/e2e/**', 'node_modules/**'],
+    // Minutes of killing processes: npm run test:crash sets how often.
+    exclude: ['tests/e2e/**', 'node_modules/**', ...(process.env.CRASH_POINTS ? [] : ['tests/crash/**'])],
     testTimeout: 20_000,
     hookTimeout: 30_000,
     setupFiles: ['tests/support/setup.ts'],

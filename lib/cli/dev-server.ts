@@ -2,6 +2,7 @@ import { spawn } from 'node:child_process';
 import { localBinary } from './process.mjs';
 import { announce, prepareDesk, readSettings } from './prepare';
 import { onStop } from './stop';
+import { startJobs, superviseJobs } from './supervise';
 
 /** `npm run dev` ends here: the same data folder, under Next's own server. There is no front. */
 async function develop(): Promise<void> {
@@ -9,14 +10,17 @@ async function develop(): Promise<void> {
   const desk = await prepareDesk(env, process.argv.slice(2));
   desk.db.$client.close();
 
+  const jobs = superviseJobs({ start: startJobs });
   const child = spawn(localBinary('next'), ['dev', '--port', String(env.PORT)], { stdio: 'inherit' });
   onStop(async () => {
     child.kill('SIGTERM');
   });
   child.once('spawn', () => announce(desk));
   child.once('exit', (code) => {
-    desk.data.release();
-    process.exit(code ?? 0);
+    void jobs.stop().then(() => {
+      desk.data.release();
+      process.exit(code ?? 0);
+    });
   });
 }
 

@@ -2,6 +2,7 @@ import { existsSync, mkdirSync, readdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { databaseFile, openDatabase, type Db } from '@/db/client';
 import { migrateDatabase } from '@/db/migrate';
+import { ensureJobs } from '@/lib/services/jobs/ensure-jobs';
 import { ensureDeskSettings } from '@/lib/services/setup/desk-settings';
 import { type DemoAccount, writeAccounts } from './accounts';
 import { type DataFolder, moveIntoPlace } from './data-folder';
@@ -17,6 +18,7 @@ export async function makeReady(data: DataFolder, seed: Seed | null): Promise<vo
   const db = openDatabase(data.database);
   migrateDatabase(db);
   ensureDeskSettings({ db, now: Date.now() });
+  ensureJobs({ db, now: Date.now() });
   db.$client.close();
 }
 

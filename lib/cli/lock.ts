@@ -73,12 +73,17 @@ function parse(text: string | null): Holder | null {
 
 /** A process number alone proves little: after a restart another process often has the same one. */
 function isAlive({ pid, mark }: Holder): boolean {
+  return isRunning(pid) && processMark(pid) === mark;
+}
+
+/** Whether some process has this number now. */
+export function isRunning(pid: number): boolean {
   try {
     process.kill(pid, 0);
   } catch (error) {
-    if ((error as NodeJS.ErrnoException).code !== 'EPERM') return false;
+    return (error as NodeJS.ErrnoException).code === 'EPERM';
   }
-  return processMark(pid) === mark;
+  return true;
 }
 
 /** When the process was started, in ticks since this boot; empty where the system does not tell. */

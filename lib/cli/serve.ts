@@ -5,6 +5,7 @@ import { trustProxies } from './forwarded';
 import { createFront } from './front';
 import { announce, prepareDesk, readSettings } from './prepare';
 import { closeServer, onStop } from './stop';
+import { startJobs, superviseJobs } from './supervise';
 
 /** `npm run up` ends here: the front, with Next behind it, over one data folder. */
 async function serve(): Promise<void> {
@@ -20,14 +21,16 @@ async function serve(): Promise<void> {
     port: env.PORT,
     httpServer: server,
   });
+  const jobs = superviseJobs({ start: startJobs });
   const leave = async (status: number) => {
+    await jobs.stop();
     await app.close();
     desk.db.$client.close();
     desk.data.release();
     process.exit(status);
   };
   onStop(async () => {
-    await closeServer(server);
+    await Promise.all([closeServer(server), jobs.stop()]);
     await leave(0);
   });
 

@@ -29,6 +29,7 @@ export const canActAsEditor = (who: Who) => has(who, 'editor');
 export const canReadCopyDesk = (who: Who) => has(who, ...ROLES);
 export const canMakeEmbeds = (who: Who) => has(who, 'reporter', 'editor', 'copy-desk');
 export const canManagePeople = (who: Who) => has(who, 'administrator');
+export const canManageJobs = (who: Who) => has(who, 'administrator');
 export const canReadHistory = (who: Who) => has(who, 'reporter', 'editor', 'administrator');
 
 /**

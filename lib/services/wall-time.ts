@@ -31,6 +31,11 @@ export function wallInstant(local: string, zone: string, words: WallTimeWords): 
   );
 }
 
+/** The first instant of a day `YYYY-MM-DD` in a zone, which is not midnight where the clocks skip it. */
+export function dayStart(day: string, zone: string): number {
+  return Temporal.PlainDate.from(day).toZonedDateTime(zone).epochMilliseconds;
+}
+
 /** Only zones that screens can show too: a bare offset such as +05:00 is none to every reader of a zone. */
 export function refuseUnlessZone(zone: string, refusal: (cause: unknown) => AppError): void {
   orRefuse(() => new Intl.DateTimeFormat('en', { timeZone: zone }), refusal);

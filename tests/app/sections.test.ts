@@ -31,6 +31,7 @@ describe('the rail', () => {
       'Wording check',
       'House style',
       'People',
+      'Jobs',
       'History',
     ]);
   });
@@ -42,6 +43,7 @@ describe('the rail', () => {
       'Wording check',
       'House style',
       'People',
+      'Jobs',
       'History',
     ]);
     expect(labels()).toEqual([]);

@@ -5,6 +5,9 @@ test('the health of the desk is open to anyone and kept by no cache', async ({ r
   expect(answer.status()).toBe(200);
   expect(answer.headers()['cache-control']).toContain('no-store');
   expect(await answer.json()).toMatchObject({ database: 'ok' });
+  // The process that runs jobs starts beside the server, which never waits for it.
+  const jobs = async () => ((await (await request.get('/api/health')).json()) as { jobs: string }).jobs;
+  await expect.poll(jobs, { timeout: 30_000 }).toBe('answering');
 });
 
 test('no page may be framed, and each page has a nonce of its own', async ({ request }) => {

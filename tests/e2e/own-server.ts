@@ -32,6 +32,7 @@ export async function startServer(port: number, folder: string, args: string[] =
       LEADLINE_ORIGIN: origin,
       LEADLINE_DATA: folder,
       DEMO_PASSWORD: PASSWORD,
+      LEADLINE_FAKES: '1',
       NODE_OPTIONS: '',
     },
     stdio: ['ignore', 'pipe', 'pipe'],

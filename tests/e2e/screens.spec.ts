@@ -9,7 +9,7 @@ const SCREENS: Record<string, string[]> = {
   reporter: ['/releases', '/releases/new', '/lines', '/copy-desk', '/embeds', '/history', '/account'],
   editor: ['/lines/night-list', '/releases/bans', '/house-style', '/wording-check'],
   'copy-desk': ['/copy-desk', '/embeds', '/releases'],
-  administrator: ['/people', '/history', '/no-such-page'],
+  administrator: ['/people', '/jobs', '/history', '/no-such-page'],
 };
 
 for (const [role, paths] of Object.entries(SCREENS))
@@ -49,6 +49,7 @@ test('a page of another role is refused with 403, an unknown one with 404, and n
   for (const [path, status] of [
     ['/releases', 403],
     ['/people', 403],
+    ['/jobs', 403],
     ['/history', 403],
     ['/lines', 403],
     ['/copy-desk', 200],

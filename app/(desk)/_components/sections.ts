@@ -2,6 +2,7 @@ import {
   type Actor,
   canLogReleases,
   canMakeEmbeds,
+  canManageJobs,
   canManagePeople,
   canReadCopyDesk,
   canReadHistory,
@@ -18,6 +19,7 @@ const SECTIONS: { href: string; label: string; isOpenTo: (who: Who) => boolean }
   { href: '/wording-check', label: 'Wording check', isOpenTo: canReadCopyDesk },
   { href: '/house-style', label: 'House style', isOpenTo: canReadCopyDesk },
   { href: '/people', label: 'People', isOpenTo: canManagePeople },
+  { href: '/jobs', label: 'Jobs', isOpenTo: canManageJobs },
   { href: '/history', label: 'History', isOpenTo: canReadHistory },
 ];
 

@@ -76,7 +76,7 @@ function columnsIn(zone: string): Column<ReleaseListItem>[] {
       key: 'race',
       head: 'Race, pollster',
       rowHead: true,
-      cell: ({ id, race, pollster, isUnderEmbargo, verdicts }) => (
+      cell: ({ id, race, pollster, isUnderEmbargo, verdicts, isBeingRecomputed }) => (
         <>
           <Link href={`/releases/${id}`} className="font-semibold">
             {race}
@@ -87,7 +87,7 @@ function columnsIn(zone: string): Column<ReleaseListItem>[] {
           ) : null}
           {/* On a phone the column of verdicts is left out, and shares never stand without them. */}
           <div className="mt-1 min-[30rem]:hidden">
-            <VerdictRow verdicts={verdicts} />
+            <VerdictRow verdicts={verdicts} isBeingRecomputed={isBeingRecomputed} />
           </div>
         </>
       ),
@@ -119,7 +119,9 @@ function columnsIn(zone: string): Column<ReleaseListItem>[] {
       key: 'verdicts',
       head: 'Supported',
       from: 'sm',
-      cell: ({ verdicts }) => <VerdictRow verdicts={verdicts} />,
+      cell: ({ verdicts, isBeingRecomputed }) => (
+        <VerdictRow verdicts={verdicts} isBeingRecomputed={isBeingRecomputed} />
+      ),
     },
     {
       key: 'logged',

@@ -8,6 +8,7 @@ import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { enqueuePurgeIn } from '../jobs/enqueue-purge';
 import { wallInstant } from '../wall-time';
 
 const id = z.string().min(1).max(64);
@@ -48,6 +49,9 @@ export function enterBan(actor: Actor, input: unknown, ctx: Ctx): { id: string }
       enteredBy: actor.personId,
       enteredAt: ctx.now,
     });
+    const purge = { of: 'ban' as const, id: ban.publicId };
+    enqueuePurgeIn(tx, purge, 'begins', ctx.now, { runAt: Math.max(fromAt, ctx.now) });
+    enqueuePurgeIn(tx, purge, 'ends', ctx.now, { runAt: toAt });
     const entry = { action: 'entered ban', entity: 'ban', entityId: ban.publicId };
     const after = { ...given, race: raceId, fromLocal, toLocal, fromAt, toAt };
     appendRecord(tx, { personId: actor.personId, ...entry, after }, ctx.now);
@@ -71,6 +75,7 @@ export function endBan(actor: Actor, input: unknown, ctx: Ctx): void {
     const isEnded =
       before !== 'over' && end(tx, ban.id, { endedBy: actor.personId, endedAt: ctx.now, endReason: reason });
     if (!isEnded) throw new AppError('conflict', 'This ban is over already.');
+    enqueuePurgeIn(tx, { of: 'ban', id: publicId }, 'ended', ctx.now);
     const entry = { action: 'ended ban', entity: 'ban', entityId: publicId, reason };
     const change = { before: { state: before, toAt: ban.toAt }, after: { endedAt: ctx.now } };
     appendRecord(tx, { personId: actor.personId, ...entry, ...change }, ctx.now);

@@ -10,6 +10,7 @@ import { newId } from '@/lib/security/ids';
 import { refuseUnderBan } from '../bans/hold';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { enqueuePurgeIn } from '../jobs/enqueue-purge';
 
 const schema = z.strictObject({ sheetId: z.string().min(1).max(64) });
 
@@ -34,14 +35,16 @@ export function createEmbed(actor: Actor, input: unknown, ctx: Ctx): { id: strin
       createdBy: actor.personId,
       createdAt: ctx.now,
     });
-    insertEmbedVersion(tx, embed.id, cleared.evidenceId, ctx.now);
+    const number = insertEmbedVersion(tx, embed.id, cleared.evidenceId, ctx.now);
+    const releaseId = found.release.id;
+    enqueuePurgeIn(tx, { of: 'embed', id: embed.publicId }, `version-${number}`, ctx.now, { releaseId });
     const entry = {
       action: 'made embed',
       entity: 'embed',
       entityId: embed.publicId,
       after: { sheet: sheetId },
     };
-    appendRecord(tx, { personId: actor.personId, ...entry, releaseId: found.release.id }, ctx.now);
+    appendRecord(tx, { personId: actor.personId, ...entry, releaseId }, ctx.now);
     return { id: embed.publicId };
   });
 }

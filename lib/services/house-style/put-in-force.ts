@@ -3,11 +3,12 @@ import { z } from 'zod';
 import type { Tx } from '@/db/client';
 import { insertHouseStyle, insertPolicy } from '@/db/queries/desk';
 import { nextStyleNumber, type StyleVersionRow, updateStyleVersion } from '@/db/queries/house-style';
-import { listReleases } from '@/db/queries/release';
+import { listClearedSheets } from '@/db/queries/job-subjects';
 import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
-import { computeFindings } from '../release/compute-findings';
-import { indexFindings } from '../release/index-findings';
+import { enqueueRecomputeIn } from '../jobs/enqueue-recompute';
+import { tellIn } from '../outbox/tell-in';
+import { enqueueShelfEndIn } from '../sheet/shelf-end';
 import {
   agreedHash,
   currentStyle,
@@ -23,9 +24,6 @@ const agreed = z.strictObject({
   /** Of the version that was on the screen. */
   hash: z.string().regex(/^[0-9a-f]{64}$/, 'Reload the page and look again.'),
 });
-
-/** Releases whose marks in the list are written anew at once under a new policy. */
-const LISTED = 200;
 
 /** The second agreement: another editor puts a proposed version in force, from this moment for everything drafted. */
 export function putStyleInForce(actor: Actor, input: unknown, ctx: Ctx): { number: number } {
@@ -56,7 +54,9 @@ export function putStyleInForce(actor: Actor, input: unknown, ctx: Ctx): { numbe
     refuseUnless(updateStyleVersion(tx, row, set), MOVED_ON);
     const act = { act: 'put-in-force' as const, hash, before: 'proposed', after: 'in-force' };
     recordAct(tx, acting, row, act, ctx.now);
-    if (set.policyId !== before.policyId) reindexListed(tx, acting, ctx.now);
+    followIn(tx, acting, before, set, ctx.now);
+    const subject = { entity: 'house style version' as const, entityId: row.publicId };
+    tellIn(tx, { kind: 'style-in-force', ...subject, refs: { number } }, ctx.now);
     return { number };
   });
 }
@@ -70,9 +70,17 @@ function bodiesOf(tx: Tx, row: StyleVersionRow, before: StyleVersionRow, now: nu
   };
 }
 
-function reindexListed(tx: Tx, actor: Actor, now: number): void {
-  for (const { version } of listReleases(tx, actor, now, LISTED))
-    indexFindings(tx, version.id, computeFindings(tx, version.id, now));
+/** What rests on the desk's settings follows: marks under the new policy, and shelf lives under the new style. */
+function followIn(
+  tx: Tx,
+  actor: Actor,
+  before: StyleVersionRow,
+  after: Pick<StyleVersionRow, 'houseStyleId' | 'policyId'>,
+  now: number,
+) {
+  if (after.policyId !== before.policyId) enqueueRecomputeIn(tx, now, actor.personId);
+  if (after.houseStyleId !== before.houseStyleId)
+    for (const sheet of listClearedSheets(tx)) enqueueShelfEndIn(tx, sheet, now);
 }
 
 const back = agreed.extend({

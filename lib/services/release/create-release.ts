@@ -10,6 +10,7 @@ import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { enqueueEmbargoEndIn } from '../jobs/enqueue-embargo-end';
 import { readDeskSettings } from '../setup/desk-settings';
 import { embargoInstant } from './embargo-time';
 import { factsOf } from './facts';
@@ -61,6 +62,7 @@ export function createReleaseIn(
     submissionKey: key,
     ...embargo,
   });
+  if (embargo && embargo.embargoAt > now) enqueueEmbargoEndIn(tx, release, embargo.embargoAt, now);
   if (isNew) recordRace(tx, actor, race, input, release.id, now);
   const who = { releaseId: release.id, number: 1, personId: actor.personId, now };
   const version = storeVersion(tx, input, who);

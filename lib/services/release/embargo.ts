@@ -9,6 +9,7 @@ import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { enqueueEmbargoEndIn } from '../jobs/enqueue-embargo-end';
 import { factsOf } from './facts';
 import { reindexSeries } from './index-findings';
 
@@ -28,6 +29,7 @@ export function liftEmbargo(actor: Actor, input: unknown, ctx: Ctx): void {
     if (!updateRelease(tx, release.id, version, { embargoLiftedAt: ctx.now }))
       throw new AppError('conflict', 'Somebody changed this release meanwhile. Reload the page.');
     reindexSeries(tx, { ...release, from: factsOf(tx, release.currentVersionId!).fieldEndOn }, ctx.now);
+    enqueueEmbargoEndIn(tx, release, ctx.now, ctx.now);
     record(tx, actor, release, 'lifted embargo', ctx.now, {
       before: { embargoAt: release.embargoAt },
       after: { embargoLiftedAt: ctx.now },

@@ -1,6 +1,6 @@
 import 'server-only';
 import { listReleases as listRows, listSharesOf } from '@/db/queries/release';
-import { listVerdicts } from '@/db/queries/finding-index';
+import { listOutdated, listVerdicts } from '@/db/queries/finding-index';
 import { pctOf } from '@/lib/domain/release-facts';
 import { type Actor, canReadUnpublished } from '@/lib/domain/roles';
 import type { Population } from '@/lib/domain/vocabulary';
@@ -20,6 +20,8 @@ export type ReleaseListItem = {
   /** The largest shares as printed, at most three. */
   topShares: { option: string; printed: string }[];
   verdicts: Verdict[];
+  /** Its marks belong to an earlier policy or engine, and are being computed anew. */
+  isBeingRecomputed: boolean;
   embargoAt: number | null;
   isUnderEmbargo: boolean;
   loggedBy: string;
@@ -34,6 +36,7 @@ export function listReleases(actor: Actor, ctx: Ctx): ReleaseListItem[] {
   const policy = readDeskSettings(ctx.db).policy.version;
   const versionIds = rows.map((row) => row.version.id);
   const verdicts = listVerdicts(ctx.db, versionIds, policy, ENGINE_VERSION);
+  const outdated = listOutdated(ctx.db, versionIds, policy, ENGINE_VERSION);
   const questionIds = rows.map((row) => row.question.id);
   const shares = listSharesOf(ctx.db, questionIds);
   return rows.map((row) => {
@@ -51,6 +54,7 @@ export function listReleases(actor: Actor, ctx: Ctx): ReleaseListItem[] {
         row.question.decimals,
       ),
       verdicts: verdicts.filter((v) => v.versionId === row.version.id).map((v) => v.verdict as Verdict),
+      isBeingRecomputed: outdated.has(row.version.id),
       embargoAt,
       isUnderEmbargo: embargoAt !== null && embargoLiftedAt === null && embargoAt > ctx.now,
       loggedBy: row.enteredBy,

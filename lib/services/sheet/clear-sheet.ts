@@ -8,6 +8,7 @@ import { type Actor, canDraftSheets, isTwoPersonAgreement, type Role } from '@/l
 import { newId } from '@/lib/security/ids';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { enqueuePurgeIn } from '../jobs/enqueue-purge';
 import { refuseUnsigned } from '../house-style/sign-language';
 import { refuseUnderBan } from '../bans/hold';
 import { assembleSheet } from './assemble-sheet';
@@ -15,6 +16,7 @@ import { markSiblings } from './languages';
 import { type LineReasons, lineReasons, storeLineReasons } from './line-reasons';
 import { overrideIn } from './override-in';
 import { MOVED_ON, openSheet, type Opened, refuseUnless } from './sheet-state';
+import { enqueueShelfEndIn } from './shelf-end';
 
 export const readerInput = z.strictObject({
   id: z.string().min(1).max(64),
@@ -83,7 +85,12 @@ export function publishIn(tx: Tx, actor: Actor, opened: Opened, evidenceId: numb
   insertAct(tx, actor, opened, evidenceId, 'cleared', null, now);
   refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
   const embed = findEmbedOfSheet(tx, opened.sheet.id);
-  if (embed) insertEmbedVersion(tx, embed.id, evidenceId, now);
+  if (embed) {
+    const number = insertEmbedVersion(tx, embed.id, evidenceId, now);
+    const releaseId = opened.release.id;
+    enqueuePurgeIn(tx, { of: 'embed', id: embed.publicId }, `version-${number}`, now, { releaseId });
+  }
+  enqueueShelfEndIn(tx, opened.sheet, now);
   if (isAnew) markSiblings(tx, opened.sheet, 'cleared', now);
 }
 

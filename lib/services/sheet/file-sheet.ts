@@ -5,10 +5,12 @@ import { findLastAct, insertClearing, insertEvidence } from '@/db/queries/cleari
 import { freezeVersion } from '@/db/queries/release';
 import { moveLineVersions, touchSheet } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets } from '@/lib/domain/roles';
+import { ESCALATES_AFTER_MS } from '@/lib/domain/look';
 import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { enqueueIn } from '../jobs/enqueue';
 import { type OverrideInput, overrideInput, refuseWording } from '../wording-check/refuse-wording';
 import { redraftAsPrinted } from './as-printed-words';
 import { assembleSheet } from './assemble-sheet';
@@ -84,7 +86,7 @@ export function fileIn(
   refuseUnless(moveLineVersions(tx, ids, 'draft', { state: 'filed', filedBy: actor.personId }), MOVED_ON);
   freezeVersion(tx, opened.sheet.releaseVersionId, now);
   if (comparisonVersionId !== null) freezeVersion(tx, comparisonVersionId, now);
-  insertClearing(
+  const filing = insertClearing(
     tx,
     {
       publicId: newId(),
@@ -99,6 +101,17 @@ export function fileIn(
   );
   refuseUnless(touchSheet(tx, opened.sheet.id, seen.version), MOVED_ON);
   settleByFiling(tx, opened.sheet, actor, now);
+  enqueueIn(
+    tx,
+    {
+      kind: 'filing-unread',
+      payload: { sheet: seen.id, filing: filing.publicId },
+      idempotencyKey: `filing-unread:${filing.publicId}`,
+      runAt: now + ESCALATES_AFTER_MS,
+      releaseId: opened.release.id,
+    },
+    now,
+  );
   if (isFiledAnew) markSiblings(tx, opened.sheet, 'changed', now);
   const reason = override ? { reason: override.reason } : {};
   const entry = { action, entity: 'sheet', entityId: opened.sheet.publicId, ...reason };

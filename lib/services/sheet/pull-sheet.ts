@@ -7,6 +7,8 @@ import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { enqueuePurgeIn } from '../jobs/enqueue-purge';
+import { tellIn } from '../outbox/tell-in';
 import { markSiblings } from './languages';
 import { MOVED_ON, openSheet, refuseUnless } from './sheet-state';
 
@@ -41,15 +43,17 @@ export function pullSheet(actor: Actor, input: unknown, ctx: Ctx): void {
     );
     const embed = findEmbedOfSheet(tx, opened.sheet.id);
     const wasSeen = isReleasePublic(tx, opened.release.id, ctx.now);
-    if (embed) pullEmbedVersions(tx, embed.id, ctx.now, !wasSeen);
+    const releaseId = opened.release.id;
+    if (embed) {
+      pullEmbedVersions(tx, embed.id, ctx.now, !wasSeen);
+      const event = `pulled-${opened.sheet.version}`;
+      enqueuePurgeIn(tx, { of: 'embed', id: embed.publicId }, event, ctx.now, { releaseId });
+    }
+    tellIn(tx, { kind: 'sheet-pulled', entity: 'sheet', entityId: id, releaseId }, ctx.now);
     refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
     markSiblings(tx, opened.sheet, 'pulled', ctx.now);
     const entry = { action: 'pulled sheet', entity: 'sheet', entityId: opened.sheet.publicId, reason };
     const [before, after] = [{ state: 'cleared' }, { state: 'pulled', embed: embed?.publicId ?? null }];
-    appendRecord(
-      tx,
-      { personId: actor.personId, ...entry, before, after, releaseId: opened.release.id },
-      ctx.now,
-    );
+    appendRecord(tx, { personId: actor.personId, ...entry, before, after, releaseId }, ctx.now);
   });
 }

@@ -8,6 +8,7 @@ import { authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { wallInstant } from '../wall-time';
 import { openSheet, refuseUnless } from './sheet-state';
+import { enqueueShelfEndIn } from './shelf-end';
 
 const schema = z.strictObject({
   id: z.string().min(1).max(64),
@@ -52,6 +53,7 @@ export function setTerms(actor: Actor, input: unknown, ctx: Ctx): void {
       setBy: actor.personId,
       setAt: ctx.now,
     });
+    enqueueShelfEndIn(tx, opened.sheet, ctx.now);
     const entry = { action: 'set terms of sheet', entity: 'sheet', entityId: id };
     const change = { before: before && toldOf(before), after: { wanted, wantedAt, shelfDays } };
     appendRecord(

@@ -86,4 +86,21 @@ describe('verifying evidence', () => {
     }));
     expect(other.problems[0]).toMatch(new RegExp(`comes out differently on engine ${ENGINE_VERSION}$`));
   });
+
+  it('allows the last bits of arithmetic to differ, and no more', async () => {
+    const nudged = (by: number): FrozenEngine => ({
+      parseCheckDocument,
+      check: (document) => {
+        const answer = check(document);
+        const findings = answer.findings.map((finding) =>
+          finding.kind === 'lead' && finding.verdict !== 'cannot-be-tested'
+            ? { ...finding, z: (finding.z ?? 0) + by }
+            : finding,
+        );
+        return { ...answer, findings } as typeof answer;
+      },
+    });
+    expect((await verify(async () => nudged(1e-14))).problems).toEqual([]);
+    expect((await verify(async () => nudged(1e-9))).problems).toHaveLength(4);
+  });
 });
