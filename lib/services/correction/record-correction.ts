@@ -1,0 +1,43 @@
+import 'server-only';
+import type { Tx } from '@/db/client';
+import type { CorrectionRow } from '@/db/queries/corrections';
+import type { Actor } from '@/lib/domain/roles';
+import { appendRecord } from '../history/append-record';
+import type { Consequence } from './consequences';
+
+/** The history tells what was corrected, why, and what it did to everything in print. */
+export function recordCorrection(
+  tx: Tx,
+  actor: Actor,
+  told: {
+    action: string;
+    row: CorrectionRow;
+    releaseId: string;
+    preview: { changed: readonly string[]; consequences: readonly Consequence[] };
+    facts?: { before: unknown; after: unknown };
+  },
+  now: number,
+): void {
+  const { action, row, releaseId, preview, facts } = told;
+  const effects = preview.consequences.map(({ sheetId, effect }) => ({ sheet: sheetId, effect }));
+  appendRecord(
+    tx,
+    {
+      personId: actor.personId,
+      action,
+      entity: 'release',
+      entityId: releaseId,
+      releaseId: row.releaseId,
+      ...(facts ? { before: facts.before } : {}),
+      after: {
+        correction: row.publicId,
+        whose: row.whose,
+        changed: preview.changed,
+        effects,
+        ...(facts ? { release: facts.after } : {}),
+      },
+      reason: row.explanation,
+    },
+    now,
+  );
+}
