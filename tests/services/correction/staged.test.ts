@@ -41,6 +41,17 @@ beforeEach(() => {
 });
 
 const stateOf = (sheet: string) => getSheet(editor, sheet, corrections.ctx).state;
+const logAugust = () =>
+  logRelease(desk.db, reporter, {
+    ...AUGUST,
+    race: { kind: 'existing', id: getRelease(reporter, id, desk.ctx()).facts.race.id },
+    shares: sharesOf([
+      ['Alder', '41'],
+      ['Brook', '45'],
+      ['Someone else', '6'],
+      ['Don’t know', '8', false],
+    ]),
+  });
 const stage = (release = id) =>
   corrections.correct(reporter, release, { n: typed('1,021') }, { how: 'staged' }).id;
 const replace = (correctionId: string, sheetId: string, actor = reporter) =>
@@ -88,10 +99,8 @@ describe('a staged correction', () => {
   });
 
   it('pulls what has no replacement that two people agreed to', () => {
-    const [first, second] = [
-      on.cleared(reporter, editor, id),
-      on.draft(reporter, id, 'lead:Alder|Someone else'),
-    ];
+    logAugust();
+    const [first, second] = [on.cleared(reporter, editor, id), on.draft(reporter, id, 'change:Alder')];
     on.file(reporter, second);
     on.clear(editor, second);
     const correctionId = stage();
@@ -106,14 +115,7 @@ describe('a staged correction', () => {
   });
 
   it('replaces words of a release that is compared with the corrected one', () => {
-    const race = { kind: 'existing' as const, id: getRelease(reporter, id, desk.ctx()).facts.race.id };
-    const shares = sharesOf([
-      ['Alder', '41'],
-      ['Brook', '45'],
-      ['Someone else', '6'],
-      ['Don’t know', '8', false],
-    ]);
-    const august = logRelease(desk.db, reporter, { ...AUGUST, race, shares });
+    const august = logAugust();
     const sheet = on.draft(reporter, id, 'change:Alder');
     on.file(reporter, sheet);
     on.clear(editor, sheet);
