@@ -1,3 +1,5 @@
+import type { LineText } from './sheet';
+
 export const CORRECTION_SOURCES = ['ours', 'pollster', 'late-data'] as const;
 export type CorrectionSource = (typeof CORRECTION_SOURCES)[number];
 
@@ -25,4 +27,20 @@ export const CORRECTION_EFFECT_NAMES: Record<CorrectionEffect, string> = {
   pulled: 'Pulled',
   flagged: 'Stays: source corrected, same numbers',
   replaced: 'Replaced in the same moment',
+};
+
+/** What a correction does to one sheet in print, for whoever decides on it. */
+export type Consequence = {
+  sheetId: string;
+  effect: CorrectionEffect;
+  /** The sheet is of another release, which is compared with this one. */
+  isComparison: boolean;
+  race: string;
+  pollster: string;
+  fieldStartOn: string;
+  fieldEndOn: string;
+  language: string;
+  /** The words in print. */
+  lines: LineText[];
+  embedId: string | null;
 };

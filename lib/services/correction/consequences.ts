@@ -1,29 +1,13 @@
 import 'server-only';
 import type { Tx } from '@/db/client';
 import { listEmbedsOf } from '@/db/queries/embed';
-import type { CorrectionEffect } from '@/lib/domain/corrections';
-import { inScreenOrder, type LineText } from '@/lib/domain/sheet';
+import type { Consequence } from '@/lib/domain/corrections';
+import { inScreenOrder } from '@/lib/domain/sheet';
 import type { CorrectedItem } from '@/lib/findings/what-changed';
 import { hashOf } from '@/lib/security/canonical';
 import { factsOf } from '../release/facts';
 import type { Effect } from './apply-in';
 import { clearedTexts } from './cleared-texts';
-
-/** What a correction does to one sheet in print, for whoever decides on it. */
-export type Consequence = {
-  sheetId: string;
-  effect: CorrectionEffect;
-  /** The sheet is of another release, which is compared with this one. */
-  isComparison: boolean;
-  race: string;
-  pollster: string;
-  fieldStartOn: string;
-  fieldEndOn: string;
-  language: string;
-  /** The words in print. */
-  lines: LineText[];
-  embedId: string | null;
-};
 
 export function consequencesOf(tx: Tx, releaseId: number, effects: readonly Effect[]): Consequence[] {
   const embeds = listEmbedsOf(

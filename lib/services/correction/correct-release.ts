@@ -5,7 +5,7 @@ import { findStagedCorrection, insertCorrection } from '@/db/queries/corrections
 import { findPollster } from '@/db/queries/race';
 import { findRelease, findWholeVersion, listVersions, updateRelease } from '@/db/queries/release';
 import { rehearse } from '@/db/write';
-import { CORRECTION_SOURCES } from '@/lib/domain/corrections';
+import { type Consequence, CORRECTION_SOURCES } from '@/lib/domain/corrections';
 import { releaseInput } from '@/lib/domain/release-input';
 import { type Actor, canLogReleases } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
@@ -19,7 +19,7 @@ import { readDeskSettings } from '../setup/desk-settings';
 import { MOVED_ON, refuseUnless } from '../sheet/sheet-state';
 import { applyIn, standingBefore } from './apply-in';
 import { recordCorrection } from './record-correction';
-import { type Consequence, consequencesOf, hashOfConsequences } from './consequences';
+import { consequencesOf, hashOfConsequences } from './consequences';
 
 const reporters = 'Only reporters and editors correct releases.';
 const LOOK_AGAIN =

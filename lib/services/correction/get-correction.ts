@@ -9,14 +9,14 @@ import {
 import { listNewestLines } from '@/db/queries/sheet';
 import { rehearse } from '@/db/write';
 import { isAsPrinted } from '@/lib/domain/as-printed';
-import type { CorrectionSource, CorrectionState } from '@/lib/domain/corrections';
+import type { Consequence, CorrectionSource, CorrectionState } from '@/lib/domain/corrections';
 import { type Actor, canActAsEditor, canReadUnpublished } from '@/lib/domain/roles';
 import type { LineState } from '@/lib/domain/sheet';
 import { AppError } from '@/lib/errors';
 import type { CorrectedItem } from '@/lib/findings/what-changed';
 import { authorize, type Ctx } from '../context';
 import { factsOf } from '../release/facts';
-import { type Consequence, consequencesOf } from './consequences';
+import { consequencesOf } from './consequences';
 import { previewStaged } from './settle-correction';
 
 export type Replacement = { sheetId: string; replaces: string; state: LineState };

@@ -1,9 +1,9 @@
 import 'server-only';
 import type { Tx } from '@/db/client';
 import type { CorrectionRow } from '@/db/queries/corrections';
+import type { Consequence } from '@/lib/domain/corrections';
 import type { Actor } from '@/lib/domain/roles';
 import { appendRecord } from '../history/append-record';
-import type { Consequence } from './consequences';
 
 /** The history tells what was corrected, why, and what it did to everything in print. */
 export function recordCorrection(
