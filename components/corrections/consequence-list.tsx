@@ -19,14 +19,14 @@ export function ConsequenceList({
     return <p className="max-w-prose">Nothing in print rests on this release.</p>;
   const worstFirst = [...consequences].sort((a, b) => RANK[a.effect] - RANK[b.effect]);
   return (
-    <ul className="border-t border-line" aria-label="What it does to words in print">
+    <ul className="border-t border-rule" aria-label="What it does to words in print">
       {worstFirst.map((one) => (
-        <li key={one.sheetId} className="border-b border-line py-3">
+        <li key={one.sheetId} className="border-b border-rule py-3">
           <p>
             <strong>{CORRECTION_EFFECT_NAMES[one.effect]}</strong>
             <span className="text-soft"> · {aboutOf(one)}</span>
           </p>
-          <p className="mt-1 max-w-prose font-copy text-18">
+          <p className="mt-1 max-w-prose font-serif text-18">
             <Link href={`/lines/${one.sheetId}`}>{titleOf(one.lines)}</Link>
           </p>
           <p className="mt-1 text-13 text-soft">
@@ -38,7 +38,7 @@ export function ConsequenceList({
               {one.lines.map(({ kind, text }) => (
                 <div key={kind} className="py-1">
                   <dt className="text-13 text-soft">{LINE_KIND_NAMES[kind]}</dt>
-                  <dd className="font-copy">{text}</dd>
+                  <dd className="font-serif">{text}</dd>
                 </div>
               ))}
             </dl>

@@ -12,7 +12,7 @@ export function WithdrawnLately({ withdrawn, zone }: { withdrawn: readonly Withd
       <ul>
         {withdrawn.map((one) => (
           <li key={one.sheetId} className="py-2">
-            <p className="max-w-prose font-copy line-through decoration-1">{one.headline}</p>
+            <p className="max-w-prose font-serif line-through decoration-1">{one.headline}</p>
             <p className="mt-1 max-w-prose text-13 text-soft">
               {one.race}, {one.pollster},{' '}
               {formatDayRange(one.fieldStartOn, one.fieldEndOn, 'en-GB', { withYear: true })}. Withdrawn{' '}

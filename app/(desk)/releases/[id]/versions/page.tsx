@@ -45,7 +45,7 @@ export default async function VersionsPage({ params }: { params: Promise<{ id: s
       <SectionHeading>What happened</SectionHeading>
       <ol className="mt-2 max-w-prose" reversed>
         {versions.map((version) => (
-          <li key={version.facts.version} className="border-b border-line py-3">
+          <li key={version.facts.version} className="border-b border-rule py-3">
             <Happened version={version} />
           </li>
         ))}
