@@ -38,9 +38,9 @@ export function FindingCard({
 }) {
   const Heading = `h${level}` as const;
   return (
-    <article aria-labelledby={id} className="keep-together border-b border-rule pt-1 pb-4 mb-5">
-      <div className="mb-2 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
-        <Heading id={id} className="text-18 font-semibold">
+    <article aria-labelledby={id} className="finding-card keep-together">
+      <div className="finding-head">
+        <Heading id={id} className="finding-heading">
           {heading}
         </Heading>
         {verdict ? <VerdictMark verdict={verdict} /> : null}

@@ -13,6 +13,7 @@ export function FindingList({
   document,
   answer,
   between,
+  besideOf,
   workingOf,
   actionOf,
 }: {
@@ -22,6 +23,8 @@ export function FindingList({
   answer: CheckAnswer;
   /** The two releases of a change, such as "August to September". */
   between?: string;
+  /** A reading that a house style wants beside the verdict; it never changes it. */
+  besideOf?: (finding: TestableFinding) => string | null;
   workingOf?: (finding: TestableFinding) => ReactNode;
   actionOf?: (finding: TestableFinding) => ReactNode;
 }) {
@@ -32,7 +35,7 @@ export function FindingList({
       heading={headingOf(finding, document, between)}
       verdict={finding.verdict}
       spec={soundingSpecOf(finding, document, ENGLISH_CHART_WORDS)}
-      why={explain(finding, answer)}
+      why={[...explain(finding, answer), besideOf?.(finding) ?? ''].filter((sentence) => sentence !== '')}
       working={workingOf?.(finding)}
       action={actionOf?.(finding)}
     />

@@ -1,4 +1,4 @@
-import { SectionHeading } from '../ui/section-heading';
+import { Fold } from './fold';
 import { isTakenBack } from './taken-back';
 import { when } from './when';
 
@@ -13,12 +13,21 @@ const WORDS: Record<string, string> = {
 };
 
 /** Everything done to a sheet, oldest first. */
-export function ActsList({ acts, now, zone }: { acts: readonly Act[]; now: number; zone: string }) {
+export function ActsList({
+  acts,
+  isUnfolded = true,
+  now,
+  zone,
+}: {
+  acts: readonly Act[];
+  isUnfolded?: boolean;
+  now: number;
+  zone: string;
+}) {
   if (acts.length === 0) return null;
   return (
-    <section aria-labelledby="acts" className="mt-6">
-      <SectionHeading id="acts">What was done</SectionHeading>
-      <ol className="mt-1">
+    <Fold id="acts" title="What was done" isOpen={isUnfolded}>
+      <ol>
         {acts.map(({ act, person, at, comment }, index) => {
           const isOwn = isTakenBack(acts, index);
           return (
@@ -31,6 +40,6 @@ export function ActsList({ acts, now, zone }: { acts: readonly Act[]; now: numbe
           );
         })}
       </ol>
-    </section>
+    </Fold>
   );
 }

@@ -1,4 +1,3 @@
-import type { Disclosed } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { DESIGN_NAMES, MODE_NAMES, POPULATION_NAMES, SAMPLE_SOURCE_NAMES } from '@/lib/domain/vocabulary';
 import type { BaseAnswer } from '@/lib/findings/check-types';
@@ -6,24 +5,28 @@ import { formatDay, formatDayRange } from '@/lib/format/date';
 import { formatCount, formatTrimmed } from '@/lib/format/number';
 import { baseSummary, noteText } from '@/lib/wording/base-words';
 import { DefinitionList } from '../ui/definition-list';
+import { Details } from '../ui/details';
 import { SectionHeading } from '../ui/section-heading';
+import { said } from './said';
 
 const LOCALE = 'en-GB';
 
-/** Who was asked, how many, when and how, and where to read it. */
+/** Who was asked, how many, when and how. */
 export function BaseFacts({ release, base }: { release: ReleaseFacts; base: BaseAnswer }) {
   return (
-    <section aria-labelledby="evidence-base">
+    <section aria-labelledby="evidence-base" className="base-facts">
       <SectionHeading id="evidence-base" level={3}>
         Base
       </SectionHeading>
-      <DefinitionList items={itemsOf(release)} className="text-13 [&>div]:py-0.5" />
-      <p className="mt-1 max-w-prose text-13 text-soft">{baseSummary(base)}</p>
-      {base.notes.map((note) => (
-        <p key={note} className="mt-1 max-w-prose text-13 text-soft">
-          {noteText(note)}
-        </p>
-      ))}
+      <DefinitionList items={itemsOf(release)} className="particulars" />
+      <Details summary="How it was counted">
+        <p className="max-w-prose text-13 text-soft">{baseSummary(base)}</p>
+        {base.notes.map((note) => (
+          <p key={note} className="mt-1 max-w-prose text-13 text-soft">
+            {noteText(note)}
+          </p>
+        ))}
+      </Details>
     </section>
   );
 }
@@ -45,30 +48,5 @@ function itemsOf(release: ReleaseFacts) {
       value: said(release.statedMargin, ({ pp }) => `± ${formatTrimmed(pp, 2, LOCALE)}`),
     },
     { term: 'Question', value: said(release.questionWording, (wording) => `“${wording}”`) },
-    { term: 'Source', value: sourceOf(release.sourceUrl) },
   ];
-}
-
-const WITHOUT = {
-  'not-disclosed': 'not disclosed',
-  'not-entered': 'not entered',
-  'not-applicable': 'does not apply',
-} as const;
-
-function said<T>(disclosed: Disclosed<T>, say: (value: T) => string): string {
-  return disclosed.status === 'given' ? say(disclosed.value) : WITHOUT[disclosed.status];
-}
-
-function sourceOf(url: Disclosed<string>) {
-  if (url.status !== 'given') return said(url, String);
-  return (
-    <a href={url.value} target="_blank" rel="noopener noreferrer" className="wrap-anywhere">
-      {hostOf(url.value)}
-      <span className="sr-only"> (opens in a new tab)</span>
-    </a>
-  );
-}
-
-function hostOf(url: string): string {
-  return URL.canParse(url) ? new URL(url).host : url;
 }

@@ -1,4 +1,4 @@
-import { formatInstant, formatTime } from '@/lib/format/date';
+import { formatExactInstant } from '@/lib/format/date';
 import { Band } from '../ui/band';
 
 const LOCALE = 'en-GB';
@@ -17,8 +17,10 @@ export function EmbargoBand({ embargo, isOnList }: { embargo: Embargo; isOnList?
   );
 }
 
-/** Its end on the clocks it was given for, and in UTC where those differ. */
+/** Its end to the second, on the clocks it was given for, and in UTC where those differ. */
 export function embargoEnd({ at, zone }: { at: number; zone: string }): string {
-  const [there, utc] = [formatInstant(at, zone, LOCALE), formatInstant(at, 'UTC', LOCALE)];
-  return there === utc ? `${utc} UTC` : `${there} in ${zone} (${formatTime(at, 'UTC', LOCALE)} UTC)`;
+  const [there, utc] = [formatExactInstant(at, zone, LOCALE), formatExactInstant(at, 'UTC', LOCALE)];
+  if (there === utc) return `${utc} UTC`;
+  const [[day], [utcDay, utcTime]] = [there.split(', '), utc.split(', ')];
+  return `${there} in ${zone} (${day === utcDay ? utcTime : utc} UTC)`;
 }

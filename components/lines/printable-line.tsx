@@ -2,8 +2,8 @@ import { LINE_KIND_NAMES, type LineKind } from '@/lib/domain/sheet';
 import type { WordingMark } from '@/lib/wording/check/types';
 import { CopyBlock } from '../ui/copy-block';
 import { SectionHeading } from '../ui/section-heading';
-import { WordDiff } from '../ui/word-diff';
 import { LineMarks } from '../wording-check/line-marks';
+import { CommentedWords, type LineComment } from './commented-words';
 import { diffParts } from './diff-parts';
 
 /** Set smaller, so that claim, sentence and evidence fit one screen. */
@@ -24,6 +24,7 @@ export function PrintableLine({
   knockedOut,
   marks,
   lang,
+  comments = [],
 }: {
   kind: LineKind;
   text: string;
@@ -32,19 +33,24 @@ export function PrintableLine({
   knockedOut: boolean;
   marks: readonly WordingMark[];
   lang: string;
+  /** Open ones on this line. */
+  comments?: readonly LineComment[];
 }) {
   const id = `line-${kind}`;
   return (
-    <section aria-labelledby={id} className="keep-together mb-4">
+    <section aria-labelledby={id} className="printable-line keep-together">
       <SectionHeading id={id} level={3}>
         {LINE_KIND_NAMES[kind]}
         {knockedOut ? <span className="font-normal">: knocked out, not part of this sheet</span> : null}
       </SectionHeading>
       {knockedOut ? null : (
-        <div className={SMALL.includes(kind) ? '[&_.copy-block]:py-2 [&_.copy-block]:text-15' : undefined}>
+        <div className={SMALL.includes(kind) ? 'printable-small' : undefined}>
           <CopyBlock lang={lang} isDisplay={kind === 'headline'}>
             <div className="whitespace-pre-line">
-              {before === null || before === text ? text : <WordDiff parts={diffParts(before, text)} />}
+              <CommentedWords
+                parts={before === null || before === text ? [{ text }] : diffParts(before, text)}
+                comments={comments}
+              />
             </div>
           </CopyBlock>
           <LineMarks marks={marks} lang={lang} />

@@ -1,5 +1,6 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { classNames } from './class-names';
 
 export type Crumb = { label: string; href?: string };
 
@@ -9,14 +10,17 @@ export function PageTitle({
   sub,
   crumbs = [],
   note,
+  isCompact = false,
 }: {
   title: ReactNode;
   sub?: ReactNode;
   crumbs?: readonly Crumb[];
   note?: ReactNode;
+  /** In one line with its particulars where the screen is wide: for pages that have to fit it. */
+  isCompact?: boolean;
 }) {
   return (
-    <header className="page-title">
+    <header className={classNames('page-title', isCompact ? 'page-title-compact' : null)}>
       {crumbs.length > 0 || note ? (
         <div className="page-title-top">
           {crumbs.length > 0 ? (

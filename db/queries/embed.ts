@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, desc, eq, inArray, lt, max, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, lt, max, sql } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { embeds, embedVersions } from '@/db/schema/embeds';
 import { people } from '@/db/schema/people';
@@ -23,6 +23,17 @@ export function listEmbedsOf(conn: Conn, sheetIds: number[]): Map<number, string
     .where(inArray(embeds.sheetId, sheetIds))
     .all();
   return new Map(rows.map(({ sheetId, publicId }) => [sheetId, publicId]));
+}
+
+/** Embeds of one claim of one release, in every language. */
+export function listEmbedsOfClaim(conn: Conn, claim: { releaseId: number; claimKey: string }) {
+  return conn
+    .select({ publicId: embeds.publicId, language: sheets.language })
+    .from(embeds)
+    .innerJoin(sheets, eq(sheets.id, embeds.sheetId))
+    .where(and(eq(sheets.releaseId, claim.releaseId), eq(sheets.claimKey, claim.claimKey)))
+    .orderBy(asc(sheets.language), asc(embeds.id))
+    .all();
 }
 
 export function insertEmbed(conn: Conn, row: typeof embeds.$inferInsert): EmbedRow {
@@ -81,6 +92,7 @@ export function findPublicEmbed(
         hash: evidence.hash,
         evidenceId: evidence.id,
         embargoAt: releases.embargoAt,
+        embargoZone: releases.embargoZone,
         raceId: releases.raceId,
         publicSince: sql<number>`max(${embedVersions.createdAt}, coalesce(${releases.embargoLiftedAt}, ${releases.embargoAt}, 0))`,
         isPublic: isPublic(now),

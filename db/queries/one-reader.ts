@@ -3,6 +3,7 @@ import { and, eq, inArray, isNull } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { oneReaderReleases } from '@/db/schema/clearing';
 import { people } from '@/db/schema/people';
+import { sheets } from '@/db/schema/sheets';
 
 export type OneReaderRow = typeof oneReaderReleases.$inferSelect;
 
@@ -25,6 +26,17 @@ export function listUnread(conn: Conn, evidenceIds: number[]): Map<number, strin
     .where(and(inArray(oneReaderReleases.evidenceId, evidenceIds), isNull(oneReaderReleases.secondAt)))
     .all();
   return new Map(rows.map(({ evidenceId, person }) => [evidenceId, person]));
+}
+
+/** Those of these sheets whose words one editor released alone and nobody else has read yet. */
+export function listUnreadSheets(conn: Conn, publicIds: string[]): Set<string> {
+  const rows = conn
+    .select({ sheetId: sheets.publicId })
+    .from(oneReaderReleases)
+    .innerJoin(sheets, eq(sheets.id, oneReaderReleases.sheetId))
+    .where(and(inArray(sheets.publicId, publicIds), isNull(oneReaderReleases.secondAt)))
+    .all();
+  return new Set(rows.map(({ sheetId }) => sheetId));
 }
 
 /** False where somebody read it before. */

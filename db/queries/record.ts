@@ -52,6 +52,7 @@ export function listRecords(conn: Conn, page: RecordPage, viewer: Viewer, now: n
       subject: subjects.name,
       race: races.name,
       pollster: pollsters.name,
+      raceId: releases.raceId,
       isVisible: sql<number>`(${visible(conn, viewer, now)})`.mapWith(Boolean),
       isHeld: sql<number>`(not (${isPublic(now)}))`.mapWith(Boolean),
     })

@@ -251,7 +251,9 @@ export const releaseInput = z
     ...days.shape,
     embargo: z
       .strictObject({
-        local: z.string().regex(/^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}$/, 'Type date and time of the embargo.'),
+        local: z
+          .string()
+          .regex(/^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}(:\d{2})?$/, 'Type date and time of the embargo.'),
         zone: line('Choose the time zone of the embargo.', 64),
       })
       .nullable(),

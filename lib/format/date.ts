@@ -80,6 +80,18 @@ export function formatInstant(atMs: number, zone: string, locale: string): strin
   return `${day.format(atMs)}, ${formatTime(atMs, zone, locale)}`;
 }
 
+/**
+ * The same with the seconds where it is no whole minute, for an hour that holds to the second.
+ *
+ * @throws RangeError where the zone is not an IANA time zone
+ * @example formatExactInstant(Date.UTC(2026, 8, 18, 7, 12, 5), 'Europe/Vienna', 'en-GB') // => '18 September 2026, 09:12:05'
+ */
+export function formatExactInstant(atMs: number, zone: string, locale: string): string {
+  const seconds = Math.floor((atMs % 60_000) / 1000);
+  const whole = formatInstant(atMs, zone, locale);
+  return seconds === 0 ? whole : `${whole}:${String(seconds).padStart(2, '0')}`;
+}
+
 /** The time of day alone, on 24 hours: "09:12". */
 export function formatTime(atMs: number, zone: string, locale: string): string {
   const time = cached(locale, {

@@ -3,16 +3,15 @@ import { valueOf } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { LineText } from '@/lib/domain/sheet';
 import type { Language } from '@/lib/domain/vocabulary';
-import { formatPercent, formatTrimmed } from '@/lib/format/number';
-import { type AsPrintedMessages, EN_AS_PRINTED } from './as-printed-messages';
+import { AS_PRINTED_MESSAGES } from './as-printed-messages';
 import type { HouseStyle } from './house-style';
+import { printLevel } from './margin-slots';
 import { plain } from './names';
-import { printShare } from './print';
+import { printNumber, printShare } from './print';
 import { releaseSlots } from './release-slots';
 import { say, type Slots } from './say';
 import { type Voice, voiceOf } from './voice';
 
-const MESSAGES: Partial<Record<string, AsPrintedMessages>> = { en: EN_AS_PRINTED };
 /** More answers than these do not stand in a headline. */
 const HEADLINE_ANSWERS = 4;
 
@@ -25,17 +24,15 @@ const HEADLINE_ANSWERS = 4;
  *
  * @param release one version of a release
  * @param houseStyle percent style, name of the newsroom and words for the closed lists
- * @param language a language that these sentences exist in
+ * @param language of the sheet
  * @returns headline, body and caveat
- * @throws RangeError `draftAsPrinted requires a language that it is written in`
  */
 export function draftAsPrinted(
   release: ReleaseFacts,
   houseStyle: HouseStyle,
   language: Language,
 ): LineText[] {
-  const messages = MESSAGES[language];
-  if (!messages) throw new RangeError('draftAsPrinted requires a language that it is written in');
+  const messages = AS_PRINTED_MESSAGES[language];
   const voice = voiceOf(houseStyle, language);
   const slots = slotsOf(release, voice);
   const told = (message: string) => say(message, slots, voice.locale);
@@ -68,9 +65,9 @@ function slotsOf(release: ReleaseFacts, voice: Voice): Slots {
     shares: printed(false).join(', '),
     random: release.sampleSource === 'probability' ? 'yes' : 'no',
     stated: margin === null ? 'none' : 'given',
-    statedPp: margin === null ? '' : formatTrimmed(margin.pp, 2, voice.locale),
+    statedPp: margin === null ? '' : printNumber(margin.pp, 2, voice, 'points'),
     statedCount: margin?.pp ?? 0,
-    statedLevel: margin === null ? '' : formatPercent(margin.level * 100, 0, voice.locale),
+    statedLevel: margin === null ? '' : printLevel(margin.level, voice),
     items: missingItems(release, voice),
   };
 }

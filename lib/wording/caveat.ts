@@ -1,10 +1,14 @@
 import { ELECTION_KINDS } from '@/lib/domain/vocabulary';
 import type { DisclosureStatus } from '@/lib/domain/disclosed';
+import { roundHalfUp } from '@/lib/format/number';
 import type { CaveatSentence, Terms } from './language-pack';
 import { rebasedSentence } from './context';
 import { sayAll, type Draft } from './draft';
 import { namesOf } from './draft-finding';
 import { figureOf, isOfTwoReleases } from './draft-input';
+import { printNumber } from './print';
+import type { Slots } from './say';
+import { twiceTheMargin } from './twice-margin';
 
 /** Below this share the margin is well under the one that a pollster states for a share near half. */
 const SMALL_PCT = 15;
@@ -19,6 +23,7 @@ export function draftCaveat(draft: Draft): string {
   const closing: (CaveatSentence | null)[] = [
     sampleSentence(draft),
     marginSentence(draft),
+    twiceSentence(draft),
     smallShareSentence(draft),
     errorSentence(draft),
   ];
@@ -27,7 +32,7 @@ export function draftCaveat(draft: Draft): string {
     rebasedSentence(draft),
     missing('not-disclosed', draft),
     missing('not-entered', draft),
-    sayAll(closing.map(messageOf(pack.caveat)), draft),
+    sayAll(closing.map(messageOf(pack.caveat)), draft, twiceSlots(draft)),
   ]
     .filter((text) => text !== '')
     .join(' ');
@@ -71,6 +76,28 @@ function marginSentence({ input }: Draft): CaveatSentence | null {
   if (answer.base.basis === 'modelled' || answer.base.basis === 'comparison') return 'margin-none';
   if (release.sampleSource !== 'probability') return null;
   return release.statedMargin.status === 'given' ? 'margin-stated-only' : 'margin-none';
+}
+
+/** The house reading beside ours, where the desk wants it; older packs have no sentence for it. */
+function twiceSentence(draft: Draft): CaveatSentence | null {
+  return readTwice(draft) && draft.pack.caveat['twice-margin'] ? 'twice-margin' : null;
+}
+
+function readTwice({ input: { houseStyle, finding, answer, release, policy } }: Draft) {
+  return houseStyle.twiceTheMargin ? twiceTheMargin(finding, answer.base, release, policy.level) : null;
+}
+
+function twiceSlots(draft: Draft): Slots {
+  const reading = readTwice(draft);
+  if (!reading) return {};
+  const { marginPp, zone, test } = reading;
+  const shown = roundHalfUp(marginPp, 1);
+  return {
+    shareMargin: printNumber(shown, 1, draft.voice, 'points'),
+    shareMarginCount: shown,
+    zone,
+    thumb: test,
+  };
 }
 
 function errorSentence({ input }: Draft): CaveatSentence {

@@ -28,8 +28,8 @@ export function draftCorrection(draft: Draft): string {
       count: items.length,
     }),
     ...items.map(({ key, slots }) => sayAll([pack.correction[key]], draft, slots)),
-    ...(isWeaker ? [sayAll([pack.correction.weaker], draft)] : []),
-    sayAll([pack.correction.now], draft, { line }),
+    ...(isWeaker && items.length > 0 ? [sayAll([pack.correction.weaker], draft)] : []),
+    sayAll([pack.correction.now], draft, { line, count: items.length }),
   ].join(' ');
 }
 

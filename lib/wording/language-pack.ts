@@ -64,6 +64,7 @@ export type CaveatSentence =
   | 'sample-comparison'
   | 'margin'
   | 'margin-stated-only'
+  | 'twice-margin'
   | 'small-shares'
   | 'margin-none'
   | 'errors-before-a-vote'

@@ -4,7 +4,14 @@ import type { Comparability } from '@/lib/findings/comparability';
 import { checkedReleaseOf } from './check/checked-release';
 import { checkWording } from './check/check-wording';
 import { onePollMarks } from './check/one-poll';
-import type { CheckedRelease, TextPart, WordingGrade, WordingLanguage, WordingMark } from './check/types';
+import type {
+  CheckedRelease,
+  TextPart,
+  WordingGrade,
+  WordingCheckInput,
+  WordingLanguage,
+  WordingMark,
+} from './check/types';
 import type { LineKind } from '@/lib/domain/sheet';
 import type { HouseStyle } from './house-style';
 
@@ -18,6 +25,8 @@ export type LineBasis = {
   policy: Policy;
   houseStyle: Omit<HouseStyle, 'messages'>;
   language: WordingLanguage;
+  /** What stood in print before: a correction notice quotes its figures. */
+  was?: Pick<LineBasis, 'release' | 'previous'>;
   /** How many polls the claim rests on. */
   polls: number;
 };
@@ -46,11 +55,12 @@ export function lineChecker(basis: LineBasis): (line: CheckedLine) => readonly W
     const part = PARTS[kind] ?? 'line';
     const common = { text, language, houseStyle, policy, part, polls };
     if (text === draft) return onePollMarks({ ...common, releases: [] });
-    const key = `${part} ${text}`;
+    const key = `${kind === 'correction-notice' ? kind : part} ${text}`;
     const before = known.get(key);
     if (before) return before;
     checked ??= releaseOf(basis);
-    const { marks } = checkWording({ ...common, releases: [checked] });
+    const now = checkWording({ ...common, releases: [checked] }).marks;
+    const marks = kind === 'correction-notice' && basis.was ? inBoth(now, common, basis) : now;
     if (known.size >= KEPT) known.clear();
     known.set(key, marks);
     return marks;
@@ -70,6 +80,17 @@ function releaseOf({ release, previous, answer, comparison, policy }: LineBasis)
     isOverridden,
   };
   return checkedReleaseOf(release, previous, policy, { answer, comparability });
+}
+
+/** A correction tells of two versions: only what neither of them supports is marked. */
+function inBoth(
+  now: readonly WordingMark[],
+  common: Omit<WordingCheckInput, 'releases'>,
+  { was, release, previous, policy }: LineBasis,
+): readonly WordingMark[] {
+  const before = checkedReleaseOf(was?.release ?? release, was?.previous ?? previous, policy);
+  const then = checkWording({ ...common, releases: [before] }).marks;
+  return now.filter((mark) => then.some((one) => one.start <= mark.end && mark.start <= one.end));
 }
 
 /** The marks of a grade; `wrong` and `not-supported` are what filing refuses. */

@@ -1,17 +1,8 @@
-import type { Browser, Page } from '@playwright/test';
-import { expect, readAccounts, signIn, test } from './support';
+import type { Page } from '@playwright/test';
+import { deskOf, expect, test } from './support';
 
 // Of two who clear at once one is told that somebody was faster.
 test.use({ expectedErrors: [/status of 409/] });
-
-async function deskOf(browser: Browser, name: string): Promise<Page> {
-  const page = await (await browser.newContext()).newPage();
-  await signIn(
-    page,
-    readAccounts().find((account) => account.name === name)!,
-  );
-  return page;
-}
 
 async function draftAndFile(page: Page): Promise<string> {
   await page.goto('/releases');

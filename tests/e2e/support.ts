@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { expect, type Page, test as base } from '@playwright/test';
+import { type Browser, type Cookie, expect, type Page, test as base } from '@playwright/test';
 import { browserTests } from '../../playwright.config';
 
 export { expect };
@@ -41,10 +41,26 @@ export function accountWith(role: string, { only = true } = {}): Account {
   return account;
 }
 
+/** Sessions opened at the door before, by the address of their person: later pages of that person carry them on. */
+const opened = new Map<string, Cookie[]>();
+
+/** Signs a person in; through the door the first time, with the session of that time afterwards. */
 export async function signIn(page: Page, { email, password }: Account): Promise<void> {
+  const kept = opened.get(email);
+  if (kept) return page.context().addCookies(kept);
   await page.goto('/sign-in');
   await page.getByLabel('Email', { exact: true }).fill(email);
   await page.getByLabel('Password', { exact: true }).fill(password);
   await page.getByRole('button', { name: 'Sign in' }).click();
   await page.waitForURL((url) => url.pathname !== '/sign-in');
+  opened.set(email, await page.context().cookies());
+}
+
+/** A page of one of the demo people, in a browser of their own. */
+export async function deskOf(browser: Browser, name: string): Promise<Page> {
+  const account = readAccounts().find((one) => one.name === name);
+  if (!account) throw new Error(`no demo account is called ${name}`);
+  const page = await (await browser.newContext()).newPage();
+  await signIn(page, account);
+  return page;
 }

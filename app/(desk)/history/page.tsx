@@ -9,6 +9,7 @@ import { formatInstant } from '@/lib/format/date';
 import { type HistoryEntry, listHistory } from '@/lib/services/history/list-history';
 import { aboutWords } from './_components/about-words';
 import { EntryChanges } from './_components/entry-changes';
+import { EntryMarks } from './_components/entry-marks';
 import { HeadNote } from './_components/head-note';
 
 export const metadata: Metadata = { title: 'History' };
@@ -85,15 +86,19 @@ function columnsFor(zone: string, only: Only | null): Column<HistoryEntry>[] {
     {
       key: 'entity',
       head: 'About',
-      cell: (entry) =>
-        only?.id === entry.entityId ? (
-          aboutWords(entry)
-        ) : (
-          <Link href={addressOf({ id: entry.entityId, kind: entry.entity }, null)}>
-            {aboutWords(entry)}
-            <span className="sr-only">, its own history {entry.about === null ? entry.entityId : ''}</span>
-          </Link>
-        ),
+      cell: (entry) => (
+        <>
+          {only?.id === entry.entityId ? (
+            aboutWords(entry)
+          ) : (
+            <Link href={addressOf({ id: entry.entityId, kind: entry.entity }, null)}>
+              {aboutWords(entry)}
+              <span className="sr-only">, its own history {entry.about === null ? entry.entityId : ''}</span>
+            </Link>
+          )}
+          <EntryMarks marks={entry.marks} />
+        </>
+      ),
     },
     { key: 'changes', head: 'Before, after, why', cell: (entry) => <EntryChanges entry={entry} /> },
   ];

@@ -46,6 +46,7 @@ function Embargo({ form }: InForm) {
         label="Embargo ends"
         hint="Date and time on the clocks of that zone."
         type="datetime-local"
+        step={1}
       />
       <TextField
         form={form}

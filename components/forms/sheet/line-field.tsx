@@ -1,6 +1,8 @@
 import { LINE_KIND_NAMES, REQUIRED_LINE_KINDS } from '@/lib/domain/sheet';
 import type { WordingMark } from '@/lib/wording/check/types';
+import type { LineComment } from '../../lines/commented-words';
 import { diffParts } from '../../lines/diff-parts';
+import { LineComments } from '../../lines/line-comments';
 import { Button } from '../../ui/button';
 import { TextArea } from '../../ui/text-area';
 import { WordDiff } from '../../ui/word-diff';
@@ -13,6 +15,7 @@ export function LineField({
   draft,
   lang,
   marks,
+  comments,
   error,
   onChange,
 }: {
@@ -20,6 +23,8 @@ export function LineField({
   draft: string;
   lang: string;
   marks: readonly WordingMark[];
+  /** Open ones on this line. */
+  comments: readonly LineComment[];
   error?: string;
   onChange: ChangeLine;
 }) {
@@ -27,6 +32,7 @@ export function LineField({
   const id = fieldIdOf(kind);
   const name = LINE_KIND_NAMES[kind];
   const isChanged = text !== draft;
+  const about = [isChanged ? `${id}-draft` : null, comments.length > 0 ? `${id}-comments` : null];
   return (
     <div className="mb-5 border-b border-rule pb-3">
       {knockedOut ? (
@@ -46,13 +52,14 @@ export function LineField({
             lang={lang}
             value={text}
             error={error}
-            aria-describedby={isChanged ? `${id}-draft` : undefined}
+            aria-describedby={about.filter((one) => one !== null).join(' ') || undefined}
             fieldClassName="mb-1!"
             onChange={(event) => onChange(kind, { text: event.target.value })}
           />
           <div aria-live="polite">
             <LineMarks marks={marks} lang={lang} />
           </div>
+          <LineComments id={`${id}-comments`} comments={comments} />
           {isChanged ? (
             <div id={`${id}-draft`} className="mt-1 max-w-prose font-serif whitespace-pre-line">
               <span className="font-sans text-13 text-soft">Against the draft: </span>

@@ -1,5 +1,6 @@
-import { LINE_KIND_NAMES } from '@/lib/domain/sheet';
+import { LINE_KIND_NAMES, type LineKind } from '@/lib/domain/sheet';
 import { ErrorSummary } from '../../ui/error-summary';
+import type { LineComment } from '../../lines/commented-words';
 import type { LineMarksOf } from '../../wording-check/use-line-marks';
 import { fieldIdOf, LineField } from './line-field';
 import type { ChangeLine, WrittenLine } from './use-lines';
@@ -10,6 +11,7 @@ export function LineFields({
   drafts,
   lang,
   marks,
+  comments,
   errors,
   attempt,
   onChange,
@@ -19,6 +21,7 @@ export function LineFields({
   lang: string;
   /** By line. */
   marks: LineMarksOf;
+  comments: (kind: LineKind) => readonly LineComment[];
   /** By line. */
   errors: Readonly<Record<string, string>>;
   attempt: number;
@@ -38,6 +41,7 @@ export function LineFields({
           draft={drafts[line.kind] ?? ''}
           lang={lang}
           marks={marks[line.kind] ?? []}
+          comments={comments(line.kind)}
           error={errors[line.kind]}
           onChange={onChange}
         />

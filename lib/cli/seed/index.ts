@@ -8,6 +8,7 @@ import { reviseSheet } from '@/lib/services/sheet/change-filed';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
 import { pullSheet } from '@/lib/services/sheet/pull-sheet';
 import type { DemoAccount } from '../accounts';
+import { seedAsPrinted, seedCalendar, seedWork } from './clearing';
 import { formOf } from './form';
 import { seedPeople, type Staff } from './people';
 import { type DemoKey, demoReleases, type RaceKey, RACES } from './releases';
@@ -91,6 +92,7 @@ function seedSheets(db: Db, staff: Staff, releases: Record<DemoKey, string>, now
 
   const waiting = desk.draft(quent, releases.kelmouth, 'change:Alder', next());
   desk.file(quent, waiting, next());
+  seedWork(db, staff, waiting, next(), now);
 
   const sentBack = desk.draft(quill, releases.approval, 'lead:Disapprove|Approve', next());
   desk.file(quill, sentBack, next());
@@ -102,4 +104,7 @@ function seedSheets(db: Db, staff: Staff, releases: Record<DemoKey, string>, now
   desk.file(quill, hidden, next());
   desk.clear(varn, hidden, next());
   createEmbed(varn, { sheetId: hidden }, { db, now: next() });
+
+  seedAsPrinted(db, staff, releases.toll, next());
+  seedCalendar(db, staff, releases.kelmouth, next(), now);
 }

@@ -16,6 +16,23 @@ export function holdsOn(conn: Conn, raceId: number, now: number): Hold[] {
     .map(({ jurisdiction, toAt, zone, rule }) => ({ jurisdiction, untilAt: toAt, zone, rule }));
 }
 
+export type BanAhead = Hold & { fromAt: number };
+
+/** The bans that will come into force on a race, the nearest first. */
+export function bansAheadOn(conn: Conn, raceId: number, now: number): BanAhead[] {
+  const race = findRaceById(conn, raceId);
+  return listBansOn(conn, raceId, now)
+    .filter((ban) => bansRace(ban, race) && banStateAt(ban, now) === 'ahead')
+    .map(({ jurisdiction, fromAt, toAt, zone, rule }) => ({
+      jurisdiction,
+      fromAt,
+      untilAt: toAt,
+      zone,
+      rule,
+    }))
+    .sort((a, b) => a.fromAt - b.fromAt);
+}
+
 /** What of a race is barred now, for what is public. */
 export function barOn(conn: Conn, raceId: number, now: number) {
   return barOf(listBansOn(conn, raceId, now), findRaceById(conn, raceId), now);

@@ -10,6 +10,7 @@ import { sha256 } from '@/lib/security/ids';
 import { barOn } from '../bans/hold';
 import type { Ctx } from '../context';
 import type { EvidenceBody } from '../sheet/evidence-body';
+import { versionBefore } from './embed-hold';
 import { encodeBody, type Encoding, encodingFor } from './encode-body';
 import { heldOf } from './held-embed';
 import { correctionNote } from './correction-note';
@@ -65,17 +66,13 @@ export function answerEmbed(request: EmbedRequest, ctx: Ctx = { db: getDb(), now
   const theme = THEME_CHOICES.find((choice) => choice === request.query.get('theme')) ?? 'auto';
   if (found.version.state === 'pulled') return withdrawn(found, part, theme, ctx);
   const bar = barOn(ctx.db, found.raceId, ctx.now);
-  const shown = bar.sinceAt === null ? found : frozenAt(ctx, found, number, bar.sinceAt);
+  const shown =
+    bar.sinceAt === null
+      ? found
+      : versionBefore(ctx.db, found, number ? Number(number) : null, bar.sinceAt, ctx.now);
   if (!shown) return notFound();
   if (bar.figures === 'all-figures') return held(bar.untilAt ?? 0, part, theme);
   return served(shown, part, theme, request, ctx, secondsLeft(bar.nextAt, ctx.now));
-}
-
-/** The version that was public when a ban began; nothing that came after it is shown while it lasts. */
-function frozenAt(ctx: Ctx, found: Found, number: string | undefined, sinceAt: number): Found | null {
-  const asked = number ? Number(number) : null;
-  const before = findPublicEmbed(ctx.db, found.embedId, asked, ctx.now, sinceAt);
-  return before && before.publicSince < sinceAt && before.version.state !== 'pulled' ? before : null;
 }
 
 function served(

@@ -2,12 +2,14 @@ import 'server-only';
 import { findEvidence } from '@/db/queries/clearing';
 import { listEmbeds as listRows } from '@/db/queries/embed';
 import { isListed } from '@/db/queries/embargo';
+import { listUnread } from '@/db/queries/one-reader';
 import { isReleasePublic } from '@/db/queries/sheet';
 import { type Actor, canMakeEmbeds } from '@/lib/domain/roles';
 import { readEnv } from '@/lib/env';
 import { authorize, type Ctx } from '../context';
 import { recordEmbargoViews } from '../release/record-embargo-views';
 import type { EvidenceBody } from '../sheet/evidence-body';
+import { type EmbedHold, holdOfEmbed } from './embed-hold';
 
 export type EmbedItem = {
   id: string;
@@ -22,6 +24,10 @@ export type EmbedItem = {
   pulledAt: number | null;
   createdBy: string;
   createdAt: number;
+  /** The editor who released its words alone, until a second person has read them. */
+  oneReader: string | null;
+  /** What keeps its newest version from the public now. */
+  hold: EmbedHold | null;
 };
 
 /** Every embed with where it stands; one under embargo waits, its address exists already. */
@@ -31,6 +37,10 @@ export function listEmbeds(actor: Actor, ctx: Ctx): EmbedItem[] {
   const isPublicNow = (row: (typeof rows)[number]) => isReleasePublic(ctx.db, row.release.id, ctx.now);
   const held = rows.filter((row) => !isPublicNow(row) && isListed(ctx.db, row.release.id, actor));
   recordEmbargoViews(ctx, actor, new Set(held.map(({ release }) => release.id)), 'embeds');
+  const unread = listUnread(
+    ctx.db,
+    rows.map(({ evidenceId }) => evidenceId),
+  );
   return rows.map((row) => {
     const isPublic = isPublicNow(row);
     const body = JSON.parse(findEvidence(ctx.db, row.evidenceId)!.bytes.toString('utf8')) as EvidenceBody;
@@ -47,6 +57,8 @@ export function listEmbeds(actor: Actor, ctx: Ctx): EmbedItem[] {
       pulledAt: row.version.pulledAt,
       createdBy: row.createdBy,
       createdAt: row.embed.createdAt,
+      oneReader: unread.get(row.evidenceId) ?? null,
+      hold: holdOfEmbed(ctx.db, row.embed.publicId, ctx.now),
     };
   });
 }

@@ -5,6 +5,7 @@ import { type Actor, canReadHistory, canReadUnpublished } from '@/lib/domain/rol
 import { authorize, type Ctx, parse } from '../context';
 import { recordEmbargoViews } from '../release/record-embargo-views';
 import type { Head } from './head';
+import { type HistoryMark, historyMarks } from './marks';
 
 export const PAGE_SIZE = 50;
 
@@ -25,6 +26,8 @@ export type HistoryEntry = {
   reason: string | null;
   /** An embargo keeps what changed, and why, from this reader for now. */
   hidden: boolean;
+  /** What stands over its sheet or embed as it is now. */
+  marks: HistoryMark[];
   hash: string;
 };
 
@@ -49,24 +52,31 @@ export function listHistory(actor: Actor, input: unknown, ctx: Ctx): HistoryPage
   const rows = listRecords(ctx.db, asked, actor, ctx.now);
   const page = rows.slice(0, PAGE_SIZE);
   recordViews(actor, page, ctx);
+  const marks = historyMarks(ctx, page);
   const last = findLastRecord(ctx.db);
   return {
-    entries: page.map(({ record, person, isVisible, ...names }) => ({
-      seq: record.seq,
-      at: record.at,
-      person: person ?? THE_SYSTEM,
-      action: record.action,
-      entity: record.entity,
-      entityId: record.entityId,
-      about: isVisible ? aboutOf(record.entity, names) : null,
-      before: isVisible ? read(record.before) : null,
-      after: isVisible ? read(record.after) : null,
-      reason: isVisible ? record.reason : null,
-      hidden: !isVisible,
-      hash: record.hash,
-    })),
+    entries: page.map((row) => entryOf(row, marks(row))),
     older: rows.length > PAGE_SIZE ? (page.at(-1)?.record.seq ?? null) : null,
     head: last ? { seq: last.seq, hash: last.hash } : null,
+  };
+}
+
+function entryOf(row: ReturnType<typeof listRecords>[number], marks: HistoryMark[]): HistoryEntry {
+  const { record, person, isVisible, ...names } = row;
+  return {
+    seq: record.seq,
+    at: record.at,
+    person: person ?? THE_SYSTEM,
+    action: record.action,
+    entity: record.entity,
+    entityId: record.entityId,
+    about: isVisible ? aboutOf(record.entity, names) : null,
+    before: isVisible ? read(record.before) : null,
+    after: isVisible ? read(record.after) : null,
+    reason: isVisible ? record.reason : null,
+    hidden: !isVisible,
+    marks,
+    hash: record.hash,
   };
 }
 

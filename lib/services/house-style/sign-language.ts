@@ -7,13 +7,11 @@ import { type Actor, canActAsEditor, canReadCopyDesk } from '@/lib/domain/roles'
 import { type Language, LANGUAGES } from '@/lib/domain/vocabulary';
 import { AppError } from '@/lib/errors';
 import { hashOf } from '@/lib/security/canonical';
+import { PACK_STATUS } from '@/lib/wording/pack-status';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
 import { EDITORS_ONLY, refuseUnless } from './open-version';
 import { readStyle } from './style-body';
-
-/** Languages that the product's makers have written and reviewed themselves. */
-const REVIEWED: readonly string[] = ['en'];
 
 export const DECLARATION = 'I read this language as a native and have read its sentences in this version.';
 
@@ -35,7 +33,7 @@ function stateOf(conn: Conn, language: Language): LanguageState {
   const packHash = packHashOf(conn, language);
   const found = findSignature(conn, language, packHash);
   const signature = found?.signature.act === 'signed' ? { by: found.person, at: found.signature.at } : null;
-  const isReviewed = REVIEWED.includes(language);
+  const isReviewed = PACK_STATUS[language].status === 'reviewed-here';
   return { language, packHash, isReviewed, signature, isClearable: isReviewed || signature !== null };
 }
 

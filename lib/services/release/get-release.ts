@@ -5,6 +5,7 @@ import { isReleasePublic } from '@/db/queries/sheet';
 import { type Actor, canActAsEditor, canReadUnpublished } from '@/lib/domain/roles';
 import { AppError } from '@/lib/errors';
 import { renderMarkdown } from '@/lib/markdown/render-markdown';
+import type { HouseStyle } from '@/lib/wording/house-style';
 import { authorize, type Ctx } from '../context';
 import { type Computed, computeFindings } from './compute-findings';
 import { whyNotRevised } from './why-not-revised';
@@ -22,6 +23,8 @@ export type ReleaseView = Omit<Computed, 'settings' | 'comparison'> & {
   id: string;
   version: number;
   policyVersion: number;
+  /** What of house style shows beside the findings and at the choice of a claim. */
+  houseStyle: Pick<HouseStyle, 'twiceTheMargin' | 'onePollHeadlines'>;
   comparison: Omit<Computed['comparison'], 'versionId' | 'override'> & {
     override: { reason: string; by: string } | null;
   };
@@ -47,11 +50,13 @@ export function getRelease(actor: Actor, id: string, ctx: Ctx): ReleaseView {
   const whole = findWholeVersion(ctx.db, versionId)!;
   const { settings, comparison, ...computed } = computeFindings(ctx.db, versionId, ctx.now);
   const { versionId: _, override, ...chosen } = comparison;
+  const { twiceTheMargin, onePollHeadlines } = settings.houseStyle.body;
   return {
     ...computed,
     id: release.publicId,
     version: release.version,
     policyVersion: settings.policy.version,
+    houseStyle: { twiceTheMargin, onePollHeadlines },
     comparison: { ...chosen, override: override && { reason: override.reason, by: override.by } },
     embargo: embargoView(release, isReleasePublic(ctx.db, release.id, ctx.now)),
     embargoReaders: listEmbargoReaders(ctx.db, release.id),

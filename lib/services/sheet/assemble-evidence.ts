@@ -20,6 +20,7 @@ import { isOfTwoReleases } from '@/lib/wording/draft-input';
 import { draftLine, draftSheet } from '@/lib/wording/draft-sheet';
 import type { LineBasis } from '@/lib/wording/line-check';
 import { type Computed, computeFindings } from '../release/compute-findings';
+import { correctedFrom } from './corrected-from';
 import type { EvidenceBody } from './evidence-body';
 
 const SCENE_PX = 640;
@@ -63,6 +64,7 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
   const finding = found.finding;
   const claim = JSON.parse(sheet.claim) as Claim;
   const language = sheet.language as Language;
+  const corrected = sheet.id === undefined ? undefined : correctedFrom(conn, sheet.id, facts, previous);
   const input = {
     claim,
     finding,
@@ -73,6 +75,7 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
     houseStyle: settings.houseStyle.body,
     policy: settings.policy.body,
     language,
+    ...(corrected ? { corrected } : {}),
   };
   const offered = requestable(input);
   const asked = sheet.id === undefined ? [] : listNewestLines(conn, sheet.id).map(({ line }) => line.kind);
@@ -131,7 +134,7 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
     requestable: offered,
     draftRequested: (kind) => draftLine(input, kind),
     basisHash: hashOf(basis),
-    lineBasis: lineBasisOf(computed, claim, language),
+    lineBasis: { ...lineBasisOf(computed, claim, language), ...(corrected ? { was: corrected.was } : {}) },
     withTexts: (texts, override) => {
       const body: EvidenceBody = {
         ...basis,

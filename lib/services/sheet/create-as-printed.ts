@@ -4,6 +4,7 @@ import { findRelease, findWholeVersion } from '@/db/queries/release';
 import { findSheetBySubmission, insertLine, insertLineVersion, insertSheet } from '@/db/queries/sheet';
 import { AS_PRINTED } from '@/lib/domain/as-printed';
 import { type Actor, canDraftSheets } from '@/lib/domain/roles';
+import { LANGUAGES } from '@/lib/domain/vocabulary';
 import { AppError } from '@/lib/errors';
 import { canonicalJson } from '@/lib/security/canonical';
 import { newId } from '@/lib/security/ids';
@@ -12,12 +13,16 @@ import { appendRecord } from '../history/append-record';
 import { submissionKey } from '../release/create-release';
 import { assembleSheet } from './assemble-sheet';
 
-const schema = z.strictObject({ submissionKey, releaseId: z.string().min(1).max(64) });
+const schema = z.strictObject({
+  submissionKey,
+  releaseId: z.string().min(1).max(64),
+  language: z.enum(LANGUAGES, 'Choose a language.').default('en'),
+});
 
 /** Drafts a sheet that gives a release as it was printed and claims nothing. */
 export function createAsPrinted(actor: Actor, input: unknown, ctx: Ctx): { id: string } {
   authorize(canDraftSheets(actor), 'Only reporters and editors draft sheets.');
-  const { submissionKey: key, releaseId } = parse(schema, input);
+  const { submissionKey: key, releaseId, language } = parse(schema, input);
   return transact(ctx, (tx) => {
     const before = findSheetBySubmission(tx, key);
     if (before && before.authorId !== actor.personId) throw new AppError('conflict', 'Reload and try again.');
@@ -29,7 +34,7 @@ export function createAsPrinted(actor: Actor, input: unknown, ctx: Ctx): { id: s
       publicId: newId(),
       claim: canonicalJson({ kind: AS_PRINTED }),
       claimKey: AS_PRINTED,
-      language: 'en',
+      language,
       releaseVersionId: whole.version.id,
     };
     const { draft, templateVersion } = assembleSheet(tx, subject, ctx.now);

@@ -4,6 +4,7 @@ import { findRelease, findWholeVersion } from '@/db/queries/release';
 import { findSheetBySubmission } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets } from '@/lib/domain/roles';
 import type { Claim } from '@/lib/domain/sheet';
+import { LANGUAGES } from '@/lib/domain/vocabulary';
 import { AppError } from '@/lib/errors';
 import type { TestableFinding } from '@/lib/findings/check-types';
 import { findClaim } from '@/lib/findings/claim-key';
@@ -20,12 +21,16 @@ const schema = z.strictObject({
   submissionKey,
   releaseId: z.string().min(1).max(64),
   claimKey: z.string().min(1, 'Choose what the sheet claims.').max(600),
+  language: z.enum(LANGUAGES, 'Choose a language.').default('en'),
 });
 
-/** Drafts a sheet for one finding of a release, from the house style in force. */
+/**
+ * Drafts a sheet for one finding of a release, from the house style in force. Every language of a claim is a sheet of
+ * its own: written, filed and cleared by itself, never translated.
+ */
 export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: string } {
   authorize(canDraftSheets(actor), 'Only reporters and editors draft sheets.');
-  const { submissionKey: key, releaseId, claimKey } = parse(schema, input);
+  const { submissionKey: key, releaseId, claimKey, language } = parse(schema, input);
   return transact(ctx, (tx) => {
     const before = findSheetBySubmission(tx, key);
     if (before && before.authorId !== actor.personId) throw new AppError('conflict', 'Reload and try again.');
@@ -42,7 +47,7 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
       publicId: newId(),
       claim: canonicalJson(claimOf(found.finding)),
       claimKey,
-      language: 'en',
+      language,
       releaseVersionId: whole.version.id,
     };
     const { draft, computed } = assemble(tx, subject, ctx.now);

@@ -9,8 +9,9 @@ import { type Actor, canActAsEditor } from '@/lib/domain/roles';
 import type { LineKind, LineText } from '@/lib/domain/sheet';
 import type { Wanted } from '@/lib/domain/wanted';
 import type { Verdict } from '@/lib/findings/check-types';
-import { type Hold, holdsOn } from '../bans/hold';
+import { type BanAhead, bansAheadOn, type Hold, holdsOn } from '../bans/hold';
 import type { Ctx } from '../context';
+import { type HeldEmbed, heldEmbedsOf } from '../embed/embed-hold';
 import { currencyOf } from './currency';
 import { type LanguageView, languagesOf } from './languages';
 import { type CommentView, commentsOf } from './list-comments';
@@ -29,6 +30,9 @@ export type DeskView = LanguageView & {
   /** Of a filed sheet: whether a second person has opened it. */
   look: Look | null;
   holds: Hold[];
+  bansAhead: BanAhead[];
+  /** Embeds of the same claim that an embargo or a ban holds. */
+  heldEmbeds: HeldEmbed[];
   /** Of cleared words. */
   currency: Currency | null;
 };
@@ -50,7 +54,7 @@ export function deskViewOf(ctx: Ctx, actor: Actor, opened: Opened, frozen: Froze
   const back = state === 'sent-back' ? findLastAct(ctx.db, sheet.id, 'sent-back') : null;
   const standing = frozen && state === 'cleared' ? standingOf(frozen, terms?.shelfDays ?? null) : null;
   return {
-    ...languagesOf(ctx.db, sheet),
+    ...languagesOf(ctx.db, sheet, release.publicId),
     language: sheet.language,
     comments: commentsOf(ctx.db, actor, opened),
     lineReasons: back ? listLineReasons(ctx.db, back.id) : [],
@@ -59,6 +63,8 @@ export function deskViewOf(ctx: Ctx, actor: Actor, opened: Opened, frozen: Froze
     maySetTerms: state !== 'pulled' && (canActAsEditor(actor) || sheet.authorId === actor.personId),
     look: filing && lookOf(filing.at, listFirstLooks(ctx.db, [filing.id]).get(filing.id) ?? null, ctx.now),
     holds: holdsOn(ctx.db, release.raceId, ctx.now),
+    bansAhead: bansAheadOn(ctx.db, release.raceId, ctx.now),
+    heldEmbeds: heldEmbedsOf(ctx.db, sheet, ctx.now),
     currency: standing && currencyOf(ctx.db, sheet, standing, ctx.now),
   };
 }

@@ -10,6 +10,8 @@ import { openSheet, refuseUnless } from './sheet-state';
 
 export type ReviewCause = 'changed' | 'cleared' | 'pulled';
 export type LanguageView = {
+  /** What a sheet of the same claim in another language is drafted from. */
+  claim: { releaseId: string; key: string };
   /** The same claim in other languages. */
   siblings: { id: string; language: string }[];
   /** What happened to them since this one was last looked at. */
@@ -58,8 +60,9 @@ export function markReviewed(actor: Actor, input: unknown, ctx: Ctx): void {
   });
 }
 
-export function languagesOf(conn: Conn, sheet: SheetRow): LanguageView {
+export function languagesOf(conn: Conn, sheet: SheetRow, releaseId: string): LanguageView {
   return {
+    claim: { releaseId, key: sheet.claimKey },
     siblings: listSiblings(conn, sheet).map(({ publicId, language }) => ({ id: publicId, language })),
     reviews: listOpenReviews(conn, [sheet.id]).map(({ review, language, causeId }) => ({
       language,

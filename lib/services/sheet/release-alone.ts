@@ -11,6 +11,7 @@ import { readEnv } from '@/lib/env';
 import { refuseUnderBan } from '../bans/hold';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
 import { appendRecord } from '../history/append-record';
+import { refuseUnsigned } from '../house-style/sign-language';
 import { readDeskSettings } from '../setup/desk-settings';
 import { publishIn, readerInput } from './clear-sheet';
 import { applyEdits, openForWriting } from './edit-lines';
@@ -38,6 +39,7 @@ export function releaseAlone(asker: Actor, input: unknown, ctx: Ctx): { version:
     refuseUnless(isAsPrinted(before.sheet), 'Only figures as printed are released by one reader.');
     authorize(isNightRuleOn(tx), NOT_ALLOWED);
     refuseUnless(isNight(ctx.now), NOT_NIGHT);
+    refuseUnsigned(tx, before.sheet.language);
     refuseUnderBan(tx, before.release.raceId, ctx.now);
     applyEdits(tx, actor, before, [], ctx.now);
     fileIn(tx, actor, seen, ctx.now, 'filed sheet');

@@ -45,7 +45,7 @@ export function getSheetData(actor: Actor, id: string, ctx: Ctx) {
 
 type Opened = ReturnType<typeof openSheet>;
 
-function clearedOf(ctx: Ctx, { sheet }: Opened) {
+function clearedOf(ctx: Ctx, { sheet, release }: Opened) {
   const lines = inScreenOrder(listClearedLines(ctx.db, sheet.id), ({ line }) => line.kind);
   const act = findLastAct(ctx.db, sheet.id, 'cleared');
   const evidence = act?.evidenceId ? findEvidence(ctx.db, act.evidenceId) : null;
@@ -61,7 +61,7 @@ function clearedOf(ctx: Ctx, { sheet }: Opened) {
     readers: listUnread(ctx.db, [evidence.id]).size > 0 ? 1 : 2,
     lines: lines.map(({ line, version }) => ({ kind: line.kind, text: version.text })),
     currency: currencyOf(ctx.db, sheet, standing, ctx.now),
-    needsReview: languagesOf(ctx.db, sheet).reviews.map(({ language, cause, at }) => ({
+    needsReview: languagesOf(ctx.db, sheet, release.publicId).reviews.map(({ language, cause, at }) => ({
       language,
       cause,
       at,
@@ -69,13 +69,13 @@ function clearedOf(ctx: Ctx, { sheet }: Opened) {
   };
 }
 
-function writtenOf(ctx: Ctx, { sheet, state, texts, author }: Opened) {
+function writtenOf(ctx: Ctx, { sheet, release, state, texts, author }: Opened) {
   return {
     version: sheet.version,
     state,
     author,
     lines: texts,
     wanted: wantedOf(findTerms(ctx.db, sheet.id)),
-    languages: languagesOf(ctx.db, sheet).siblings,
+    languages: languagesOf(ctx.db, sheet, release.publicId).siblings,
   };
 }

@@ -34,7 +34,7 @@ export function storeSheet(
     });
   }
   const entry = { action: 'drafted sheet', entity: 'sheet', entityId: stored.publicId };
-  const after = { release: told.release, claim: sheet.claim, draft: drafted.draft };
+  const after = { release: told.release, claim: sheet.claim, language: sheet.language, draft: drafted.draft };
   appendRecord(tx, { personId: actor.personId, ...entry, after, releaseId: stored.releaseId }, now);
   return stored;
 }

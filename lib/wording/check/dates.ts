@@ -1,5 +1,5 @@
 import type { CompiledLexicon } from './lexicon/compiled';
-import { phraseAt, type Hit, type Phrases } from './phrases';
+import { phraseAt, type Hit } from './phrases';
 import type { Token } from './tokens';
 
 /** A date as written: a month (1–12), its days where it has some, its year where it has one. */
@@ -10,13 +10,13 @@ export function datesIn(
   tokens: readonly Token[],
   isCapital: (at: number) => boolean,
   isNamed: (at: number) => boolean,
-  { words: { months }, cues }: CompiledLexicon,
+  { words: { months, datesAreNames }, cues }: CompiledLexicon,
 ): Dated[] {
   const dates: Dated[] = [];
   for (let at = 0; at < tokens.length; at += 1) {
-    if (!isCapital(at) || isNamed(at)) continue;
+    if ((datesAreNames && !isCapital(at)) || isNamed(at)) continue;
     const month = months.findIndex((names) => names.includes(tokens[at]?.text ?? '')) + 1;
-    if (month > 0) dates.push(dateAround(tokens, at, month, cues.dateLinks));
+    if (month > 0) dates.push(dateAround(tokens, at, month, cues));
   }
   return dates;
 }
@@ -24,12 +24,17 @@ export function datesIn(
 const DAY = /^(?:[1-9]|[12]\d|3[01])$/;
 
 /** The days written around a month: "14–17 September", "September 14 to 17", with a year. */
-function dateAround(tokens: readonly Token[], at: number, month: number, links: Phrases): Dated {
-  const isLink = (place: number) => phraseAt(links, tokens, place) !== null;
+function dateAround(
+  tokens: readonly Token[],
+  at: number,
+  month: number,
+  { dateLinks, ofWords }: CompiledLexicon['cues'],
+): Dated {
+  const isLink = (place: number) => phraseAt(dateLinks, tokens, place) !== null;
   const text = (place: number) => tokens[place]?.text ?? '';
   const days: number[] = [];
   let from = at;
-  for (let place = at - 1; place >= at - 5 && (DAY.test(text(place)) || isLink(place)); place -= 1) {
+  for (let place = at - 1; place >= at - 8 && (DAY.test(text(place)) || isLink(place)); place -= 1) {
     if (DAY.test(text(place))) {
       days.unshift(Number(text(place)));
       from = place;
@@ -44,7 +49,7 @@ function dateAround(tokens: readonly Token[], at: number, month: number, links: 
       }
     }
   }
-  const yearAt = text(to) === ',' ? to + 1 : to;
+  const yearAt = text(to) === ',' || phraseAt(ofWords, tokens, to) ? to + 1 : to;
   const year = /^(?:19|20)\d\d$/.test(text(yearAt)) ? Number(text(yearAt)) : null;
   return { from, to: year === null ? to : yearAt + 1, days, month, year };
 }

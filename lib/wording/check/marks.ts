@@ -1,3 +1,4 @@
+import { formatPercent, roundHalfUp } from '@/lib/format/number';
 import type { Lexicon, Replacement } from './lexicon/types';
 import type { Hit } from './phrases';
 import type { Reading } from './reading';
@@ -13,7 +14,8 @@ export type Judged = {
 };
 
 /** A mark on token places. Words inside quotation marks are somebody else's: said, not graded. */
-export function markAt(reading: Reading, { from, to }: Hit, judged: Judged): WordingMark {
+export function markAt(reading: Reading, { from, to: own, tail }: Hit, judged: Judged): WordingMark {
+  const to = tail ?? own;
   const { folded, tokens, input } = reading;
   const start = folded.starts[tokens[from]?.from ?? 0] ?? 0;
   const end = folded.ends[(tokens[to - 1]?.to ?? 1) - 1] ?? start;
@@ -28,7 +30,8 @@ export function markAt(reading: Reading, { from, to }: Hit, judged: Judged): Wor
     release: judged.release ?? null,
     claim: judged.claim ?? null,
     message: quoted ? `Quoted words, not judged. In our own words: ${judged.message}` : judged.message,
-    replacement: quoted ? null : (judged.replacement ?? null),
+    // Between the two parts of a verb stand words that a replacement would lose.
+    replacement: quoted || tail !== undefined ? null : (judged.replacement ?? null),
   };
 }
 
@@ -42,6 +45,12 @@ export function replacementOf(
   if (text === null) return null;
   const filled = text.replace(/\{(\w+)\}/g, (hole, name: string) => slots[name] ?? hole);
   return filled.includes('{') ? null : filled;
+}
+
+/** A percentage as the language prints it, with no more decimals than it has. */
+export function percentText({ locale }: Lexicon, pct: number, decimals?: number): string {
+  const own = String(roundHalfUp(pct, 2)).split('.')[1]?.length ?? 0;
+  return formatPercent(pct, decimals ?? own, locale);
 }
 
 const WEIGHT: readonly WordingGrade[] = ['wrong', 'not-supported', 'house-style', 'cannot-judge'];

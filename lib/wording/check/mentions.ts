@@ -1,4 +1,5 @@
 import type { CompiledLexicon } from './lexicon/compiled';
+import type { Lexicon } from './lexicon/types';
 import { fold } from './fold';
 import { tokenise, type Token } from './tokens';
 import type { CheckedRelease } from './types';
@@ -50,6 +51,7 @@ function knownEntries(releases: readonly CheckedRelease[], lexicon: CompiledLexi
 }
 
 function entriesOf(releases: readonly CheckedRelease[], { words }: CompiledLexicon): Map<string, Entry[]> {
+  const wordsOf = (name: string) => wordsIn(name, words);
   const common = new Set(words.commonNames.map((name) => wordsOf(name).join(' ')));
   const named = new Map<string, Entry>();
   const add = (entry: Entry) => {
@@ -74,11 +76,17 @@ function entriesOf(releases: readonly CheckedRelease[], { words }: CompiledLexic
   );
   const generic = new Set(words.genericNameWords);
   for (const one of all) {
-    for (const alias of aliasesOf(one, options, generic, common)) {
+    for (const alias of aliasesOf(one, options, { generic, common, wordsOf })) {
       add({ ...one, words: alias, isCommon: common.has(alias.join(' ')), isAcronym: false });
     }
     const initials = wordsOf(one.name).map((word) => word.charAt(0));
     if (initials.length > 1) add({ ...one, words: [initials.join('')], isCommon: false, isAcronym: true });
+  }
+  for (const entry of [...named.values()].filter(({ isAcronym }) => !isAcronym)) {
+    for (const ending of words.nameEndings ?? []) {
+      const last = entry.words.at(-1) ?? '';
+      if (!last.endsWith(ending)) add({ ...entry, words: [...entry.words.slice(0, -1), last + ending] });
+    }
   }
   return byFirstWord([...named.values()]);
 }
@@ -102,12 +110,17 @@ function namesIn({ facts, previous }: CheckedRelease): Named[] {
   ]);
 }
 
+type Known = {
+  generic: ReadonlySet<string>;
+  common: ReadonlySet<string>;
+  wordsOf: (name: string) => string[];
+};
+
 /** Surnames, and names without their generic word, where no other option could be meant. */
 function aliasesOf(
   { kind, name }: Named,
   options: readonly { name: string; words: readonly string[] }[],
-  generic: ReadonlySet<string>,
-  common: ReadonlySet<string>,
+  { generic, common, wordsOf }: Known,
 ): string[][] {
   const parts = wordsOf(name);
   const specific = parts.filter((part) => !generic.has(part));
@@ -121,7 +134,7 @@ function aliasesOf(
   return [specific, last].filter((alias) => alias.length < parts.length && isOwn(alias));
 }
 
-const wordsOf = (name: string) =>
-  tokenise(fold(name).text)
+const wordsIn = (name: string, { elisions }: Lexicon) =>
+  tokenise(fold(name).text, elisions)
     .filter(({ kind }) => kind !== 'break')
     .map(({ text }) => text);

@@ -10,6 +10,8 @@ export type Party = { option: string; mention: Mention } | 'unknown' | null;
 export function subjectOf(reading: Reading, hit: Hit): Party {
   const beside = reading.mentionAt(hit.from - 1);
   if (beside?.kind === 'option') return { option: beside.name, mention: beside };
+  const owner = ownerOf(reading, hit);
+  if (owner) return { option: owner.name, mention: owner };
   if (isUnknownName(reading, hit)) return 'unknown';
   const clause = clauseOf(reading, hit);
   const sentence = reading.sentenceAt(hit.from);
@@ -17,12 +19,24 @@ export function subjectOf(reading: Reading, hit: Hit): Party {
   if (turned) return turned;
   return (
     lastBefore(reading, clause.from, hit.from) ??
-    firstAfter(reading, hit.to, clause.to) ??
+    firstAfter(reading, pastObject(reading, hit), clause.to) ??
     lastBefore(reading, sentence.from, clause.from) ??
     firstAfter(reading, clause.to, sentence.to) ??
     fromSentenceBefore(reading, hit, sentence.from)
   );
 }
+
+/** "la ventaja de Alder", "l'avance d'Alder": whose a noun is stands after it, past an article. */
+function ownerOf(reading: Reading, { from, to }: Hit): Mention | null {
+  if (!reading.has('ownedNouns', { from, to })) return null;
+  const of = reading.cueAt('ofWords', to);
+  const owner = of && reading.mentionAt(of.to);
+  return owner?.kind === 'option' ? owner : null;
+}
+
+/** A name that a preposition stands before is no subject: "Vor Brook liegt Alder". */
+const pastObject = (reading: Reading, { to, objectAt }: Hit) =>
+  objectAt === undefined ? to : (reading.mentionAt(objectAt)?.to ?? to);
 
 /** The other option of a comparison: the first named after the phrase, or else the other one named before it. */
 export function objectOf(reading: Reading, hit: Hit, subject: string): Party {
@@ -105,8 +119,8 @@ function hasUnknownAfter(reading: Reading, { to }: Hit): boolean {
 
 function isName(reading: Reading, at: number): boolean {
   const token = reading.tokens[at];
-  if (token?.kind !== 'word' || !reading.isCapital(at)) return false;
   const { words } = reading.lexicon;
+  if (token?.kind !== 'word' || words.nounsHaveCapitals || !reading.isCapital(at)) return false;
   if (words.notNames.includes(token.text) || words.months.flat().includes(token.text)) return false;
   return !words.weekdays.flat().includes(token.text);
 }

@@ -59,8 +59,8 @@ const halfPointAt: Reader = (tokens, at, lexicon) => {
 };
 
 const oneInAt: Reader = (tokens, at, lexicon) => {
-  const part = bareNumberAt(tokens, at, lexicon);
-  const link = part && phraseAt(lexicon.inEvery, tokens, part.to);
+  const part = articleAt(tokens, at, lexicon) ?? bareNumberAt(tokens, at, lexicon);
+  const link = part && phraseAt(lexicon.inEvery, tokens, peopleEnd(tokens, part.to, lexicon));
   const whole = link && bareNumberAt(tokens, link.to, lexicon);
   if (!part || !whole || part.decimals > 0 || whole.decimals > 0) return null;
   if (whole.value < 2 || whole.value > 10 || part.value < 1 || part.value >= whole.value) return null;
@@ -75,6 +75,13 @@ const oneInAt: Reader = (tokens, at, lexicon) => {
     isInWords: true,
   };
 };
+
+/** "un électeur sur trois": past the people between the part and the whole. */
+function peopleEnd(tokens: readonly Token[], at: number, { cues }: CompiledLexicon): number {
+  const groups = [cues.likelyVoters, cues.registeredVoters, cues.voters, cues.adults, cues.countedPeople];
+  const ends = groups.map((group) => phraseAt(group, tokens, at)?.to ?? at);
+  return Math.max(...ends);
+}
 
 const fractionAt: Reader = (tokens, at, lexicon) => {
   const hit = phraseAt(lexicon.fractions, tokens, at);
@@ -96,7 +103,7 @@ function valueOfFraction(
 }
 
 const numberAt: Reader = (tokens, at, lexicon) => {
-  const number = bareNumberAt(tokens, at, lexicon);
+  const number = bareNumberAt(tokens, at, lexicon) ?? articleWithUnit(tokens, at, lexicon);
   if (!number) return null;
   const points = phraseAt(lexicon.cues.pointWords, tokens, number.to);
   const percent = phraseAt(lexicon.cues.percentWords, tokens, number.to);
@@ -116,19 +123,51 @@ const numberAt: Reader = (tokens, at, lexicon) => {
 
 type Bare = { to: number; value: number; decimals: number; isInWords: boolean };
 
-function bareNumberAt(tokens: readonly Token[], at: number, { words }: CompiledLexicon): Bare | null {
+const articleAt = (tokens: readonly Token[], at: number, { words }: CompiledLexicon): Bare | null =>
+  words.oneArticles.includes(tokens[at]?.text ?? '')
+    ? { to: at + 1, value: 1, decimals: 0, isInWords: true }
+    : null;
+
+/** "un punto", "un point": the article counts only right before its unit. */
+function articleWithUnit(tokens: readonly Token[], at: number, lexicon: CompiledLexicon): Bare | null {
+  const article = articleAt(tokens, at, lexicon);
+  return article && phraseAt(lexicon.cues.pointWords, tokens, article.to) ? article : null;
+}
+
+function bareNumberAt(
+  tokens: readonly Token[],
+  at: number,
+  { words, numbers }: CompiledLexicon,
+): Bare | null {
   const token = tokens[at];
   if (token?.kind === 'number') {
-    const read = readDigits(token.text, words.decimalMark);
-    return read && { ...read, to: at + 1, isInWords: false };
+    const to = words.groupsBySpace ? endOfGroups(tokens, at) : at + 1;
+    const digits = tokens.slice(at, to).map(({ text }) => text);
+    const read = readDigits(digits.join(''), words.decimalMark);
+    return read && { ...read, to, isInWords: false };
   }
-  const value = numberWord(words.numbers, token);
-  if (value === undefined) return null;
-  const next = numberWord(words.numbers, tokens[at + 1]);
+  const said = phraseAt(numbers, tokens, at);
+  if (!said) return null;
+  const phrase = tokens.slice(said.from, said.to).map(({ text }) => text);
+  const value = words.numbers[phrase.join(' ')] ?? 0;
+  const next = said.to === at + 1 ? numberWord(words.numbers, tokens[at + 1]) : undefined;
   const isCompound = value >= 20 && value % 10 === 0 && next !== undefined && next > 0 && next < 10;
   return isCompound
     ? { to: at + 2, value: value + next, decimals: 0, isInWords: true }
-    : { to: at + 1, value, decimals: 0, isInWords: true };
+    : { to: said.to, value, decimals: 0, isInWords: true };
+}
+
+/** Past the groups of three digits that one space each parts from a number of one to three. */
+function endOfGroups(tokens: readonly Token[], at: number): number {
+  let to = at + 1;
+  if (!/^\d{1,3}$/.test(tokens[at]?.text ?? '')) return to;
+  while (
+    /^\d{3}(?:[.,]\d+)?$/.test(tokens[to]?.text ?? '') &&
+    tokens[to]?.from === (tokens[to - 1]?.to ?? 0) + 1
+  ) {
+    to += 1;
+  }
+  return to;
 }
 
 const numberWord = (numbers: Readonly<Record<string, number>>, token: Token | undefined) =>

@@ -34,11 +34,12 @@ export type Reading = {
 
 export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Reading {
   const folded = fold(input.text);
-  const tokens = tokenise(folded.text);
+  const tokens = tokenise(folded.text, lexicon.words.elisions);
   const isCapital = (at: number) => isUpper(input.text, folded.starts[tokens[at]?.from ?? -1]);
   const mentions = mentionsOf(tokens, isCapital, input.releases, lexicon);
   const mentionAt = placesOf(mentions, tokens.length);
   const isNamed = (at: number) => mentionAt(at) !== null;
+  const isOption = (at: number) => mentionAt(at)?.kind === 'option';
   const dates = datesIn(tokens, isCapital, isNamed, lexicon);
   const dateAt = placesOf(dates, tokens.length);
   const quantities = quantitiesOf(tokens, lexicon, (at) => isNamed(at) || dateAt(at) !== null);
@@ -48,7 +49,7 @@ export function readText(input: WordingCheckInput, lexicon: CompiledLexicon): Re
   const cueMap = (group: CueGroup) => {
     let entry = known.get(group);
     if (!entry) {
-      const hits = findPhrases(lexicon.cues[group], tokens, isNamed);
+      const hits = findPhrases(lexicon.cues[group], tokens, isNamed, isOption);
       entry = { hits, at: placesOf(hits, tokens.length) };
       known.set(group, entry);
     }

@@ -10,7 +10,8 @@ const NEAR = 4;
  * Whether the words before a phrase, back to the last break of its sentence, leave it open or deny it. A condition
  * ("if the vote were held today, …") reaches to its comma; a denial reaches over a few words.
  */
-export function scopeOf(reading: Reading, { from }: Hit): Scope {
+export function scopeOf(reading: Reading, hit: Hit): Scope {
+  const { from } = hit;
   const { from: start } = reading.sentenceAt(from);
   let pastComma = false;
   for (let at = from - 1; at >= start; at -= 1) {
@@ -20,7 +21,20 @@ export function scopeOf(reading: Reading, { from }: Hit): Scope {
     if (!pastComma && reading.cueAt('conditionals', at)) return 'open';
     if (!pastComma && from - at <= NEAR && reading.cueAt('negators', at)) return 'denied';
   }
-  return isQuestion(reading, from) ? 'open' : 'claimed';
+  if (isQuestion(reading, from)) return 'open';
+  return isDeniedAfter(reading, hit) ? 'denied' : 'claimed';
+}
+
+/** "Alder führt nicht": where a language denies after the verb, up to the next comma. */
+export function isDeniedAfter(reading: Reading, { from, to }: Hit): boolean {
+  const { negatorsAfter } = reading.lexicon.words;
+  const { to: end } = reading.sentenceAt(from);
+  for (let at = to; negatorsAfter && at < end; at += 1) {
+    const { text = '' } = reading.tokens[at] ?? {};
+    if (text === ',' || reading.cueAt('clauseBreaks', at)) return false;
+    if (negatorsAfter.includes(text)) return true;
+  }
+  return false;
 }
 
 /** "Alder, who leads": the word points back to a name and leaves nothing open. */

@@ -15,6 +15,9 @@ export function sentencesOf(
   { words }: CompiledLexicon,
 ): Sentence[] {
   const abbreviations = new Set(words.abbreviations);
+  const months = new Set(words.ordinalDots ? words.months.flat() : []);
+  const isOrdinal = (before: Token | undefined, next: Token | undefined) =>
+    before?.kind === 'number' && before.text.length <= 2 && next !== undefined && months.has(next.text);
   const sentences: Sentence[] = [];
   let from = 0;
   const close = (to: number) => {
@@ -30,6 +33,7 @@ export function sentencesOf(
     while (tokens[next]?.text === '"' && tokens[next]?.from === tokens[next - 1]?.to) next += 1;
     const following = tokens[next];
     const isSpaced = !following || /\s/.test(text.charAt(following.from - 1)) || following.kind === 'break';
+    if (token.text === '.' && isOrdinal(before, following)) return;
     if (isSpaced && (!following || following.kind !== 'word' || isCapital(next))) close(next);
   });
   close(tokens.length);

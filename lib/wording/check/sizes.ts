@@ -56,18 +56,31 @@ function isTo(reading: Reading, at: number): boolean {
   );
 }
 
-export function isPairOfShares(reading: Reading, { from, to }: Quantity): boolean {
+export function isPairOfShares(reading: Reading, own: Quantity): boolean {
+  const { from, to } = own;
   const { to: links } = reading.lexicon.words;
   const isLink = (at: number) => links.includes(reading.tokens[at]?.text ?? '');
-  const follows = reading.quantityAt(to + 1) !== null && isLink(to);
+  const ofKind = (other: Quantity | null) => other !== null && !areUnlike(own, other);
+  const follows = ofKind(reading.quantityAt(to + 1)) && isLink(to);
   const joined = reading.quantityAt(to) !== null && reading.tokens[to]?.joined === true;
-  const precedes = reading.quantityAt(from - 2) !== null && isLink(from - 1);
+  const precedes = ofKind(reading.quantityAt(from - 2)) && isLink(from - 1);
   return (
     follows ||
     joined ||
     precedes ||
     (reading.tokens[from]?.joined === true && reading.quantityAt(from - 1) !== null)
   );
+}
+
+/** "Up 10 points to 51%": points and a percentage are no pair. */
+const areUnlike = (a: Quantity, b: Quantity) =>
+  (a.unit === 'points' && b.unit === 'percent') || (a.unit === 'percent' && b.unit === 'points');
+
+/** "With 52% ahead", "auf 52 Prozent gestiegen"; but "with a 14% lead". */
+function isShareBefore(reading: Reading, { from }: Quantity, hit: number): boolean {
+  if (reading.cueAt('leadNoun', hit)) return false;
+  const { to } = reading.lexicon.words;
+  return reading.cueAt('withWords', from - 1) !== null || to.includes(reading.tokens[from - 1]?.text ?? '');
 }
 
 const isMargin = (reading: Reading, { from }: Quantity) =>
@@ -88,5 +101,6 @@ function sizeBefore(reading: Reading, { from }: Hit): Quantity | null {
 /** "6 points ahead", "6-point lead"; of a percent only right before the word. */
 function beforeSize(reading: Reading, quantity: Quantity, from: number): Quantity | null {
   if (isPairOfShares(reading, quantity) || isMargin(reading, quantity)) return null;
-  return quantity.unit === 'points' || quantity.to === from ? quantity : null;
+  if (quantity.unit === 'points') return quantity;
+  return quantity.to === from && !isShareBefore(reading, quantity, from) ? quantity : null;
 }

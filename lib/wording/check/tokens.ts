@@ -13,9 +13,10 @@ const PATTERN = /\n|\d+(?:[.,]\d+)*|[\p{L}\p{Lo}]+(?:'[\p{L}]+)*|[^\s]/gu;
 
 /**
  * The tokens of a folded text. "Alder's" is two, `alder` and `'s`; "isn't" is `is` and `not`, "cannot" is `can` and
- * `not`, so that a negation is always a word of its own.
+ * `not`, so that a negation is always a word of its own. Of a word in `elisions` the apostrophe is the end: "l'avance"
+ * is `l'` and `avance`.
  */
-export function tokenise(text: string): Token[] {
+export function tokenise(text: string, elisions: readonly string[] = []): Token[] {
   const tokens: Token[] = [];
   let end = -1;
   let isHyphen = false;
@@ -28,7 +29,7 @@ export function tokenise(text: string): Token[] {
       continue;
     }
     const joined = from === end && (isHyphen || !/^[^\p{L}\d]/u.test(piece));
-    const parts = partsOf(piece);
+    const parts = partsOf(piece, elisions);
     parts.forEach((part, index) =>
       tokens.push({ ...part, from: from + part.from, to: from + part.to, joined: index === 0 && joined }),
     );
@@ -45,7 +46,7 @@ type Part = Pick<Token, 'text' | 'kind' | 'from' | 'to'>;
 
 const word = (text: string, from: number, to: number): Part => ({ text, kind: 'word', from, to });
 
-function partsOf(piece: string): Part[] {
+function partsOf(piece: string, elisions: readonly string[]): Part[] {
   const { length } = piece;
   if (piece === '\n') return [{ text: piece, kind: 'break', from: 0, to: 1 }];
   if (/^\d/.test(piece)) return [{ text: piece, kind: 'number', from: 0, to: length }];
@@ -55,9 +56,19 @@ function partsOf(piece: string): Part[] {
   if (negated) return [word(negated, 0, length - 3), word('not', length - 3, length)];
   const apostrophe = piece.indexOf("'");
   if (apostrophe <= 0) return [word(piece, 0, length)];
+  if (elisions.includes(piece.slice(0, apostrophe))) return elided(piece, apostrophe + 1, elisions);
   if (piece.endsWith("n't"))
     return [word(piece.slice(0, -3), 0, length - 3), word('not', length - 3, length)];
   return [word(piece.slice(0, apostrophe), 0, apostrophe), word(piece.slice(apostrophe), apostrophe, length)];
+}
+
+/** "l'avance", and "qu'il n'est" word by word: what follows is a word of its own. */
+function elided(piece: string, cut: number, elisions: readonly string[]): Part[] {
+  const rest = partsOf(piece.slice(cut), elisions);
+  return [
+    word(piece.slice(0, cut), 0, cut),
+    ...rest.map((part) => ({ ...part, from: part.from + cut, to: part.to + cut })),
+  ];
 }
 
 const NEGATED: Record<string, string> = { "won't": 'will', "can't": 'can', "shan't": 'shall' };

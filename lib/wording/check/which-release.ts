@@ -22,3 +22,11 @@ export function releasesFor(reading: Reading, { from }: Hit, options: readonly s
   );
   return ofPollster.length > 0 ? ofPollster : having;
 }
+
+/** The same, but where a sentence names several pollsters what it says may be of any of them. */
+export function releasesNamed(reading: Reading, hit: Hit, options: readonly string[] = []): number[] {
+  const { from, to } = reading.sentenceAt(hit.from);
+  const named = reading.mentions.filter((one) => one.kind === 'pollster' && one.from >= from && one.to <= to);
+  if (new Set(named.map(({ name }) => name)).size < 2) return releasesFor(reading, hit, options);
+  return reading.input.releases.map((_, index) => index);
+}

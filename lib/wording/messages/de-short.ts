@@ -65,13 +65,13 @@ export const DE_NEWSLETTER: LanguagePack['newsletter'] = { line: '{race}: {line}
 /** Corrections, in German. */
 export const DE_CORRECTION: LanguagePack['correction'] = {
   intro:
-    'Korrektur, {on}: Eine frühere Fassung dieses Berichts enthielt {count, plural, one {eine falsche Angabe} other {falsche Angaben}} zur Umfrage von {pollster}.',
+    'Korrektur, {on}: {count, plural, =0 {Formulierungen einer früheren Fassung dieses Berichts zur Umfrage von {pollster} wurden zurückgezogen} one {Eine frühere Fassung dieses Berichts enthielt eine falsche Angabe zur Umfrage von {pollster}} other {Eine frühere Fassung dieses Berichts enthielt falsche Angaben zur Umfrage von {pollster}}}.',
   share: 'Sie nannte für {option} {was}; richtig ist {is}.',
   'earlier-share': 'Sie nannte für {option} {was} in {prevPoll}; richtig ist {is}.',
   'group-share': 'Sie nannte für {option} {was} unter {group}; richtig ist {is}.',
   'sample-size':
     '{wasSized, select, yes {Sie nannte {was} Befragte} other {Sie nannte keine Zahl der Befragten}}; {isSized, select, yes {richtig ist {is}} other {die richtige Zahl ist nicht veröffentlicht}}.',
   dates: 'Sie datierte die Interviews {was}; richtig ist: {is}.',
-  now: 'Was sich mit den richtigen Werten sagen lässt: {line}',
+  now: 'Was sich mit den {count, plural, =0 {} other {richtigen }}Werten sagen lässt: {line}',
   weaker: 'Sie stützen die frühere Aussage nicht.',
 };

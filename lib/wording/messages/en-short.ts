@@ -65,13 +65,13 @@ export const EN_NEWSLETTER: LanguagePack['newsletter'] = { line: '{race}: {line}
 /** What was wrong, what is right, and what the right figures support. Rule of correcting openly: SPJ Code, from memory. */
 export const EN_CORRECTION: LanguagePack['correction'] = {
   intro:
-    'Correction, {on}: an earlier version of this report gave {count, plural, one {a wrong particular} other {wrong particulars}} of the poll by {pollster}.',
+    'Correction, {on}: {count, plural, =0 {words of an earlier version of this report about the poll by {pollster} were withdrawn} one {an earlier version of this report gave a wrong particular of the poll by {pollster}} other {an earlier version of this report gave wrong particulars of the poll by {pollster}}}.',
   share: 'It put {option} at {was}; the right figure is {is}.',
   'earlier-share': 'It put {option} at {was} in {prevPoll}; the right figure is {is}.',
   'group-share': 'It put {option} at {was} among {group}; the right figure is {is}.',
   'sample-size':
     '{wasSized, select, yes {It said that {was} people were asked} other {It did not say how many people were asked}}; {isSized, select, yes {the right number is {is}} other {the right number is not disclosed}}.',
   dates: 'It dated the interviews {was}; the right dates are {is}.',
-  now: 'What the right figures support: {line}',
+  now: '{count, plural, =0 {What the figures support} other {What the right figures support}}: {line}',
   weaker: 'They do not support the claim that was made.',
 };

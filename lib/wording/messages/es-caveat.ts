@@ -21,6 +21,8 @@ export const ES_CAVEAT: LanguagePack['caveat'] = {
   'sample-comparison': `${DRAWN} El margen que aquí se da está calculado como si lo hubiera sido, solo a efectos de comparación, conforme a {comparisonRule}; no es un margen de error de muestreo.`,
   margin: `{stated, select, given {{pollsterStart} declara ±${STATED} para un porcentaje{sameLevel, select, yes {} other { con una confianza del {statedLevel}}}; {newsroom} estima} none {{pollsterStart} no declara ningún margen; {newsroom} estima} other {{newsroomStart} estima}} para ${QUANTITY} un margen de ±${points('margin')}{wider, select, yes {, o de ±{widerMargin} {basis, select, modelled {dentro del redondeo de ese intervalo} other {si ${WEIGHTING} costara más precisión}}} other {}} (confianza del {level}).`,
   'margin-stated-only': `{pollsterStart} declara ±${STATED} para un porcentaje con una confianza del {statedLevel}; aquí no se da ninguno para ${QUANTITY}.`,
+  'twice-margin':
+    'Según la regla práctica del doble del margen (aquí ±{shareMargin} {shareMarginCount, plural, one {punto} other {puntos}} para un porcentaje), la diferencia {zone, select, above {es suficiente} between {queda entre una y dos veces ese margen} other {es menor que ese margen}}; {thumb, select, agrees {{newsroom} se guía por su propia prueba de la diferencia.} stricter {la prueba de {newsroom} es más estricta, porque también tiene en cuenta la ponderación, el redondeo y el número de comparaciones.} other {la prueba de {newsroom} exige menos, porque hay otras opciones o personas indecisas.}}',
   'small-shares':
     'El margen declarado vale para un porcentaje cercano a la mitad; los porcentajes pequeños tienen márgenes menores.',
   'margin-none': `Aquí no se da ningún margen para ${QUANTITY}.`,

@@ -63,13 +63,13 @@ export const ES_NEWSLETTER: LanguagePack['newsletter'] = { line: '{race}. {line}
 /** Corrections, in Spanish. */
 export const ES_CORRECTION: LanguagePack['correction'] = {
   intro:
-    'Corrección, {on}: una versión anterior de esta información daba {count, plural, one {un dato erróneo} other {datos erróneos}} del sondeo de {pollster}.',
+    'Corrección, {on}: {count, plural, =0 {se han retirado palabras de una versión anterior de esta información sobre el sondeo de {pollster}} one {una versión anterior de esta información daba un dato erróneo del sondeo de {pollster}} other {una versión anterior de esta información daba datos erróneos del sondeo de {pollster}}}.',
   share: 'Atribuía a {option} el {was}; la cifra correcta es {is}.',
   'earlier-share': 'Atribuía a {option} el {was} en {prevPoll}; la cifra correcta es {is}.',
   'group-share': 'Atribuía a {option} el {was} entre {group}; la cifra correcta es {is}.',
   'sample-size':
     '{wasSized, select, yes {Decía que se preguntó a {was} personas} other {No decía a cuántas personas se preguntó}}; {isSized, select, yes {el número correcto es {is}} other {el número correcto no se ha difundido}}.',
   dates: 'Situaba las entrevistas {was}; las fechas correctas son: {is}.',
-  now: 'Esto es lo que permiten afirmar las cifras correctas. {line}',
+  now: 'Esto es lo que permiten afirmar las cifras{count, plural, =0 {} other { correctas}}. {line}',
   weaker: 'No respaldan la afirmación que se hizo.',
 };

@@ -66,13 +66,13 @@ export const FR_NEWSLETTER: LanguagePack['newsletter'] = { line: '{race}. {line}
 /** Corrections, in French. */
 export const FR_CORRECTION: LanguagePack['correction'] = {
   intro:
-    'Rectificatif, {on} : une version antérieure de cet article donnait {count, plural, one {une indication erronée} other {des indications erronées}} sur le sondage {pollster}.',
+    'Rectificatif, {on} : {count, plural, =0 {des formulations d’une version antérieure de cet article sur le sondage {pollster} ont été retirées} one {une version antérieure de cet article donnait une indication erronée sur le sondage {pollster}} other {une version antérieure de cet article donnait des indications erronées sur le sondage {pollster}}}.',
   share: 'Elle donnait {option} à {was} ; le chiffre exact est {is}.',
   'earlier-share': 'Elle donnait {option} à {was} dans {prevPoll} ; le chiffre exact est {is}.',
   'group-share': 'Elle donnait {option} à {was} parmi {group} ; le chiffre exact est {is}.',
   'sample-size':
     '{wasSized, select, yes {Elle indiquait {was} personnes interrogées} other {Elle n’indiquait pas le nombre de personnes interrogées}} ; {isSized, select, yes {le nombre exact est {is}} other {le nombre exact n’est pas communiqué}}.',
   dates: 'Elle datait les entretiens {was} ; les dates exactes sont : {is}.',
-  now: 'Voici ce que permettent de dire les chiffres exacts. {line}',
+  now: 'Voici ce que permettent de dire les chiffres{count, plural, =0 {} other { exacts}}. {line}',
   weaker: 'Ils ne permettent pas l’affirmation qui a été faite.',
 };

@@ -23,8 +23,18 @@ beforeEach(() => {
 });
 afterEach(cleanup);
 
-const open = (preselected: string | null = null) =>
-  render(<ChooseClaim {...{ releaseId, preselected, facts, previous, document, answer, create }} />);
+const languages = [
+  { language: 'en' as const, isClearable: true },
+  { language: 'es' as const, isClearable: false },
+];
+type More = { onePollHeadlines: 'allow' | 'warn' | 'refuse' };
+const open = (preselected: string | null = null, more: More = { onePollHeadlines: 'allow' }) =>
+  render(
+    <ChooseClaim
+      {...{ releaseId, preselected, facts, previous, document, answer, create, languages, ...more }}
+      preselectedLanguage="en"
+    />,
+  );
 const draft = () => screen.getByRole('button', { name: 'Draft the sheet' });
 
 describe('choosing the claim of a sheet', () => {
@@ -58,5 +68,23 @@ describe('choosing the claim of a sheet', () => {
     await userEvent.click(draft());
     const [first, second] = create.mock.calls.map(([input]) => input.submissionKey);
     expect(first).toBe(second);
+  });
+
+  it('says at the choice of a language what it still lacks, and drafts in the one chosen', async () => {
+    open('lead:Alder|Brook');
+    const choice = screen.getByRole('combobox', { name: 'Language of the sheet' });
+    expect(screen.queryByText(/No native editor/)).toBeNull();
+    await userEvent.selectOptions(choice, 'es');
+    expect(screen.getByText(/No native editor of this desk has signed/)).toBeTruthy();
+    await userEvent.click(draft());
+    await waitFor(() => expect(create.mock.calls[0]?.[0]).toMatchObject({ language: 'es' }));
+  });
+
+  it('says before drafting what house style makes of a headline on one poll', () => {
+    open('lead:Alder|Brook', { onePollHeadlines: 'refuse' });
+    expect(screen.getByText(/it is drafted knocked out/)).toBeTruthy();
+    cleanup();
+    open('lead:Alder|Brook');
+    expect(screen.queryByText(/rests on one poll/)).toBeNull();
   });
 });

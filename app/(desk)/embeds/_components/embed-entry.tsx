@@ -1,5 +1,7 @@
 import Link from 'next/link';
+import { embargoEnd } from '@/components/lines/embargo-band';
 import { when } from '@/components/lines/when';
+import { CautionNote } from '@/components/ui/caution-note';
 import { Details } from '@/components/ui/details';
 import { formatInstant } from '@/lib/format/date';
 import type { EmbedItem } from '@/lib/services/embed/list-embeds';
@@ -21,6 +23,7 @@ export function EmbedEntry({
   zone: string;
 }) {
   const { id, url, chartTitle, state } = embed;
+  const isShown = state === 'live' && embed.hold === null;
   const title = chartTitle === '' ? 'A chart without title' : chartTitle;
   return (
     <article
@@ -35,7 +38,9 @@ export function EmbedEntry({
         >
           {title}
         </h2>
-        <p className={state === 'live' ? 'font-semibold' : 'font-semibold text-caution'}>{STATES[state]}</p>
+        <p className={isShown ? 'font-semibold' : 'font-semibold text-caution'}>
+          {isShown || state !== 'live' ? STATES[state] : 'Held'}
+        </p>
       </div>
       <p className="text-soft">
         {embed.race}, {embed.pollster}. Version {embed.version}, made by {embed.createdBy},{' '}
@@ -50,6 +55,11 @@ export function EmbedEntry({
         ) : null}
       </p>
       <p className="mt-1 max-w-prose">{standing(embed, zone)}</p>
+      {embed.oneReader && state !== 'pulled' ? (
+        <CautionNote title="One reader">
+          <p>{embed.oneReader} released these words alone at night. A second person has not read them yet.</p>
+        </CautionNote>
+      ) : null}
       <p className="mt-1 wrap-anywhere">
         Address:{' '}
         {state === 'live' ? (
@@ -76,12 +86,27 @@ export function EmbedEntry({
   );
 }
 
-function standing({ state, embargoAt, pulledAt }: EmbedItem, zone: string): string {
+function standing({ state, embargoAt, pulledAt, hold }: EmbedItem, zone: string): string {
+  if (state === 'live' && hold) return heldWords(hold, zone);
   if (state === 'live') return 'Public now. Articles show the newest cleared version.';
   if (state === 'waiting') {
-    const until = embargoAt === null ? '' : ` (${formatInstant(embargoAt, zone, 'en-GB')})`;
+    const until = embargoAt === null ? '' : ` (${embargoEnd({ at: embargoAt, zone })})`;
     return `The address exists; it answers 404 until the embargo ends${until}.`;
   }
   const at = pulledAt === null ? '' : ` on ${formatInstant(pulledAt, zone, 'en-GB')}`;
   return `Pulled${at}. Where readers saw it, a note without figures says that the chart was withdrawn.`;
+}
+
+function heldWords(hold: NonNullable<EmbedItem['hold']>, zone: string): string {
+  const until = formatInstant(hold.untilAt, zone, 'en-GB');
+  switch (hold.kind) {
+    case 'embargo':
+      return `The address answers 404 until the embargo ends (${until}).`;
+    case 'taken-down':
+      return `Barred by a publication ban until ${until}: articles show a note without figures meanwhile.`;
+    case 'frozen':
+      return `New figures are barred by a publication ban until ${until}: articles show version ${hold.version}, which was public before.`;
+    case 'not-shown':
+      return `New figures are barred by a publication ban until ${until}: the address answers 404 meanwhile.`;
+  }
 }

@@ -7,7 +7,6 @@ import { PrintableLine } from '@/components/lines/printable-line';
 import { SharesTable } from '@/components/lines/shares-table';
 import { PageTitle } from '@/components/ui/page-title';
 import { SectionHeading } from '@/components/ui/section-heading';
-import { LINE_STATE_NAMES } from '@/lib/domain/sheet';
 import type { ActionResult } from '@/lib/errors';
 import { formatDayRange } from '@/lib/format/date';
 import type { AsPrintedView } from '@/lib/services/sheet/get-as-printed';
@@ -17,6 +16,7 @@ import { KeyList } from './key-list';
 import { OneReaderMark } from './one-reader-mark';
 import type { SheetActions } from './sheet-actions';
 import { StandingNotes } from './standing-notes';
+import { StateNote } from './state-note';
 import { TermsForm } from './terms-form';
 
 type Action<Input> = (input: Input) => Promise<ActionResult<unknown>>;
@@ -44,7 +44,7 @@ export function AsPrintedScreen({
       <PageTitle
         title="Figures as printed"
         crumbs={[{ label: 'Lines', href: '/lines' }, { label: release.race.name }]}
-        note={LINE_STATE_NAMES[view.state]}
+        note={<StateNote state={view.state} wanted={view.desk.wanted} now={now} />}
         sub={`${release.pollster.name}, ${dates}. No claim, no comparison, no chart: house style’s own words, which nobody edits.`}
       />
       <OneReaderMark oneReader={view.oneReader} />
@@ -73,9 +73,11 @@ export function AsPrintedScreen({
         </div>
       </div>
       <AsPrintedBar key={`${view.state} ${view.version}`} view={view} actions={actions} />
-      <TermsForm id={view.id} desk={view.desk} zone={zone} now={now} set={actions.terms} />
-      <ActsList acts={view.acts} now={now} zone={zone} />
-      <KeyList />
+      <div className="sheet-folds">
+        <TermsForm id={view.id} desk={view.desk} zone={zone} set={actions.terms} />
+        <ActsList acts={view.acts} now={now} zone={zone} />
+        <KeyList />
+      </div>
     </>
   );
 }

@@ -6,6 +6,7 @@ import { OverrideField } from '@/components/wording-check/override-field';
 import { Button } from '@/components/ui/button';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
+import { lineCommentsOf } from './line-comments-of';
 import { MovedNote } from './moved-note';
 import { RefusedNote } from './refused-note';
 import type { SheetActions } from './sheet-actions';
@@ -42,6 +43,7 @@ export function Changing({
           drafts={draftsOf(view.lines)}
           lang={view.language}
           marks={marks}
+          comments={(kind) => lineCommentsOf(view.desk.comments, kind)}
           errors={failure?.fields ?? {}}
           attempt={attempt}
           onChange={change}

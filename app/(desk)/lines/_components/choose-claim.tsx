@@ -13,6 +13,9 @@ import { ErrorSummary } from '@/components/ui/error-summary';
 import { Radios } from '@/components/ui/radios';
 import { ENGLISH_CHART_WORDS } from '@/lib/charts/chart-words';
 import { soundingSpecOf } from '@/lib/charts/sounding-spec-of';
+import { LanguageChoice, type OfferedLanguage } from '@/components/lines/language-choice';
+import type { Language } from '@/lib/domain/vocabulary';
+import { isOfTwoReleases } from '@/lib/wording/draft-input';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { ActionResult } from '@/lib/errors';
 import type { CheckAnswer, CheckDocument, TestableFinding } from '@/lib/findings/check-types';
@@ -20,12 +23,21 @@ import { claimKey } from '@/lib/findings/claim-key';
 import { headingOf } from '@/lib/findings/heading';
 import { faultsOf, useAction } from '../../../_components/use-action';
 
-type Input = { submissionKey: string; releaseId: string; claimKey: string };
+type Input = { submissionKey: string; releaseId: string; claimKey: string; language: Language };
+
+const ONE_POLL = {
+  allow: '',
+  warn: 'This claim rests on one poll. House style asks for such headlines to be put in their trend.',
+  refuse: 'This claim rests on one poll. House style files no headline on one: it is drafted knocked out.',
+};
 
 /** What the sheet claims: one of the findings of the release, with what each supports in sight. */
 export function ChooseClaim({
   releaseId,
   preselected,
+  preselectedLanguage,
+  languages,
+  onePollHeadlines,
   facts,
   previous,
   document,
@@ -34,6 +46,10 @@ export function ChooseClaim({
 }: {
   releaseId: string;
   preselected: string | null;
+  preselectedLanguage: Language;
+  languages: readonly OfferedLanguage[];
+  /** What house style makes of a headline that rests on one poll. */
+  onePollHeadlines: 'allow' | 'warn' | 'refuse';
   facts: ReleaseFacts;
   previous: ReleaseFacts | null;
   document: CheckDocument;
@@ -44,15 +60,19 @@ export function ChooseClaim({
   const findings = testedFindings(answer).filter(({ estimatePp }) => estimatePp !== null);
   const known = findings.some((finding) => claimKey(finding) === preselected);
   const [chosen, setChosen] = useState(known ? (preselected ?? '') : '');
+  const [language, setLanguage] = useState(preselectedLanguage);
   const [submissionKey] = useState(newSubmissionKey);
   const [isMade, setMade] = useState(false);
   const { run, isPending, failure, attempt } = useAction(create);
   const between = previous ? betweenReleases(previous.fieldStartOn, facts.fieldStartOn) : undefined;
 
+  const picked = findings.find((finding) => claimKey(finding) === chosen);
+  const onePoll = picked !== undefined && !isOfTwoReleases(picked.kind);
+
   const submit = async (event: FormEvent) => {
     event.preventDefault();
     if (isPending || isMade) return;
-    const result = await run({ submissionKey, releaseId, claimKey: chosen });
+    const result = await run({ submissionKey, releaseId, claimKey: chosen, language });
     if (!result.ok) return;
     setMade(true);
     router.push(`/lines/${result.value.id}`);
@@ -84,6 +104,10 @@ export function ChooseClaim({
           label: <ClaimLabel finding={finding} document={document} between={between} />,
         }))}
       />
+      <p role="status" className="mb-4 max-w-prose text-soft">
+        {onePoll ? ONE_POLL[onePollHeadlines] : ''}
+      </p>
+      <LanguageChoice id="language" languages={languages} value={language} onChange={setLanguage} />
       <Button type="submit" tone="primary" pending={isPending || isMade} pendingLabel="Drafting…">
         Draft the sheet
       </Button>

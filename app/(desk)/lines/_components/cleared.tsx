@@ -10,9 +10,9 @@ import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
 import { HashLine } from './hash-line';
 import { PullDialog } from './pull-dialog';
+import { ReadingColumns } from './reading-columns';
 import { RefusedNote } from './refused-note';
 import type { SheetActions } from './sheet-actions';
-import { SheetColumns } from './sheet-columns';
 import { useAct } from './use-act';
 
 type Props = {
@@ -31,11 +31,15 @@ export function Cleared({ view, actions, now, zone, onDone }: Props) {
   return (
     <>
       <OverrideNote override={view.override} />
-      <SheetColumns view={view}>
-        <SectionHeading>{isCleared ? 'Cleared words' : 'Pulled words, not to be printed'}</SectionHeading>
-        {view.lines
-          .filter(({ knockedOut }) => !knockedOut)
-          .map(({ kind, text, marks }) => (
+      <ReadingColumns
+        view={view}
+        head={
+          <div className="reading-head">
+            <SectionHeading>{isCleared ? 'Cleared words' : 'Pulled words, not to be printed'}</SectionHeading>
+          </div>
+        }
+        line={({ kind, text, marks, knockedOut }) =>
+          knockedOut ? null : (
             <PrintableLine
               key={kind}
               {...{ kind, text, marks }}
@@ -43,9 +47,10 @@ export function Cleared({ view, actions, now, zone, onDone }: Props) {
               knockedOut={false}
               lang={view.language}
             />
-          ))}
-        {view.hash ? <HashLine hash={view.hash} /> : null}
-      </SheetColumns>
+          )
+        }
+        foot={view.hash ? <HashLine hash={view.hash} /> : null}
+      />
       <RefusedNote failure={embed.failure ?? revise.failure} />
       <ActBar
         actions={

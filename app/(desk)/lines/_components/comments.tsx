@@ -2,16 +2,18 @@
 
 import { useRouter } from 'next/navigation';
 import { type FormEvent, useState } from 'react';
+import { entryIdOf, passageIdOf } from '@/components/lines/commented-words';
+import { Fold } from '@/components/lines/fold';
 import { whenSaid } from '@/components/lines/when';
 import { Button } from '@/components/ui/button';
 import { ErrorSummary } from '@/components/ui/error-summary';
-import { SectionHeading } from '@/components/ui/section-heading';
 import { Select } from '@/components/ui/select';
 import { TextArea } from '@/components/ui/text-area';
 import { LINE_KIND_NAMES, type LineKind, type LineText } from '@/lib/domain/sheet';
 import type { ActionResult } from '@/lib/errors';
 import type { CommentView } from '@/lib/services/sheet/list-comments';
 import { faultsOf, useAction } from '../../../_components/use-action';
+import { openComments } from './line-comments-of';
 
 export type CommentActions = {
   comment: (input: unknown) => Promise<ActionResult<{ id: string }>>;
@@ -25,6 +27,8 @@ type Props = {
   actions: CommentActions;
   /** While words are being written or read. */
   isOpen: boolean;
+  /** Open ones are in sight from the start. */
+  isUnfolded: boolean;
   now: number;
   zone: string;
 };
@@ -32,30 +36,38 @@ type Props = {
 const IDS = { quote: 'comment-quote', body: 'comment-body' };
 
 /** What people noted on passages of the lines. It is the desk's own: never evidence, never public. */
-export function Comments({ id, lines, comments, actions, isOpen, now, zone }: Props) {
+export function Comments({ id, lines, comments, actions, isOpen, isUnfolded, now, zone }: Props) {
   if (!isOpen && comments.length === 0) return null;
+  const open = openComments(comments);
   return (
-    <section aria-labelledby="comments" className="mt-6">
-      <SectionHeading id="comments">
-        Comments ({comments.filter(({ resolved }) => !resolved).length} open)
-      </SectionHeading>
+    <Fold id="comments" title={`Comments (${open.length} open)`} isOpen={isUnfolded && open.length > 0}>
       <ul className="border-t border-rule">
         {comments.map((comment) => (
-          <Entry key={comment.id} comment={comment} settle={actions.settle} now={now} zone={zone} />
+          <Entry
+            key={comment.id}
+            comment={comment}
+            number={open.indexOf(comment) + 1}
+            settle={actions.settle}
+            now={now}
+            zone={zone}
+          />
         ))}
       </ul>
       {isOpen ? <AddComment id={id} lines={lines} add={actions.comment} /> : null}
-    </section>
+    </Fold>
   );
 }
 
 function Entry({
   comment,
+  number,
   settle,
   now,
   zone,
 }: {
   comment: CommentView;
+  /** As it is marked in the words; 0 once it is settled. */
+  number: number;
   settle: CommentActions['settle'];
   now: number;
   zone: string;
@@ -67,10 +79,13 @@ function Entry({
     if (ok) router.refresh();
   };
   return (
-    <li className="border-b border-rule py-2">
+    <li id={entryIdOf(comment.id)} tabIndex={-1} className="border-b border-rule py-2">
       <p className="text-13 text-soft">
+        {number > 0 ? <strong>{number}. </strong> : null}
         {comment.by} {whenSaid(comment.at, now, zone)} on the {LINE_KIND_NAMES[comment.kind].toLowerCase()}:{' '}
-        <span className="font-serif text-15">“{comment.quote}”</span>
+        <a href={`#${passageIdOf(comment.id)}`} className="font-serif text-15">
+          “{comment.quote}”
+        </a>
         {comment.anchor.kind === 'changed' ? <strong> (the words have changed)</strong> : null}
       </p>
       <p className="max-w-prose whitespace-pre-line">{comment.body}</p>

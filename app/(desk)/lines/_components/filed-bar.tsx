@@ -1,5 +1,6 @@
 'use client';
 
+import type { ReactNode } from 'react';
 import { Button } from '@/components/ui/button';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { ActBar } from './act-bar';
@@ -12,11 +13,13 @@ import { useAct } from './use-act';
 export function FiledBar({
   view,
   actions,
+  folds,
   onDone,
   onChange,
 }: {
   view: SheetView;
   actions: SheetActions;
+  folds: ReactNode;
   onDone: (words: string) => void;
   onChange: () => void;
 }) {
@@ -63,7 +66,8 @@ export function FiledBar({
           </>
         }
       >
-        {wordsFor(view)}
+        <p className="text-13">{wordsFor(view)}</p>
+        {folds}
       </ActBar>
     </>
   );

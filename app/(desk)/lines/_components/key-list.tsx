@@ -1,6 +1,7 @@
 'use client';
 
 import { useEffect, useState } from 'react';
+import { goTo } from '@/components/lines/go-to';
 import { Button } from '@/components/ui/button';
 import { DefinitionList } from '@/components/ui/definition-list';
 import { Dialog } from '@/components/ui/dialog';
@@ -40,7 +41,7 @@ export function KeyList() {
         event.altKey && event.shiftKey ? KEYS.find(({ letter }) => event.code === `Key${letter}`) : undefined;
       if (!key || document.querySelector('dialog[open]')) return;
       event.preventDefault();
-      goTo(key.find);
+      goToFirst(key.find);
     };
     window.addEventListener('keydown', press);
     return () => window.removeEventListener('keydown', press);
@@ -55,8 +56,14 @@ export function KeyList() {
     setOff(!isOff);
   };
   return (
-    <div className="no-print mt-6">
-      <Button onClick={open}>Keys of this page</Button>
+    <div className="no-print">
+      <button
+        type="button"
+        className="text-13 font-semibold text-soft underline decoration-rule"
+        onClick={open}
+      >
+        Keys<span className="sr-only"> of this page</span>
+      </button>
       <Dialog isOpen={isOpen} onClose={() => setOpen(false)} title="Keys of this page">
         <DefinitionList
           items={[
@@ -76,13 +83,9 @@ export function KeyList() {
 }
 
 /** To the first of these that is on the page. */
-function goTo(find: readonly string[]): void {
+function goToFirst(find: readonly string[]): void {
   const places = find.map((selector) => document.querySelector<HTMLElement>(selector));
-  const place = places.find((one) => one !== null);
-  if (!place) return;
-  if (place.tabIndex < 0) place.tabIndex = -1;
-  place.focus();
-  place.scrollIntoView({ block: 'nearest' });
+  goTo(places.find((one) => one !== null) ?? null);
 }
 
 function isTyping(target: EventTarget | null): boolean {

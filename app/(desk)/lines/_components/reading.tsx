@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { type ReactNode, useState } from 'react';
 import { PrintableLine } from '@/components/lines/printable-line';
 import { SectionHeading } from '@/components/ui/section-heading';
 import { OverrideNote } from '@/components/wording-check/override-note';
@@ -8,14 +8,21 @@ import type { SheetView } from '@/lib/services/sheet/get-sheet';
 import { AGAINST, type Against, AgainstChoice } from './against-choice';
 import { Changing } from './changing';
 import { FiledBar } from './filed-bar';
+import { lineCommentsOf } from './line-comments-of';
 import { MovedNote } from './moved-note';
+import { ReadingColumns } from './reading-columns';
 import type { SheetActions } from './sheet-actions';
-import { SheetColumns } from './sheet-columns';
 
-type Props = { view: SheetView; actions: SheetActions; onDone: (words: string) => void };
+type Props = {
+  view: SheetView;
+  actions: SheetActions;
+  /** Comments, times, what was done: for the bar. */
+  folds: ReactNode;
+  onDone: (words: string) => void;
+};
 
 /** A filed sheet as its second reader sees it: printable words beside all they rest on. */
-export function Reading({ view, actions, onDone }: Props) {
+export function Reading({ view, actions, folds, onDone }: Props) {
   const [isChanging, setChanging] = useState(false);
   const isAgain = view.isAuthor && view.notYours !== 'filer';
   const [against, setAgainst] = useState<Against>(isAgain ? 'filed' : 'draft');
@@ -26,14 +33,17 @@ export function Reading({ view, actions, onDone }: Props) {
     <>
       <MovedNote view={view} />
       <OverrideNote override={view.override} />
-      <SheetColumns view={view}>
-        <div className="mb-2">
-          <SectionHeading>
-            {isAgain && against === 'filed' ? 'Marked against what you filed' : AGAINST[against]}
-          </SectionHeading>
-          <AgainstChoice value={against} isThere={isThere} onChange={setAgainst} />
-        </div>
-        {view.lines.map(({ kind, text, draft, filed, cleared, knockedOut, marks }) => (
+      <ReadingColumns
+        view={view}
+        head={
+          <div className="reading-head">
+            <SectionHeading>
+              {isAgain && against === 'filed' ? 'Marked against what you filed' : AGAINST[against]}
+            </SectionHeading>
+            <AgainstChoice value={against} isThere={isThere} onChange={setAgainst} />
+          </div>
+        }
+        line={({ kind, text, draft, filed, cleared, knockedOut, marks }) => (
           <PrintableLine
             key={kind}
             kind={kind}
@@ -42,10 +52,17 @@ export function Reading({ view, actions, onDone }: Props) {
             knockedOut={knockedOut}
             marks={marks}
             lang={view.language}
+            comments={lineCommentsOf(view.desk.comments, kind)}
           />
-        ))}
-      </SheetColumns>
-      <FiledBar view={view} actions={actions} onDone={onDone} onChange={() => setChanging(true)} />
+        )}
+      />
+      <FiledBar
+        view={view}
+        actions={actions}
+        folds={folds}
+        onDone={onDone}
+        onChange={() => setChanging(true)}
+      />
     </>
   );
 }

@@ -31,10 +31,29 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
     if (done !== '') said.current?.focus();
   }, [done]);
   const seen = `${view.state} ${view.version} ${view.hash} ${view.basisHash}`;
+  // In the bar of a sheet that is read, to fit one screen; elsewhere in sight from the start.
+  const isRead = view.state === 'filed';
+  const folds = (
+    <div className="sheet-folds">
+      <Comments
+        id={view.id}
+        lines={view.lines.filter(({ knockedOut }) => !knockedOut)}
+        comments={view.desk.comments}
+        actions={actions}
+        isOpen={view.state !== 'cleared' && view.state !== 'pulled'}
+        isUnfolded={!isRead}
+        now={now}
+        zone={zone}
+      />
+      <TermsForm id={view.id} desk={view.desk} zone={zone} set={actions.terms} />
+      <ActsList acts={view.acts} isUnfolded={!isRead} now={now} zone={zone} />
+      <KeyList />
+    </div>
+  );
   const isBeingRewritten = view.isServed && view.state !== 'cleared';
   return (
     <>
-      <p ref={said} tabIndex={-1} role="status" className="mt-2 font-semibold">
+      <p ref={said} tabIndex={-1} role="status" className="mt-2 font-semibold empty:m-0">
         {done}
       </p>
       <StandingNotes id={view.id} desk={view.desk} review={actions.review} />
@@ -45,7 +64,7 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
         </div>
       ) : null}
       {view.state === 'filed' ? (
-        <Reading key={seen} view={view} actions={actions} onDone={setDone} />
+        <Reading key={seen} view={view} actions={actions} folds={folds} onDone={setDone} />
       ) : view.state === 'cleared' || view.state === 'pulled' ? (
         <Cleared key={seen} view={view} actions={actions} now={now} zone={zone} onDone={setDone} />
       ) : view.may.write ? (
@@ -61,18 +80,7 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
       ) : (
         <Waiting view={view} now={now} zone={zone} />
       )}
-      <Comments
-        id={view.id}
-        lines={view.lines.filter(({ knockedOut }) => !knockedOut)}
-        comments={view.desk.comments}
-        actions={actions}
-        isOpen={view.state !== 'cleared' && view.state !== 'pulled'}
-        now={now}
-        zone={zone}
-      />
-      <TermsForm id={view.id} desk={view.desk} zone={zone} now={now} set={actions.terms} />
-      <ActsList acts={view.acts} now={now} zone={zone} />
-      <KeyList />
+      {isRead ? null : folds}
     </>
   );
 }

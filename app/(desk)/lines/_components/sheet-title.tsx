@@ -2,10 +2,10 @@ import { betweenReleases } from '@/components/findings/between';
 import { isTakenBack } from '@/components/lines/taken-back';
 import { when } from '@/components/lines/when';
 import { PageTitle } from '@/components/ui/page-title';
-import { LINE_STATE_NAMES } from '@/lib/domain/sheet';
 import { subjectOf } from '@/lib/findings/heading';
 import { formatDayRange } from '@/lib/format/date';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
+import { StateNote } from './state-note';
 
 const LOCALE = 'en-GB';
 
@@ -17,7 +17,8 @@ export function SheetTitle({ view, now, zone }: { view: SheetView; now: number; 
     <PageTitle
       title={titleOf(view, now, zone)}
       crumbs={[{ label: 'Lines', href: '/lines' }, { label: release.race.name }]}
-      note={LINE_STATE_NAMES[view.state]}
+      note={<StateNote state={view.state} wanted={view.desk.wanted} now={now} />}
+      isCompact
       sub={`${release.pollster.name}, ${dates}. ${agreedOf(view)}`}
     />
   );
@@ -61,6 +62,6 @@ function agreedOf({ state, filer, notYours }: SheetView): string {
   if (state === 'pulled') return 'These words were withdrawn.';
   if (state !== 'filed') return 'Nobody has agreed to these words yet.';
   if (notYours === 'filer') return 'You have agreed to these words by filing them.';
-  const agreed = `${filer?.name ?? 'The filer'} has agreed to these words by filing them`;
+  const agreed = `${filer?.name ?? 'The filer'} has agreed by filing`;
   return notYours === null ? `${agreed}; yours is the second reading.` : `${agreed}.`;
 }

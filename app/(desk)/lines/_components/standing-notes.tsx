@@ -5,6 +5,7 @@ import { useRouter } from 'next/navigation';
 import { StaleReasons } from '@/components/lines/stale-reasons';
 import { Button } from '@/components/ui/button';
 import { CautionNote } from '@/components/ui/caution-note';
+import { LANGUAGE_NAMES, LANGUAGES } from '@/lib/domain/vocabulary';
 import { LINE_KIND_NAMES } from '@/lib/domain/sheet';
 import type { ActionResult } from '@/lib/errors';
 import { formatInstant } from '@/lib/format/date';
@@ -42,6 +43,7 @@ export function StandingNotes({
         </CautionNote>
       ) : null}
       {desk.reviews.length > 0 ? <NeedsReview id={id} desk={desk} review={review} /> : null}
+      <OtherLanguages desk={desk} />
       {desk.lineReasons.length > 0 ? (
         <CautionNote title="Why single lines came back">
           <ul>
@@ -56,6 +58,41 @@ export function StandingNotes({
     </>
   );
 }
+
+/** The same claim in other languages: where it stands already, and where it can still be drafted. */
+function OtherLanguages({ desk: { siblings, claim, language: own } }: { desk: DeskView }) {
+  const missing = LANGUAGES.filter(
+    (one) => one !== own && !siblings.some(({ language }) => language === one),
+  );
+  const draft = (language: string) =>
+    `/lines/new?${new URLSearchParams({ release: claim.releaseId, claim: claim.key, language })}`;
+  return (
+    <p className="no-print mt-2 text-13 text-soft">
+      In {nameOf(own)}.{' '}
+      {siblings.map(({ id, language }) => (
+        <span key={id}>
+          <Link href={`/lines/${id}`}>
+            The same in <span lang={language}>{nameOf(language)}</span>
+          </Link>
+          .{' '}
+        </span>
+      ))}
+      {missing.length > 0 ? 'Draft it in ' : null}
+      {missing.map((language, at) => (
+        <span key={language}>
+          {at > 0 ? ', ' : ''}
+          <Link href={draft(language)} lang={language}>
+            {nameOf(language)}
+          </Link>
+        </span>
+      ))}
+      {missing.length > 0 ? '.' : null}
+    </p>
+  );
+}
+
+const nameOf = (language: string) =>
+  LANGUAGES.flatMap((one) => (one === language ? [LANGUAGE_NAMES[one]] : []))[0] ?? language;
 
 function NeedsReview({
   id,
@@ -77,7 +114,7 @@ function NeedsReview({
       <ul>
         {desk.reviews.map(({ sheetId, language, cause }) => (
           <li key={`${sheetId} ${cause}`}>
-            <Link href={`/lines/${sheetId}`}>The sheet in {language}</Link> {CAUSES[cause]}.
+            <Link href={`/lines/${sheetId}`}>The sheet in {nameOf(language)}</Link> {CAUSES[cause]}.
           </li>
         ))}
       </ul>

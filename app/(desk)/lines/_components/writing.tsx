@@ -12,6 +12,7 @@ import { ActBar } from './act-bar';
 import { AddLine } from './add-line';
 import { DiscardDraft } from './discard-draft';
 import { LastComment } from './last-comment';
+import { lineCommentsOf } from './line-comments-of';
 import { RefusedNote } from './refused-note';
 import { SaveStatus } from './save-status';
 import type { SheetActions } from './sheet-actions';
@@ -78,6 +79,7 @@ export function Writing({ view, actions, person, now, zone, onDone }: Props) {
           drafts={draftsOf(view.lines)}
           lang={view.language}
           marks={marks}
+          comments={(kind) => lineCommentsOf(view.desk.comments, kind)}
           errors={failure?.fields ?? {}}
           attempt={attempt}
           onChange={change}

@@ -5,6 +5,8 @@ import { EmbargoBand } from '@/components/lines/embargo-band';
 import { PageTitle } from '@/components/ui/page-title';
 import { deskPage } from '@/lib/auth/desk-page';
 import { formatDayRange } from '@/lib/format/date';
+import { LANGUAGES } from '@/lib/domain/vocabulary';
+import { listLanguages } from '@/lib/services/house-style/sign-language';
 import { getRelease } from '@/lib/services/release/get-release';
 import { ChooseClaim } from '../_components/choose-claim';
 import { StartAsPrinted } from '../_components/start-as-printed';
@@ -12,13 +14,20 @@ import { createAsPrintedAction, createSheetAction } from '../actions';
 
 export const metadata: Metadata = { title: 'Draft a sheet' };
 
-type Search = { release?: string | string[]; claim?: string | string[] };
+type Search = Record<'release' | 'claim' | 'language', string | string[] | undefined>;
 
-export default async function NewSheetPage({ searchParams }: { searchParams: Promise<Search> }) {
-  const { release: asked, claim } = await searchParams;
+export default async function NewSheetPage({ searchParams }: { searchParams: Promise<Partial<Search>> }) {
+  const { release: asked, claim, language } = await searchParams;
   if (typeof asked !== 'string') notFound();
-  const release = await deskPage((actor, ctx) => getRelease(actor, asked, ctx));
-  const { facts, previous, document, answer, embargo, isOnList } = release;
+  const { release, languages } = await deskPage((actor, ctx) => ({
+    release: getRelease(actor, asked, ctx),
+    languages: listLanguages(actor, ctx).map((one) => ({
+      language: one.language,
+      isClearable: one.isClearable,
+    })),
+  }));
+  const { facts, previous, document, answer, embargo, isOnList, houseStyle } = release;
+  const preselectedLanguage = LANGUAGES.find((one) => one === language) ?? 'en';
   const dates = formatDayRange(facts.fieldStartOn, facts.fieldEndOn, 'en-GB');
   return (
     <>
@@ -34,13 +43,21 @@ export default async function NewSheetPage({ searchParams }: { searchParams: Pro
       <ChooseClaim
         releaseId={release.id}
         preselected={typeof claim === 'string' ? claim : null}
+        preselectedLanguage={preselectedLanguage}
+        languages={languages}
+        onePollHeadlines={houseStyle.onePollHeadlines}
         facts={facts}
         previous={previous}
         document={document}
         answer={answer}
         create={createSheetAction}
       />
-      <StartAsPrinted releaseId={release.id} create={createAsPrintedAction} />
+      <StartAsPrinted
+        releaseId={release.id}
+        languages={languages}
+        preselectedLanguage={preselectedLanguage}
+        create={createAsPrintedAction}
+      />
       <p className="mt-6">
         <Link href={`/releases/${release.id}`}>Back to the release</Link>
       </p>

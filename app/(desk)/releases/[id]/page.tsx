@@ -30,6 +30,7 @@ import { LiftEmbargo } from './_components/lift-embargo';
 import { Particulars } from './_components/particulars';
 import { missingSentence, particularsOf, tabOf, titleOf } from './_components/release-words';
 import { SharesTable } from './_components/shares-table';
+import { twiceTheMargin, twiceTheMarginNote } from '@/lib/wording/twice-margin';
 
 type Props = { params: Promise<{ id: string }> };
 
@@ -132,8 +133,9 @@ function draftHref(releaseId: string, finding: TestableFinding): string {
 }
 
 function Findings({ view }: { view: ReleaseView }) {
-  const { id, facts, previous, document, answer } = view;
-  const level = formatLevel(resolvePolicy(document.policy).level, ENGLISH_CHART_WORDS);
+  const { id, facts, previous, document, answer, houseStyle } = view;
+  const policy = resolvePolicy(document.policy);
+  const level = formatLevel(policy.level, ENGLISH_CHART_WORDS);
   const uncounted = uncountedThresholds(facts);
   return (
     <section aria-labelledby="findings" className="min-w-0">
@@ -151,6 +153,12 @@ function Findings({ view }: { view: ReleaseView }) {
         document={document}
         answer={answer}
         between={previous ? betweenReleases(previous.fieldEndOn, facts.fieldEndOn) : undefined}
+        besideOf={(finding) => {
+          const reading = houseStyle.twiceTheMargin
+            ? twiceTheMargin(finding, answer.base, facts, policy.level)
+            : null;
+          return reading && twiceTheMarginNote(reading);
+        }}
         workingOf={(finding) => (
           <WorkingSteps steps={working(document, answer, answer.findings.indexOf(finding))} />
         )}

@@ -1,4 +1,4 @@
-import { compilePhrases, type Phrases } from '../phrases';
+import { compilePhrases, type Cue, type Phrases } from '../phrases';
 import type { WordingLanguage } from '../types';
 import { EN_LEXICON } from './en';
 import { CUE_GROUPS, type CueGroup, type Lexicon } from './types';
@@ -8,6 +8,7 @@ export type CompiledLexicon = {
   words: Lexicon;
   cues: Readonly<Record<CueGroup, Phrases>>;
   fractions: Phrases;
+  numbers: Phrases;
   inEvery: Phrases;
 };
 
@@ -26,12 +27,14 @@ export function lexiconOf(language: WordingLanguage): CompiledLexicon | null {
   if (!words) return null;
   const known = compiled.get(language);
   if (known) return known;
-  const cues = Object.fromEntries(CUE_GROUPS.map((group) => [group, compilePhrases(words.cues[group])]));
+  const compile = (list: readonly Cue[]) => compilePhrases(list, words.elisions);
+  const cues = Object.fromEntries(CUE_GROUPS.map((group) => [group, compile(words.cues[group])]));
   const lexicon: CompiledLexicon = {
     words,
     cues: cues as Record<CueGroup, Phrases>,
-    fractions: compilePhrases([{ say: Object.keys(words.fractions) }]),
-    inEvery: compilePhrases([{ say: words.inEvery }]),
+    fractions: compile([{ say: Object.keys(words.fractions) }]),
+    numbers: compile([{ say: Object.keys(words.numbers) }]),
+    inEvery: compile([{ say: words.inEvery }]),
   };
   compiled.set(language, lexicon);
   return lexicon;

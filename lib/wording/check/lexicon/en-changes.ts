@@ -21,7 +21,7 @@ const PHRASAL = (
   'made make makes making set turned turn turns show showed shown add adds added break breaks broke pick follow ' +
   'follows wake lined ended end come came brought bring speed sum sums summed give gave open opened signed sign ' +
   'divided cleared clear grew split close drawn draw drew takes take taken taking summing runner stand stood warm ' +
-  'look looked build built hold held keep keeps catch catching brings backed backs'
+  'look looked build built hold held keep keeps catch catching brings backed backs toss run line start mix pop check'
 ).split(' ');
 const DOWN_PHRASAL =
   'break broke turned written lay laid stand stands step steps slow slowed shut tone upside narrowed calm boil boils'.split(
@@ -160,7 +160,9 @@ export const EN_CHANGES: Readonly<Record<Extract<CueGroup, Groups>, readonly Cue
       notAfter: ['car', 'bridge', 'market', 'plane'],
     },
     {
-      say: listed(`leaps | leapt | leap | spikes | spiked | spike | haemorrhaging | hemorrhaging | meteoric`),
+      say: listed(
+        `leaps | leapt | leap | spikes | spiked | spike | haemorrhaging | hemorrhaging | meteoric | craters | cratered | cratering | tanks | tanked | implodes | imploded | implosion | meltdown | balloons | ballooned | nose dives | nose dived`,
+      ),
     },
   ],
   momentum: [
@@ -227,7 +229,13 @@ export const EN_CHANGES: Readonly<Record<Extract<CueGroup, Groups>, readonly Cue
       changed little | barely budged`),
     },
   ],
-  raceWords: [{ say: listed(`race | contest | gap | picture | standings | field | lead`) }],
+  raceWords: [
+    {
+      say: listed(
+        `race | contest | gap | picture | standings | field | lead | views | opinion | opinions | mood | polls | figures | numbers | support`,
+      ),
+    },
+  ],
   recordWords: [
     {
       say: listed(`

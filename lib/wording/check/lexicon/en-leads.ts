@@ -84,7 +84,8 @@ export const EN_LEADS: Readonly<Record<Extract<CueGroup, Groups>, readonly Cue[]
     },
     {
       say: listed(`
-      beats | beating | defeats | overtakes | overtook | overtaking | overtaken | has overtaken |
+      beats | beating | defeats | pips | pipped | bests | bested | outstrips | outperforms |
+      shades | noses out | nosed out | overtakes | overtook | overtaking | overtaken | has overtaken |
       leapfrogs`),
     },
     { say: ['tops'], notBefore: listed(`the | out | off | up | of`) },
@@ -96,7 +97,11 @@ export const EN_LEADS: Readonly<Record<Extract<CueGroup, Groups>, readonly Cue[]
       slightly ahead | narrowly ahead | just ahead | marginally ahead | comfortably ahead | edges
       ahead`),
     },
-    { say: listed(`edging ahead | edged ahead | nudges ahead | inches ahead | moves ahead | moved ahead`) },
+    {
+      say: listed(
+        `edging ahead | edged ahead | nudges ahead | inches ahead | moves ahead | moved ahead | noses ahead | nosed ahead | creeps ahead | sneaks ahead | squeaks ahead | a nose ahead`,
+      ),
+    },
     {
       say: ['ahead'],
       notAfter: listed(`

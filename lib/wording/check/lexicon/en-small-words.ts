@@ -24,7 +24,8 @@ type Groups =
   | 'afterNoFraction'
   | 'changeNouns'
   | 'countedPeople'
-  | 'auxiliaries';
+  | 'auxiliaries'
+  | 'ownedNouns';
 
 /** English: small words around a claim, by what they do there. */
 export const EN_SMALL_WORDS: Readonly<Record<Extract<CueGroup, Groups>, readonly Cue[]>> = {
@@ -71,6 +72,7 @@ export const EN_SMALL_WORDS: Readonly<Record<Extract<CueGroup, Groups>, readonly
   ],
   changeNouns: [{ say: listed(`change | shift | move | difference since | swing`) }],
   countedPeople: [{ say: listed(`people | respondents | interviews | residents | electors | asked`) }],
+  ownedNouns: [],
   auxiliaries: [
     {
       say: listed(

@@ -10,6 +10,9 @@ import type { Lexicon } from './types';
 /** English, with British and American spellings. */
 export const EN_LEXICON: Lexicon = {
   decimalMark: '.',
+  locale: 'en-GB',
+  groupsBySpace: false,
+  elisions: [],
   abbreviations: listed(`
       mr | mrs | ms | dr | st | vs | approx | gov | sen | rep | jan | feb | aug | sept | sep | oct
       | nov | dec`),
@@ -43,6 +46,7 @@ export const EN_LEXICON: Lexicon = {
     eighty: 80,
     ninety: 90,
   },
+  oneArticles: [],
   fractions: {
     'two thirds': 200 / 3,
     'two third': 200 / 3,
@@ -63,6 +67,7 @@ export const EN_LEXICON: Lexicon = {
   },
   inEvery: ['in', 'in every', 'out of', 'out of every'],
   to: ['to', '–', '-'],
+  datesAreNames: true,
   months: [
     ['january', 'jan'],
     ['february', 'feb'],
@@ -85,6 +90,7 @@ export const EN_LEXICON: Lexicon = {
     ),
     yes: ['the ayes', 'yes side', 'yes vote', 'yes camp'],
     no: ['noes', 'no side', 'no vote', 'no camp'],
+    "don't know": listed(`did not know | do not know | does not know | had not decided | have not decided`),
   },
   commonNames: listed(`
       yes | no | other | others | none | someone else | remain | leave | undecided | unsure |
@@ -105,6 +111,11 @@ export const EN_LEXICON: Lexicon = {
       statistically | narrowly | also | there | momentum | backing | approval | figures | numbers
       | slight | we | i | his | her | its | their`),
   cues: { ...EN_LEADS, ...EN_CHANGES, ...EN_FIGURES, ...EN_POLLS, ...EN_WORDS, ...EN_SMALL_WORDS },
+  populations: {
+    adults: 'adults',
+    'registered-voters': 'registered voters',
+    'likely-voters': 'likely voters',
+  },
   replacements: {
     isAheadUnsettled: 'is ahead of {b} in this poll, which cannot settle it',
     aheadNow: 'ahead',

@@ -1,4 +1,4 @@
-import { markAt, replacementOf, type Judged } from '../marks';
+import { markAt, percentText, replacementOf, type Judged } from '../marks';
 import { subjectOf, type Party } from '../parties';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
@@ -137,10 +137,11 @@ function judgeIn(reading: Reading, said: Said, subject: Party, release: number):
   if (!found) return null;
   const now = option === null ? null : shareOf(checked.facts, option);
   const then = option === null ? null : shareOf(checked.previous, option);
-  return judge(reading, said, found, { now: printed(now), then: printed(then) });
+  return judge(reading, said, found, { now: printed(reading, now), then: printed(reading, then) });
 }
 
-const printed = (pct: number | null): Record<never, never> | string => (pct === null ? {} : `${pct}%`);
+const printed = ({ lexicon: { words } }: Reading, pct: number | null): Record<never, never> | string =>
+  pct === null ? {} : percentText(words, pct);
 
 /** The change of the lead of whoever was ahead before, told from the side of the one who is ahead. */
 function leadMove(reading: Reading, release: number, option: string | null): Claimed | null {

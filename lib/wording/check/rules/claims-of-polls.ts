@@ -1,7 +1,7 @@
 import { markAt, replacementOf } from '../marks';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
-import { scopeOf } from '../scope';
+import { isDeniedAfter, scopeOf } from '../scope';
 import type { WordingMark } from '../types';
 
 /** A poll measures opinion at its time and forecasts nothing: BBC Editorial Guidelines, section 10, from memory. */
@@ -54,6 +54,7 @@ function isDeniedOrAsked(reading: Reading, hit: Hit): boolean {
   for (; at >= sentence.from && !reading.cueAt('clauseBreaks', at); at -= 1) {
     if (reading.cueAt('negators', at)) return true;
   }
+  if (isDeniedAfter(reading, hit)) return true;
   return (
     scopeOf(reading, hit) === 'open' && !reading.has('conditionals', { from: sentence.from, to: hit.from })
   );

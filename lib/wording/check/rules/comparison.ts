@@ -49,10 +49,10 @@ export function namesPeriodOutside(reading: Reading, hit: Hit, release: number):
 }
 
 function monthsIn(reading: Reading, { from, to }: Hit): number[] {
-  const { months } = reading.lexicon.words;
+  const { months, datesAreNames } = reading.lexicon.words;
   const found: number[] = [];
   for (let at = from; at < to; at += 1) {
-    if (!reading.isCapital(at) || reading.mentionAt(at)) continue;
+    if ((datesAreNames && !reading.isCapital(at)) || reading.mentionAt(at)) continue;
     const month = months.findIndex((names) => names.includes(reading.tokens[at]?.text ?? ''));
     if (month >= 0) found.push(month + 1);
   }

@@ -67,10 +67,10 @@ function isInReleases(reading: Reading, { days, month, year }: Dated): boolean {
 }
 
 function weekdaysIn(reading: Reading): (Hit & { weekday: number })[] {
-  const { weekdays } = reading.lexicon.words;
+  const { weekdays, datesAreNames } = reading.lexicon.words;
   return reading.tokens.flatMap(({ text }, at) => {
     const weekday = weekdays.findIndex((names) => names.includes(text));
-    return weekday < 0 || !reading.isCapital(at) || reading.mentionAt(at)
+    return weekday < 0 || (datesAreNames && !reading.isCapital(at)) || reading.mentionAt(at)
       ? []
       : [{ from: at, to: at + 1, weekday }];
   });

@@ -1,6 +1,6 @@
 import { valueOf } from '@/lib/domain/disclosed';
-import { roundHalfUp } from '@/lib/format/number';
-import { markAt, replacementOf, type Judged } from '../marks';
+import { formatTrimmed, roundHalfUp } from '@/lib/format/number';
+import { markAt, percentText, replacementOf, type Judged } from '../marks';
 import { objectOf, subjectOf } from '../parties';
 import type { Quantity } from '../quantities';
 import type { Reading } from '../reading';
@@ -8,7 +8,7 @@ import { clauseOf } from '../scope';
 import { sizeOf } from '../sizes';
 import type { WordingMark } from '../types';
 import { isRounded, leadOf, rankedOptions, shareOf } from '../verdicts';
-import { releasesFor } from '../which-release';
+import { releasesFor, releasesNamed } from '../which-release';
 import { isAboutSubgroup } from './about';
 import { linkedOption } from './linked-option';
 
@@ -35,7 +35,7 @@ function judgeShare(
   { option, mayBeEarlier }: { option: string; mayBeEarlier: boolean },
 ): Judged | null {
   const { releases } = reading.input;
-  const candidates = releasesNear(reading, quantity, option);
+  const candidates = releasesNamed(reading, quantity, [option]);
   const facts = candidates.flatMap((release) => {
     const { facts: now, previous } = releases[release]!;
     return [now, ...(mayBeEarlier && previous ? [previous] : [])].map((one) => ({ release, one }));
@@ -47,11 +47,14 @@ function judgeShare(
     isRounded(quantity.value, quantity.decimals, shareOf(one, option) ?? -1),
   );
   const { release, one } = fitting ?? first;
-  const share = printedShare(shareOf(one, option) ?? 0, one.decimals);
+  const pct = shareOf(one, option) ?? 0;
+  const share = printedShare(pct, one.decimals);
   const base = {
     rule: 'figure' as const,
     release,
-    replacement: replacementOf(reading.lexicon.words, 'atShare', { share: `${share}%` }),
+    replacement: replacementOf(reading.lexicon.words, 'atShare', {
+      share: percentText(reading.lexicon.words, pct, one.decimals),
+    }),
   };
   if (!fitting) return { ...base, grade: 'wrong', message: `The release gives ${option} ${share}%.` };
   return quantity.decimals > one.decimals
@@ -61,14 +64,6 @@ function judgeShare(
         message: `The release prints ${share}%: no more decimals than it has.`,
       }
     : null;
-}
-
-/** Where a sentence names several pollsters, a share may be any of theirs. */
-function releasesNear(reading: Reading, quantity: Quantity, option: string): number[] {
-  const { from, to } = reading.sentenceAt(quantity.from);
-  const named = reading.mentions.filter((one) => one.kind === 'pollster' && one.from >= from && one.to <= to);
-  if (new Set(named.map(({ name }) => name)).size < 2) return releasesFor(reading, quantity, [option]);
-  return reading.input.releases.map((_, index) => index);
 }
 
 const printedShare = (pct: number, decimals: number) => roundHalfUp(pct, decimals).toFixed(decimals);
@@ -106,7 +101,9 @@ function markSizes(reading: Reading): WordingMark[] {
             release,
             claim,
             message: `The printed figures differ by ${roundHalfUp(pp, releases[release]!.facts.decimals)} points.`,
-            replacement: replacementOf(reading.lexicon.words, 'points', { n: String(roundHalfUp(pp, 1)) }),
+            replacement: replacementOf(reading.lexicon.words, 'points', {
+              n: formatTrimmed(pp, 1, reading.lexicon.words.locale),
+            }),
           },
         ),
       ];

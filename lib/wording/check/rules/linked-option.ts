@@ -114,7 +114,8 @@ function after(reading: Reading, quantity: Quantity): Link | null {
         ? { option: mention.name, mayBeEarlier: isEarlier(reading, mention) }
         : null;
     }
-    if (reading.quantityAt(at) || reading.tokens[at]?.text === ',') return null;
+    const isCut = reading.tokens[at]?.text === ',' && !reading.cueAt('backs', at + 1);
+    if (reading.quantityAt(at) || isCut) return null;
     if (reading.cueAt('backs', at)) isBacking = true;
   }
   return null;

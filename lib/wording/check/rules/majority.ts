@@ -1,4 +1,4 @@
-import { markAt, replacementOf, type Judged } from '../marks';
+import { markAt, percentText, replacementOf, type Judged } from '../marks';
 import { optionsIn, subjectOf } from '../parties';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
@@ -40,7 +40,9 @@ function saidFractions(reading: Reading): Said[] {
     .filter(
       ({ unit, from, to }) =>
         unit === 'fraction' &&
-        (!reading.isCapital(from) || reading.sentenceAt(from).from === from) &&
+        (reading.lexicon.words.nounsHaveCapitals ||
+          !reading.isCapital(from) ||
+          reading.sentenceAt(from).from === from) &&
         !reading.cueAt('beforeNoFraction', from - 1) &&
         !reading.cueAt('afterNoFraction', to),
     )
@@ -102,7 +104,9 @@ function judgeSide(
 ): Judged | null {
   const found = thresholdOf(reading.input.releases, release, option, 50);
   const base = { rule: 'majority' as const, release, claim: found?.claim ?? null };
-  const figure = replacementOf(reading.lexicon.words, 'atShare', { share: `${share}%` });
+  const figure = replacementOf(reading.lexicon.words, 'atShare', {
+    share: percentText(reading.lexicon.words, share),
+  });
   const isAbove = said.kind === 'above';
   if (isAbove ? share <= 50 : share >= 50) {
     return {
@@ -135,6 +139,8 @@ function judgeFraction(reading: Reading, said: Said, share: number, release: num
     grade: 'wrong',
     release,
     message: `The figure is ${share}%, which is not near this fraction.`,
-    replacement: replacementOf(reading.lexicon.words, 'atShare', { share: `${share}%` }),
+    replacement: replacementOf(reading.lexicon.words, 'atShare', {
+      share: percentText(reading.lexicon.words, share),
+    }),
   };
 }

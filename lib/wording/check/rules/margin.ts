@@ -1,11 +1,12 @@
 import { valueOf } from '@/lib/domain/disclosed';
+import type { Finding } from '@/lib/findings/check-types';
 import { formatTrimmed } from '@/lib/format/number';
 import { markAt, type Judged } from '../marks';
 import { optionsIn, subjectOf } from '../parties';
 import type { Hit } from '../phrases';
 import type { Quantity } from '../quantities';
 import type { Reading } from '../reading';
-import { scopeOf } from '../scope';
+import { clauseOf, scopeOf } from '../scope';
 import type { CheckedRelease, WordingMark } from '../types';
 import { leadOf, rankedOptions, type Claimed } from '../verdicts';
 import { releasesFor } from '../which-release';
@@ -107,7 +108,7 @@ function judgeStated(reading: Reading, quantity: Quantity): Judged | null {
   if (release === undefined) return null;
   const isOfLead = saysLead(reading, quantity) && !isOfShare(reading, quantity);
   const known = all.flatMap((checked) =>
-    isOfLead ? leadMargins(checked) : [...shareMargins(checked), ...leadMargins(checked)],
+    isOfLead ? leadMargins(checked) : [...shareMargins(checked), ...testMargins(checked, () => true)],
   );
   if (known.length === 0) return null;
   const fits = known.some(
@@ -115,11 +116,13 @@ function judgeStated(reading: Reading, quantity: Quantity): Judged | null {
   );
   if (fits || isWider(reading, quantity, known)) return null;
   const stated = shareMargins(all[0]!)[0];
-  const shown = formatTrimmed((isOfLead ? leadMargins(all[0]!)[0] : stated) ?? 0, 1, 'en-GB');
+  const size = (isOfLead ? leadMargins(all[0]!)[0] : stated) ?? 0;
+  const shown = formatTrimmed(size, 1, 'en-GB');
+  const replacement = `±${formatTrimmed(size, 1, reading.lexicon.words.locale)}`;
   const message = isOfLead
     ? `That is not the margin of this lead, which is about ±${shown} points.`
     : `The margin stated, or worked out here, is ±${shown} points.`;
-  return { rule: 'margin', grade: 'wrong', release, message, replacement: `±${shown}` };
+  return { rule: 'margin', grade: 'wrong', release, message, replacement };
 }
 
 /** "or ±10 if weighting cost more": beside a margin its wider end, up to what a doubled design effect would make it. */
@@ -141,7 +144,8 @@ const tolerance = (reading: Reading, { decimals, value }: Quantity) =>
 /** "±7 points for the lead", "the margin for the lead is ±7". */
 function saysLead(reading: Reading, hit: Hit): boolean {
   const sentence = reading.sentenceAt(hit.from);
-  if (reading.has('leadOrGap', { from: hit.to, to: Math.min(sentence.to, hit.to + REACH) })) return true;
+  const clause = clauseOf(reading, hit);
+  if (reading.has('leadOrGap', { from: hit.to, to: Math.min(clause.to, hit.to + REACH) })) return true;
   const noun = reading.cues('marginNoun').findLast(({ from, to }) => from >= sentence.from && to <= hit.from);
   return (
     noun !== undefined && reading.has('leadOrGap', { from: noun.to, to: Math.min(hit.from, noun.to + 3) })
@@ -149,7 +153,7 @@ function saysLead(reading: Reading, hit: Hit): boolean {
 }
 
 const isOfShare = (reading: Reading, { from, to }: Hit) =>
-  reading.has('shareWords', { from: to, to: Math.min(reading.sentenceAt(from).to, to + 4) });
+  reading.has('shareWords', { from: to, to: Math.min(clauseOf(reading, { from, to }).to, to + 4) });
 
 function shareMargins({ facts, previous, answer }: CheckedRelease): number[] {
   const stated = [facts, previous].map((one) => (one ? valueOf(one.statedMargin)?.pp : null));
@@ -162,8 +166,13 @@ function shareMargins({ facts, previous, answer }: CheckedRelease): number[] {
   return all.filter((margin): margin is number => typeof margin === 'number');
 }
 
-function leadMargins({ answer }: CheckedRelease): number[] {
-  return answer.findings.flatMap((one) => (one.kind !== 'share' && 'marginPp' in one ? [one.marginPp] : []));
+/** Of leads and changes; a test against a threshold has the margin of one share. */
+const leadMargins = (checked: CheckedRelease) => testMargins(checked, ({ kind }) => kind !== 'threshold');
+
+function testMargins({ answer }: CheckedRelease, fits: (finding: Finding) => boolean): number[] {
+  return answer.findings.flatMap((one) =>
+    one.kind !== 'share' && 'marginPp' in one && fits(one) ? [one.marginPp] : [],
+  );
 }
 
 /** "Within the margin of error": of a lead, only its own test says that. */

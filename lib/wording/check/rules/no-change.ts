@@ -1,4 +1,4 @@
-import { replacementOf, type Judged } from '../marks';
+import { percentText, replacementOf, type Judged } from '../marks';
 import { subjectOf } from '../parties';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
@@ -50,8 +50,8 @@ function judgeSaid(reading: Reading, hit: Hit): WordingMark[] {
         : leadChangeOf(releases, release, a, b);
       const option = subject?.option ?? '';
       const slots = {
-        now: `${shareOf(checked.facts, option)}%`,
-        then: `${shareOf(checked.previous, option)}%`,
+        now: percentText(reading.lexicon.words, shareOf(checked.facts, option) ?? 0),
+        then: percentText(reading.lexicon.words, shareOf(checked.previous, option) ?? 0),
       };
       return found && judge(reading, found, subject ? slots : null);
     },

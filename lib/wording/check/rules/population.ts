@@ -4,7 +4,7 @@ import { markAt } from '../marks';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
 import type { WordingMark } from '../types';
-import { releasesFor } from '../which-release';
+import { releasesNamed } from '../which-release';
 import { isAboutPoll } from './about';
 
 const NAMES: Record<Population, string> = {
@@ -42,7 +42,7 @@ function isInOther(reading: Reading, group: string, hit: Hit): boolean {
 }
 
 function judge(reading: Reading, hit: Hit, fitting: readonly Population[]): WordingMark[] {
-  const asked = releasesFor(reading, hit).flatMap((release) => {
+  const asked = releasesNamed(reading, hit).flatMap((release) => {
     const { facts, previous } = reading.input.releases[release]!;
     const sentence = reading.sentenceAt(hit.from);
     const all = reading.has('earlierWords', sentence) && previous ? [facts, previous] : [facts];
@@ -58,7 +58,7 @@ function judge(reading: Reading, hit: Hit, fitting: readonly Population[]): Word
       grade: 'wrong',
       release: first.release,
       message: `The poll asked ${name}.`,
-      replacement: name,
+      replacement: first.population ? reading.lexicon.words.populations[first.population] : null,
     }),
   ];
 }

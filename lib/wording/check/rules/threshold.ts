@@ -1,4 +1,4 @@
-import { markAt, replacementOf, type Judged } from '../marks';
+import { markAt, percentText, replacementOf, type Judged } from '../marks';
 import { subjectOf } from '../parties';
 import type { Hit } from '../phrases';
 import type { Reading } from '../reading';
@@ -25,7 +25,7 @@ export function markThresholds(reading: Reading): WordingMark[] {
 function saidSides(reading: Reading): Said[] {
   const sides = (['aboveThreshold', 'belowThreshold'] as const).flatMap((group) =>
     reading.cues(group).flatMap((hit): Said[] => {
-      const line = lineAfter(reading, hit);
+      const line = lineAfter(reading, hit) ?? lineBefore(reading, hit);
       return line ? [{ ...line, isAbove: group === 'aboveThreshold' }] : [];
     }),
   );
@@ -45,12 +45,22 @@ function lineAfter(reading: Reading, { from, to }: Hit): Omit<Said, 'isAbove'> |
     const noun = reading.cueAt('thresholdNoun', at);
     if (noun) return { from, to: noun.to, pct };
     const quantity = reading.quantityAt(at);
-    if (quantity) {
+    if (quantity && reading.cueAt('withWords', at - 1)) at = quantity.to - 1;
+    else if (quantity) {
       pct = quantity.value;
       at = quantity.to - 1;
       const isEnd = !reading.has('thresholdNoun', { from: quantity.to, to: quantity.to + 2 });
       if (isEnd) return isRaceThreshold(reading, quantity.value) ? { from, to: quantity.to, pct } : null;
     } else if (reading.mentionAt(at) || reading.tokens[at]?.kind !== 'word') return null;
+  }
+  return null;
+}
+
+/** "die Hürde überspringt": where verbs come last, the hurdle stands before them. */
+function lineBefore(reading: Reading, { from, to }: Hit): Omit<Said, 'isAbove'> | null {
+  if (!reading.lexicon.words.verbsComeLast || reading.tokens[to]?.kind === 'word') return null;
+  for (let at = from - 1; at >= from - NEAR && reading.tokens[at]?.kind === 'word'; at -= 1) {
+    if (reading.cueAt('thresholdNoun', at)) return { from, to, pct: null };
   }
   return null;
 }
@@ -89,7 +99,9 @@ function judge(reading: Reading, said: Said, option: string, release: number): J
   const isPlain = reading.has('aboveThreshold', said) || reading.has('belowThreshold', said);
   if (found.verdict === 'holds' || (found.verdict === 'fragile' && isPlain)) return null;
   const replacement =
-    share === null ? null : replacementOf(reading.lexicon.words, 'atShare', { share: `${share}%` });
+    share === null
+      ? null
+      : replacementOf(reading.lexicon.words, 'atShare', { share: percentText(reading.lexicon.words, share) });
   return {
     ...base,
     grade: 'not-supported',
