@@ -15,7 +15,7 @@ import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { submissionKey } from '../release/create-release';
-import { assembleSheet } from '../sheet/assemble-sheet';
+import { assemble } from '../sheet/assemble-evidence';
 import { refuseUnless } from '../sheet/sheet-state';
 import { storeSheet } from '../sheet/store-sheet';
 
@@ -51,20 +51,25 @@ export function draftReplacement(actor: Actor, input: unknown, ctx: Ctx): { id: 
       language: replaced.language,
       releaseVersionId: versionId,
       correctionId: correction.id,
+      replacesSheetId: replaced.id,
     };
-    const { draft, templateVersion } = assembleSheet(tx, subject, ctx.now);
+    const { draft, requestable, draftRequested, computed } = assemble(tx, subject, ctx.now);
+    const notices = requestable.filter((kind) => kind === 'correction-notice');
     const whole = findWholeVersion(tx, versionId)!;
     const sheet = storeSheet(
       tx,
       actor,
       {
         ...subject,
-        replacesSheetId: replaced.id,
         releaseId: replaced.releaseId,
         questionId: whole.question.id,
         submissionKey: key,
       },
-      { draft, templateVersion, knockedOut: [] },
+      {
+        draft: [...draft, ...notices.map((kind) => ({ kind, text: draftRequested(kind) }))],
+        templateVersion: computed.settings.houseStyle.body.templateVersion,
+        knockedOut: [],
+      },
       { release: whole.release.publicId },
       ctx.now,
     );

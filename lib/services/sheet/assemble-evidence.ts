@@ -30,6 +30,7 @@ export type Subject = Pick<SheetRow, 'publicId' | 'claim' | 'claimKey' | 'langua
   id?: number;
   /** Of a sheet that takes another one's place once a correction is applied. */
   correctionId?: number | null;
+  replacesSheetId?: number | null;
 };
 
 export type Assembled = {
@@ -64,7 +65,9 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
   const finding = found.finding;
   const claim = JSON.parse(sheet.claim) as Claim;
   const language = sheet.language as Language;
-  const corrected = sheet.id === undefined ? undefined : correctedFrom(conn, sheet.id, facts, previous);
+  // What a replacement puts right is what the sheet in print says.
+  const correctedId = sheet.replacesSheetId ?? sheet.id;
+  const corrected = correctedId === undefined ? undefined : correctedFrom(conn, correctedId, facts, previous);
   const input = {
     claim,
     finding,

@@ -95,6 +95,11 @@ describe('a staged correction', () => {
     expect(ask(embed).status).toBe(200);
     expect(JSON.parse(String(ask(embed, '/data.json').body))).toMatchObject({ n: 1021, version: 2 });
     expect(ask(embed, '@1').status).toBe(410);
+    const notice = getSheet(editor, replacement, corrections.ctx).lines.find(
+      ({ kind }) => kind === 'correction-notice',
+    );
+    expect(notice?.text).toMatch(/1,012.*1,021|1,021.*1,012/);
+    expect(String(ask(embed, '@1').body)).toContain('1,012');
     expect(getRelease(reporter, id, corrections.ctx).facts).toMatchObject({ version: 2, n: { value: 1021 } });
   });
 
