@@ -27,7 +27,7 @@ const config = {
     'db',
     'drizzle',
     'public',
-    'tests/{app,auth,charts,cli,components,e2e,format,import,look,services,wording}',
+    'tests/{app,auth,charts,cli,components,e2e,format,import,look,services}',
   ],
   coverageAnalysis: 'perTest',
   ignoreStatic: true,

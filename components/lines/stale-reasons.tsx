@@ -22,6 +22,8 @@ export function staleWords(stale: Stale): string {
       return stale.part === 'release'
         ? 'The release has a newer version.'
         : 'The poll it was compared with has a newer version.';
+    case 'source-corrected':
+      return `The source was corrected on ${formatDay(new Date(stale.at).toISOString().slice(0, 10), LOCALE)}; its numbers are the same.`;
     case 'ladder':
       return `House style no longer says ${stale.words.map((word) => `“${word}”`).join(', ')} for this verdict.`;
     case 'shelf-life':

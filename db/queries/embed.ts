@@ -57,6 +57,11 @@ export function insertEmbedVersion(conn: Conn, embedId: number, evidenceId: numb
   return number;
 }
 
+/** An address stays with its article: from now on it shows what another sheet cleared. */
+export function moveEmbed(conn: Conn, embedId: number, sheetId: number): void {
+  conn.update(embeds).set({ sheetId }).where(eq(embeds.id, embedId)).run();
+}
+
 /** Pulls what an embed shows, and everything it showed before. */
 export function pullEmbedVersions(conn: Conn, embedId: number, now: number, unseen: boolean): number {
   return conn

@@ -86,6 +86,10 @@ export function findNamed(conn: Conn, table: 'pollsters' | 'sponsors', name: str
   );
 }
 
+export function findPollster(conn: Conn, id: number): typeof pollsters.$inferSelect {
+  return conn.select().from(pollsters).where(eq(pollsters.id, id)).get()!;
+}
+
 export function insertNamed(
   conn: Conn,
   table: 'pollsters' | 'sponsors',

@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, asc, desc, eq, inArray, isNull } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull, ne, or } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
 import { people } from '@/db/schema/people';
 import { pollsters, races, sponsors } from '@/db/schema/races';
@@ -27,8 +27,12 @@ export type VersionRows = {
   shares: Omit<typeof shares.$inferInsert, 'questionId' | 'position'>[];
 };
 
-/** Writes one whole version and makes it the release's current one. */
-export function insertReleaseVersion(conn: Conn, rows: VersionRows): ReleaseVersionRow {
+/** Writes one whole version, which becomes the release's current one unless a correction holds it back. */
+export function insertReleaseVersion(
+  conn: Conn,
+  rows: VersionRows,
+  { isCurrent = true }: { isCurrent?: boolean } = {},
+): ReleaseVersionRow {
   const version = conn.insert(releaseVersions).values(rows.version).returning().get();
   const base = conn
     .insert(bases)
@@ -45,7 +49,12 @@ export function insertReleaseVersion(conn: Conn, rows: VersionRows): ReleaseVers
       .insert(shares)
       .values({ ...row, questionId: question.id, position })
       .run();
-  conn.update(releases).set({ currentVersionId: version.id }).where(eq(releases.id, version.releaseId)).run();
+  if (isCurrent)
+    conn
+      .update(releases)
+      .set({ currentVersionId: version.id })
+      .where(eq(releases.id, version.releaseId))
+      .run();
   return version;
 }
 
@@ -140,6 +149,9 @@ export function listSharesOf(conn: Conn, questionIds: number[]): (typeof shares.
     .all();
 }
 
+/** A version that is taken for the current one of its release, before it is. */
+export type StandIn = { releaseId: number; versionId: number };
+
 /**
  * Current versions of one race by one pollster, latest field dates first.
  *
@@ -150,11 +162,15 @@ export function listVersionsOfSeries(
   raceId: number,
   pollsterId: number,
   publicAt: number | null,
+  standIn: StandIn | null = null,
 ): WholeVersion[] {
+  const isCurrent = eq(releases.currentVersionId, releaseVersions.id);
   return versionSelect(conn)
     .where(
       and(
-        eq(releases.currentVersionId, releaseVersions.id),
+        standIn === null
+          ? isCurrent
+          : or(and(isCurrent, ne(releases.id, standIn.releaseId)), eq(releaseVersions.id, standIn.versionId)),
         eq(releases.raceId, raceId),
         eq(releases.pollsterId, pollsterId),
         isNull(releases.archivedAt),
@@ -176,6 +192,14 @@ export function listReleases(conn: Conn, viewer: Viewer, now: number, limit: num
     )
     .orderBy(desc(releases.createdAt), desc(releases.id))
     .limit(limit)
+    .all();
+}
+
+/** Every version of a release, oldest first, with who entered it. */
+export function listVersions(conn: Conn, releaseId: number): WholeVersion[] {
+  return versionSelect(conn)
+    .where(eq(releaseVersions.releaseId, releaseId))
+    .orderBy(asc(releaseVersions.number))
     .all();
 }
 

@@ -1,6 +1,7 @@
 import 'server-only';
-import { and, asc, desc, eq, inArray, isNull, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull, notInArray, or, sql } from 'drizzle-orm';
 import type { Conn } from '@/db/client';
+import { corrections } from '@/db/schema/corrections';
 import { people } from '@/db/schema/people';
 import { pollsters, races } from '@/db/schema/races';
 import { releases, releaseVersions } from '@/db/schema/releases';
@@ -262,14 +263,27 @@ export function countClearedSheetsOn(conn: Conn, releaseId: number): number {
   return row?.count ?? 0;
 }
 
-/** Sheets of a release rest on its newest version from now on. */
+/** Sheets of a release rest on its newest version from now on, but for those that wait for a correction. */
 export function moveSheetsToVersion(
   conn: Conn,
   releaseId: number,
   releaseVersionId: number,
   questionId: number,
 ): void {
-  conn.update(sheets).set({ releaseVersionId, questionId }).where(eq(sheets.releaseId, releaseId)).run();
+  const waiting = conn
+    .select({ id: corrections.id })
+    .from(corrections)
+    .where(eq(corrections.state, 'staged'));
+  conn
+    .update(sheets)
+    .set({ releaseVersionId, questionId })
+    .where(
+      and(
+        eq(sheets.releaseId, releaseId),
+        or(isNull(sheets.correctionId), notInArray(sheets.correctionId, waiting)),
+      ),
+    )
+    .run();
 }
 
 /** Removes a sheet with its lines. The schema refuses it for one that anything was done to. */

@@ -1,5 +1,15 @@
 import { sql } from 'drizzle-orm';
-import { blob, index, integer, primaryKey, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
+import {
+  type AnySQLiteColumn,
+  blob,
+  index,
+  integer,
+  primaryKey,
+  sqliteTable,
+  text,
+  uniqueIndex,
+} from 'drizzle-orm/sqlite-core';
+import { corrections } from './corrections';
 import { people } from './people';
 import { questions, releases, releaseVersions } from './releases';
 
@@ -40,8 +50,14 @@ export const sheets = sqliteTable(
     createdAt: integer('created_at').notNull(),
     submissionKey: text('submission_key').notNull(),
     version: integer('version').notNull().default(1),
+    /** The correction that its words wait for, or came in with. */
+    correctionId: integer('correction_id').references(() => corrections.id),
+    /** The sheet whose place it takes when that correction is applied. */
+    replacesSheetId: integer('replaces_sheet_id').references((): AnySQLiteColumn => sheets.id),
   },
   (t) => [
+    index('sheets_correction_id').on(t.correctionId),
+    index('sheets_replaces_sheet_id').on(t.replacesSheetId),
     uniqueIndex('sheets_public_id').on(t.publicId),
     uniqueIndex('sheets_submission_key').on(t.submissionKey),
     index('sheets_release_id').on(t.releaseId),
@@ -66,7 +82,7 @@ const LINE_KIND = [
   'newsletter-line',
   'correction-notice',
 ] as const;
-const LINE_STATE = ['draft', 'filed', 'sent-back', 'cleared', 'superseded', 'pulled'] as const;
+const LINE_STATE = ['draft', 'filed', 'sent-back', 'agreed', 'cleared', 'superseded', 'pulled'] as const;
 
 export const lines = sqliteTable(
   'lines',

@@ -1,5 +1,11 @@
 /** Why words that were cleared are not the newest any more. */
-export const STALE_REASONS = ['newer-release', 'new-version', 'ladder', 'shelf-life'] as const;
+export const STALE_REASONS = [
+  'newer-release',
+  'new-version',
+  'source-corrected',
+  'ladder',
+  'shelf-life',
+] as const;
 export type StaleReason = (typeof STALE_REASONS)[number];
 
 export type Stale =
@@ -7,6 +13,8 @@ export type Stale =
   | { reason: 'newer-release'; releaseId: string; fieldStartOn: string; fieldEndOn: string }
   /** The release, or the one it was compared with, has a newer version. */
   | { reason: 'new-version'; part: 'release' | 'comparison' }
+  /** The source was corrected, and nothing that these words or their chart show differs. */
+  | { reason: 'source-corrected'; at: number }
   /** House style took these words off the verdict's rung. */
   | { reason: 'ladder'; words: string[] }
   /** From this day on: so many days after the field dates. */

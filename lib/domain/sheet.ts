@@ -70,12 +70,22 @@ export const REQUESTED_LINE_KINDS: readonly RequestedLineKind[] = LINE_KINDS.fil
 /** Lines that a sheet or its embed cannot do without: they may be edited, not knocked out. */
 export const REQUIRED_LINE_KINDS: readonly LineKind[] = ['caveat', 'chart-title', 'alt-text'];
 
-export const LINE_STATES = ['draft', 'filed', 'sent-back', 'cleared', 'superseded', 'pulled'] as const;
+/** `agreed`: two people agreed to words that become printable with the correction they wait for. */
+export const LINE_STATES = [
+  'draft',
+  'filed',
+  'sent-back',
+  'agreed',
+  'cleared',
+  'superseded',
+  'pulled',
+] as const;
 export type LineState = (typeof LINE_STATES)[number];
 export const LINE_STATE_NAMES: Record<LineState, string> = {
   draft: 'Draft',
   filed: 'Filed',
   'sent-back': 'Sent back',
+  agreed: 'Agreed, waits for its correction',
   cleared: 'Cleared',
   superseded: 'Superseded',
   pulled: 'Pulled',

@@ -7,7 +7,9 @@ import { TextInput } from '@/components/ui/text-input';
 import { deskPage } from '@/lib/auth/desk-page';
 import { readEnv } from '@/lib/env';
 import { listCopyDesk } from '@/lib/services/copy/list-copy-desk';
+import { listWithdrawn } from '@/lib/services/copy/list-withdrawn';
 import { ClearedSheet } from './_components/cleared-sheet';
+import { WithdrawnLately } from './_components/withdrawn-lately';
 import { createEmbedAction } from './actions';
 
 export const metadata: Metadata = { title: 'Copy desk' };
@@ -19,8 +21,9 @@ const one = (value: string | string[] | undefined) => (typeof value === 'string'
 export default async function CopyDeskPage({ searchParams }: { searchParams: Promise<Search> }) {
   const asked = await searchParams;
   const search = { race: one(asked.race), pollster: one(asked.pollster) };
-  const { sheets, now } = await deskPage((actor, ctx) => ({
+  const { sheets, withdrawn, now } = await deskPage((actor, ctx) => ({
     sheets: listCopyDesk(actor, search, ctx),
+    withdrawn: listWithdrawn(actor, ctx),
     now: ctx.now,
   }));
   const zone = readEnv().LEADLINE_ZONE;
@@ -31,6 +34,7 @@ export default async function CopyDeskPage({ searchParams }: { searchParams: Pro
         title="Copy desk"
         sub="Cleared words, newest first. Each copy is fetched when you press, so that nothing withdrawn is pasted."
       />
+      <WithdrawnLately withdrawn={withdrawn} zone={zone} />
       <SearchForm search={search} isSearched={isSearched} />
       <p className="mb-3 text-soft">{countWords(sheets.length, isSearched)}</p>
       {sheets.length === 0 ? (

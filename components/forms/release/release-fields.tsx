@@ -38,8 +38,8 @@ export function ReleaseFields({
   /** Above the fields. */
   lead: ReactNode;
   send: { label: string; pendingLabel: string };
-  /** Sends what was validated; the id of the release comes back. */
-  submit: (values: ReleaseForm) => Promise<Answer<{ id: string }>>;
+  /** Sends what was validated; the id of the release comes back, or null where the page goes on by itself. */
+  submit: (values: ReleaseForm) => Promise<Answer<{ id: string } | null>>;
 }) {
   const [attempt, setAttempt] = useState(0);
   const router = useRouter();
@@ -47,7 +47,8 @@ export function ReleaseFields({
 
   async function deliver(values: ReleaseForm) {
     const answer = await submit(values);
-    if (answer.ok) return router.push(`/releases/${answer.value.id}`);
+    if (answer.ok && answer.value) return router.push(`/releases/${answer.value.id}`);
+    if (answer.ok) return form.reset(undefined, { keepValues: true, keepDefaultValues: true });
     showRefusal(form, answer);
     setAttempt((count) => count + 1);
   }

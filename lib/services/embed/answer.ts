@@ -13,6 +13,7 @@ import type { EvidenceBody } from '../sheet/evidence-body';
 import { versionBefore } from './embed-hold';
 import { encodeBody, type Encoding, encodingFor } from './encode-body';
 import { heldOf } from './held-embed';
+import { correctionNote } from './correction-note';
 import { dataOf, pageOf, pictureOf, withdrawalOf } from './render-embed';
 
 export type EmbedRequest = {
@@ -63,7 +64,7 @@ export function answerEmbed(request: EmbedRequest, ctx: Ctx = { db: getDb(), now
   const found = findPublicEmbed(ctx.db, id, number ? Number(number) : null, ctx.now);
   if (!found?.isPublic || found.version.pulledUnseen) return notFound();
   const theme = THEME_CHOICES.find((choice) => choice === request.query.get('theme')) ?? 'auto';
-  if (found.version.state === 'pulled') return withdrawn(found, part, theme);
+  if (found.version.state === 'pulled') return withdrawn(found, part, theme, ctx);
   const bar = barOn(ctx.db, found.raceId, ctx.now);
   const shown =
     bar.sinceAt === null
@@ -133,12 +134,12 @@ function held(untilAt: number, part: Part, theme: ThemeChoice): EmbedAnswer {
   };
 }
 
-/** 410: on purpose, with a dated note and no figure. */
-function withdrawn(found: Found, part: Part, theme: ThemeChoice): EmbedAnswer {
+/** 410: on purpose, with a dated note, and no figure but those of a cleared correction notice. */
+function withdrawn(found: Found, part: Part, theme: ThemeChoice, ctx: Ctx): EmbedAnswer {
   return {
     status: 410,
     headers: { ...SAFE, 'Content-Type': TYPES[part], 'Cache-Control': 'no-store' },
-    body: withdrawalOf(part, found.version.pulledAt ?? 0, theme),
+    body: withdrawalOf(part, found.version.pulledAt ?? 0, theme, correctionNote(ctx.db, found.evidenceId)),
   };
 }
 

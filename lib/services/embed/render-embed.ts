@@ -86,10 +86,12 @@ export function withdrawalOf(
   part: 'page' | 'chart.svg' | 'data.json',
   at: number,
   theme: ThemeChoice,
+  note: string | null,
 ): string {
   const withdrawn = dated(at);
-  if (part === 'data.json') return canonicalJson({ withdrawn: true, at: withdrawn.iso });
-  if (part === 'page') return withdrawalDocument({ lang: 'en', theme, withdrawn, note: null });
+  if (part === 'data.json')
+    return canonicalJson({ withdrawn: true, at: withdrawn.iso, ...(note === null ? {} : { note }) });
+  if (part === 'page') return withdrawalDocument({ lang: 'en', theme, withdrawn, note });
   return [
     '<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 640 60" width="640" height="60" role="img">',
     `<title>This chart was withdrawn on ${withdrawn.text}</title>`,

@@ -10,6 +10,8 @@ export const TOLD = [
   'filing-unread',
   'sheet-pulled',
   'style-in-force',
+  'release-corrected',
+  'correction-notices',
 ] as const;
 
 export type News = {

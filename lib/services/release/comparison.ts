@@ -4,6 +4,7 @@ import {
   findOverride,
   findWholeVersion,
   listVersionsOfSeries,
+  type StandIn,
   type WholeVersion,
 } from '@/db/queries/release';
 import { listShares } from '@/db/queries/release';
@@ -61,19 +62,32 @@ export function seriesFactsOf(conn: Conn, whole: WholeVersion): SeriesFacts {
 }
 
 /** The release that a stored version is compared with: the latest comparable one, or an editor's override. */
-export function comparisonOf(conn: Conn, whole: WholeVersion, now: number): Comparison {
+export function comparisonOf(
+  conn: Conn,
+  whole: WholeVersion,
+  now: number,
+  standIn: StandIn | null = null,
+): Comparison {
   const current = seriesFactsOf(conn, whole);
+  const { raceId, pollsterId } = whole.release;
   return (
-    overriddenOf(conn, whole, current) ??
-    chooseAmong(conn, current, whole.release.raceId, whole.release.pollsterId, now)
+    overriddenOf(conn, whole, current, standIn) ??
+    chooseAmong(conn, current, raceId, pollsterId, now, standIn)
   );
 }
 
 /** An editor chose a release, whose figures are those of its newest version; one that fits no more is left. */
-function overriddenOf(conn: Conn, whole: WholeVersion, current: SeriesFacts): Comparison | null {
+function overriddenOf(
+  conn: Conn,
+  whole: WholeVersion,
+  current: SeriesFacts,
+  standIn: StandIn | null,
+): Comparison | null {
   const override = findOverride(conn, whole.version.id);
   const chosen = override && findWholeVersion(conn, override.override.comparisonVersionId);
-  const newest = chosen && findWholeVersion(conn, chosen.release.currentVersionId ?? chosen.version.id);
+  const newestId =
+    chosen?.release.id === standIn?.releaseId ? standIn?.versionId : chosen?.release.currentVersionId;
+  const newest = chosen && findWholeVersion(conn, newestId ?? chosen.version.id);
   if (!override || !newest) return null;
   const { differences, unknowns } = compareReleases(current, seriesFactsOf(conn, newest));
   if (!mayBeCompared(whole, newest, differences)) return null;
@@ -110,8 +124,9 @@ export function chooseAmong(
   raceId: number,
   pollsterId: number,
   now: number,
+  standIn: StandIn | null = null,
 ): Comparison {
-  const choice = chooseComparison(current, earlierThan(conn, current, raceId, pollsterId, now));
+  const choice = chooseComparison(current, earlierThan(conn, current, raceId, pollsterId, now, standIn));
   return {
     versionId: choice.chosen?.versionId ?? null,
     reason: choice.reason,
@@ -134,9 +149,10 @@ function earlierThan(
   raceId: number,
   pollsterId: number,
   now: number,
+  standIn: StandIn | null,
 ): SeriesFacts[] {
   const earlier: SeriesFacts[] = [];
-  for (const row of listVersionsOfSeries(conn, raceId, pollsterId, now)) {
+  for (const row of listVersionsOfSeries(conn, raceId, pollsterId, now, standIn)) {
     if (row.release.publicId === current.id || !isEarlier(row, current)) continue;
     const facts = seriesFactsOf(conn, row);
     earlier.push(facts);

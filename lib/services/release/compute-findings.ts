@@ -1,6 +1,6 @@
 import 'server-only';
 import type { Conn } from '@/db/client';
-import { findWholeVersion } from '@/db/queries/release';
+import { findWholeVersion, type StandIn } from '@/db/queries/release';
 import type { DisclosureStatus } from '@/lib/domain/disclosed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import { AppError } from '@/lib/errors';
@@ -25,11 +25,16 @@ export type Computed = {
 };
 
 /** Everything that a stored version supports now: under the policy in force, beside what is out of embargo. */
-export function computeFindings(conn: Conn, versionId: number, now: number): Computed {
+export function computeFindings(
+  conn: Conn,
+  versionId: number,
+  now: number,
+  standIn: StandIn | null = null,
+): Computed {
   const whole = findWholeVersion(conn, versionId);
   if (!whole) throw new AppError('not-found', 'There is no such release.');
   const facts = factsOf(conn, versionId);
-  const comparison = comparisonOf(conn, whole, now);
+  const comparison = comparisonOf(conn, whole, now, standIn);
   const previous =
     comparison.versionId === null ? null : withNamesOf(factsOf(conn, comparison.versionId), facts);
   const settings = readDeskSettings(conn, sourcesOf(facts, previous));

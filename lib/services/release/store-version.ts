@@ -1,20 +1,27 @@
 import 'server-only';
 import type { Tx } from '@/db/client';
 import { findNamed, insertNamed } from '@/db/queries/race';
-import { insertReleaseVersion, type ReleaseVersionRow } from '@/db/queries/release';
+import { insertReleaseVersion, type ReleaseVersionRow, type VersionRows } from '@/db/queries/release';
 import { type Disclosed, valueOf } from '@/lib/domain/disclosed';
 import { unitsAt } from '@/lib/domain/printed-number';
 import type { StatedMargin } from '@/lib/domain/release-facts';
 import type { ReleaseInput } from '@/lib/domain/release-input';
 import { newId } from '@/lib/security/ids';
 
-type Who = { releaseId: number; number: number; personId: number; now: number };
+type Who = {
+  releaseId: number;
+  number: number;
+  personId: number;
+  now: number;
+  /** False for a version that waits for its correction to be applied. */
+  isCurrent?: boolean;
+};
 
 /** Writes one version of a release with its base, question and shares. */
 export function storeVersion(tx: Tx, input: ReleaseInput, who: Who): ReleaseVersionRow {
   const decimals = Math.max(0, ...input.shares.map((share) => share.printed?.decimals ?? 0));
   const sponsor = valueOf(input.sponsor);
-  return insertReleaseVersion(tx, {
+  const rows: VersionRows = {
     version: {
       publicId: newId(),
       releaseId: who.releaseId,
@@ -61,7 +68,8 @@ export function storeVersion(tx: Tx, input: ReleaseInput, who: Who): ReleaseVers
       isAnswer: share.isAnswer,
       enteredBy: who.personId,
     })),
-  });
+  };
+  return insertReleaseVersion(tx, rows, { isCurrent: who.isCurrent });
 }
 
 function marginColumns(margin: Disclosed<StatedMargin>) {

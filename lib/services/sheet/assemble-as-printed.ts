@@ -1,5 +1,6 @@
 import 'server-only';
 import type { Conn } from '@/db/client';
+import { findStandIn } from '@/db/queries/corrections';
 import { AS_PRINTED } from '@/lib/domain/as-printed';
 import type { ReleaseFacts } from '@/lib/domain/release-facts';
 import type { LineText } from '@/lib/domain/sheet';
@@ -30,7 +31,7 @@ export type AsPrintedBody = {
 };
 
 export function assembleAsPrinted(conn: Conn, sheet: Subject, now: number) {
-  const computed = computeFindings(conn, sheet.releaseVersionId, now);
+  const computed = computeFindings(conn, sheet.releaseVersionId, now, findStandIn(conn, sheet.correctionId));
   const { facts, settings, document, answer, missing } = computed;
   const language = sheet.language as Language;
   const draft = draftAsPrinted(facts, settings.houseStyle.body, language);

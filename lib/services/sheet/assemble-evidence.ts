@@ -1,5 +1,6 @@
 import 'server-only';
 import type { Conn } from '@/db/client';
+import { findStandIn } from '@/db/queries/corrections';
 import { findPerson } from '@/db/queries/person';
 import { listNewestLines, type SheetRow } from '@/db/queries/sheet';
 import { ENGLISH_CHART_WORDS } from '@/lib/charts/chart-words';
@@ -27,6 +28,9 @@ const SCENE_PX = 640;
 export type Subject = Pick<SheetRow, 'publicId' | 'claim' | 'claimKey' | 'language' | 'releaseVersionId'> & {
   /** Absent of a sheet that is being made. */
   id?: number;
+  /** Of a sheet that takes another one's place once a correction is applied. */
+  correctionId?: number | null;
+  replacesSheetId?: number | null;
 };
 
 export type Assembled = {
@@ -50,7 +54,7 @@ export type Assembled = {
 
 /** Everything a sheet rests on, computed anew from what is stored now. */
 export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
-  const computed = computeFindings(conn, sheet.releaseVersionId, now);
+  const computed = computeFindings(conn, sheet.releaseVersionId, now, findStandIn(conn, sheet.correctionId));
   const { facts, previous, comparison, settings, document, answer, missing } = computed;
   const found = findClaim(answer, sheet.claimKey);
   if (!found || found.finding.kind === 'share')
@@ -61,7 +65,9 @@ export function assemble(conn: Conn, sheet: Subject, now: number): Assembled {
   const finding = found.finding;
   const claim = JSON.parse(sheet.claim) as Claim;
   const language = sheet.language as Language;
-  const corrected = sheet.id === undefined ? undefined : correctedFrom(conn, sheet.id, facts, previous);
+  // What a replacement puts right is what the sheet in print says.
+  const correctedId = sheet.replacesSheetId ?? sheet.id;
+  const corrected = correctedId === undefined ? undefined : correctedFrom(conn, correctedId, facts, previous);
   const input = {
     claim,
     finding,

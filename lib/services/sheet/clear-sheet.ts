@@ -2,8 +2,9 @@ import 'server-only';
 import { z } from 'zod';
 import type { Tx } from '@/db/client';
 import { findEvidence, findLastAct, insertClearing, type ClearingRow } from '@/db/queries/clearing';
-import { findEmbedOfSheet, insertEmbedVersion } from '@/db/queries/embed';
-import { listClearedLines, moveLineVersions, touchSheet } from '@/db/queries/sheet';
+import { findStandIn } from '@/db/queries/corrections';
+import { type EmbedRow, findEmbedOfSheet, insertEmbedVersion, moveEmbed } from '@/db/queries/embed';
+import { listClearedLines, moveLineVersions, type SheetRow, touchSheet } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets, isTwoPersonAgreement, type Role } from '@/lib/domain/roles';
 import { newId } from '@/lib/security/ids';
 import { actingNow, authorize, type Ctx, parse, transact } from '../context';
@@ -78,13 +79,20 @@ export function clearSheetIn(
 /** Words that were filed are printable from here on; what was cleared before is superseded. */
 export function publishIn(tx: Tx, actor: Actor, opened: Opened, evidenceId: number, now: number): void {
   const ids = opened.kept.map(({ version }) => version.id);
+  if (findStandIn(tx, opened.sheet.correctionId)) {
+    // Words on corrected figures wait for the moment in which the old ones go.
+    refuseUnless(moveLineVersions(tx, ids, 'filed', { state: 'agreed' }), MOVED_ON);
+    insertAct(tx, actor, opened, evidenceId, 'cleared', null, now);
+    refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
+    return;
+  }
   const isAnew = findLastAct(tx, opened.sheet.id, 'cleared') !== null;
   for (const { version } of listClearedLines(tx, opened.sheet.id))
     refuseUnless(moveLineVersions(tx, [version.id], 'cleared', { state: 'superseded' }), MOVED_ON);
   refuseUnless(moveLineVersions(tx, ids, 'filed', { state: 'cleared' }), MOVED_ON);
   insertAct(tx, actor, opened, evidenceId, 'cleared', null, now);
   refuseUnless(touchSheet(tx, opened.sheet.id, opened.sheet.version), MOVED_ON);
-  const embed = findEmbedOfSheet(tx, opened.sheet.id);
+  const embed = findEmbedOfSheet(tx, opened.sheet.id) ?? inheritEmbed(tx, opened.sheet);
   if (embed) {
     const number = insertEmbedVersion(tx, embed.id, evidenceId, now);
     const releaseId = opened.release.id;
@@ -92,6 +100,14 @@ export function publishIn(tx: Tx, actor: Actor, opened: Opened, evidenceId: numb
   }
   enqueueShelfEndIn(tx, opened.sheet, now);
   if (isAnew) markSiblings(tx, opened.sheet, 'cleared', now);
+}
+
+/** A replacement that was not ready when its correction was applied takes over the address once it is. */
+function inheritEmbed(tx: Tx, { id, replacesSheetId }: SheetRow): EmbedRow | null {
+  const embed = replacesSheetId === null ? null : findEmbedOfSheet(tx, replacesSheetId);
+  if (!embed || listClearedLines(tx, embed.sheetId).length > 0) return null;
+  moveEmbed(tx, embed.id, id);
+  return embed;
 }
 
 const back = readerInput

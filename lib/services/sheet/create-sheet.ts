@@ -1,7 +1,7 @@
 import 'server-only';
 import { z } from 'zod';
 import { findRelease, findWholeVersion } from '@/db/queries/release';
-import { findSheetBySubmission, insertLine, insertLineVersion, insertSheet } from '@/db/queries/sheet';
+import { findSheetBySubmission } from '@/db/queries/sheet';
 import { type Actor, canDraftSheets } from '@/lib/domain/roles';
 import type { Claim } from '@/lib/domain/sheet';
 import { LANGUAGES } from '@/lib/domain/vocabulary';
@@ -12,10 +12,10 @@ import { canonicalJson } from '@/lib/security/canonical';
 import { newId } from '@/lib/security/ids';
 import { isOfTwoReleases } from '@/lib/wording/draft-input';
 import { authorize, type Ctx, parse, transact } from '../context';
-import { appendRecord } from '../history/append-record';
 import { computeFindings } from '../release/compute-findings';
 import { submissionKey } from '../release/create-release';
 import { assemble } from './assemble-evidence';
+import { storeSheet } from './store-sheet';
 
 const schema = z.strictObject({
   submissionKey,
@@ -51,35 +51,17 @@ export function createSheet(actor: Actor, input: unknown, ctx: Ctx): { id: strin
       releaseVersionId: whole.version.id,
     };
     const { draft, computed } = assemble(tx, subject, ctx.now);
-    const sheet = insertSheet(tx, {
-      ...subject,
-      releaseId: release.id,
-      questionId: whole.question.id,
-      authorId: actor.personId,
-      createdAt: ctx.now,
-      submissionKey: key,
-    });
     const style = computed.settings.houseStyle.body;
+    // House style files no headline on one poll: the words stay there to be read, knocked out.
     const isAlone = style.onePollHeadlines === 'refuse' && !isOfTwoReleases(found.finding.kind);
-    for (const { kind, text } of draft) {
-      // House style files no headline on one poll: the words stay there to be read, knocked out.
-      const knockedOut = isAlone && kind === 'headline';
-      const line = insertLine(tx, { publicId: newId(), sheetId: sheet.id, kind, knockedOut });
-      insertLineVersion(tx, {
-        publicId: newId(),
-        lineId: line.id,
-        number: 1,
-        draftText: text,
-        text,
-        state: 'draft',
-        templateVersion: style.templateVersion,
-        changedBy: actor.personId,
-        changedAt: ctx.now,
-      });
-    }
-    const entry = { action: 'drafted sheet', entity: 'sheet', entityId: sheet.publicId };
-    const after = { release: releaseId, claim: subject.claim, language, draft };
-    appendRecord(tx, { personId: actor.personId, ...entry, after, releaseId: release.id }, ctx.now);
+    const sheet = storeSheet(
+      tx,
+      actor,
+      { ...subject, releaseId: release.id, questionId: whole.question.id, submissionKey: key },
+      { draft, templateVersion: style.templateVersion, knockedOut: isAlone ? ['headline'] : [] },
+      { release: releaseId },
+      ctx.now,
+    );
     return { id: sheet.publicId };
   });
 }

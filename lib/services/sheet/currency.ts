@@ -1,5 +1,6 @@
 import 'server-only';
 import type { Conn } from '@/db/client';
+import { findFlaggedAt } from '@/db/queries/corrections';
 import { findHouseStyle, findLatestHouseStyle } from '@/db/queries/desk';
 import { findWholeVersion, findWholeVersionByPublicId, listVersionsOfSeries } from '@/db/queries/release';
 import type { SheetRow } from '@/db/queries/sheet';
@@ -34,7 +35,7 @@ export function currencyOf(conn: Conn, sheet: SheetRow, standing: Standing, now:
   const inForce = style && { version: style.id, body: JSON.parse(style.body) as HouseStyle };
   const reasons: (Stale | null)[] = [
     newerRelease(conn, sheet, now),
-    ...newVersions(conn, standing),
+    ...newVersions(conn, sheet, standing),
     inForce && takenOff(conn, standing, inForce),
     pastShelf(standing, inForce?.body.shelfLifeDays ?? null, now),
   ];
@@ -55,15 +56,16 @@ function newerRelease(conn: Conn, sheet: SheetRow, now: number): Stale | null {
   return { reason: 'newer-release', releaseId: newer.release.publicId, fieldStartOn, fieldEndOn };
 }
 
-function newVersions(conn: Conn, { release, previous }: Standing): (Stale | null)[] {
-  const isOld = (facts: ReleaseFacts | null) => {
+/** A newer version makes words old, unless a correction found that nothing of them differs on it. */
+function newVersions(conn: Conn, sheet: SheetRow, { release, previous }: Standing): Stale[] {
+  return ([release, previous] as const).flatMap((facts, place): Stale[] => {
     const whole = facts && findWholeVersionByPublicId(conn, facts.versionId);
-    return whole !== null && whole.release.currentVersionId !== whole.version.id;
-  };
-  return [
-    isOld(release) ? { reason: 'new-version', part: 'release' } : null,
-    isOld(previous) ? { reason: 'new-version', part: 'comparison' } : null,
-  ];
+    const currentId = whole?.release.currentVersionId ?? null;
+    if (!whole || currentId === null || currentId === whole.version.id) return [];
+    const at = findFlaggedAt(conn, sheet.id, currentId);
+    if (at !== null) return [{ reason: 'source-corrected', at }];
+    return [{ reason: 'new-version', part: place === 0 ? 'release' : 'comparison' }];
+  });
 }
 
 function takenOff(

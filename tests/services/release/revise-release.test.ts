@@ -18,7 +18,7 @@ import { refusal } from '@/tests/support/refusal';
 import { GOVERNOR, logRelease, releaseForm, sharesOf, typed, withheld } from '@/tests/support/release';
 import { sheetDesk } from '@/tests/support/sheet';
 
-const RESTING = 'Cleared words rest on these figures: pull them before they change.';
+const RESTING = 'Cleared words rest on these figures: correct the release, and see what that does to them.';
 const AUGUST = { fieldStartOn: '2026-08-13', fieldEndOn: '2026-08-16', publishedOn: '2026-08-19' };
 const OTHER_SHARES = sharesOf([
   ['Alder', '52'],

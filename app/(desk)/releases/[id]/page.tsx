@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { cache } from 'react';
 import { betweenReleases } from '@/components/findings/between';
 import { FindingList, testedFindings } from '@/components/findings/finding-list';
@@ -90,9 +91,13 @@ export default async function ReleasePage({ params }: Props) {
   );
 }
 
-function noteOf({ loggedBy, loggedAt, facts }: ReleaseView) {
+function noteOf({ id, loggedBy, loggedAt, facts }: ReleaseView) {
   const at = formatInstant(loggedAt, readEnv().LEADLINE_ZONE, 'en-GB');
-  return `Logged by ${loggedBy}, ${at} · version ${facts.version}`;
+  return (
+    <>
+      Logged by {loggedBy}, {at} · <Link href={`/releases/${id}/versions`}>version {facts.version}</Link>
+    </>
+  );
 }
 
 function Next({ view, canLift }: { view: ReleaseView; canLift: boolean }) {
@@ -103,7 +108,9 @@ function Next({ view, canLift }: { view: ReleaseView; canLift: boolean }) {
       actions={
         <>
           {canLift ? <LiftEmbargo id={view.id} version={view.version} lift={liftEmbargoAction} /> : null}
-          {view.whyNotRevised ? null : (
+          {view.whyNotRevised ? (
+            <LinkButton href={`/releases/${view.id}/correct`}>Correct</LinkButton>
+          ) : (
             <LinkButton href={`/releases/${view.id}/edit`}>Change figures</LinkButton>
           )}
           {first ? (
