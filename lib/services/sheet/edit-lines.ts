@@ -3,13 +3,13 @@ import { z } from 'zod';
 import type { Tx } from '@/db/client';
 import { insertLineVersion, setKnockedOut, touchSheet, updateDraftText } from '@/db/queries/sheet';
 import { type Actor, canActAsEditor, canDraftSheets } from '@/lib/domain/roles';
-import { LINE_KIND_NAMES, LINE_KINDS, REQUIRED_LINE_KINDS } from '@/lib/domain/sheet';
+import { LINE_KIND_NAMES, LINE_KINDS, type LineKind, REQUIRED_LINE_KINDS } from '@/lib/domain/sheet';
 import { AppError, type FieldErrors } from '@/lib/errors';
 import { newId } from '@/lib/security/ids';
 import { authorize, type Ctx, parse, transact } from '../context';
 import { isAsPrinted } from '@/lib/domain/as-printed';
 import { assembleSheet } from './assemble-sheet';
-import { MOVED_ON, type NewestLine, openSheet, type Opened, refuseUnless } from './sheet-state';
+import { isUntouched, MOVED_ON, type NewestLine, openSheet, type Opened, refuseUnless } from './sheet-state';
 
 export const lineEdits = z
   .array(
@@ -55,7 +55,9 @@ export function openForWriting(tx: Tx, actor: Actor, id: string, version: number
 
 /** Writes the edits onto draft versions; words that were sent back get a new version first. */
 export function applyEdits(tx: Tx, actor: Actor, opened: Opened, edits: LineEdits, now: number): void {
-  const lines = opened.state === 'draft' ? opened.lines : renewLines(tx, actor, opened, now);
+  const isDraft = opened.state === 'draft';
+  const lines = isDraft ? opened.lines : renewLines(tx, actor, opened, now);
+  const drafts = isDraft && edits.some((edit) => isMoved(lines, edit)) ? draftsNow(tx, opened, now) : null;
   for (const edit of edits) {
     const target = lines.find(({ line }) => line.kind === edit.kind);
     if (!target)
@@ -72,29 +74,48 @@ export function applyEdits(tx: Tx, actor: Actor, opened: Opened, edits: LineEdit
     if (edit.knockedOut !== target.line.knockedOut) setKnockedOut(tx, target.line.id, edit.knockedOut);
     const text = plainText(edit.text);
     if (text === target.version.text) continue;
-    const change = { text, changedBy: actor.personId, changedAt: now };
+    const isDrafted = drafts?.get(edit.kind) === text;
+    const change = {
+      text,
+      changedBy: actor.personId,
+      changedAt: now,
+      ...(isDrafted ? { draftText: text } : {}),
+    };
     refuseUnless(updateDraftText(tx, target.version.id, change), MOVED_ON);
   }
 }
 
-/** New draft versions of every line, drafted from what is stored now, with the words as they stand. */
+/** Words that nobody had edited come back otherwise: perhaps as house style drafts them from other figures now. */
+function isMoved(lines: readonly NewestLine[], edit: LineEdits[number]): boolean {
+  const target = lines.find(({ line }) => line.kind === edit.kind);
+  return target !== undefined && isUntouched(target.version) && plainText(edit.text) !== target.version.text;
+}
+
+function draftsNow(tx: Tx, opened: Opened, now: number): Map<LineKind, string> {
+  return new Map(assembleSheet(tx, opened.sheet, now).draft.map(({ kind, text }) => [kind, text]));
+}
+
+/** New draft versions of every line, drafted from what is stored now; words that somebody wrote stay as they stand. */
 export function renewLines(tx: Tx, actor: Actor, opened: Opened, now: number): NewestLine[] {
   const { draft, templateVersion } = assembleSheet(tx, opened.sheet, now);
-  return opened.lines.map(({ line, version, changedBy }) => ({
-    line,
-    changedBy,
-    version: insertLineVersion(tx, {
-      publicId: newId(),
-      lineId: line.id,
-      number: version.number + 1,
-      draftText: draft.find(({ kind }) => kind === line.kind)?.text ?? version.draftText,
-      text: version.text,
-      state: 'draft',
-      templateVersion,
-      changedBy: actor.personId,
-      changedAt: now,
-    }),
-  }));
+  return opened.lines.map(({ line, version, changedBy }) => {
+    const draftText = draft.find(({ kind }) => kind === line.kind)?.text ?? version.draftText;
+    return {
+      line,
+      changedBy,
+      version: insertLineVersion(tx, {
+        publicId: newId(),
+        lineId: line.id,
+        number: version.number + 1,
+        draftText,
+        text: isUntouched(version) ? draftText : version.text,
+        state: 'draft',
+        templateVersion,
+        changedBy: actor.personId,
+        changedAt: now,
+      }),
+    };
+  });
 }
 
 /** Line ends and invisible characters tidied, so that nothing hides in a copied sentence. */

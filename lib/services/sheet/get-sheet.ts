@@ -22,7 +22,7 @@ import { type DeskView, deskViewOf } from './desk-view';
 import type { EvidenceBody } from './evidence-body';
 import { overrideIn } from './override-in';
 import { permissionsOf, type SheetPermissions } from './sheet-permissions';
-import { type Opened, openSheet } from './sheet-state';
+import { isUntouched, type Opened, openSheet } from './sheet-state';
 
 export type LineView = {
   kind: LineKind;
@@ -182,17 +182,23 @@ function linesOf(ctx: Ctx, opened: Opened, { body, lineBasis }: Shown): LineView
     body.draft.find((line) => line.kind === kind)?.text ?? before;
   const earlier = listEarlierTexts(ctx.db, opened.sheet.id);
   const agreed = listEarlierAgreed(ctx.db, opened.sheet.id);
-  return opened.lines.map(({ line, version, changedBy }) => ({
-    kind: line.kind,
-    draft: draftOf(line.kind, version.draftText),
-    text: version.text,
-    earlier: earlier.get(line.id) ?? null,
-    filed: agreed.filed.get(line.id) ?? null,
-    cleared: agreed.cleared.get(line.id) ?? null,
-    knockedOut: line.knockedOut,
-    changedBy,
-    marks: check({ kind: line.kind, text: version.text, draft: draftOf(line.kind, version.draftText) }),
-  }));
+  const isWritten = opened.state === 'draft' || opened.state === 'sent-back';
+  return opened.lines.map(({ line, version, changedBy }) => {
+    const draft = draftOf(line.kind, version.draftText);
+    // Words that nobody edited follow figures and house style for as long as the sheet is being written.
+    const text = isWritten && isUntouched(version) ? draft : version.text;
+    return {
+      kind: line.kind,
+      draft,
+      text,
+      earlier: earlier.get(line.id) ?? null,
+      filed: agreed.filed.get(line.id) ?? null,
+      cleared: agreed.cleared.get(line.id) ?? null,
+      knockedOut: line.knockedOut,
+      changedBy,
+      marks: check({ kind: line.kind, text, draft }),
+    };
+  });
 }
 
 function toldOf(ctx: Ctx, { override, ...told }: EvidenceBody['comparison']): ComparisonTold {

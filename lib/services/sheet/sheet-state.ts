@@ -36,3 +36,8 @@ export function refuseUnless(condition: boolean, message: string): asserts condi
 
 export const MOVED_ON =
   'Somebody changed this sheet meanwhile. Reload the page and look again; nothing was done.';
+
+/** Nobody changed what house style drafted. */
+export function isUntouched({ text, draftText }: NewestLine['version']): boolean {
+  return text === draftText;
+}

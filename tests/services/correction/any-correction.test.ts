@@ -148,11 +148,11 @@ describe('whatever is corrected', () => {
         pulled += consequences.filter(({ effect }) => effect === 'pulled').length;
         flagged += consequences.filter(({ effect }) => effect === 'flagged').length;
       }),
-      { seed: SEED, numRuns: 40 },
+      { seed: SEED, numRuns: 20 },
     );
-    expect(pulled).toBeGreaterThan(30);
-    expect(flagged).toBeGreaterThan(5);
-  });
+    expect(pulled).toBeGreaterThan(15);
+    expect(flagged).toBeGreaterThan(2);
+  }, 120_000);
 });
 
 /** Ids of names differ between two databases; the name decides. */
