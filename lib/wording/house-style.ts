@@ -49,7 +49,7 @@ export type HouseStyle = {
  * NCPP advice (a weaker verb between one and two margins), from memory, put on a test of the lead.
  */
 export const DEFAULT_HOUSE_STYLE: HouseStyle = {
-  templateVersion: '1.1.0',
+  templateVersion: '1.2.0',
   newsroom: 'our desk',
   comparisonRule: 'a rule of this newsroom',
   comparisonRules: { quota: '', 'opt-in': '', blended: '', unknown: '' },

@@ -13,8 +13,8 @@ export type PackStatus = {
 
 /** The packs as they ship. */
 export const PACK_STATUS: Record<Language, PackStatus> = {
-  en: { language: 'en', version: '1.1.0', status: 'reviewed-here' },
-  es: { language: 'es', version: '1.0.0', status: 'unreviewed' },
-  fr: { language: 'fr', version: '1.0.0', status: 'unreviewed' },
-  de: { language: 'de', version: '1.0.0', status: 'unreviewed' },
+  en: { language: 'en', version: '1.2.0', status: 'reviewed-here' },
+  es: { language: 'es', version: '1.1.0', status: 'unreviewed' },
+  fr: { language: 'fr', version: '1.1.0', status: 'unreviewed' },
+  de: { language: 'de', version: '1.1.0', status: 'unreviewed' },
 };

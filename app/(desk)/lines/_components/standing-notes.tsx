@@ -43,7 +43,6 @@ export function StandingNotes({
         </CautionNote>
       ) : null}
       {desk.reviews.length > 0 ? <NeedsReview id={id} desk={desk} review={review} /> : null}
-      <OtherLanguages desk={desk} />
       {desk.lineReasons.length > 0 ? (
         <CautionNote title="Why single lines came back">
           <ul>
@@ -56,38 +55,6 @@ export function StandingNotes({
         </CautionNote>
       ) : null}
     </>
-  );
-}
-
-/** The same claim in other languages: where it stands already, and where it can still be drafted. */
-function OtherLanguages({ desk: { siblings, claim, language: own } }: { desk: DeskView }) {
-  const missing = LANGUAGES.filter(
-    (one) => one !== own && !siblings.some(({ language }) => language === one),
-  );
-  const draft = (language: string) =>
-    `/lines/new?${new URLSearchParams({ release: claim.releaseId, claim: claim.key, language })}`;
-  return (
-    <p className="no-print mt-2 text-13 text-soft">
-      In {nameOf(own)}.{' '}
-      {siblings.map(({ id, language }) => (
-        <span key={id}>
-          <Link href={`/lines/${id}`}>
-            The same in <span lang={language}>{nameOf(language)}</span>
-          </Link>
-          .{' '}
-        </span>
-      ))}
-      {missing.length > 0 ? 'Draft it in ' : null}
-      {missing.map((language, at) => (
-        <span key={language}>
-          {at > 0 ? ', ' : ''}
-          <Link href={draft(language)} lang={language}>
-            {nameOf(language)}
-          </Link>
-        </span>
-      ))}
-      {missing.length > 0 ? '.' : null}
-    </p>
   );
 }
 

@@ -3,7 +3,7 @@ import { embargoEnd } from '@/components/lines/embargo-band';
 import { DefinitionList } from '@/components/ui/definition-list';
 import { dayInZone } from '@/lib/domain/wall-clock';
 import { formatDay } from '@/lib/format/date';
-import { LANGUAGE_NAMES } from '@/lib/domain/vocabulary';
+import { LANGUAGE_NAMES, LANGUAGES } from '@/lib/domain/vocabulary';
 import type { HeldEmbed } from '@/lib/services/embed/embed-hold';
 import type { DeskView } from '@/lib/services/sheet/desk-view';
 
@@ -15,8 +15,38 @@ export function StandingPlaces({ desk }: { desk: DeskView }) {
       items={[
         { term: 'Bans', value: <Bans desk={desk} /> },
         { term: 'Embeds held', value: <Embeds held={desk.heldEmbeds} /> },
+        { term: 'Language', value: <Languages desk={desk} /> },
       ]}
     />
+  );
+}
+
+/** Its own language, where the same claim stands in another, and in which it can still be drafted. */
+function Languages({ desk: { siblings, claim, language: own } }: { desk: DeskView }) {
+  const missing = LANGUAGES.filter(
+    (one) => one !== own && !siblings.some(({ language }) => language === one),
+  );
+  const draft = (language: string) =>
+    `/lines/new?${new URLSearchParams({ release: claim.releaseId, claim: claim.key, language })}`;
+  return (
+    <>
+      {languageName(own)}
+      {siblings.map(({ id, language }) => (
+        <span key={id}>
+          , <Link href={`/lines/${id}`}>{languageName(language)}</Link>
+        </span>
+      ))}
+      {missing.length > 0 ? '; draft ' : null}
+      {missing.map((language, at) => (
+        <span key={language}>
+          {at > 0 ? ', ' : ''}
+          <Link href={draft(language)} title={`Draft it in ${languageName(language)}`}>
+            {language}
+            <span className="sr-only"> ({languageName(language)})</span>
+          </Link>
+        </span>
+      ))}
+    </>
   );
 }
 
