@@ -114,6 +114,17 @@ export function findStandIn(conn: Conn, correctionId: number | null | undefined)
   );
 }
 
+/** Public id of a correction that is staged; null once it is settled. */
+export function findStagedId(conn: Conn, id: number | null): string | null {
+  if (id === null) return null;
+  const row = conn
+    .select({ publicId: corrections.publicId })
+    .from(corrections)
+    .where(and(eq(corrections.id, id), eq(corrections.state, 'staged')))
+    .get();
+  return row?.publicId ?? null;
+}
+
 export type CurrentEvidence = { sheet: SheetRow; evidenceId: number };
 
 /** Sheets with words cleared now, whose evidence rests on any version of a release, also as the comparison. */

@@ -178,6 +178,43 @@ test('a release typed from a press note becomes a cleared sheet and a live chart
     expect(data.base.deff).toBeCloseTo(1.4426, 4);
   });
 
+  await test.step('a correction is staged, its replacement agreed to, and both change places at one address', async () => {
+    await reporter.getByRole('link', { name: 'Open the release' }).click();
+    await reporter.getByRole('link', { name: 'Correct', exact: true }).click();
+    await reporter.getByLabel('Sample size', { exact: true }).fill('1,021');
+    await reporter.getByRole('button', { name: 'See what this does' }).click();
+    await expect(reporter.getByText('1 sheet pulled.')).toBeVisible();
+    await expect(reporter.getByText('What differs: sample size.')).toBeVisible();
+    await reporter.getByRole('radio', { name: /The pollster’s/ }).check();
+    await reporter
+      .getByLabel('What was wrong, in a sentence')
+      .fill('The pollster miscounted its interviews.');
+    await reporter.getByRole('button', { name: /Stage it/ }).click();
+    await reporter.waitForURL(/\/releases\/corrections\/[\w-]{22}$/);
+    const correctionUrl = reporter.url();
+    expect((await copyDesk.request.get(embedUrl)).status()).toBe(200);
+    await reporter.getByRole('button', { name: 'Draft its replacement' }).click();
+    await reporter.waitForURL(/\/lines\/[\w-]{22}$/);
+    await reporter.getByRole('button', { name: 'File', exact: true }).click();
+    await expect(reporter.getByText('You filed this; somebody else reads it.')).toBeVisible();
+    await editor.goto(reporter.url());
+    await editor.getByRole('button', { name: 'Clear for publication' }).click();
+    await expect(editor.getByText(/^Agreed to\./)).toBeVisible();
+    await reporter.goto(correctionUrl);
+    await reporter.getByRole('button', { name: /^Apply/ }).click();
+    await expect(reporter.getByText('Applied.')).toBeVisible();
+    const data = await copyDesk.request.get(`${embedUrl}/data.json`);
+    expect(await data.json()).toMatchObject({ n: 1021, version: 2 });
+    const old = await copyDesk.request.get(`${embedUrl}@1`);
+    expect(old.status()).toBe(410);
+    expect(await old.text()).toContain('1,012');
+    await copyDesk.goto('/copy-desk');
+    await expect(copyDesk.getByText('Its replacement is cleared.')).toBeVisible();
+    await reporter.getByRole('link', { name: 'Versions' }).click();
+    await expect(reporter.getByRole('columnheader', { name: 'Version 2, current' })).toBeVisible();
+    await expect(reporter.getByRole('row', { name: /^Interviews 1,021/ })).toContainText('1,012');
+  });
+
   await test.step('the editor pulls it: the address answers 410 without a figure', async () => {
     await editor.reload();
     await editor.getByRole('button', { name: 'Pull', exact: true }).click();
@@ -196,7 +233,14 @@ test('a release typed from a press note becomes a cleared sheet and a live chart
 
   await test.step('the history tells all of it', async () => {
     await editor.goto('/history');
-    for (const action of ['pulled sheet', 'made embed', 'copied', 'cleared sheet', 'sent sheet back'])
+    for (const action of [
+      'corrected release',
+      'pulled sheet',
+      'made embed',
+      'copied',
+      'cleared sheet',
+      'sent sheet back',
+    ])
       await expect(editor.getByText(action, { exact: false }).first()).toBeVisible();
   });
 });

@@ -27,6 +27,8 @@ export const readerInput = z.strictObject({
 
 export type Cleared =
   | { outcome: 'cleared'; version: number }
+  /** Two people agreed; the words become printable with the correction that they wait for. */
+  | { outcome: 'agreed'; version: number }
   /** The evidence had changed since filing: the sheet went back to its filer, who agrees anew with one key. */
   | { outcome: 'returned' };
 
@@ -73,7 +75,8 @@ export function clearSheetIn(
   const after = { state: 'cleared', evidence: evidence.hash, texts: opened.texts };
   const before = { state: 'filed', filedBy: filer.personId };
   appendRecord(tx, { personId: actor.personId, ...entry, before, after, releaseId: opened.release.id }, now);
-  return { outcome: 'cleared', version: opened.sheet.version + 1 };
+  const outcome = findStandIn(tx, opened.sheet.correctionId) ? 'agreed' : 'cleared';
+  return { outcome, version: opened.sheet.version + 1 };
 }
 
 /** Words that were filed are printable from here on; what was cleared before is superseded. */

@@ -1,5 +1,6 @@
 import 'server-only';
 import { findEvidence, findLastAct, listActs, type EvidenceRow } from '@/db/queries/clearing';
+import { findStagedId } from '@/db/queries/corrections';
 import { findEmbedOfSheet } from '@/db/queries/embed';
 import { isListed } from '@/db/queries/embargo';
 import { findPersonByPublicId } from '@/db/queries/person';
@@ -77,6 +78,8 @@ export type SheetView = SheetPermissions & {
   /** Why the words shown were filed against the wording check. */
   override: { reason: string; by: string; marks: { kind: LineKind; phrase: string }[] } | null;
   embedId: string | null;
+  /** The staged correction that these words wait for. */
+  correctionId: string | null;
   desk: DeskView;
 };
 
@@ -87,7 +90,7 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
   const { sheet, release, state } = opened;
   const acts = listActs(ctx.db, sheet.id);
   const filing = findLastAct(ctx.db, sheet.id, 'filed');
-  const stands = state === 'filed' || state === 'cleared' || state === 'pulled' ? filing : null;
+  const stands = FROZEN.includes(state) ? filing : null;
   const frozen = stands?.evidenceId ? findEvidence(ctx.db, stands.evidenceId) : null;
   const shown = evidenceShown(ctx, opened, frozen);
   const finding = findingOf(shown.body);
@@ -128,9 +131,13 @@ export function getSheet(actor: Actor, id: string, ctx: Ctx): SheetView {
     mayOverride: canActAsEditor(actor),
     override: overrideOf(ctx, shown.body),
     embedId: findEmbedOfSheet(ctx.db, sheet.id)?.publicId ?? null,
+    correctionId: findStagedId(ctx.db, sheet.correctionId),
     desk: deskViewOf(ctx, actor, opened, frozen && { body: shown.body, verdict: finding.verdict }),
   };
 }
+
+/** Words that stand on the evidence they were filed on. */
+const FROZEN: readonly LineState[] = ['filed', 'agreed', 'cleared', 'pulled'];
 
 type Shown = {
   body: EvidenceBody;

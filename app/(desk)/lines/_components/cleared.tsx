@@ -23,7 +23,13 @@ type Props = {
   onDone: (words: string) => void;
 };
 
-/** Words that are cleared or pulled, on the evidence that two people agreed to. */
+const HEADINGS: Partial<Record<SheetView['state'], string>> = {
+  cleared: 'Cleared words',
+  pulled: 'Pulled words, not to be printed',
+  agreed: 'Agreed words, not to be printed before their correction',
+};
+
+/** Words that are cleared, agreed to or pulled, on the evidence that two people agreed to. */
 export function Cleared({ view, actions, now, zone, onDone }: Props) {
   const embed = useAct(actions.embed, () => onDone('The embed is made.'));
   const revise = useAct(actions.revise, () => onDone('A new version is open.'));
@@ -35,7 +41,7 @@ export function Cleared({ view, actions, now, zone, onDone }: Props) {
         view={view}
         head={
           <div className="reading-head">
-            <SectionHeading>{isCleared ? 'Cleared words' : 'Pulled words, not to be printed'}</SectionHeading>
+            <SectionHeading>{HEADINGS[view.state] ?? 'Words'}</SectionHeading>
           </div>
         }
         line={({ kind, text, marks, knockedOut }) =>

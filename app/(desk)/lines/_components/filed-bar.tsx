@@ -75,6 +75,7 @@ export function FiledBar({
 
 const OUTCOMES = {
   cleared: 'Cleared for publication.',
+  agreed: 'Agreed to. The words become printable with the correction that they wait for.',
   returned: 'Nothing was cleared: the evidence had changed, and the sheet went back to whoever filed it.',
 };
 

@@ -19,7 +19,7 @@ export type SheetActions = {
   add: Action<{ id: string; version: number; kind: string }, { version: number }>;
   file: Action<Filing, { hash: string; version: number }>;
   change: Action<Filing, { hash: string; version: number }>;
-  clear: Action<Reading, { outcome: 'cleared' | 'returned' }>;
+  clear: Action<Reading, { outcome: 'cleared' | 'agreed' | 'returned' }>;
   sendBack: Action<Reading & { comment: string; lines?: { kind: string; reason: string }[] }, void>;
   pull: Action<{ id: string; reason: string }, void>;
   revise: Action<{ id: string; version: number }, { version: number }>;

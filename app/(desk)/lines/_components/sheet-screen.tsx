@@ -1,5 +1,6 @@
 'use client';
 
+import Link from 'next/link';
 import { useEffect, useRef, useState } from 'react';
 import { ActsList } from '@/components/lines/acts-list';
 import type { SheetView } from '@/lib/services/sheet/get-sheet';
@@ -23,6 +24,9 @@ type Props = {
   zone: string;
 };
 
+/** Words that nobody writes on any more. */
+const STANDING: readonly SheetView['state'][] = ['cleared', 'agreed', 'pulled'];
+
 /** One sheet in the face that its state and its reader call for. */
 export function SheetScreen({ view, actions, person, now, zone }: Props) {
   const [done, setDone] = useState('');
@@ -40,7 +44,7 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
         lines={view.lines.filter(({ knockedOut }) => !knockedOut)}
         comments={view.desk.comments}
         actions={actions}
-        isOpen={view.state !== 'cleared' && view.state !== 'pulled'}
+        isOpen={!STANDING.includes(view.state)}
         isUnfolded={!isRead}
         now={now}
         zone={zone}
@@ -57,6 +61,12 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
         {done}
       </p>
       <StandingNotes id={view.id} desk={view.desk} review={actions.review} />
+      {view.correctionId ? (
+        <p className="mt-2">
+          These words wait for <Link href={`/releases/corrections/${view.correctionId}`}>a correction</Link>{' '}
+          that is staged: nothing of them is printed before it is applied.
+        </p>
+      ) : null}
       {isBeingRewritten ? (
         <div className="mt-2 flex flex-wrap items-center gap-3">
           <p>An earlier version of these words is cleared and served until this one is cleared.</p>
@@ -65,7 +75,7 @@ export function SheetScreen({ view, actions, person, now, zone }: Props) {
       ) : null}
       {view.state === 'filed' ? (
         <Reading key={seen} view={view} actions={actions} folds={folds} onDone={setDone} />
-      ) : view.state === 'cleared' || view.state === 'pulled' ? (
+      ) : STANDING.includes(view.state) ? (
         <Cleared key={seen} view={view} actions={actions} now={now} zone={zone} onDone={setDone} />
       ) : view.may.write ? (
         <Writing
