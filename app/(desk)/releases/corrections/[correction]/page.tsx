@@ -58,7 +58,7 @@ export default async function CorrectionPage({ params }: { params: Promise<{ cor
             }
           />
         </section>
-        <aside aria-label="About this correction" className="min-w-0">
+        <aside aria-label="About this correction" className="mt-6 min-w-0 lg:mt-0">
           <SectionHeading>About it</SectionHeading>
           <DefinitionList stacked items={entriesOf(view)} />
         </aside>
