@@ -1,6 +1,6 @@
 import 'server-only';
 import type { Tx } from '@/db/client';
-import { findEvidence, findLastAct, insertClearing } from '@/db/queries/clearing';
+import { findEvidence, findLastAct } from '@/db/queries/clearing';
 import {
   type CorrectionRow,
   type CurrentEvidence,
@@ -8,27 +8,17 @@ import {
   listCurrentEvidenceOn,
   listReplacements,
 } from '@/db/queries/corrections';
-import { findEmbedOfSheet, insertEmbedVersion, moveEmbed, pullEmbedVersions } from '@/db/queries/embed';
+import { findEmbedOfSheet, insertEmbedVersion, moveEmbed } from '@/db/queries/embed';
 import { findWholeVersion, type ReleaseRow, updateRelease } from '@/db/queries/release';
-import {
-  isReleasePublic,
-  listClearedLines,
-  listNewestLines,
-  moveLineVersions,
-  moveSheetsToVersion,
-  type SheetRow,
-  touchSheet,
-} from '@/db/queries/sheet';
+import { listNewestLines, moveLineVersions, moveSheetsToVersion, type SheetRow } from '@/db/queries/sheet';
 import type { CorrectionEffect } from '@/lib/domain/corrections';
 import type { Actor } from '@/lib/domain/roles';
-import { newId } from '@/lib/security/ids';
 import { enqueuePurgeIn } from '../jobs/enqueue-purge';
-import { tellIn } from '../outbox/tell-in';
 import { reindexSeries } from '../release/index-findings';
 import { assembleSheet } from '../sheet/assemble-sheet';
-import { markSiblings } from '../sheet/languages';
 import { enqueueShelfEndIn } from '../sheet/shelf-end';
 import { overrideIn } from '../sheet/override-in';
+import { pullIn } from '../sheet/pull-in';
 import { MOVED_ON, refuseUnless, textsOf } from '../sheet/sheet-state';
 import { clearedTexts } from './cleared-texts';
 import { standingOf } from './standing';
@@ -98,37 +88,6 @@ export function applyIn(tx: Tx, actor: Actor, applied: Applied, before: Before, 
 }
 
 const kindsIn = (tx: Tx, evidenceId: number) => clearedTexts(tx, evidenceId).map(({ kind }) => kind);
-
-/** Cleared words and everything their chart ever showed, withdrawn: by its rule, whoever applied it. */
-function pullIn(tx: Tx, actor: Actor, sheet: SheetRow, reason: string, now: number): void {
-  const cleared = listClearedLines(tx, sheet.id).map(({ version }) => version.id);
-  const change = { state: 'pulled' as const, pullReason: reason };
-  refuseUnless(moveLineVersions(tx, cleared, 'cleared', change), MOVED_ON);
-  insertClearing(
-    tx,
-    {
-      publicId: newId(),
-      sheetId: sheet.id,
-      evidenceId: null,
-      act: 'pulled',
-      personId: actor.personId,
-      roles: JSON.stringify(actor.roles),
-      comment: reason,
-      at: now,
-    },
-    cleared,
-  );
-  const embed = findEmbedOfSheet(tx, sheet.id);
-  const { releaseId } = sheet;
-  if (embed) {
-    pullEmbedVersions(tx, embed.id, now, !isReleasePublic(tx, releaseId, now));
-    const event = `pulled-${sheet.version}`;
-    enqueuePurgeIn(tx, { of: 'embed', id: embed.publicId }, event, now, { releaseId });
-  }
-  tellIn(tx, { kind: 'sheet-pulled', entity: 'sheet', entityId: sheet.publicId, releaseId }, now);
-  refuseUnless(touchSheet(tx, sheet.id, sheet.version), MOVED_ON);
-  markSiblings(tx, sheet, 'pulled', now);
-}
 
 /** The agreed words become printable, and the address of the old chart shows the new one. */
 function takePlace(tx: Tx, sheet: SheetRow, replaced: SheetRow, now: number): void {
