@@ -6,6 +6,7 @@ import { check } from '@/lib/findings/check';
 import type { CheckAnswer, CheckDocument } from '@/lib/findings/check-types';
 import { ENGINE_VERSION } from '@/lib/findings/engine-version';
 import { parseCheckDocument } from '@/lib/findings/parse-check';
+import { canonicalJson } from '@/lib/security/canonical';
 import cases from '../reference/findings/cases.json';
 import refused from '../reference/findings/refused.json';
 import { differences } from './agreement';
@@ -47,6 +48,13 @@ describe('the archive of engines', () => {
       );
       expect(moved, 'an answer has moved: raise ENGINE_VERSION and run npm run engine:freeze').toEqual([]);
     }
+  });
+
+  test('gives the answers of this source to the byte, since evidence is verified so', async () => {
+    const frozen = await load(ENGINE_VERSION);
+    const answersOf = (engine: Pick<FrozenEngine, 'check' | 'parseCheckDocument'>) =>
+      cases.map(({ input }) => canonicalJson(engine.check(engine.parseCheckDocument(input))));
+    expect(answersOf(frozen)).toEqual(answersOf({ check, parseCheckDocument }));
   });
 
   test('refuses what this source refuses, at the same path', async () => {

@@ -87,7 +87,7 @@ describe('verifying evidence', () => {
     expect(other.problems[0]).toMatch(new RegExp(`comes out differently on engine ${ENGINE_VERSION}$`));
   });
 
-  it('allows the last bits of arithmetic to differ, and no more', async () => {
+  it('tells of a number whose last bits moved', async () => {
     const nudged = (by: number): FrozenEngine => ({
       parseCheckDocument,
       check: (document) => {
@@ -100,7 +100,7 @@ describe('verifying evidence', () => {
         return { ...answer, findings } as typeof answer;
       },
     });
-    expect((await verify(async () => nudged(1e-14))).problems).toEqual([]);
-    expect((await verify(async () => nudged(1e-9))).problems).toHaveLength(4);
+    expect((await verify(async () => nudged(0))).problems).toEqual([]);
+    expect((await verify(async () => nudged(1e-14))).problems).toHaveLength(4);
   });
 });
