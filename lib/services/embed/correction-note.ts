@@ -9,7 +9,7 @@ import { CORRECTION_SOURCE_NOTES } from '@/lib/domain/corrections';
  * values only once its replacement is cleared with a correction notice, in the words of that notice.
  */
 export function correctionNote(conn: Conn, evidenceId: number): string | null {
-  const [found] = listEffectsOn(conn, evidenceId);
+  const found = listEffectsOn(conn, evidenceId).find(({ effect }) => effect.effect !== 'flagged');
   if (!found) return null;
   const { replacementSheetId } = found.effect;
   const cleared = replacementSheetId === null ? [] : listClearedLines(conn, replacementSheetId);

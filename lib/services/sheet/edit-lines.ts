@@ -57,7 +57,8 @@ export function openForWriting(tx: Tx, actor: Actor, id: string, version: number
 export function applyEdits(tx: Tx, actor: Actor, opened: Opened, edits: LineEdits, now: number): void {
   const isDraft = opened.state === 'draft';
   const lines = isDraft ? opened.lines : renewLines(tx, actor, opened, now);
-  const drafts = isDraft && edits.some((edit) => isMoved(lines, edit)) ? draftsNow(tx, opened, now) : null;
+  const isAsked = edits.some((edit) => isMoved(lines, edit)) || edits.length < lines.length;
+  const drafts = isDraft && isAsked && !isAsPrinted(opened.sheet) ? draftsNow(tx, opened, now) : null;
   for (const edit of edits) {
     const target = lines.find(({ line }) => line.kind === edit.kind);
     if (!target)
@@ -83,6 +84,22 @@ export function applyEdits(tx: Tx, actor: Actor, opened: Opened, edits: LineEdit
     };
     refuseUnless(updateDraftText(tx, target.version.id, change), MOVED_ON);
   }
+  const given = edits.map(({ kind }) => kind);
+  for (const { line, version } of lines.filter(({ line }) => !given.includes(line.kind)))
+    follow(tx, actor, version, drafts?.get(line.kind), now);
+}
+
+/** A line that nobody edited is what house style drafts now, as the screen shows it. */
+function follow(
+  tx: Tx,
+  actor: Actor,
+  version: NewestLine['version'],
+  text: string | undefined,
+  now: number,
+): void {
+  if (text === undefined || text === version.text || !isUntouched(version)) return;
+  const change = { text, draftText: text, changedBy: actor.personId, changedAt: now };
+  refuseUnless(updateDraftText(tx, version.id, change), MOVED_ON);
 }
 
 /** Words that nobody had edited come back otherwise: perhaps as house style drafts them from other figures now. */

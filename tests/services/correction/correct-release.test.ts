@@ -7,6 +7,7 @@ import { answerEmbed } from '@/lib/services/embed/answer';
 import { createEmbed } from '@/lib/services/embed/create-embed';
 import { verifyHistory } from '@/lib/services/history/verify';
 import { getRelease } from '@/lib/services/release/get-release';
+import { pullSheet } from '@/lib/services/sheet/pull-sheet';
 import { getSheet } from '@/lib/services/sheet/get-sheet';
 import { correctionDesk } from '@/tests/support/correction';
 import { freshDatabase, makePerson, type TestDatabase } from '@/tests/support/database';
@@ -106,6 +107,15 @@ describe('a correction that changes nothing printed', () => {
     expect(ask(embed).status).toBe(200);
     const [item] = listCopyDesk(copyDesk, { race: '', pollster: '' }, corrections.ctx);
     expect(item?.stale).toEqual([{ reason: 'source-corrected', at: corrections.ctx.now }]);
+  });
+
+  it('is not named at a chart that an editor pulls later for another reason', () => {
+    const sheet = on.cleared(reporter, editor, id);
+    const embed = embedOf(sheet);
+    corrections.correct(reporter, id, { methodNote: 'Weighted by age and region.' });
+    pullSheet(editor, { id: sheet, reason: 'The wrong photograph stood beside it.' }, corrections.ctx);
+    expect(ask(embed).status).toBe(410);
+    expect(JSON.parse(String(ask(embed, '/data.json').body))).not.toHaveProperty('note');
   });
 
   it('is one of the link to the source only where no word in print has the link', () => {

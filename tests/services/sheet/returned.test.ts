@@ -100,7 +100,7 @@ describe('a page that is out of date', () => {
     const { reporter } = people;
     const id = on.draft(reporter, releaseId);
     const { version } = getSheet(reporter, id, desk.ctx());
-    const written = { kind: 'headline', text: 'Alder and Brook at 47% and 41%', knockedOut: false };
+    const written = { kind: 'headline', text: 'Alder at 47%, Brook at 41%', knockedOut: false };
     saveLines(reporter, { id, version, lines: [written] }, desk.ctx());
     changes[1]![2]();
     const { lines } = getSheet(reporter, id, desk.ctx());
@@ -109,6 +109,10 @@ describe('a page that is out of date', () => {
     expect(lineOf('body').text).toBe(lineOf('body').draft);
     expect(lineOf('headline').text).toBe(written.text);
     expect(lineOf('headline').draft).not.toBe(written.text);
+    const opened = getSheet(reporter, id, desk.ctx());
+    fileSheet(reporter, { id, version: opened.version, basisHash: opened.basisHash, lines: [] }, desk.ctx());
+    const filed = getSheet(reporter, id, desk.ctx()).lines;
+    expect(filed.map(({ text }) => text)).toEqual(opened.lines.map(({ text }) => text));
   });
 });
 
